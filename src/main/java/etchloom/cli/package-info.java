@@ -1,0 +1,2 @@
+/** The commands, exit codes and progress. */
+package etchloom.cli;

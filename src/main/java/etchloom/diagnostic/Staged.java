@@ -1,0 +1,30 @@
+package etchloom.diagnostic;
+
+import java.util.List;
+import java.util.Optional;
+
+/**
+ * What a stage gives back: its value, and all that it has to say about the input. There is no value
+ * exactly when an error is among the diagnostics.
+ */
+public record Staged<T>(Optional<T> value, List<Diagnostic> diagnostics) {
+  public Staged {
+    diagnostics = List.copyOf(diagnostics);
+    boolean failed = diagnostics.stream().anyMatch(d -> d.severity() == Severity.ERROR);
+    if (failed == value.isPresent()) {
+      throw new IllegalArgumentException("a stage has a value exactly when it has no error");
+    }
+  }
+
+  public static <T> Staged<T> of(T value) {
+    return new Staged<>(Optional.of(value), List.of());
+  }
+
+  public static <T> Staged<T> of(T value, List<Diagnostic> warnings) {
+    return new Staged<>(Optional.of(value), warnings);
+  }
+
+  public static <T> Staged<T> failed(List<Diagnostic> diagnostics) {
+    return new Staged<>(Optional.empty(), diagnostics);
+  }
+}

@@ -1,0 +1,2 @@
+/** What the copper does: resistance, inductance, field, EMF, torque, loss, heat, drive values. */
+package etchloom.electric;

@@ -1,0 +1,2 @@
+/** Readers for the formats written, copper rebuilt, connectivity, comparison. */
+package etchloom.proof;

@@ -1,0 +1,2 @@
+/** The report as JSON, HTML and terminal tables. */
+package etchloom.report;

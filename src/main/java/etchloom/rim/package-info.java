@@ -1,0 +1,2 @@
+/** Connecting the nodes: rings, radials, terminals. */
+package etchloom.rim;

@@ -1,0 +1,23 @@
+package etchloom.rules;
+
+import etchloom.geometry.Point;
+
+/**
+ * A broken rule, with its place.
+ *
+ * @param rule the rule's name, as bound by the spec page
+ * @param layer {@code L1}, or empty where no layer is meant
+ * @param at a place in between the two things
+ * @param measured in {@code unit}
+ * @param required in {@code unit}
+ * @param unit {@code mm}, or what the rule is measured in ({@code C}, {@code 1}, …)
+ * @param what the two things, in the user's words
+ */
+public record Finding(
+    String rule,
+    String layer,
+    Point at,
+    double measured,
+    double required,
+    String unit,
+    String what) {}

@@ -1,0 +1,22 @@
+package etchloom.rules;
+
+import java.util.List;
+
+/**
+ * What the rule check found.
+ *
+ * @param minima the tightest place of every rule, kept or broken, in the order of the rules' names
+ * @param findings the broken ones, sorted by rule, layer and place
+ * @param notes things the reader should know, such as which voltage column applies and why
+ */
+public record RuleReport(List<Finding> minima, List<Finding> findings, List<String> notes) {
+  public RuleReport {
+    minima = List.copyOf(minima);
+    findings = List.copyOf(findings);
+    notes = List.copyOf(notes);
+  }
+
+  public boolean passed() {
+    return findings.isEmpty();
+  }
+}

@@ -1,0 +1,2 @@
+/** The clearance and fab checks. */
+package etchloom.rules;

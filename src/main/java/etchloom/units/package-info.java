@@ -1,0 +1,2 @@
+/** Quantities read from text, physical constants, number formatting. */
+package etchloom.units;

@@ -1,0 +1,2 @@
+/** Star of slots, phase belts, winding factors. */
+package etchloom.winding;

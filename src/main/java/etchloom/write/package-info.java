@@ -1,0 +1,2 @@
+/** One writer per output format. */
+package etchloom.write;
