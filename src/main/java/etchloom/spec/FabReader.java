@@ -18,7 +18,15 @@ public final class FabReader {
     Optional<Mapping> root = YamlFile.read(fileName, bytes, findings);
     return root.isEmpty()
         ? Staged.failed(findings.sorted())
-        : check(fileName, root.get(), findings);
+        : check(root.get(), findings);
+  }
+
+  /**
+   * Whether a {@code fab:} value, which holds a dot or a slash, names a rules file (relative to the
+   * spec) rather than a built-in class.
+   */
+  public static boolean isPath(String fab) {
+    return fab.indexOf('.') >= 0 || fab.indexOf('/') >= 0;
   }
 
   /** A built-in class. */
@@ -28,8 +36,8 @@ public final class FabReader {
         .orElseThrow(() -> new IllegalStateException("fab class " + name + ": " + read));
   }
 
-  private static Staged<FabRules> check(String fileName, Mapping root, Findings findings) {
-    Section top = Section.top(findings, fileName, root);
+  private static Staged<FabRules> check(Mapping root, Findings findings) {
+    Section top = Section.top(findings, root);
     if (!FormatVersion.check(top, VERSION_KEY, SpecReader.VERSION_KEY, "a spec")) {
       return Staged.failed(findings.sorted());
     }

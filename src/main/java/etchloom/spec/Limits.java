@@ -49,6 +49,8 @@ final class Limits {
   static final Range PITCH = Range.of(LENGTH, "0.2 mm", "50 mm");
   static final Range BOARD_THICKNESS = Range.of(LENGTH, "0.1 mm", "10 mm");
   static final Range DIELECTRIC = Range.of(LENGTH, "0.01 mm", "10 mm");
+  static final Range ORDERED_COPPER =
+      Range.of(LENGTH, "5 um", "500 um").named("0.1 oz to 15 oz or 5 um to 500 um");
   static final Range FINISHED_COPPER = Range.of(LENGTH, "5 um", "500 um");
   static final Range WEIGHT = Range.of(COPPER_WEIGHT, "0.1 oz", "15 oz");
   static final Range GAP = Range.above(LENGTH, "0 mm", "100 mm");

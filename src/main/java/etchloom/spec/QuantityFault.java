@@ -23,7 +23,7 @@ final class QuantityFault {
       String range) {
     String units = Show.units(dimension.units());
     String wanted = dimension.phrase() + " in " + units + ", " + range;
-    String example = q.number() + " " + dimension.units().get(0).symbol();
+    String example = q.number() + " " + usualUnit(q, dimension);
     String found = Show.found(text) + " was found; ";
     switch (q.fault()) {
       case MISSING_UNIT ->
@@ -58,6 +58,13 @@ final class QuantityFault {
       default ->
           findings.error(Codes.NOT_A_NUMBER, where, path, found + "this key takes " + wanted);
     }
+  }
+
+  /** Nobody orders 35 oz of copper: a large bare number there is a thickness in um. */
+  private static String usualUnit(Quantity q, Dimension dimension) {
+    boolean thickness = dimension == Dimension.COPPER && q.number().length() > 1;
+    boolean whole = q.number().chars().allMatch(c -> c >= '0' && c <= '9');
+    return thickness && whole ? "um" : dimension.units().get(0).symbol();
   }
 
   private static String line(String key, String value) {

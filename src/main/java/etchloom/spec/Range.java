@@ -24,6 +24,11 @@ record Range(double minimum, boolean open, double maximum, String text) {
     return new Range(value(minimum, dimension), true, value(maximum, dimension), text);
   }
 
+  /** The same range in other words. */
+  Range named(String words) {
+    return new Range(minimum, open, maximum, words);
+  }
+
   boolean holds(double value) {
     return (open ? value > minimum : value >= minimum) && value <= maximum;
   }

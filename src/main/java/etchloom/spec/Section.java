@@ -6,6 +6,7 @@ import etchloom.spec.yaml.YamlNode;
 import etchloom.spec.yaml.YamlNode.Entry;
 import etchloom.spec.yaml.YamlNode.Mapping;
 import etchloom.spec.yaml.YamlNode.Scalar;
+import etchloom.spec.yaml.YamlNode.Sequence;
 import etchloom.units.Dimension;
 import java.util.ArrayList;
 import java.util.LinkedHashSet;
@@ -33,8 +34,8 @@ final class Section {
     this.node = node;
   }
 
-  static Section top(Findings findings, String file, Mapping root) {
-    return new Section(findings, "", SourceSpan.ofFile(file), Optional.of(root));
+  static Section top(Findings findings, Mapping root) {
+    return new Section(findings, "", root.span(), Optional.of(root));
   }
 
   /** The full path of one of its keys. */
@@ -51,10 +52,6 @@ final class Section {
 
   boolean has(String key) {
     return entry(key).isPresent();
-  }
-
-  Findings findings() {
-    return findings;
   }
 
   void error(String code, String key, String message, String... hints) {
@@ -151,6 +148,9 @@ final class Section {
   private List<YamlNode> items(String key, String wanted) {
     known.add(key);
     Optional<Entry> e = entry(key);
+    if (e.isPresent() && e.get().value() instanceof Sequence q && q.items().isEmpty()) {
+      findings.error(Codes.EMPTY_VALUE, q.span(), pathOf(key), "the list is empty");
+    }
     if (e.isEmpty()) {
       return List.of();
     }
@@ -165,7 +165,7 @@ final class Section {
               wrongShape(pathOf(key), e.get().keySpan(), "here belongs " + wanted);
               return List.of();
             },
-            YamlNode.Sequence::items,
+            Sequence::items,
             b -> List.of());
   }
 

@@ -4,6 +4,7 @@ import etchloom.diagnostic.Findings;
 import etchloom.diagnostic.Staged;
 import etchloom.spec.yaml.YamlFile;
 import etchloom.spec.yaml.YamlNode.Mapping;
+import java.util.Map;
 import java.util.Optional;
 
 /**
@@ -22,15 +23,33 @@ public final class SpecReader {
 
   /** Reads a spec file's bytes; {@code fileName} is for messages only. */
   public static Staged<SpecFile> read(String fileName, byte[] bytes) {
+    return read(fileName, bytes, Map.of());
+  }
+
+  /**
+   * Reads a spec with some keys set anew, as a survey does.
+   *
+   * @param overrides full key path to value as text, {@code coil.track} to {@code 0.2mm}; the unit
+   *     may follow its number without a space. A key that is absent is added with its groups. The
+   *     place of such a key is the file's name with the override behind it.
+   */
+  public static Staged<SpecFile> read(
+      String fileName, byte[] bytes, Map<String, String> overrides) {
     Findings findings = new Findings();
-    Optional<Mapping> root = YamlFile.read(fileName, bytes, findings);
+    Optional<Mapping> root = tree(fileName, bytes, overrides, findings);
     return root.isEmpty()
         ? Staged.failed(findings.sorted())
         : check(fileName, root.get(), findings);
   }
 
+  static Optional<Mapping> tree(
+      String fileName, byte[] bytes, Map<String, String> overrides, Findings findings) {
+    return YamlFile.read(fileName, bytes, findings)
+        .map(m -> new Overrides(fileName, findings).apply(m, overrides));
+  }
+
   private static Staged<SpecFile> check(String fileName, Mapping root, Findings findings) {
-    Section top = Section.top(findings, fileName, root);
+    Section top = Section.top(findings, root);
     if (!FormatVersion.check(top, VERSION_KEY, FabReader.VERSION_KEY, "a fab rules file")) {
       return Staged.failed(findings.sorted());
     }

@@ -53,14 +53,9 @@ final class Titles {
     Optional<String> fab =
         top.text("fab", Limits.PATH_MAX, Show.oneOf(Templates.fabNames()) + ", or a file's path")
             .required();
-    fab.filter(f -> !isPath(f) && !Templates.fabNames().contains(f))
+    fab.filter(f -> !FabReader.isPath(f) && !Templates.fabNames().contains(f))
         .ifPresent(f -> unknownFab(top, f));
     return fab.orElse("");
-  }
-
-  /** Whether a {@code fab:} value names a file rather than a built-in class. */
-  static boolean isPath(String fab) {
-    return fab.indexOf('.') >= 0 || fab.indexOf('/') >= 0;
   }
 
   private static void unknownFab(Section top, String fab) {

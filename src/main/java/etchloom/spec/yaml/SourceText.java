@@ -41,11 +41,11 @@ final class SourceText {
   static Staged<SourceText> decode(String file, byte[] bytes, int maxBytes) {
     if (bytes.length > maxBytes) {
       String found = "the file has " + bytes.length + " bytes, at most " + maxBytes + " are read";
-      return failed(YamlCodes.TOO_BIG, SourceSpan.ofFile(file), found);
+      return failed(YamlCodes.TOO_BIG, new SourceSpan(file, 1, 1, 0, ""), found);
     }
     if (bytes.length >= 2 && isUtf16Mark(bytes[0], bytes[1])) {
       return failed(
-          YamlCodes.ENCODING, SourceSpan.ofFile(file), "the file is UTF-16 text; save it as UTF-8");
+          YamlCodes.ENCODING, new SourceSpan(file, 1, 1, 0, ""), "the file is UTF-16 text; save it as UTF-8");
     }
     CharBuffer chars = CharBuffer.allocate(bytes.length);
     CharsetDecoder decoder =

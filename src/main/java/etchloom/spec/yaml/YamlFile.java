@@ -94,7 +94,7 @@ public final class YamlFile {
   private Optional<Mapping> empty(String file) {
     findings.error(
         YamlCodes.EMPTY,
-        SourceSpan.ofFile(file),
+        new SourceSpan(file, 1, 1, 0, ""),
         "",
         "the file is empty; a spec starts with `etchloom: 1`",
         "copy a starting spec with the command `new`");
