@@ -25,7 +25,7 @@ class AssemblerTest {
         shape(3, 4, 2, Spec.Connection.OPEN, 5, 20, 0.3, 0.2, 0.7, 0.3, 64),
         shape(3, 2, 8, Spec.Connection.STAR, 3, 25, 0.2, 0.2, 0.6, 0.3, 72),
         shape(18, 24, 2, Spec.Connection.OPEN, 20, 40, 0.25, 0.25, 0.6, 0.3, 110),
-        shape(6, 8, 16, Spec.Connection.STAR, 10, 40, 0.2, 0.2, 0.5, 0.25, 106));
+        shape(6, 8, 10, Spec.Connection.STAR, 10, 40, 0.2, 0.2, 0.5, 0.25, 106));
   }
 
   private static Specs.Shape shape(
