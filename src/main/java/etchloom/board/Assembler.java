@@ -29,17 +29,29 @@ import java.util.Optional;
 public final class Assembler {
   private final Spec spec;
   private final FabRules fab;
+  private final boolean draft;
   private final Problems problems;
 
-  private Assembler(Spec spec, FabRules fab, Positions positions) {
+  private Assembler(Spec spec, FabRules fab, Positions positions, boolean draft) {
     this.spec = spec;
     this.fab = fab;
+    this.draft = draft;
     problems = new Problems(positions);
   }
 
   /** Draws the board, or says which keys keep it from being drawn. */
   public static Staged<Assembly> assemble(Spec spec, FabRules fab, Positions positions) {
-    Assembler a = new Assembler(spec, fab, positions);
+    return assemble(spec, fab, positions, false);
+  }
+
+  /**
+   * Draws the board, or says which keys keep it from being drawn.
+   *
+   * @param draft whether the board breaks rules and is to say so in its legend
+   */
+  public static Staged<Assembly> assemble(
+      Spec spec, FabRules fab, Positions positions, boolean draft) {
+    Assembler a = new Assembler(spec, fab, positions, draft);
     Optional<Assembly> out = a.assemble();
     return a.problems.any() ? Staged.failed(a.problems.list()) : Staged.of(out.orElseThrow());
   }
@@ -177,13 +189,14 @@ public final class Assembler {
     List<MountingHole> holes = mountingHoles();
     List<Path> profile = profile();
     Mask mask = Mask.over(copper.joints(), holes, fab.mask().expansionMm());
-    PlacedLegend legend = new LegendBuilder(spec, fab, copper.joints(), holes, mask.top()).build();
+    PlacedLegend legend =
+        new LegendBuilder(spec, fab, copper.joints(), holes, mask.top()).build(draft);
     Artwork art =
         new Artwork(
             spec.title(),
             spec.slug(),
             spec.revision(),
-            false,
+            draft,
             stackup,
             profile,
             copper.joints(),

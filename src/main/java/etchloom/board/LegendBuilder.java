@@ -48,11 +48,11 @@ final class LegendBuilder {
             lineMm);
   }
 
-  Assembler.PlacedLegend build() {
+  Assembler.PlacedLegend build(boolean draft) {
     terminalMarks();
     datum();
-    String title = StrokeFont.plain(spec.title() + " " + spec.revision());
-    if (!alongAnArc(title, spec.title() + " " + spec.revision())) {
+    String text = spec.title() + " " + spec.revision() + (draft ? " DRAFT" : "");
+    if (!alongAnArc(StrokeFont.plain(text), text)) {
       leftOut.add("title");
     }
     return new Assembler.PlacedLegend(strokes, leftOut);
