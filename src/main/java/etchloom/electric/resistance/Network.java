@@ -10,6 +10,7 @@ import java.util.Optional;
 import java.util.OptionalDouble;
 import java.util.OptionalInt;
 import java.util.Set;
+import java.util.SortedSet;
 import java.util.TreeMap;
 import java.util.TreeSet;
 
@@ -77,8 +78,8 @@ public final class Network {
   }
 
   /** The layers that the whole board uses at each joint, so that part networks cut holes alike. */
-  private static Map<Integer, TreeSet<Integer>> layersAtJoints(Artwork artwork) {
-    Map<Integer, TreeSet<Integer>> layers = new TreeMap<>();
+  private static Map<Integer, SortedSet<Integer>> layersAtJoints(Artwork artwork) {
+    Map<Integer, SortedSet<Integer>> layers = new TreeMap<>();
     for (Conductor c : artwork.conductors()) {
       layers.computeIfAbsent(c.fromJoint(), k -> new TreeSet<>()).add(c.layer());
       layers.computeIfAbsent(c.toJoint(), k -> new TreeSet<>()).add(c.layer());
@@ -93,7 +94,7 @@ public final class Network {
       Artwork artwork, Variation variation, double tempC, Set<Node> nodes, List<Edge> edges) {
     Set<Integer> reached = new TreeSet<>();
     nodes.forEach(n -> reached.add(n.joint()));
-    for (Map.Entry<Integer, TreeSet<Integer>> at : layersAtJoints(artwork).entrySet()) {
+    for (Map.Entry<Integer, SortedSet<Integer>> at : layersAtJoints(artwork).entrySet()) {
       Joint joint = artwork.joints().get(at.getKey());
       if (joint.hole().isEmpty() || !reached.contains(joint.id())) {
         continue;
