@@ -16,9 +16,7 @@ public final class FabReader {
   public static Staged<FabRules> read(String fileName, byte[] bytes) {
     Findings findings = new Findings();
     Optional<Mapping> root = YamlFile.read(fileName, bytes, findings);
-    return root.isEmpty()
-        ? Staged.failed(findings.sorted())
-        : check(root.get(), findings);
+    return root.isEmpty() ? Staged.failed(findings.sorted()) : check(root.get(), findings);
   }
 
   /**

@@ -37,6 +37,7 @@ public enum Dimension {
   RATIO("a ratio", Unit.exact("%", "0.01"), List.of());
 
   private final String phrase;
+
   @SuppressWarnings("ImmutableEnumChecker") // List.of never changes
   private final List<Unit> units;
 

@@ -45,7 +45,9 @@ final class SourceText {
     }
     if (bytes.length >= 2 && isUtf16Mark(bytes[0], bytes[1])) {
       return failed(
-          YamlCodes.ENCODING, new SourceSpan(file, 1, 1, 0, ""), "the file is UTF-16 text; save it as UTF-8");
+          YamlCodes.ENCODING,
+          new SourceSpan(file, 1, 1, 0, ""),
+          "the file is UTF-16 text; save it as UTF-8");
     }
     CharBuffer chars = CharBuffer.allocate(bytes.length);
     CharsetDecoder decoder =

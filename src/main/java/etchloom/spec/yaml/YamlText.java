@@ -90,7 +90,10 @@ public final class YamlText {
     } else if (c == '\n') {
       out.append("\\n");
     } else if (c < 0x20 || (c >= 0x7f && c < 0xa0) || c == 0xfeff || (c & 0xfffe) == 0xfffe) {
-      out.append(c > 0xffff ? String.format(Locale.ROOT, "\\U%08X", c) : String.format(Locale.ROOT, "\\u%04X", c));
+      out.append(
+          c > 0xffff
+              ? String.format(Locale.ROOT, "\\U%08X", c)
+              : String.format(Locale.ROOT, "\\u%04X", c));
     } else {
       out.appendCodePoint(c);
     }
