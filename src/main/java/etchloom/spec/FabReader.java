@@ -3,8 +3,7 @@ package etchloom.spec;
 import etchloom.diagnostic.Findings;
 import etchloom.diagnostic.Staged;
 import etchloom.spec.yaml.YamlFile;
-import etchloom.spec.yaml.YamlNode.Mapping;
-import java.util.Optional;
+import etchloom.spec.yaml.YamlTree;
 
 /** Reads a fab's rules file, with the same care and the same bounds as {@link SpecReader}. */
 public final class FabReader {
@@ -15,8 +14,9 @@ public final class FabReader {
   /** Reads a rules file's bytes; {@code fileName} is for messages only. */
   public static Staged<FabRules> read(String fileName, byte[] bytes) {
     Findings findings = new Findings();
-    Optional<Mapping> root = YamlFile.read(fileName, bytes, findings);
-    return root.isEmpty() ? Staged.failed(findings.sorted()) : check(root.get(), findings);
+    return YamlFile.read(fileName, bytes, VERSION_KEY + ": 1", findings)
+        .map(tree -> check(tree, findings))
+        .orElseGet(() -> Staged.failed(findings.sorted()));
   }
 
   /**
@@ -34,8 +34,8 @@ public final class FabReader {
         .orElseThrow(() -> new IllegalStateException("fab class " + name + ": " + read));
   }
 
-  private static Staged<FabRules> check(Mapping root, Findings findings) {
-    Section top = Section.top(findings, root);
+  private static Staged<FabRules> check(YamlTree tree, Findings findings) {
+    Section top = Section.top(findings, tree);
     if (!FormatVersion.check(top, VERSION_KEY, SpecReader.VERSION_KEY, "a spec")) {
       return Staged.failed(findings.sorted());
     }

@@ -5,6 +5,7 @@ import etchloom.diagnostic.SourceSpan;
 import etchloom.units.Dimension;
 import etchloom.units.Quantity;
 import etchloom.units.Unit;
+import java.util.List;
 import java.util.Locale;
 import java.util.Optional;
 
@@ -71,13 +72,17 @@ final class QuantityFault {
     return key + ": " + value;
   }
 
-  /** The unit that differs only in case, in spaces, in a degree sign or in the sign for ohm. */
+  /**
+   * The unit that differs only in case, in spaces, in a degree sign or in the sign for ohm; else
+   * the nearest.
+   */
   private static Optional<String> meant(String unit, Dimension dimension) {
     String plain = plain(unit);
-    return dimension.units().stream()
-        .map(Unit::symbol)
+    List<String> symbols = dimension.units().stream().map(Unit::symbol).toList();
+    return symbols.stream()
         .filter(symbol -> plain(symbol).equals(plain))
-        .findFirst();
+        .findFirst()
+        .or(() -> Suggest.nearest(unit, symbols));
   }
 
   private static String plain(String unit) {

@@ -1,101 +1,97 @@
 package etchloom.spec.yaml;
 
-import etchloom.spec.yaml.YamlNode.Entry;
-import etchloom.spec.yaml.YamlNode.Mapping;
-import etchloom.spec.yaml.YamlNode.Scalar;
-import etchloom.spec.yaml.YamlNode.Sequence;
 import java.util.List;
 import java.util.Locale;
+import java.util.function.BiConsumer;
+import java.util.function.Consumer;
 
-/** Writes a tree as YAML: groups as indented blocks, lists of values on one line. */
+/** Writes YAML: groups as indented blocks, lists of values on one line, texts in quotes. */
 public final class YamlText {
-  private YamlText() {}
+  private final StringBuilder out = new StringBuilder();
+  private int depth;
 
-  /** The text, ending with a line end; reads back as an equal tree. */
-  public static String of(Mapping root) {
-    StringBuilder out = new StringBuilder();
-    group(out, root, 0);
+  /** What the next line starts with instead of its last indentation; empty for none. */
+  private String lead = "";
+
+  /** A line for people. */
+  public YamlText comment(String line) {
+    out.append("# ").append(line).append('\n');
+    return this;
+  }
+
+  /**
+   * A key with a word, number or quantity.
+   *
+   * @param value holds nothing that means something to YAML
+   */
+  public YamlText value(String key, String value) {
+    key(key).append(' ').append(value).append('\n');
+    return this;
+  }
+
+  /** A key with any text, which is put in quotes. */
+  public YamlText text(String key, String text) {
+    return value(key, quoted(text));
+  }
+
+  /** A key with values of the kind that {@link #value} takes. */
+  public YamlText list(String key, List<String> values) {
+    return value(key, "[" + String.join(", ", values) + "]");
+  }
+
+  /** A key with a group of keys, which is not empty. */
+  public YamlText group(String key, Consumer<YamlText> keys) {
+    key(key).append('\n');
+    depth++;
+    keys.accept(this);
+    depth--;
+    return this;
+  }
+
+  /** A key with a list of groups, none of them empty. */
+  public <T> YamlText groups(String key, List<T> items, BiConsumer<YamlText, T> keys) {
+    key(key).append('\n');
+    depth += 2;
+    for (T item : items) {
+      lead = "- ";
+      keys.accept(this, item);
+    }
+    depth -= 2;
+    return this;
+  }
+
+  /** All of it so far; every line ends with a line feed. */
+  @Override
+  public String toString() {
     return out.toString();
   }
 
-  private static void group(StringBuilder out, Mapping m, int depth) {
-    for (Entry e : m.entries()) {
-      out.append("  ".repeat(depth)).append(scalar(e.key(), true)).append(':');
-      value(out, e.value(), depth);
-    }
+  private StringBuilder key(String key) {
+    out.append("  ".repeat(lead.isEmpty() ? depth : depth - 1)).append(lead);
+    lead = "";
+    return out.append(key).append(':');
   }
 
-  private static void value(StringBuilder out, YamlNode value, int depth) {
-    value.match(
-        s -> out.append(s.isNull() ? "" : " " + text(s)).append('\n'),
-        m -> {
-          if (m.entries().isEmpty()) {
-            return out.append(" {}\n");
-          }
-          out.append('\n');
-          group(out, m, depth + 1);
-          return out;
-        },
-        q -> list(out, q, depth),
-        b -> out.append('\n'));
+  private static String quoted(String text) {
+    StringBuilder s = new StringBuilder("\"");
+    text.codePoints().forEach(c -> escape(s, c));
+    return s.append('"').toString();
   }
 
-  private static StringBuilder list(StringBuilder out, Sequence q, int depth) {
-    if (q.items().stream().allMatch(n -> n instanceof Scalar)) {
-      List<String> items = q.items().stream().map(n -> text((Scalar) n)).toList();
-      return out.append(" [").append(String.join(", ", items)).append("]\n");
-    }
-    out.append('\n');
-    for (YamlNode item : q.items()) {
-      out.append("  ".repeat(depth + 1)).append('-');
-      value(out, item, depth + 1);
-    }
-    return out;
-  }
-
-  private static String text(Scalar s) {
-    return s.isNull() ? "null" : scalar(s.text(), s.plain());
-  }
-
-  /** Without quotes where it was without and can be, else in double quotes. */
-  private static String scalar(String text, boolean plain) {
-    if (plain && isPlain(text)) {
-      return text;
-    }
-    StringBuilder out = new StringBuilder("\"");
-    text.codePoints().forEach(c -> escape(out, c));
-    return out.append('"').toString();
-  }
-
-  /** Letters, digits and a few signs that mean nothing to YAML anywhere in a value. */
-  private static boolean isPlain(String text) {
-    if (text.isEmpty() || text.startsWith(" ") || text.endsWith(" ")) {
-      return false;
-    }
-    for (int i = 0; i < text.length(); i++) {
-      char c = text.charAt(i);
-      boolean word = Character.isLetterOrDigit(c) || c == '_' || c == '.' || c == '+';
-      boolean inside = i > 0 && (c == ' ' || c == '/' || c == '%' || c == '-');
-      boolean sign = i == 0 && c == '-' && text.length() > 1 && text.charAt(1) != ' ';
-      if (!word && !inside && !sign) {
-        return false;
-      }
-    }
-    return true;
-  }
-
-  private static void escape(StringBuilder out, int c) {
+  /** YAML 1.2.2, section 5.7; whatever is not plainly printable is written by its number. */
+  private static void escape(StringBuilder s, int c) {
+    int type = Character.getType(c);
     if (c == '"' || c == '\\') {
-      out.append('\\').appendCodePoint(c);
-    } else if (c == '\n') {
-      out.append("\\n");
-    } else if (c < 0x20 || (c >= 0x7f && c < 0xa0) || c == 0xfeff || (c & 0xfffe) == 0xfffe) {
-      out.append(
-          c > 0xffff
-              ? String.format(Locale.ROOT, "\\U%08X", c)
-              : String.format(Locale.ROOT, "\\u%04X", c));
+      s.append('\\').appendCodePoint(c);
+    } else if (type == Character.CONTROL
+        || type == Character.FORMAT
+        || type == Character.SURROGATE
+        || type == Character.UNASSIGNED
+        || type == Character.LINE_SEPARATOR
+        || type == Character.PARAGRAPH_SEPARATOR) {
+      s.append(String.format(Locale.ROOT, "\\U%08X", c));
     } else {
-      out.appendCodePoint(c);
+      s.appendCodePoint(c);
     }
   }
 }
