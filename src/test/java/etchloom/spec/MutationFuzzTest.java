@@ -23,10 +23,10 @@ import org.junit.jupiter.params.provider.MethodSource;
 
 /**
  * Templates with random damage: never a trace, always a place inside the file, always soon. What is
- * still taken must survive being written and read again. Seven files, 700 mutants each.
+ * still taken must survive being written and read again. Seven files, 500 mutants each.
  */
 class MutationFuzzTest {
-  private static final int MUTANTS = 700;
+  private static final int MUTANTS = 500;
 
   /** A thousand times what one takes on an idle machine: 0.3 to 1 ms. */
   private static final long SLOWEST_NS = 2_000_000_000L;

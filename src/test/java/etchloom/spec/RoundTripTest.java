@@ -85,7 +85,7 @@ class RoundTripTest {
         List.of(
             "a: b # c",
             "null",
-            "~",
+            "~1",
             "- x",
             "1.0",
             "\"quoted\" 'twice'",
