@@ -58,16 +58,12 @@ public final class RandomSpecs {
     double pad = hole + between(0.27, 0.4);
     double inner = between(5, 25);
     double outer = inner + between(6, 22);
-    double board = 2 * (outer + between(5, 16));
+    double board = 2 * (outer + between(6, 18));
     line("etchloom: 1");
     line("title: Random board");
     line("rotor: {poles: " + counts[1] + "}");
-    line(
-        "winding: {phases: 3, coils: "
-            + counts[0]
-            + ", connection: "
-            + pick(List.of("star", "delta", "open"))
-            + "}");
+    String connection = pick(List.of("star", "delta", "open"));
+    line("winding: {phases: 3, coils: " + counts[0] + ", connection: " + connection + "}");
     line("coil:");
     line("  outline: wedge");
     line("  inner-radius: " + mm(inner));
@@ -92,7 +88,9 @@ public final class RandomSpecs {
             + " deg, pitch: "
             + pick(List.of("2.54", "3.5", "5"))
             + " mm, hole: 0.9 mm, pad: 1.8 mm}");
-    line("  star-point: " + pick(List.of("inside", "inside", "terminal")));
+    if (connection.equals("star")) {
+      line("  star-point: " + pick(List.of("inside", "inside", "terminal")));
+    }
     line("fab: standard");
   }
 
