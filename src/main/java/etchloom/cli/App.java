@@ -9,7 +9,9 @@ import java.nio.file.Files;
 import java.nio.file.Path;
 import picocli.CommandLine;
 import picocli.CommandLine.Command;
+import picocli.CommandLine.Mixin;
 import picocli.CommandLine.Model.CommandSpec;
+import picocli.CommandLine.Option;
 import picocli.CommandLine.Spec;
 
 /** The program: its commands, and what becomes of what goes wrong in them. */
@@ -45,10 +47,7 @@ public final class App implements Runnable {
     PrintWriter err = new PrintWriter(console.err(), true, StandardCharsets.UTF_8);
     line.setOut(out).setErr(err);
     line.setUsageHelpWidth(80).setUsageHelpAutoWidth(false);
-    boolean colour = console.variable("NO_COLOR").isEmpty() && System.console() != null;
-    line.setColorScheme(
-        CommandLine.Help.defaultColorScheme(
-            colour ? CommandLine.Help.Ansi.AUTO : CommandLine.Help.Ansi.OFF));
+    line.setColorScheme(CommandLine.Help.defaultColorScheme(CommandLine.Help.Ansi.OFF));
     line.setParameterExceptionHandler(App::misused);
     line.setExecutionExceptionHandler((e, c, r) -> failed(e, console));
     int code = line.execute(args);
@@ -57,13 +56,9 @@ public final class App implements Runnable {
     return code;
   }
 
-  @picocli.CommandLine.Option(
-      names = {"-h", "--help"},
-      usageHelp = true,
-      description = "show this text")
-  private boolean help;
+  @Mixin private HelpOption help;
 
-  @picocli.CommandLine.Option(names = "--version", description = "show the version")
+  @Option(names = "--version", description = "show the version")
   private boolean version;
 
   @Override

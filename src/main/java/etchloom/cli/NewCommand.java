@@ -11,7 +11,7 @@ import java.util.ArrayList;
 import java.util.List;
 import java.util.concurrent.Callable;
 import picocli.CommandLine.Command;
-import picocli.CommandLine.Option;
+import picocli.CommandLine.Mixin;
 import picocli.CommandLine.Parameters;
 
 /** {@code new}: lists the starting specs, or copies one. */
@@ -38,11 +38,7 @@ final class NewCommand implements Callable<Integer> {
       description = "where to; NAME.yaml if left out. An existing file is never overwritten.")
   private String file;
 
-  @Option(
-      names = {"-h", "--help"},
-      usageHelp = true,
-      description = "show this text")
-  private boolean help;
+  @Mixin private HelpOption help;
 
   NewCommand(Console console) {
     this.console = console;

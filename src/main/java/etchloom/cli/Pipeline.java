@@ -5,6 +5,7 @@ import etchloom.board.Assembly;
 import etchloom.diagnostic.Staged;
 import etchloom.electric.resistance.Resistance;
 import etchloom.electric.resistance.ResistanceFigures;
+import etchloom.report.Results;
 import etchloom.rules.RuleCheck;
 import etchloom.rules.RuleContext;
 import etchloom.rules.RuleReport;
@@ -15,10 +16,19 @@ final class Pipeline {
 
   /** What one run came to. */
   record Drawn(
-      InputFiles.Inputs inputs,
-      Assembly assembly,
-      RuleReport rules,
-      ResistanceFigures resistance) {}
+      InputFiles.Inputs inputs, Assembly assembly, RuleReport rules, ResistanceFigures resistance) {
+
+    Results results() {
+      return Results.of(
+          Version.TEXT,
+          inputs.file().spec(),
+          inputs.fab(),
+          assembly.artwork(),
+          assembly.winding(),
+          rules,
+          resistance);
+    }
+  }
 
   /**
    * @param draft whether the board is to be marked as one that breaks rules

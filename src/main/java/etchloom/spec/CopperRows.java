@@ -16,8 +16,7 @@ final class CopperRows {
   private CopperRows() {}
 
   private static final String KEY = "copper";
-  private static final Map<String, Boolean> SIDES =
-      Words.of("outer", true).and("inner", false).map();
+  static final Map<String, Boolean> SIDES = Words.of("outer", true).and("inner", false).map();
 
   static List<CopperRow> read(Section top, List<Integer> layers) {
     top.missing(KEY, "a row for every copper weight that the fab offers");

@@ -5,6 +5,7 @@ import etchloom.diagnostic.SourceSpan;
 import etchloom.units.Dimension;
 import etchloom.units.Quantity;
 import etchloom.units.Unit;
+import java.util.List;
 import java.util.Locale;
 import java.util.Optional;
 
@@ -23,7 +24,7 @@ final class QuantityFault {
       String range) {
     String units = Show.units(dimension.units());
     String wanted = dimension.phrase() + " in " + units + ", " + range;
-    String example = q.number() + " " + dimension.units().get(0).symbol();
+    String example = q.number() + " " + usualUnit(q, dimension);
     String found = Show.found(text) + " was found; ";
     switch (q.fault()) {
       case MISSING_UNIT ->
@@ -60,17 +61,28 @@ final class QuantityFault {
     }
   }
 
+  /** Nobody orders 35 oz of copper: a large bare number there is a thickness in um. */
+  private static String usualUnit(Quantity q, Dimension dimension) {
+    boolean thickness = dimension == Dimension.COPPER && q.number().length() > 1;
+    boolean whole = q.number().chars().allMatch(c -> c >= '0' && c <= '9');
+    return thickness && whole ? "um" : dimension.units().get(0).symbol();
+  }
+
   private static String line(String key, String value) {
     return key + ": " + value;
   }
 
-  /** The unit that differs only in case, in spaces, in a degree sign or in the sign for ohm. */
+  /**
+   * The unit that differs only in case, in spaces, in a degree sign or in the sign for ohm; else
+   * the nearest.
+   */
   private static Optional<String> meant(String unit, Dimension dimension) {
     String plain = plain(unit);
-    return dimension.units().stream()
-        .map(Unit::symbol)
+    List<String> symbols = dimension.units().stream().map(Unit::symbol).toList();
+    return symbols.stream()
         .filter(symbol -> plain(symbol).equals(plain))
-        .findFirst();
+        .findFirst()
+        .or(() -> Suggest.nearest(unit, symbols));
   }
 
   private static String plain(String unit) {

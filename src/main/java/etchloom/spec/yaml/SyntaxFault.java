@@ -12,7 +12,7 @@ import org.snakeyaml.engine.v2.exceptions.YamlEngineException;
 final class SyntaxFault {
   private SyntaxFault() {}
 
-  static void report(YamlEngineException fault, SourceText source, String file, Findings findings) {
+  static void report(YamlEngineException fault, SourceText source, Findings findings) {
     Optional<Mark> mark =
         fault instanceof MarkedYamlEngineException m ? m.getProblemMark() : Optional.empty();
     int line = mark.map(Mark::getLine).orElse(source.lines().size() - 1);
@@ -21,10 +21,14 @@ final class SyntaxFault {
     }
     SourceSpan where =
         mark.map(m -> source.span(m.getLine(), m.getColumn(), m.getLine(), m.getColumn() + 1))
-            .orElse(SourceSpan.ofFile(file));
+            .orElseGet(source::end);
     String problem =
         fault instanceof MarkedYamlEngineException m ? m.getProblem() : fault.getMessage();
-    findings.error(YamlCodes.SYNTAX, where, "", "this is not valid YAML: " + words(problem));
+    findings.error(
+        YamlCodes.SYNTAX,
+        where,
+        "",
+        "this is not valid YAML: " + words(problem) + "; nothing below this place was checked");
   }
 
   /**
