@@ -1,9 +1,9 @@
 package etchloom.rules;
 
+import etchloom.geometry.Point;
 import java.util.ArrayList;
 import java.util.Comparator;
 import java.util.List;
-import java.util.Optional;
 
 /** Finds all pairs of a layer's pieces that come near each other. */
 final class CloseSearch {
@@ -18,7 +18,7 @@ final class CloseSearch {
    */
   CloseSearch(LayerCopper copper, double requiredMm) {
     this.copper = copper;
-    this.gaps = new Gaps(copper.walk());
+    this.gaps = new Gaps(copper.walk(), requiredMm);
     this.requiredMm = requiredMm;
   }
 
@@ -31,7 +31,10 @@ final class CloseSearch {
           .pairs(
               limitMm,
               (i, j, limit) -> {
-                measure(i, j, limit).ifPresent(out::add);
+                Close c = measure(i, j, limit);
+                if (c != null) {
+                  out.add(c);
+                }
                 return limit;
               });
       out.sort(Comparator.comparingInt(Close::first).thenComparingInt(Close::second));
@@ -50,17 +53,16 @@ final class CloseSearch {
     return found;
   }
 
-  private Optional<Close> measure(int i, int j, double limitMm) {
+  /** Null where the two are not near each other. */
+  private Close measure(int i, int j, double limitMm) {
     Piece p = copper.pieces().get(i);
     Piece q = copper.pieces().get(j);
-    return gaps.gap(p, q, requiredMm, limitMm)
-        .map(
-            g ->
-                new Close(
-                    i,
-                    j,
-                    g.centres().distanceMm() - p.fatMm() - q.fatMm(),
-                    Board.middle(g.centres(), p.fatMm(), q.fatMm()),
-                    g.bend()));
+    Gaps.Gap g = gaps.gap(p, q, limitMm, requiredMm - Board.SLACK_MM);
+    if (g == null) {
+      return null;
+    }
+    double gap = g.centres().distanceMm() - p.fatMm() - q.fatMm();
+    Point at = Board.middle(g.centres(), p.fatMm(), q.fatMm());
+    return new Close(i, j, gap, at, g.bend());
   }
 }

@@ -5,7 +5,6 @@ import etchloom.geometry.Nearest;
 import java.util.ArrayDeque;
 import java.util.Deque;
 import java.util.List;
-import java.util.Optional;
 
 /**
  * The gap between two pieces of copper, the parts that are neighbours along the copper left out.
@@ -27,9 +26,14 @@ final class Gaps {
   private static final double WALK_SLACK_MM = 1e-9;
 
   private final Walk walk;
+  private final double spaceMm;
 
-  Gaps(Walk walk) {
+  /**
+   * @param spaceMm the space that the neighbours' length is reckoned with
+   */
+  Gaps(Walk walk, double spaceMm) {
     this.walk = walk;
+    this.spaceMm = spaceMm;
   }
 
   /**
@@ -39,30 +43,37 @@ final class Gaps {
   record Gap(Nearest centres, boolean bend) {}
 
   /**
-   * The smallest gap up to the limit; empty where there is none.
+   * The smallest gap up to the limit; null where there is none.
    *
-   * @param spaceMm the space that the neighbours' length is reckoned with
    * @param limitMm gaps above this are of no interest
+   * @param bendMm where nearer points were left out as neighbours: gaps from this on are of no
+   *     interest
    */
-  Optional<Gap> gap(Piece p, Piece q, double spaceMm, double limitMm) {
+  Gap gap(Piece p, Piece q, double limitMm, double bendMm) {
     double fat = p.fatMm() + q.fatMm();
+    double near = walk.neighbourMm(p, q, spaceMm) + WALK_SLACK_MM;
+    if (adjacent(p, q) && straight(p, q, near, bendMm + fat)) {
+      return null;
+    }
     Nearest n = Distance.between(p.shape(), q.shape());
     if (n.distanceMm() - fat > limitMm) {
-      return Optional.empty();
+      return null;
     }
-    double near = walk.neighbourMm(p, q, spaceMm) + WALK_SLACK_MM;
     List<Walk.Way> ways = walk.ways(p, q, near);
     Pair whole = new Pair(p, q, n);
     if (!near(whole, ways, near)) {
-      return Optional.of(new Gap(n, false));
+      return new Gap(n, false);
     }
-    return outside(whole, ways, near, limitMm + fat).map(c -> new Gap(c, true));
+    Nearest outside = outside(whole, ways, near, bendMm + fat);
+    return outside == null ? null : new Gap(outside, true);
   }
 
   private record Pair(Piece p, Piece q, Nearest nearest) {}
 
-  private static Optional<Nearest> outside(
-      Pair whole, List<Walk.Way> ways, double near, double limitMm) {
+  /**
+   * The nearest points that are no neighbours, nearer than the limit; null where there are none.
+   */
+  private static Nearest outside(Pair whole, List<Walk.Way> ways, double near, double limitMm) {
     Deque<Pair> open = new ArrayDeque<>();
     open.add(whole);
     Nearest best = null;
@@ -70,7 +81,9 @@ final class Gaps {
     int cuts = 0;
     while (!open.isEmpty()) {
       Pair pair = open.remove();
-      if (pair.nearest().distanceMm() > bound || allNear(pair, ways, near)) {
+      if (pair.nearest().distanceMm() > bound
+          || straight(pair.p(), pair.q(), near, bound)
+          || allNear(pair, ways, near)) {
         continue;
       }
       boolean finest = pair.p().lengthMm() + pair.q().lengthMm() <= FINEST_MM || cuts >= MOST_CUTS;
@@ -82,7 +95,7 @@ final class Gaps {
       cuts++;
       halve(open, pair);
     }
-    return Optional.ofNullable(best);
+    return best;
   }
 
   private static void halve(Deque<Pair> open, Pair pair) {
@@ -98,6 +111,28 @@ final class Gaps {
     }
   }
 
+  private static boolean adjacent(Piece p, Piece q) {
+    return p.conductor() == q.conductor()
+        && !p.isPad()
+        && (p.toMm() == q.fromMm() || q.toMm() == p.fromMm());
+  }
+
+  /**
+   * Whether one track turns so little from the one piece to the other that points too far along it
+   * for neighbours are at least the limit apart.
+   *
+   * <p>Seen in the direction half-way between its extreme ones, a run that turns by no more than t
+   * advances by at least cos(t/2) of its length.
+   */
+  private static boolean straight(Piece p, Piece q, double near, double limitMm) {
+    if (p.isPad() || p.conductor() != q.conductor()) {
+      return false;
+    }
+    double turn =
+        Math.max(p.turnToRad(), q.turnToRad()) - Math.min(p.turnFromRad(), q.turnFromRad());
+    return turn < Math.PI && near * Math.cos(turn / 2) >= limitMm;
+  }
+
   /** Whether every point of the one is a neighbour of every point of the other. */
   private static boolean allNear(Pair pair, List<Walk.Way> ways, double near) {
     for (Walk.Way w : ways) {
@@ -110,6 +145,9 @@ final class Gaps {
 
   /** Whether the nearest points are neighbours. */
   private static boolean near(Pair pair, List<Walk.Way> ways, double near) {
+    if (ways.isEmpty()) {
+      return false;
+    }
     double s = pair.p().walkMm(pair.nearest().onFirst());
     double t = pair.q().walkMm(pair.nearest().onSecond());
     for (Walk.Way w : ways) {

@@ -69,16 +69,28 @@ final class LayerCopper {
     Joint first = artwork.joints().get(c.fromJoint());
     Joint last = artwork.joints().get(c.toJoint());
     double at = 0;
+    double turn = 0;
     for (int k = 0; k < path.size(); k++) {
       Segment s = path.get(k);
       double length = s.lengthMm();
+      turn += k == 0 ? 0 : corner(path.get(k - 1), s);
+      double turned = turn + (s instanceof Arc a ? Math.abs(a.sweepRad()) : 0);
       double from = k == 0 ? hidden(s, first, c) : 0;
       double to = length - (k == path.size() - 1 ? hidden(s.reversed(), last, c) : 0);
       if (to - from > SLIVER_MM) {
-        cut(out, new Piece(s, c.widthMm() / 2, c.id(), k, at, at + length, -1), at + from, at + to);
+        Piece whole = new Piece(s, c.widthMm() / 2, c.id(), k, at, at + length, turn, turned, -1);
+        cut(out, whole, at + from, at + to);
       }
       at += length;
+      turn = turned;
     }
+  }
+
+  /** The angle, never negative, between the end of one piece and the start of the next. */
+  private static double corner(Segment before, Segment after) {
+    Point a = before.tangent(1);
+    Point b = after.tangent(0);
+    return Math.abs(Math.atan2(a.cross(b), a.dot(b)));
   }
 
   /** How much of the piece's beginning lies wholly under its joint's pad, mm. */
@@ -98,8 +110,8 @@ final class LayerCopper {
 
   private static void cut(List<Piece> out, Piece whole, double fromMm, double toMm) {
     int n = 1;
-    if (whole.shape() instanceof Arc a) {
-      double sweep = Math.abs(a.sweepRad()) * (toMm - fromMm) / whole.lengthMm();
+    if (whole.shape() instanceof Arc) {
+      double sweep = (whole.turnToRad() - whole.turnFromRad()) * (toMm - fromMm) / whole.lengthMm();
       n = (int) Math.ceil(sweep / ShapeTree.MAX_SWEEP_RAD);
     }
     if (n == 1 && fromMm == whole.fromMm() && toMm == whole.toMm()) {
