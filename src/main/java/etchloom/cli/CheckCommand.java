@@ -31,8 +31,8 @@ final class CheckCommand implements Callable<Integer> {
   @Override
   public Integer call() {
     InputFiles.Inputs in = InputFiles.read(spec, options.fab());
-    console.warn(in.warnings());
     Pipeline.Drawn drawn = Pipeline.run(in, false);
+    console.warn(drawn.warnings());
     FindingText.lines(drawn.rules()).forEach(console.err()::println);
     if (options.json()) {
       console.print(ReportJson.writeCheck(drawn.results()));

@@ -45,8 +45,8 @@ final class DrawCommand implements Callable<Integer> {
   @Override
   public Integer call() {
     InputFiles.Inputs in = InputFiles.read(spec, options.fab());
-    console.warn(in.warnings());
     Pipeline.Drawn drawn = Pipeline.run(in, false);
+    console.warn(drawn.warnings());
     FindingText.lines(drawn.rules()).forEach(console.err()::println);
     boolean passed = drawn.rules().passed();
     if (!passed && !force) {
