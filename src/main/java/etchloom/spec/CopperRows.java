@@ -29,13 +29,15 @@ final class CopperRows {
       s.close();
       checkEtch(s, row);
       faulty |= outer.isEmpty();
-      if (!Double.isNaN(row.ounces()) && !seen.add(row.ounces() + (row.outer() ? "o" : "i"))) {
+      if (outer.isPresent()
+          && !Double.isNaN(row.ounces())
+          && !seen.add(row.ounces() + (row.outer() ? "o" : "i"))) {
         String weight = Numbers.trimmed(row.ounces(), 3) + " oz";
         s.error(Codes.FAB, "weight", "there is already a row for " + weight + " on these layers");
       }
       rows.add(row);
     }
-    if (!faulty && top.has(KEY)) {
+    if (!faulty && !rows.isEmpty()) {
       checkSides(top, rows, layers);
     }
     return rows;

@@ -21,10 +21,10 @@ final class QuantityFault {
       String text,
       Quantity q,
       Dimension dimension,
-      String range) {
+      Range range) {
     String units = Show.units(dimension.units());
-    String wanted = dimension.phrase() + " in " + units + ", " + range;
-    String example = q.number() + " " + usualUnit(q, dimension);
+    String wanted = dimension.phrase() + " in " + units + ", " + range.text();
+    String example = q.number() + " " + likelyUnit(q, dimension, range);
     String found = Show.found(text) + " was found; ";
     switch (q.fault()) {
       case MISSING_UNIT ->
@@ -61,11 +61,18 @@ final class QuantityFault {
     }
   }
 
-  /** Nobody orders 35 oz of copper: a large bare number there is a thickness in um. */
-  private static String usualUnit(Quantity q, Dimension dimension) {
-    boolean thickness = dimension == Dimension.COPPER && q.number().length() > 1;
-    boolean whole = q.number().chars().allMatch(c -> c >= '0' && c <= '9');
-    return thickness && whole ? "um" : dimension.units().get(0).symbol();
+  /** The first unit that makes the number a value which the key takes. */
+  private static String likelyUnit(Quantity q, Dimension dimension, Range range) {
+    if (dimension == Dimension.COPPER) { // nobody orders 35 oz
+      return Limits.WEIGHT.holds(Quantity.read(q.number() + " oz", dimension).value())
+          ? "oz"
+          : "um";
+    }
+    return dimension.units().stream()
+        .map(Unit::symbol)
+        .filter(u -> range.holds(Quantity.read(q.number() + " " + u, dimension).value()))
+        .findFirst()
+        .orElse(dimension.units().get(0).symbol());
   }
 
   private static String line(String key, String value) {

@@ -14,7 +14,7 @@ final class Show {
 
   /** What was found, in quotes, cut short where it is long. */
   static String found(String text) {
-    return "'" + cut(text) + "'";
+    return "'" + cut(text).replace("\t", "\\t").replace("\n", "\\n") + "'";
   }
 
   /** Cut short where it is long. */

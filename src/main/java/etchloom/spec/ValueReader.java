@@ -49,7 +49,7 @@ final class ValueReader {
     String text = s.typed() ? Quantity.spaced(s.text()) : s.text();
     Quantity q = Quantity.read(text, dimension);
     if (!q.ok()) {
-      QuantityFault.report(findings, s.span(), path, key, s.text(), q, dimension, range.text());
+      QuantityFault.report(findings, s.span(), path, key, s.text(), q, dimension, range);
       return q;
     }
     return checked(s, q, range);

@@ -3,6 +3,7 @@ package etchloom.spec.yaml;
 import etchloom.diagnostic.Findings;
 import etchloom.diagnostic.SourceSpan;
 import etchloom.diagnostic.Staged;
+import etchloom.spec.yaml.YamlEvents.Stop;
 import etchloom.spec.yaml.YamlNode.Broken;
 import etchloom.spec.yaml.YamlNode.Entry;
 import etchloom.spec.yaml.YamlNode.Mapping;
@@ -10,23 +11,17 @@ import etchloom.spec.yaml.YamlNode.Scalar;
 import etchloom.spec.yaml.YamlNode.Sequence;
 import java.util.ArrayList;
 import java.util.HashSet;
-import java.util.Iterator;
 import java.util.List;
 import java.util.Optional;
 import java.util.Set;
-import org.snakeyaml.engine.v2.api.LoadSettings;
-import org.snakeyaml.engine.v2.api.lowlevel.Parse;
-import org.snakeyaml.engine.v2.events.CollectionEndEvent;
 import org.snakeyaml.engine.v2.events.CollectionStartEvent;
 import org.snakeyaml.engine.v2.events.Event;
 import org.snakeyaml.engine.v2.events.NodeEvent;
 import org.snakeyaml.engine.v2.events.ScalarEvent;
-import org.snakeyaml.engine.v2.exceptions.Mark;
-import org.snakeyaml.engine.v2.exceptions.YamlEngineException;
 
 /**
  * Reads one YAML document, a group at its top, from bytes. Time and memory are bounded by the size
- * limit; nesting by {@link #MAX_DEPTH}.
+ * limit and the number of values; nesting by {@link #MAX_DEPTH}.
  */
 public final class YamlFile {
   /** Largest file that is read: 1 MiB. */
@@ -35,19 +30,16 @@ public final class YamlFile {
   /** Deepest nesting; the formats need four levels. */
   public static final int MAX_DEPTH = 16;
 
-  private final SourceText source;
   private final Findings findings;
-  private final Iterator<Event> events;
+  private final YamlEvents events;
   private boolean whole = true;
 
   /** Whether a value of a top key is being read, so that the entries before it are finished. */
   private boolean inTopValue;
 
   private YamlFile(SourceText source, Findings findings) {
-    this.source = source;
     this.findings = findings;
-    LoadSettings settings = LoadSettings.builder().setCodePointLimit(2 * MAX_BYTES).build();
-    this.events = new Parse(settings).parseString(source.text()).iterator();
+    this.events = new YamlEvents(source, findings);
   }
 
   /**
@@ -63,15 +55,13 @@ public final class YamlFile {
     if (decoded.value().isEmpty()) {
       return Optional.empty();
     }
-    SourceText source = decoded.value().get();
+    YamlFile yaml = new YamlFile(decoded.value().get(), findings);
     try {
-      YamlFile yaml = new YamlFile(source, findings);
       Optional<Mapping> root = yaml.document(file, start);
       return root.map(m -> new YamlTree(m, yaml.whole));
-    } catch (YamlEngineException e) {
-      SyntaxFault.report(e, source, findings);
+    } catch (Stop reported) {
+      return Optional.empty();
     }
-    return Optional.empty();
   }
 
   private Optional<Mapping> document(String file, String start) {
@@ -99,12 +89,12 @@ public final class YamlFile {
       if (after.getEventId() == Event.ID.DocumentStart) {
         findings.error(
             YamlCodes.DOCUMENTS,
-            span(after),
+            events.span(after),
             "",
             "a second document starts here; a file holds one, without `---` between its parts");
       }
-    } catch (YamlEngineException e) {
-      SyntaxFault.report(e, source, findings);
+    } catch (Stop reported) {
+      return;
     }
   }
 
@@ -128,13 +118,11 @@ public final class YamlFile {
   }
 
   private YamlNode node(Event event, String path, int depth) {
-    SourceSpan span = span(event);
+    SourceSpan span = events.span(event);
     refuseMarks(event, span, path);
     if (depth > MAX_DEPTH && event instanceof CollectionStartEvent) {
-      findings.error(
-          YamlCodes.DEPTH, span, path, "groups are nested more than " + MAX_DEPTH + " deep here");
-      skipGroup();
-      return new Broken(span);
+      String found = "groups are nested more than " + MAX_DEPTH + " deep here";
+      throw events.stop(YamlCodes.DEPTH, span, path, found);
     }
     switch (event.getEventId()) {
       case Scalar -> {
@@ -153,28 +141,15 @@ public final class YamlFile {
     }
   }
 
-  /** Leaves out the rest of a group or list whose start was read, whatever its depth. */
-  private void skipGroup() {
-    int open = 1;
-    while (open > 0) {
-      Event event = events.next();
-      if (event instanceof CollectionStartEvent) {
-        open++;
-      } else if (event instanceof CollectionEndEvent) {
-        open--;
-      }
-    }
-  }
-
   private Mapping mapping(SourceSpan span, String path, int depth) {
     List<Entry> entries = new ArrayList<>();
     try {
       entries(entries, path, depth);
-    } catch (YamlEngineException e) {
+    } catch (Stop reported) {
       if (depth > 0) {
-        throw e;
+        throw reported;
       }
-      cutShort(entries, e);
+      cutShort(entries);
     }
     return new Mapping(entries, span);
   }
@@ -183,9 +158,8 @@ public final class YamlFile {
    * Keeps the top groups before the fault, so that their mistakes are found in the same run. A
    * group that seems to end just before the fault may owe its end to it: nothing is said about it.
    */
-  private void cutShort(List<Entry> entries, YamlEngineException fault) {
+  private void cutShort(List<Entry> entries) {
     whole = false;
-    SyntaxFault.report(fault, source, findings);
     if (!inTopValue && !entries.isEmpty()) {
       Entry last = entries.remove(entries.size() - 1);
       entries.add(new Entry(last.key(), last.keySpan(), new Broken(last.keySpan())));
@@ -251,11 +225,5 @@ public final class YamlFile {
     if (tag.isPresent()) {
       findings.error(YamlCodes.TAG, span, path, "tags (`!name`) are not allowed; leave it out");
     }
-  }
-
-  private SourceSpan span(Event event) {
-    Mark start = event.getStartMark().orElseThrow();
-    Mark end = event.getEndMark().orElseThrow();
-    return source.span(start.getLine(), start.getColumn(), end.getLine(), end.getColumn());
   }
 }
