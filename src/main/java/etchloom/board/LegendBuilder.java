@@ -11,6 +11,7 @@ import etchloom.spec.Spec;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
+import java.util.OptionalDouble;
 
 /**
  * The legend on L1's side: terminal marks, a datum mark at 0°, title and revision along an arc;
@@ -81,7 +82,7 @@ final class LegendBuilder {
         double off = j.padMm() / 2 + room.gapMm() + lineMm + heightMm / 2;
         for (int step = 0; step < 12 && !done; step++) {
           Point middle = j.at().plus(radial.times(side * (off + step * 0.25)));
-          done = put(text(j.mark(), middle, turn), "mark " + j.mark());
+          done = put(text(j.mark(), middle, turn), "mark " + j.mark(), letters());
         }
         if (done) {
           break;
@@ -104,7 +105,7 @@ final class LegendBuilder {
               StrokeFont.stroke(foot, tip),
               StrokeFont.stroke(tip, barb),
               StrokeFont.stroke(tip, barb.mirrored()));
-      if (put(mark, "datum")) {
+      if (put(mark, "datum", OptionalDouble.empty())) {
         return;
       }
     }
@@ -135,7 +136,7 @@ final class LegendBuilder {
       for (int k = 0; k <= 120; k++) {
         double a = away + (k % 2 == 0 ? 1 : -1) * ((k + 1) / 2) * STEP_RAD;
         Optional<List<Path>> arc = curved(text, r, a);
-        if (arc.isPresent() && put(arc.get(), what)) {
+        if (arc.isPresent() && put(arc.get(), what, letters())) {
           return true;
         }
       }
@@ -161,12 +162,16 @@ final class LegendBuilder {
     return out.isEmpty() ? Optional.empty() : Optional.of(out);
   }
 
-  private boolean put(List<Path> paths, String what) {
+  private OptionalDouble letters() {
+    return OptionalDouble.of(heightMm);
+  }
+
+  private boolean put(List<Path> paths, String what, OptionalDouble letterMm) {
     if (!room.free(paths)) {
       return false;
     }
     room.take(paths);
-    paths.forEach(p -> strokes.add(new Stroke(p, lineMm, what)));
+    paths.forEach(p -> strokes.add(new Stroke(p, lineMm, what, letterMm)));
     return true;
   }
 }

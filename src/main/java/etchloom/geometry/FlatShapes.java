@@ -28,6 +28,8 @@ final class FlatShapes {
   private final double[] stripLo;
   private final double[] stripHi;
   private final double[] height;
+  private final double[] slack;
+  private final boolean[] low;
 
   /**
    * @param fatMm one entry a shape: by how much its box, and only that, is fattened
@@ -46,6 +48,8 @@ final class FlatShapes {
     stripLo = new double[n];
     stripHi = new double[n];
     height = new double[n];
+    slack = new double[n];
+    low = new boolean[n];
     box = new double[4 * n];
     for (int i = 0; i < n; i++) {
       put(i, shapes.get(i));
@@ -76,15 +80,19 @@ final class FlatShapes {
       r[i] = Math.sqrt(px * px + py * py);
       double mid = nx[i] * cx[i] + ny[i] * cy[i];
       // A counter-clockwise arc bulges to the right of its chord, against the normal.
-      if (arc.counterClockwise()) {
+      low[i] = arc.counterClockwise();
+      if (low[i]) {
         stripLo[i] = Math.min(at, mid - r[i]);
       } else {
         stripHi[i] = Math.max(at, mid + r[i]);
       }
+      double ex = b.x() - arc.centre().x();
+      double ey = b.y() - arc.centre().y();
+      slack[i] = Math.abs(Math.sqrt(ex * ex + ey * ey) - r[i]) + ROUNDING_MM;
       // Up to half a turn no point of the arc stands beyond its chord's ends.
-      height[i] = stripHi[i] - stripLo[i] + Arc.RADIUS_SLACK_MM;
-      stripLo[i] -= Arc.RADIUS_SLACK_MM;
-      stripHi[i] += Arc.RADIUS_SLACK_MM;
+      height[i] = stripHi[i] - stripLo[i] + slack[i];
+      stripLo[i] -= slack[i];
+      stripHi[i] += slack[i];
     }
   }
 
@@ -98,7 +106,7 @@ final class FlatShapes {
     double rj = b.r[j];
     return ri > 0
         && rj > 0
-        && Math.abs(ri - rj) - 2 * Arc.RADIUS_SLACK_MM > limit
+        && Math.abs(ri - rj) - a.slack[i] - b.slack[j] > limit
         && Math.abs(a.cx[i] - b.cx[j]) <= SAME_CENTRE_MM
         && Math.abs(a.cy[i] - b.cy[j]) <= SAME_CENTRE_MM;
   }
@@ -127,7 +135,7 @@ final class FlatShapes {
         && Math.abs(cx[i] - cx[c]) <= SAME_CENTRE_MM
         && Math.abs(cy[i] - cy[c]) <= SAME_CENTRE_MM) {
       double beyond = Math.max(beyond(x0[i], y0[i], c), beyond(x1[i], y1[i], c));
-      return Math.abs(r[i] - r[c]) + beyond + 2 * Arc.RADIUS_SLACK_MM + 2 * SAME_CENTRE_MM;
+      return Math.abs(r[i] - r[c]) + beyond + slack[i] + slack[c] + 2 * SAME_CENTRE_MM;
     }
     double a = toChord(x0[i], y0[i], c);
     double b = toChord(x1[i], y1[i], c);
@@ -146,8 +154,7 @@ final class FlatShapes {
     double qy = cy[c] + k * py;
     // On the circle the arc is what lies on its own side of the chord.
     double side = nx[c] * qx + ny[c] * qy - (nx[c] * x0[c] + ny[c] * y0[c]);
-    boolean low = stripHi[c] - Arc.RADIUS_SLACK_MM <= nx[c] * x0[c] + ny[c] * y0[c];
-    if (low ? side <= 0 : side >= 0) {
+    if (low[c] ? side <= 0 : side >= 0) {
       return 0;
     }
     double ax = qx - x0[c];

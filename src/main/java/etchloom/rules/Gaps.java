@@ -9,18 +9,21 @@ import java.util.List;
 /**
  * The gap between two pieces of copper, the parts that are neighbours along the copper left out.
  *
- * <p>Exact where the nearest points are no neighbours. Else both pieces are halved until their
- * parts hold neighbours only, or none, or are no nearer than wanted. Where the border between the
- * two stays near, the halving ends at {@link #FINEST_MM} or {@link #MOST_CUTS}, and neighbours near
- * the border count: that can make the gap too small by up to the size of the parts, never too
- * great.
+ * <p>Exact where the nearest points are no neighbours. Else both pieces are cut, where neighbours
+ * end or in the middle, until their parts hold neighbours only, or none, or are no nearer than
+ * wanted. Where the border between the two stays near, the cutting ends at {@link #FINEST_MM} or
+ * {@link #MOST_CUTS}, and neighbours near the border count: that can make the gap too small by up
+ * to the size of the parts, never too great.
  */
 final class Gaps {
-  /** Far below the slack of 1 nm: what the halving may leave undecided. */
+  /** Far below the slack of 1 nm: what the cutting may leave undecided. */
   private static final double FINEST_MM = 2e-7;
 
   /** Enough to come down to the finest part at several places of a pair. */
   private static final int MOST_CUTS = 3000;
+
+  /** Where the border cuts off less, the middle is the better place to cut. */
+  private static final double LEAST_PART = 0.01;
 
   /** Lengths along the copper are sums of many rounded terms. */
   private static final double WALK_SLACK_MM = 1e-9;
@@ -52,7 +55,7 @@ final class Gaps {
   Gap gap(Piece p, Piece q, double limitMm, double bendMm) {
     double fat = p.fatMm() + q.fatMm();
     double near = walk.neighbourMm(p, q, spaceMm) + WALK_SLACK_MM;
-    if (adjacent(p, q) && straight(p, q, near, bendMm + fat)) {
+    if (Run.leastMm(p, q, near) > limitMm + fat) {
       return null;
     }
     Nearest n = Distance.between(p.shape(), q.shape());
@@ -82,7 +85,7 @@ final class Gaps {
     while (!open.isEmpty()) {
       Pair pair = open.remove();
       if (pair.nearest().distanceMm() > bound
-          || straight(pair.p(), pair.q(), near, bound)
+          || Run.leastMm(pair.p(), pair.q(), near) >= bound
           || allNear(pair, ways, near)) {
         continue;
       }
@@ -93,44 +96,35 @@ final class Gaps {
         continue;
       }
       cuts++;
-      halve(open, pair);
+      cut(open, pair, ways.get(0), near);
     }
     return best;
   }
 
-  private static void halve(Deque<Pair> open, Pair pair) {
+  private static void cut(Deque<Pair> open, Pair pair, Walk.Way way, double near) {
     Piece p = pair.p();
     Piece q = pair.q();
-    boolean cutFirst = p.lengthMm() >= q.lengthMm();
+    double atP = way.firstAtMm(q, near);
+    double atQ = way.secondAtMm(p, near);
+    boolean cutFirst = inside(p, atP) || (!inside(q, atQ) && p.lengthMm() >= q.lengthMm());
     Piece cut = cutFirst ? p : q;
-    double mid = (cut.fromMm() + cut.toMm()) / 2;
-    for (Piece half : List.of(cut.part(cut.fromMm(), mid), cut.part(mid, cut.toMm()))) {
-      Piece a = cutFirst ? half : p;
-      Piece b = cutFirst ? q : half;
-      open.add(new Pair(a, b, Distance.between(a.shape(), b.shape())));
-    }
+    double at = cutFirst ? atP : atQ;
+    // No border to cut at: in the middle.
+    at = inside(cut, at) ? at : (cut.fromMm() + cut.toMm()) / 2;
+    add(open, cutFirst, cut.part(cut.fromMm(), at), cutFirst ? q : p);
+    add(open, cutFirst, cut.part(at, cut.toMm()), cutFirst ? q : p);
   }
 
-  private static boolean adjacent(Piece p, Piece q) {
-    return p.conductor() == q.conductor()
-        && !p.isPad()
-        && (p.toMm() == q.fromMm() || q.toMm() == p.fromMm());
+  private static void add(Deque<Pair> open, boolean first, Piece part, Piece other) {
+    Piece p = first ? part : other;
+    Piece q = first ? other : part;
+    open.add(new Pair(p, q, Distance.between(p.shape(), q.shape())));
   }
 
-  /**
-   * Whether one track turns so little from the one piece to the other that points too far along it
-   * for neighbours are at least the limit apart.
-   *
-   * <p>Seen in the direction half-way between its extreme ones, a run that turns by no more than t
-   * advances by at least cos(t/2) of its length.
-   */
-  private static boolean straight(Piece p, Piece q, double near, double limitMm) {
-    if (p.isPad() || p.conductor() != q.conductor()) {
-      return false;
-    }
-    double turn =
-        Math.max(p.turnToRad(), q.turnToRad()) - Math.min(p.turnFromRad(), q.turnFromRad());
-    return turn < Math.PI && near * Math.cos(turn / 2) >= limitMm;
+  /** Whether a cut there leaves two parts worth having. */
+  private static boolean inside(Piece p, double atMm) {
+    double least = Math.max(FINEST_MM / 2, LEAST_PART * p.lengthMm());
+    return atMm > p.fromMm() + least && atMm < p.toMm() - least;
   }
 
   /** Whether every point of the one is a neighbour of every point of the other. */

@@ -25,6 +25,8 @@ final class LayerCopper {
   private final List<Piece> pieces;
   private final ShapeTree tree;
   private final Walk walk;
+  private final List<Segment> shapes;
+  private final double[] fatMm;
 
   /**
    * @param spaceMm the greatest space that will be asked for
@@ -40,15 +42,17 @@ final class LayerCopper {
       add(out, artwork, c);
     }
     pieces = List.copyOf(out);
-    double[] fat = new double[pieces.size()];
-    for (int i = 0; i < fat.length; i++) {
-      fat[i] = pieces.get(i).fatMm();
+    fatMm = new double[pieces.size()];
+    shapes = new ArrayList<>(fatMm.length);
+    for (int i = 0; i < fatMm.length; i++) {
+      fatMm[i] = pieces.get(i).fatMm();
+      shapes.add(pieces.get(i).shape());
     }
-    tree = new ShapeTree(pieces.stream().map(Piece::shape).toList(), fat);
+    tree = new ShapeTree(shapes, fatMm);
     walk = new Walk(artwork, tracks, spaceMm);
   }
 
-  int layer() {
+  int number() {
     return layer;
   }
 
@@ -62,6 +66,11 @@ final class LayerCopper {
 
   Walk walk() {
     return walk;
+  }
+
+  /** A search for what lies near other shapes, with no memory of earlier ones. */
+  Nearby nearby() {
+    return new Nearby(tree, shapes, fatMm);
   }
 
   private static void add(List<Piece> out, Artwork artwork, Conductor c) {
@@ -112,7 +121,7 @@ final class LayerCopper {
     int n = 1;
     if (whole.shape() instanceof Arc) {
       double sweep = (whole.turnToRad() - whole.turnFromRad()) * (toMm - fromMm) / whole.lengthMm();
-      n = (int) Math.ceil(sweep / ShapeTree.MAX_SWEEP_RAD);
+      n = ArcPieces.count(sweep);
     }
     if (n == 1 && fromMm == whole.fromMm() && toMm == whole.toMm()) {
       out.add(whole);
@@ -135,10 +144,5 @@ final class LayerCopper {
   /** {@code terminal U1}, or what the joint is called. */
   static String jointWords(Joint j) {
     return j.terminal() ? "terminal " + j.mark() : j.what();
-  }
-
-  /** A point of the piece, to tell its place. */
-  static Point place(Piece p) {
-    return p.shape().at(0.5);
   }
 }
