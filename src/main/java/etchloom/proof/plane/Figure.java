@@ -153,6 +153,30 @@ public final class Figure {
     return e >= 0 && fromY[e] > toY[e] ? island(ringOf[e]) : -1;
   }
 
+  /** The islands that a disc touches or covers part of, in ascending order. */
+  public int[] islandsWithin(int x, int y, double radius) {
+    if (edges == 0) {
+      return new int[0];
+    }
+    boolean[] found = new boolean[islands()];
+    int here = islandAt(x, y);
+    if (here >= 0) {
+      found[here] = true;
+    }
+    EdgeGrid g = grid();
+    int n = g.coverBox(x - radius, y - radius, x + radius, y + radius);
+    for (int c = 0; c < n; c++) {
+      int cell = g.covered(c);
+      for (int k = g.from(cell); k < g.to(cell); k++) {
+        int e = g.entry(k);
+        if (Distance.pointToEdge(this, e, x, y) <= radius) {
+          found[island(ringOf[e])] = true;
+        }
+      }
+    }
+    return java.util.stream.IntStream.range(0, found.length).filter(i -> found[i]).toArray();
+  }
+
   /** The edge met first on the way to the left, or -1. */
   int leftOf(int x, int y) {
     return edges == 0 ? -1 : grid().leftOf(x, y);
