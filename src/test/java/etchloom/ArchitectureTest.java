@@ -37,6 +37,10 @@ class ArchitectureTest {
           Map.entry("rules", List.of("artwork", "geometry", "spec", "units", "diagnostic")),
           Map.entry(
               "electric", List.of("artwork", "geometry", "winding", "spec", "units", "diagnostic")),
+          Map.entry(
+              "board",
+              List.of(
+                  "geometry", "spec", "winding", "coil", "rim", "artwork", "diagnostic", "units")),
           Map.entry("write", List.of("artwork", "geometry", "units")),
           Map.entry("proof", List.of("artwork", "geometry", "units", "diagnostic")));
 

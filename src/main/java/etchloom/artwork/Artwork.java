@@ -56,8 +56,9 @@ public record Artwork(
     return conductors.stream().filter(c -> c.layer() == layer).toList();
   }
 
+  /** The joints with a pad on the layer; a joint where tracks just meet has none. */
   public List<Joint> padsOn(int layer) {
-    return joints.stream().filter(j -> j.on(layer)).toList();
+    return joints.stream().filter(j -> j.on(layer) && j.padMm() > 0).toList();
   }
 
   /**

@@ -7,7 +7,8 @@ import java.util.Optional;
  * A place where conductors meet, with a pad on each layer it needs.
  *
  * @param id its place in {@link Artwork#joints()}
- * @param hole the plated hole that joins its layers; empty for a joint of one layer
+ * @param padMm diameter of the pad on each of its layers; 0 where tracks just meet (then no hole)
+ * @param hole diameter of the plated hole that joins its layers; empty for a joint of one layer
  * @param firstLayer the topmost layer with a pad, from 1
  * @param lastLayer the lowest layer with a pad
  * @param mark a terminal's mark ({@code U1}), else empty

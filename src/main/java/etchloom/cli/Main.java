@@ -5,6 +5,15 @@ public final class Main {
   private Main() {}
 
   public static void main(String[] args) {
-    System.out.println("etchloom");
+    Console console = new Console(System.out, System.err, System.getenv());
+    int code;
+    try {
+      code = App.run(args, console);
+    } catch (RuntimeException | Error e) {
+      code = App.crashed(e, console);
+    }
+    System.out.flush();
+    System.err.flush();
+    System.exit(code);
   }
 }

@@ -1,0 +1,267 @@
+package etchloom.board;
+
+import etchloom.artwork.Artwork;
+import etchloom.artwork.CopperBuilder;
+import etchloom.artwork.MountingHole;
+import etchloom.artwork.Opening;
+import etchloom.artwork.Stackup;
+import etchloom.artwork.Stroke;
+import etchloom.coil.CoilPlan;
+import etchloom.coil.CoilSize;
+import etchloom.coil.Wedge;
+import etchloom.diagnostic.Staged;
+import etchloom.geometry.Path;
+import etchloom.geometry.Point;
+import etchloom.rim.Rim;
+import etchloom.rim.RimBuilder;
+import etchloom.rim.RimSize;
+import etchloom.spec.FabRules;
+import etchloom.spec.Positions;
+import etchloom.spec.Spec;
+import etchloom.winding.StarOfSlots;
+import etchloom.winding.Winding;
+import java.util.ArrayList;
+import java.util.List;
+import java.util.Locale;
+import java.util.Optional;
+
+/** The one way from a spec to the artwork: winding, coils, rim, board. */
+public final class Assembler {
+  private final Spec spec;
+  private final FabRules fab;
+  private final boolean draft;
+  private final Problems problems;
+
+  private Assembler(Spec spec, FabRules fab, Positions positions, boolean draft) {
+    this.spec = spec;
+    this.fab = fab;
+    this.draft = draft;
+    problems = new Problems(positions);
+  }
+
+  /** Draws the board, or says which keys keep it from being drawn. */
+  public static Staged<Assembly> assemble(Spec spec, FabRules fab, Positions positions) {
+    return assemble(spec, fab, positions, false);
+  }
+
+  /**
+   * Draws the board, or says which keys keep it from being drawn.
+   *
+   * @param draft whether the board breaks rules and is to say so in its legend
+   */
+  public static Staged<Assembly> assemble(
+      Spec spec, FabRules fab, Positions positions, boolean draft) {
+    Assembler a = new Assembler(spec, fab, positions, draft);
+    Optional<Assembly> out = a.assemble();
+    return a.problems.any() ? Staged.failed(a.problems.list()) : Staged.of(out.orElseThrow());
+  }
+
+  private Optional<Assembly> assemble() {
+    Stackup stackup = StackupBuilder.build(spec, fab, problems);
+    Optional<Winding> winding = winding();
+    Optional<CoilPlan> coil = coil();
+    if (winding.isEmpty() || coil.isEmpty() || problems.any()) {
+      return Optional.empty();
+    }
+    RimBuilder.Result rim =
+        RimBuilder.plan(
+            winding.get(),
+            spec.winding().connection(),
+            spec.board().starPointOut(),
+            rimSize(coil.get()));
+    rim.refusal().ifPresent(r -> problems.add("rim", r.key(), r.message()));
+    if (rim.planned().isEmpty()) {
+      return Optional.empty();
+    }
+    return Optional.of(draw(stackup, winding.get(), coil.get(), rim.planned().get()));
+  }
+
+  private Optional<Winding> winding() {
+    int phases = spec.winding().phases();
+    int coils = spec.winding().coils();
+    int poles = spec.rotor().poles();
+    Optional<Winding> w = StarOfSlots.wind(phases, coils, poles);
+    if (w.isEmpty()) {
+      String near =
+          StarOfSlots.nearestCoils(phases, coils, poles).map(n -> n + " coils").orElse("no count")
+              + " with "
+              + poles
+              + " poles, or "
+              + StarOfSlots.nearestPoles(phases, coils, poles)
+                  .map(n -> n + " poles")
+                  .orElse("no count")
+              + " with "
+              + coils
+              + " coils";
+      problems.add(
+          "winding",
+          "winding.coils",
+          coils
+              + " coils and "
+              + poles
+              + " poles give no balanced "
+              + phases
+              + "-phase winding; nearest: "
+              + near);
+    }
+    return w;
+  }
+
+  private CoilSize coilSize() {
+    Spec.Coil c = spec.coil();
+    double pitch = c.trackMm() + c.spaceMm();
+    return new CoilSize(
+        spec.winding().coils(),
+        spec.board().layers(),
+        c.innerRadiusMm(),
+        c.outerRadiusMm(),
+        c.trackMm(),
+        c.spaceMm(),
+        c.cornerMm().orElse(Math.max(c.trackMm(), pitch / 2)),
+        spec.via().padMm(),
+        spec.via().holeMm(),
+        fab.hole().gapMm(),
+        spec.rim().trackMm());
+  }
+
+  private Optional<CoilPlan> coil() {
+    CoilSize size = coilSize();
+    if (size.cornerMm() < size.pitchMm() / 2 - 1e-9) {
+      problems.add(
+          "corner",
+          "coil.corner",
+          String.format(
+              Locale.ROOT,
+              "a corner of %.3f mm closes the gap at the coil's inner end; at least half of track"
+                  + " and space: %.3f mm",
+              size.cornerMm(),
+              size.pitchMm() / 2),
+          String.format(Locale.ROOT, "`corner: %.3f mm`", size.pitchMm() / 2));
+      return Optional.empty();
+    }
+    int most = Wedge.mostTurns(size);
+    int turns = spec.coil().turns().orElse(most);
+    if (most == 0) {
+      problems.add(
+          "turns",
+          "coil.outer-radius",
+          "the sector has no room for a single turn around its "
+              + size.layers() / 2
+              + " eye vias; a larger coil.outer-radius, a smaller via.pad, fewer board.layers or"
+              + " fewer winding.coils would do");
+      return Optional.empty();
+    }
+    if (turns > most) {
+      problems.add(
+          "turns",
+          "coil.turns",
+          turns + " turns do not fit; the rules leave room for " + most,
+          "`turns: " + most + "` or `turns: fill`");
+      return Optional.empty();
+    }
+    return Wedge.draw(size, turns);
+  }
+
+  private RimSize rimSize(CoilPlan coil) {
+    return new RimSize(
+        spec.winding().coils(),
+        coil.nodeAnglesRad().size(),
+        spec.board().layers(),
+        coil.nodeRadiusMm(),
+        coil.nodeAnglesRad().get(0),
+        spec.rim().trackMm(),
+        spec.coil().spaceMm(),
+        spec.via().padMm(),
+        spec.via().holeMm(),
+        spec.board().diameterMm() / 2,
+        fab.edge().copperMm(),
+        fab.edge().holeMm(),
+        spec.board().terminals());
+  }
+
+  private Assembly draw(
+      Stackup stackup, Winding winding, CoilPlan coil, RimBuilder.Planned planned) {
+    boolean open = spec.winding().connection() == Spec.Connection.OPEN;
+    CopperBuilder copper = new CopperBuilder();
+    CoilPlacer placer = new CoilPlacer(spec, coil, winding, copper, open);
+    placer.place();
+    Rim rim = planned.draw(copper, placer::joint, phase -> open ? phase : "WINDING");
+    List<MountingHole> holes = mountingHoles();
+    List<Path> profile = profile();
+    Mask mask = Mask.over(copper.joints(), holes, fab.mask().expansionMm());
+    PlacedLegend legend =
+        new LegendBuilder(spec, fab, copper.joints(), holes, mask.top()).build(draft);
+    Artwork art =
+        new Artwork(
+            spec.title(),
+            spec.slug(),
+            spec.revision(),
+            draft,
+            stackup,
+            profile,
+            copper.joints(),
+            copper.conductors(),
+            holes,
+            mask.top(),
+            mask.bottom(),
+            legend.strokes(),
+            placer.coils(),
+            PhaseTracer.trace(copper, placer.coils(), rim),
+            coil.turns(),
+            spec.winding().connection() == Spec.Connection.DELTA ? 1 : 0);
+    return new Assembly(art, winding, rim);
+  }
+
+  private List<Path> profile() {
+    List<Path> out = new ArrayList<>();
+    out.add(Path.circle(Point.ORIGIN, spec.board().diameterMm() / 2));
+    if (spec.board().boreMm() > 0) {
+      out.add(Path.circle(Point.ORIGIN, spec.board().boreMm() / 2));
+    }
+    return out;
+  }
+
+  private List<MountingHole> mountingHoles() {
+    List<MountingHole> out = new ArrayList<>();
+    spec.board()
+        .holes()
+        .ifPresent(
+            h -> {
+              for (int i = 0; i < h.count(); i++) {
+                double a = h.startRad() + 2 * Math.PI * i / h.count();
+                Point at = Point.polar(h.circleMm() / 2, a);
+                out.add(new MountingHole(at, h.diameterMm(), h.keepOutMm()));
+              }
+            });
+    return out;
+  }
+
+  /** Mask openings: terminals and mounting holes; vias stay tented. */
+  private record Mask(List<Opening> top, List<Opening> bottom) {
+    static Mask over(
+        List<etchloom.artwork.Joint> joints, List<MountingHole> holes, double expansionMm) {
+      List<Opening> top = new ArrayList<>();
+      List<Opening> bottom = new ArrayList<>();
+      for (etchloom.artwork.Joint j : joints) {
+        if (j.terminal()) {
+          Opening o = new Opening(j.at(), j.padMm() + 2 * expansionMm, j.what());
+          top.add(o);
+          if (j.hole().isPresent()) {
+            bottom.add(o);
+          }
+        }
+      }
+      for (int i = 0; i < holes.size(); i++) {
+        MountingHole h = holes.get(i);
+        Opening o =
+            new Opening(h.at(), h.diameterMm() + 2 * expansionMm, "mounting hole " + (i + 1));
+        top.add(o);
+        bottom.add(o);
+      }
+      return new Mask(top, bottom);
+    }
+  }
+
+  /** The legend's strokes, and what of it found no place. */
+  record PlacedLegend(List<Stroke> strokes, List<String> leftOut) {}
+}

@@ -1,0 +1,90 @@
+package etchloom.board;
+
+import etchloom.artwork.Coil;
+import etchloom.artwork.Conductor;
+import etchloom.artwork.CopperBuilder;
+import etchloom.artwork.Feature;
+import etchloom.artwork.Phase;
+import etchloom.rim.Rim;
+import java.util.ArrayDeque;
+import java.util.ArrayList;
+import java.util.Deque;
+import java.util.HashMap;
+import java.util.List;
+import java.util.Map;
+
+/** Follows each phase from its entry to its exit, through its coils and the links between them. */
+final class PhaseTracer {
+  private final CopperBuilder copper;
+  private final List<Coil> coils;
+  private final Map<Integer, List<Conductor>> rimAt = new HashMap<>();
+
+  private PhaseTracer(CopperBuilder copper, List<Coil> coils) {
+    this.copper = copper;
+    this.coils = coils;
+    for (Conductor c : copper.conductors()) {
+      if (c.what().kind() != Feature.Kind.SPIRAL) {
+        rimAt.computeIfAbsent(c.fromJoint(), k -> new ArrayList<>()).add(c);
+        rimAt.computeIfAbsent(c.toJoint(), k -> new ArrayList<>()).add(c);
+      }
+    }
+  }
+
+  static List<Phase> trace(CopperBuilder copper, List<Coil> coils, Rim rim) {
+    PhaseTracer t = new PhaseTracer(copper, coils);
+    return rim.chains().stream().map(t::trace).toList();
+  }
+
+  private Phase trace(Rim.PhaseChain chain) {
+    List<Phase.Step> steps = new ArrayList<>();
+    int entry = -1;
+    int exit = -1;
+    for (int number : chain.coils()) {
+      Coil c = coils.get(number - 1);
+      int in = c.sign() > 0 ? c.startJoint() : c.finishJoint();
+      if (exit < 0) {
+        entry = in;
+      } else {
+        link(exit, in, steps);
+      }
+      through(c, steps);
+      exit = c.sign() > 0 ? c.finishJoint() : c.startJoint();
+    }
+    return new Phase(chain.phase(), entry, exit, steps);
+  }
+
+  private static void through(Coil c, List<Phase.Step> steps) {
+    int n = c.conductors().size();
+    for (int i = 0; i < n; i++) {
+      boolean forward = c.sign() > 0;
+      steps.add(new Phase.Step(c.conductors().get(forward ? i : n - 1 - i), forward));
+    }
+  }
+
+  /** The shortest way over rim copper, in pieces. */
+  private void link(int from, int to, List<Phase.Step> steps) {
+    Map<Integer, Phase.Step> into = new HashMap<>();
+    Deque<Integer> open = new ArrayDeque<>(List.of(from));
+    while (!open.isEmpty() && !into.containsKey(to)) {
+      int at = open.remove();
+      for (Conductor c : rimAt.getOrDefault(at, List.of())) {
+        boolean forward = c.fromJoint() == at;
+        int next = forward ? c.toJoint() : c.fromJoint();
+        if (next != from && into.putIfAbsent(next, new Phase.Step(c.id(), forward)) == null) {
+          open.add(next);
+        }
+      }
+    }
+    List<Phase.Step> way = new ArrayList<>();
+    for (int at = to; at != from; ) {
+      Phase.Step s = into.get(at);
+      if (s == null) {
+        throw new IllegalStateException("no link from joint " + from + " to joint " + to);
+      }
+      way.add(0, s);
+      Conductor c = copper.conductors().get(s.conductor());
+      at = s.forward() ? c.fromJoint() : c.toJoint();
+    }
+    steps.addAll(way);
+  }
+}

@@ -1,0 +1,119 @@
+package etchloom.cli;
+
+import etchloom.diagnostic.DiagnosticText;
+import java.io.IOException;
+import java.io.PrintWriter;
+import java.io.StringWriter;
+import java.nio.charset.StandardCharsets;
+import java.nio.file.Files;
+import java.nio.file.Path;
+import picocli.CommandLine;
+import picocli.CommandLine.Command;
+import picocli.CommandLine.Model.CommandSpec;
+import picocli.CommandLine.Spec;
+
+/** The program: its commands, and what becomes of what goes wrong in them. */
+@Command(
+    name = "etchloom",
+    description = {
+      "Draws printed-circuit stators: reads one YAML spec, writes the copper, drill, mask, legend"
+          + " and netlist files a board fab needs, checks them against the fab's rules, and reports"
+          + " the electrical properties of the copper it drew.",
+      ""
+    },
+    synopsisHeading = "Usage: ",
+    commandListHeading = "%nCommands:%n",
+    optionListHeading = "%nOptions:%n",
+    footer = {
+      "",
+      "Start:   etchloom new filter-wheel wheel.yaml",
+      "         etchloom draw wheel.yaml",
+      "",
+      "Exit: 0 done, every rule kept; 1 done, and the answer is no; 2 wrong input; 3 cannot read"
+          + " or write; 70 a fault in the program."
+    })
+public final class App implements Runnable {
+  @Spec private CommandSpec spec;
+
+  /** Runs one command line and gives its exit code; never throws, never exits. */
+  public static int run(String[] args, Console console) {
+    CommandLine line = new CommandLine(new App());
+    line.addSubcommand("new", new NewCommand(console));
+    line.addSubcommand("draw", new DrawCommand(console));
+    line.addSubcommand("check", new CheckCommand(console));
+    PrintWriter out = new PrintWriter(console.out(), true, StandardCharsets.UTF_8);
+    PrintWriter err = new PrintWriter(console.err(), true, StandardCharsets.UTF_8);
+    line.setOut(out).setErr(err);
+    line.setUsageHelpWidth(80).setUsageHelpAutoWidth(false);
+    boolean colour = console.variable("NO_COLOR").isEmpty() && System.console() != null;
+    line.setColorScheme(
+        CommandLine.Help.defaultColorScheme(
+            colour ? CommandLine.Help.Ansi.AUTO : CommandLine.Help.Ansi.OFF));
+    line.setParameterExceptionHandler(App::misused);
+    line.setExecutionExceptionHandler((e, c, r) -> failed(e, console));
+    int code = line.execute(args);
+    out.flush();
+    err.flush();
+    return code;
+  }
+
+  @picocli.CommandLine.Option(
+      names = {"-h", "--help"},
+      usageHelp = true,
+      description = "show this text")
+  private boolean help;
+
+  @picocli.CommandLine.Option(names = "--version", description = "show the version")
+  private boolean version;
+
+  @Override
+  public void run() {
+    if (version) {
+      spec.commandLine().getOut().println("etchloom " + Version.TEXT);
+    } else {
+      spec.commandLine().usage(spec.commandLine().getOut());
+    }
+  }
+
+  private static int misused(CommandLine.ParameterException e, String[] args) {
+    PrintWriter err = e.getCommandLine().getErr();
+    err.println("error[usage]: " + e.getMessage());
+    if (e instanceof CommandLine.UnmatchedArgumentException u) {
+      u.getSuggestions().stream().findFirst().ifPresent(s -> err.println("  hint: " + s));
+    }
+    err.println("  hint: " + e.getCommandLine().getCommandSpec().qualifiedName() + " --help");
+    return ExitCode.BAD_INPUT;
+  }
+
+  private static int failed(Exception e, Console console) {
+    if (e instanceof BadInput b) {
+      console.err().print(DiagnosticText.text(b.diagnostics()));
+      return ExitCode.BAD_INPUT;
+    }
+    if (e instanceof DiskTrouble) {
+      console.err().println("error[disk]: " + e.getMessage());
+      return ExitCode.DISK;
+    }
+    console.err().println("error[fault]: a fault in Etchloom itself: " + trace(e));
+    return ExitCode.FAULT;
+  }
+
+  /** Where the full trace was put; a user gets one line. */
+  private static String trace(Throwable e) {
+    StringWriter text = new StringWriter();
+    e.printStackTrace(new PrintWriter(text));
+    try {
+      Path file = Files.createTempFile("etchloom-fault-", ".txt");
+      Files.writeString(file, text.toString());
+      return e.getClass().getSimpleName() + "; the full trace is in " + file;
+    } catch (IOException io) {
+      return e + "; no trace could be kept";
+    }
+  }
+
+  /** A fault outside picocli's reach, such as memory running out. */
+  static int crashed(Throwable t, Console console) {
+    console.err().println("error[fault]: a fault in Etchloom itself: " + trace(t));
+    return ExitCode.FAULT;
+  }
+}

@@ -1,0 +1,122 @@
+package etchloom.cli;
+
+import etchloom.diagnostic.Staged;
+import etchloom.spec.FabReader;
+import etchloom.spec.FabRules;
+import etchloom.spec.Positions;
+import etchloom.spec.SpecFile;
+import etchloom.spec.SpecReader;
+import etchloom.spec.Templates;
+import java.io.IOException;
+import java.io.InputStream;
+import java.nio.file.Files;
+import java.nio.file.InvalidPathException;
+import java.nio.file.NoSuchFileException;
+import java.nio.file.Path;
+import java.util.List;
+import java.util.Optional;
+
+/** The files a command starts from, read whole and within bounds. */
+final class InputFiles {
+  private InputFiles() {}
+
+  /**
+   * A spec and the rules it is held against, with the bytes as read.
+   *
+   * @param fabName the class, or the path as the user gave it
+   */
+  record Inputs(
+      Path specPath,
+      SpecFile file,
+      byte[] specBytes,
+      String fabName,
+      FabRules fab,
+      byte[] fabBytes,
+      List<etchloom.diagnostic.Diagnostic> warnings) {
+    Inputs {
+      warnings = List.copyOf(warnings);
+    }
+  }
+
+  /**
+   * @param fabOption stands for the spec's own {@code fab} where given
+   * @throws BadInput for anything wrong in either file
+   * @throws DiskTrouble where a file cannot be read
+   */
+  static Inputs read(String spec, Optional<String> fabOption) {
+    Path path = path(spec);
+    byte[] bytes = bytes(path, spec, "spec");
+    Staged<SpecFile> staged = SpecReader.read(spec, bytes);
+    SpecFile file = staged.value().orElseThrow(() -> new BadInput(staged.diagnostics()));
+    String fab = fabOption.orElse(file.spec().fab());
+    if (!isPath(fab)) {
+      if (!Templates.fabNames().contains(fab)) {
+        throw unknownClass(fab, fabOption.isPresent() ? Optional.empty() : Optional.of(file), spec);
+      }
+      byte[] fabBytes = Templates.fabBytes(fab);
+      return new Inputs(
+          path, file, bytes, fab, FabReader.builtIn(fab), fabBytes, staged.diagnostics());
+    }
+    Path base = Optional.ofNullable(path.toAbsolutePath().getParent()).orElse(path);
+    Path fabPath = fabOption.isPresent() ? path(fab) : base.resolve(path(fab));
+    byte[] fabBytes = bytes(fabPath, fabPath.toString(), "rules file");
+    Staged<FabRules> rules = FabReader.read(fabPath.toString(), fabBytes);
+    return new Inputs(
+        path,
+        file,
+        bytes,
+        fab,
+        rules.value().orElseThrow(() -> new BadInput(rules.diagnostics())),
+        fabBytes,
+        staged.diagnostics());
+  }
+
+  static boolean isPath(String fab) {
+    return fab.indexOf('.') >= 0 || fab.indexOf('/') >= 0;
+  }
+
+  private static BadInput unknownClass(String fab, Optional<SpecFile> file, String specName) {
+    String message =
+        "there is no fab class '"
+            + fab
+            + "'; the built-in ones are "
+            + String.join(", ", Templates.fabNames())
+            + ", and a rules file of your own is named with its path";
+    if (file.isEmpty()) {
+      return BadInput.of("--fab", "unknown-fab", message);
+    }
+    Positions p = file.get().positions();
+    return new BadInput(
+        List.of(etchloom.diagnostic.Diagnostic.error("unknown-fab", p.at("fab"), "fab", message)));
+  }
+
+  static Path path(String text) {
+    try {
+      return Path.of(text);
+    } catch (InvalidPathException e) {
+      throw BadInput.of(
+          text.replaceAll("\\p{Cntrl}", "?"), "path", "this is no path: " + e.getReason());
+    }
+  }
+
+  /** The whole file; one byte more than is allowed is enough to refuse it. */
+  static byte[] bytes(Path path, String name, String what) {
+    if (Files.isDirectory(path)) {
+      throw BadInput.of(name, "directory", "this is a folder; a " + what + " is one YAML file");
+    }
+    try (InputStream in = Files.newInputStream(path)) {
+      return in.readNBytes(SpecReader.MAX_BYTES + 1);
+    } catch (NoSuchFileException e) {
+      throw new DiskTrouble(name + ": there is no such file");
+    } catch (IOException e) {
+      throw new DiskTrouble(name + ": cannot be read: " + reason(e));
+    }
+  }
+
+  static String reason(IOException e) {
+    if (e instanceof java.nio.file.AccessDeniedException) {
+      return "no permission";
+    }
+    return e.getMessage() == null ? e.getClass().getSimpleName() : e.getMessage();
+  }
+}

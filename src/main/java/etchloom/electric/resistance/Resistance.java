@@ -1,0 +1,144 @@
+package etchloom.electric.resistance;
+
+import etchloom.artwork.Artwork;
+import etchloom.artwork.Coil;
+import etchloom.artwork.Conductor;
+import etchloom.artwork.Joint;
+import etchloom.electric.resistance.ResistanceFigures.CoilLayer;
+import etchloom.electric.resistance.ResistanceFigures.CopperLayer;
+import etchloom.electric.resistance.ResistanceFigures.Limits;
+import etchloom.electric.resistance.ResistanceFigures.PhaseOhm;
+import etchloom.electric.resistance.ResistanceFigures.TerminalOhm;
+import etchloom.spec.FabRules;
+import java.util.ArrayList;
+import java.util.List;
+import java.util.Optional;
+
+/** Works out all resistances of a board from its conductors. */
+public final class Resistance {
+  private Resistance() {}
+
+  /**
+   * All figures at 20 °C.
+   *
+   * @param tolerance the fab's, as ratios of track width, copper and plating thickness
+   * @throws IllegalArgumentException if a track is narrower than its undercut
+   * @throws IllegalStateException if a phase or coil is not one piece, or no two terminals are
+   *     joined
+   */
+  public static ResistanceFigures of(Artwork artwork, FabRules.Tolerance tolerance) {
+    double tempC = Copper.REFERENCE_C;
+    Coil coil = artwork.coils().get(0);
+    List<TerminalOhm> terminals = terminals(artwork, Variation.NONE);
+    if (terminals.isEmpty()) {
+      throw new IllegalStateException("no two terminals are joined");
+    }
+    return new ResistanceFigures(
+        coil.conductors().stream().map(id -> coilLayer(artwork, id)).toList(),
+        copperLayers(artwork),
+        Chains.coil(artwork, coil, tempC).ohm(),
+        artwork.phases().stream()
+            .map(p -> new PhaseOhm(p.mark(), Chains.phase(artwork, p, tempC).ohm()))
+            .toList(),
+        terminals,
+        imbalancePercent(ResistanceFigures.lineToLine(terminals)),
+        worst(artwork, tolerance),
+        rss(artwork, tolerance, terminals));
+  }
+
+  private static CoilLayer coilLayer(Artwork artwork, int id) {
+    Conductor c = artwork.conductors().get(id);
+    double area = Section.trackAreaMm2(c.widthMm(), artwork.stackup().copper().get(c.layer() - 1));
+    double mm = c.path().lengthMm();
+    return new CoilLayer(c.layer(), mm, Section.ohm(mm, area, Copper.REFERENCE_C));
+  }
+
+  private static List<CopperLayer> copperLayers(Artwork artwork) {
+    double[] mm = new double[artwork.layers()];
+    for (Conductor c : artwork.conductors()) {
+      mm[c.layer() - 1] += c.path().lengthMm();
+    }
+    List<CopperLayer> out = new ArrayList<>();
+    for (int i = 0; i < mm.length; i++) {
+      out.add(new CopperLayer(i + 1, mm[i]));
+    }
+    return out;
+  }
+
+  /** Every pair of terminals that copper joins, at 20 °C. */
+  public static List<TerminalOhm> terminals(Artwork artwork, Variation variation) {
+    Network network = Network.of(artwork, variation, Copper.REFERENCE_C);
+    List<Joint> all = artwork.terminals();
+    List<TerminalOhm> out = new ArrayList<>();
+    for (int i = 0; i < all.size(); i++) {
+      for (int j = i + 1; j < all.size(); j++) {
+        Joint a = all.get(i);
+        Joint b = all.get(j);
+        network
+            .ohm(Network.terminalNode(a), Network.terminalNode(b))
+            .ifPresent(ohm -> out.add(new TerminalOhm(a.mark(), b.mark(), ohm)));
+      }
+    }
+    return out;
+  }
+
+  private static double imbalancePercent(List<TerminalOhm> pairs) {
+    double mean = pairs.stream().mapToDouble(TerminalOhm::ohm).average().orElseThrow();
+    return 100 * (max(pairs) - min(pairs)) / mean;
+  }
+
+  private static double min(List<TerminalOhm> pairs) {
+    return pairs.stream().mapToDouble(TerminalOhm::ohm).min().orElseThrow();
+  }
+
+  private static double max(List<TerminalOhm> pairs) {
+    return pairs.stream().mapToDouble(TerminalOhm::ohm).max().orElseThrow();
+  }
+
+  private static boolean possible(Artwork artwork, Variation v) {
+    return artwork.conductors().stream()
+        .allMatch(c -> v.leaves(c.widthMm(), artwork.stackup().copper().get(c.layer() - 1)));
+  }
+
+  private static Optional<Limits> worst(Artwork artwork, FabRules.Tolerance t) {
+    Variation thin = new Variation(1 - t.track(), 1 - t.copper(), 1 - t.plating());
+    if (!possible(artwork, thin)) {
+      return Optional.empty();
+    }
+    Variation fat = new Variation(1 + t.track(), 1 + t.copper(), 1 + t.plating());
+    return Optional.of(new Limits(min(terminals(artwork, fat)), max(terminals(artwork, thin))));
+  }
+
+  /**
+   * Each tolerance alone moves the extreme pairs by so much; the moves are added as root of the sum
+   * of squares, upward and downward apart since resistance is not linear in them.
+   */
+  private static Optional<Limits> rss(
+      Artwork artwork, FabRules.Tolerance t, List<TerminalOhm> nominal) {
+    double up = 0;
+    double down = 0;
+    for (int side = -1; side <= 1; side += 2) {
+      List<Variation> each =
+          List.of(
+              new Variation(1 + side * t.track(), 1, 1),
+              new Variation(1, 1 + side * t.copper(), 1),
+              new Variation(1, 1, 1 + side * t.plating()));
+      for (Variation v : each) {
+        if (!possible(artwork, v)) {
+          return Optional.empty();
+        }
+        List<TerminalOhm> moved = terminals(artwork, v);
+        if (side < 0) {
+          up += square(max(moved) - max(nominal));
+        } else {
+          down += square(min(moved) - min(nominal));
+        }
+      }
+    }
+    return Optional.of(new Limits(min(nominal) - Math.sqrt(down), max(nominal) + Math.sqrt(up)));
+  }
+
+  private static double square(double x) {
+    return x * x;
+  }
+}

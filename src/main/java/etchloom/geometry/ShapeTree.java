@@ -1,0 +1,277 @@
+package etchloom.geometry;
+
+import java.util.List;
+
+/**
+ * Finds which of many fat lines and arcs come near each other, in close to linear time.
+ *
+ * <p>A search tree of axis-parallel boxes does not do for windings: the box of a long slanted track
+ * covers all its parallel neighbours, and the box of a long arc those inside it, so that every
+ * track of a coil meets every other and the cost grows with the square of the turns, however the
+ * tracks are cut. Here a group of shapes is bounded by one of its own members, fattened until it
+ * holds the others: for neighbouring turns that is a slim bent strip. Boxes are only a first, cheap
+ * test.
+ *
+ * <p>Shapes are lines (a point is a line with equal ends) and arcs of at most {@link
+ * #MAX_SWEEP_RAD}; each is fattened by a distance of its own: half a track's width, or a pad's
+ * radius.
+ */
+public final class ShapeTree {
+  /** Bounds on groups of arcs need arcs that bend no further than a quarter turn. */
+  public static final double MAX_SWEEP_RAD = Math.PI / 2 + 1e-9;
+
+  private static final int LEAF = 4;
+
+  /** Up to this many members a group's reach is measured, above it is added up from its halves. */
+  private static final int MEASURED = 64;
+
+  /** Told of a pair that may be near; gives back the limit to go on with. */
+  @FunctionalInterface
+  public interface PairVisitor {
+    double visit(int i, int j, double limitMm);
+  }
+
+  /** Told of a shape that may be near; gives back the limit to go on with. */
+  @FunctionalInterface
+  public interface Visitor {
+    double visit(int i, double limitMm);
+  }
+
+  private final Segment[] shapes;
+  private final double[] fatMm;
+  private final int[] order;
+  private final double[][] feature;
+  private final double[] itemBox;
+  private final int[] lo;
+  private final int[] hi;
+  private final int[] left;
+  private final int[] middle;
+  private final double[] reachMm;
+  private final double[] box;
+  private int nodes;
+
+  /**
+   * @param fatMm by how much each shape is fattened, mm, not negative, one entry a shape
+   */
+  public ShapeTree(List<? extends Segment> shapes, double[] fatMm) {
+    int n = shapes.size();
+    this.shapes = shapes.toArray(new Segment[0]);
+    this.fatMm = fatMm.clone();
+    if (fatMm.length != n) {
+      throw new IllegalArgumentException(n + " shapes, but " + fatMm.length + " distances");
+    }
+    order = new int[n];
+    feature = new double[6][n];
+    itemBox = new double[4 * n];
+    int most = Math.max(1, 2 * n);
+    lo = new int[most];
+    hi = new int[most];
+    left = new int[most];
+    middle = new int[most];
+    reachMm = new double[most];
+    box = new double[4 * most];
+    for (int i = 0; i < n; i++) {
+      order[i] = i;
+      describe(i);
+    }
+    if (n > 0) {
+      build(0, n);
+    }
+  }
+
+  private void describe(int i) {
+    Segment s = shapes[i];
+    if (s instanceof Arc a && !(Math.abs(a.sweepRad()) <= MAX_SWEEP_RAD)) {
+      throw new IllegalArgumentException(
+          "arc bends " + a.sweepRad() + " rad, too far for the tree");
+    }
+    Point m = s.at(0.5);
+    double dx = s.end().x() - s.start().x();
+    boolean back = dx < 0 || (dx == 0 && s.end().y() < s.start().y());
+    Point from = back ? s.end() : s.start();
+    Point to = back ? s.start() : s.end();
+    feature[0][i] = from.x();
+    feature[1][i] = from.y();
+    feature[2][i] = m.x();
+    feature[3][i] = m.y();
+    feature[4][i] = to.x();
+    feature[5][i] = to.y();
+    ShapeBounds.box(s, fatMm[i], itemBox, 4 * i);
+  }
+
+  private int build(int from, int to) {
+    int node = nodes++;
+    lo[node] = from;
+    hi[node] = to;
+    left[node] = -1;
+    int at = 4 * node;
+    box[at] = box[at + 1] = Double.POSITIVE_INFINITY;
+    box[at + 2] = box[at + 3] = Double.NEGATIVE_INFINITY;
+    for (int k = from; k < to; k++) {
+      int i = 4 * order[k];
+      box[at] = Math.min(box[at], itemBox[i]);
+      box[at + 1] = Math.min(box[at + 1], itemBox[i + 1]);
+      box[at + 2] = Math.max(box[at + 2], itemBox[i + 2]);
+      box[at + 3] = Math.max(box[at + 3], itemBox[i + 3]);
+    }
+    if (to - from > LEAF) {
+      double[] key = feature[widest(from, to)];
+      int mid = (from + to) >>> 1;
+      Selection.split(order, key, from, to, mid);
+      middle[node] = order[mid];
+      left[node] = build(from, mid);
+      int right = build(mid, to);
+      reachMm[node] =
+          to - from <= MEASURED
+              ? reach(from, to, middle[node])
+              : Math.max(viaHalf(left[node], middle[node]), viaHalf(right, middle[node]));
+    } else {
+      middle[node] = order[(from + to) >>> 1];
+      reachMm[node] = reach(from, to, middle[node]);
+    }
+    return node;
+  }
+
+  private int widest(int from, int to) {
+    int best = 0;
+    double most = -1;
+    for (int f = 0; f < feature.length; f++) {
+      double min = Double.POSITIVE_INFINITY;
+      double max = Double.NEGATIVE_INFINITY;
+      for (int k = from; k < to; k++) {
+        double v = feature[f][order[k]];
+        min = Math.min(min, v);
+        max = Math.max(max, v);
+      }
+      if (max - min > most) {
+        most = max - min;
+        best = f;
+      }
+    }
+    return best;
+  }
+
+  private double reach(int from, int to, int c) {
+    double reach = 0;
+    for (int k = from; k < to; k++) {
+      int i = order[k];
+      double own = i == c ? 0 : ShapeBounds.reach(shapes[i], shapes[c]);
+      reach = Math.max(reach, own + fatMm[i]);
+    }
+    return reach;
+  }
+
+  private double viaHalf(int half, int c) {
+    int m = middle[half];
+    return reachMm[half] + (m == c ? 0 : ShapeBounds.reach(shapes[m], shapes[c]));
+  }
+
+  private int right(int node) {
+    // Nodes are numbered in the order of building: the right half follows the whole left one.
+    int l = left[node];
+    return l + size(hi[l] - lo[l]);
+  }
+
+  /** Nodes of a subtree over {@code n} shapes. */
+  private static int size(int n) {
+    return n <= LEAF ? 1 : 1 + size(n >>> 1) + size(n - (n >>> 1));
+  }
+
+  /**
+   * Visits every pair i &lt; j whose fat shapes may be as near as the limit, each once, in a fixed
+   * order that follows the tree and not the indices.
+   *
+   * @param limitMm gap between the fat shapes up to which pairs are wanted, not negative
+   */
+  public void pairs(double limitMm, PairVisitor visitor) {
+    if (nodes > 0) {
+      inside(0, limitMm, visitor);
+    }
+  }
+
+  private double inside(int u, double limit, PairVisitor visitor) {
+    double now = limit;
+    if (left[u] >= 0) {
+      now = inside(left[u], now, visitor);
+      now = inside(right(u), now, visitor);
+      return between(left[u], right(u), now, visitor);
+    }
+    for (int a = lo[u]; a < hi[u]; a++) {
+      for (int b = a + 1; b < hi[u]; b++) {
+        now = items(order[a], order[b], now, visitor);
+      }
+    }
+    return now;
+  }
+
+  private double items(int i, int j, double limit, PairVisitor visitor) {
+    if (boxesApart(itemBox, 4 * i, itemBox, 4 * j, limit)) {
+      return limit;
+    }
+    return Math.max(0, visitor.visit(Math.min(i, j), Math.max(i, j), limit));
+  }
+
+  private double between(int u, int v, double limit, PairVisitor visitor) {
+    if (apart(u, v, limit)) {
+      return limit;
+    }
+    double now = limit;
+    if (left[u] < 0 && left[v] < 0) {
+      for (int a = lo[u]; a < hi[u]; a++) {
+        for (int b = lo[v]; b < hi[v]; b++) {
+          now = items(order[a], order[b], now, visitor);
+        }
+      }
+      return now;
+    }
+    boolean cutFirst = left[v] < 0 || (left[u] >= 0 && reachMm[u] >= reachMm[v]);
+    if (cutFirst) {
+      now = between(left[u], v, now, visitor);
+      return between(right(u), v, now, visitor);
+    }
+    now = between(u, left[v], now, visitor);
+    return between(u, right(v), now, visitor);
+  }
+
+  private boolean apart(int u, int v, double limit) {
+    if (boxesApart(box, 4 * u, box, 4 * v, limit)) {
+      return true;
+    }
+    double held = reachMm[u] + reachMm[v] + limit;
+    return Distance.exceeds(shapes[middle[u]], shapes[middle[v]], held);
+  }
+
+  /** Visits every shape that may be as near to the given one as the limit, in a fixed order. */
+  public void near(Segment shape, double shapeFatMm, double limitMm, Visitor visitor) {
+    if (nodes > 0) {
+      double[] own = new double[4];
+      ShapeBounds.box(shape, shapeFatMm, own, 0);
+      near(0, shape, shapeFatMm, own, limitMm, visitor);
+    }
+  }
+
+  private double near(
+      int u, Segment shape, double shapeFat, double[] own, double limit, Visitor visitor) {
+    if (boxesApart(own, 0, box, 4 * u, limit)
+        || Distance.exceeds(shape, shapes[middle[u]], shapeFat + reachMm[u] + limit)) {
+      return limit;
+    }
+    double now = limit;
+    if (left[u] >= 0) {
+      now = near(left[u], shape, shapeFat, own, now, visitor);
+      return near(right(u), shape, shapeFat, own, now, visitor);
+    }
+    for (int k = lo[u]; k < hi[u]; k++) {
+      if (!boxesApart(own, 0, itemBox, 4 * order[k], now)) {
+        now = Math.max(0, visitor.visit(order[k], now));
+      }
+    }
+    return now;
+  }
+
+  private static boolean boxesApart(double[] a, int i, double[] b, int j, double limit) {
+    double dx = Math.max(0, Math.max(a[i] - b[j + 2], b[j] - a[i + 2]));
+    double dy = Math.max(0, Math.max(a[i + 1] - b[j + 3], b[j + 1] - a[i + 3]));
+    return dx * dx + dy * dy > limit * limit;
+  }
+}

@@ -1,0 +1,7 @@
+package etchloom.rules;
+
+/** One rule, or rules that share their measurements. */
+@FunctionalInterface
+interface Rule {
+  void check(Board board, Verdicts verdicts);
+}

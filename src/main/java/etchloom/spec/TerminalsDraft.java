@@ -1,0 +1,48 @@
+package etchloom.spec;
+
+import etchloom.spec.Spec.TerminalKind;
+import etchloom.spec.Spec.Terminals;
+import etchloom.units.Dimension;
+import java.util.Map;
+import java.util.Optional;
+
+/** The terminals' keys as read, with their defaults. */
+record TerminalsDraft(TerminalKind kind, double start, double pitch, double hole, double pad) {
+  private static final Map<String, TerminalKind> KINDS =
+      Words.of("hole", TerminalKind.HOLE).and("pad", TerminalKind.PAD).map();
+
+  private static final double START_RAD = Math.PI / 2;
+  private static final double PITCH_MM = 3.5;
+  private static final double HOLE_MM = 1.0;
+  private static final double PAD_MM = 2.0;
+
+  static final TerminalsDraft DEFAULT =
+      new TerminalsDraft(TerminalKind.HOLE, START_RAD, PITCH_MM, HOLE_MM, PAD_MM);
+
+  static TerminalsDraft read(Section s) {
+    WordField<TerminalKind> kind = s.word("kind", KINDS);
+    double start = s.number("start", Dimension.ANGLE, Limits.ANY_ANGLE).or(START_RAD);
+    double pitch = s.length("pitch", Limits.PITCH).or(PITCH_MM);
+    double hole = s.length("hole", Limits.HOLE).or(HOLE_MM);
+    double pad = s.length("pad", Limits.PAD).or(PAD_MM);
+    s.close();
+    boolean drilled = !kind.present() || kind.value().equals(Optional.of(TerminalKind.HOLE));
+    if (drilled && pad <= hole) {
+      s.error(Codes.PAD, "pad", Show.mm(pad) + " is not more than the hole, " + Show.mm(hole));
+    }
+    if (pitch <= pad) {
+      s.error(
+          Codes.PAD,
+          "pitch",
+          Show.mm(pitch)
+              + " is not more than the pad, "
+              + Show.mm(pad)
+              + ": terminals would touch");
+    }
+    return new TerminalsDraft(kind.or(TerminalKind.HOLE), start, pitch, hole, pad);
+  }
+
+  Terminals build() {
+    return new Terminals(kind, start, pitch, hole, pad);
+  }
+}
