@@ -106,7 +106,8 @@ final class LegendBuilder {
   private List<Path> text(String text, Point middle, double turnRad) {
     List<Path> out = new ArrayList<>();
     double x = -StrokeFont.widthMm(text, heightMm) / 2;
-    for (char c : text.toCharArray()) {
+    for (int i = 0; i < text.length(); i++) {
+      char c = text.charAt(i);
       for (Path g : StrokeFont.glyph(c, heightMm)) {
         out.add(StrokeFont.placed(g, new Point(x, -heightMm / 2), turnRad, middle));
       }
@@ -139,7 +140,8 @@ final class LegendBuilder {
     double step = heightMm / radius * (below ? 1 : -1);
     double a = middleRad - step * (text.length() - 1) / 2.0;
     List<Path> out = new ArrayList<>();
-    for (char c : text.toCharArray()) {
+    for (int i = 0; i < text.length(); i++) {
+      char c = text.charAt(i);
       double turn = below ? a + Math.PI / 2 : a - Math.PI / 2;
       Point at = Point.polar(radius, a);
       for (Path g : StrokeFont.glyph(c, heightMm)) {
