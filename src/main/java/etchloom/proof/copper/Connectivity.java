@@ -28,10 +28,11 @@ public final class Connectivity {
    * A hole in the copper of one island.
    *
    * @param layer from 1
+   * @param ring its number in the layer's figure
    * @param areaMm2 of the hole
    * @param at where the copper that closes it most likely is
    */
-  public record Loop(int layer, int island, double areaMm2, Point at) {}
+  public record Loop(int layer, int island, int ring, double areaMm2, Point at) {}
 
   /**
    * @param layers the copper from L1 down
@@ -79,8 +80,7 @@ public final class Connectivity {
   private static int[] islandsTouched(Hole hole, Figure f) {
     double r = hole.diameterMm() / 2 * RingPen.NM;
     return hole.samples().stream()
-        .flatMapToInt(
-            p -> Arrays.stream(f.islandsWithin(Place.nm(p.x()), Place.nm(p.y()), r)))
+        .flatMapToInt(p -> Arrays.stream(f.islandsWithin(Place.nm(p.x()), Place.nm(p.y()), r)))
         .distinct()
         .sorted()
         .toArray();
@@ -92,7 +92,7 @@ public final class Connectivity {
       Figure f = layers.get(l - 1);
       for (int r = 0; r < f.rings(); r++) {
         if (f.hole(r) && !drilled.covers(f, r, l)) {
-          loops.add(new Loop(l, f.island(r), -f.ringAreaMm2(r), Fold.place(f, r)));
+          loops.add(new Loop(l, f.island(r), r, -f.ringAreaMm2(r), Fold.place(f, r)));
         }
       }
     }

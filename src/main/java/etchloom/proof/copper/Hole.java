@@ -14,7 +14,8 @@ import java.util.Optional;
  * @param fromLayer first copper layer it passes, from 1
  * @param toLayer last copper layer it passes
  * @param nets the nets that the file declares for it
- * @param where file and line, in the user's words
+ * @param file where it was read
+ * @param line of that file, from 1
  */
 public record Hole(
     Point at,
@@ -24,7 +25,8 @@ public record Hole(
     int fromLayer,
     int toLayer,
     List<String> nets,
-    String where) {
+    String file,
+    int line) {
   public Hole {
     nets = List.copyOf(nets);
   }

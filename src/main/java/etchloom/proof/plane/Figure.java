@@ -2,6 +2,7 @@ package etchloom.proof.plane;
 
 import java.util.Arrays;
 import java.util.function.IntPredicate;
+import java.util.stream.IntStream;
 
 /**
  * A plane figure as its boundary: directed edges with the figure on their left, joined to rings.
@@ -155,26 +156,32 @@ public final class Figure {
 
   /** The islands that a disc touches or covers part of, in ascending order. */
   public int[] islandsWithin(int x, int y, double radius) {
+    IntStream near = Arrays.stream(edgesWithin(x, y, radius)).map(e -> island(ringOf[e]));
+    int here = islandAt(x, y);
+    return (here < 0 ? near : IntStream.concat(near, IntStream.of(here)))
+        .sorted()
+        .distinct()
+        .toArray();
+  }
+
+  /** The edges that a disc touches, in ascending order. */
+  public int[] edgesWithin(int x, int y, double radius) {
     if (edges == 0) {
       return new int[0];
     }
-    boolean[] found = new boolean[islands()];
-    int here = islandAt(x, y);
-    if (here >= 0) {
-      found[here] = true;
-    }
     EdgeGrid g = grid();
     int n = g.coverBox(x - radius, y - radius, x + radius, y + radius);
+    IntStream.Builder out = IntStream.builder();
     for (int c = 0; c < n; c++) {
       int cell = g.covered(c);
       for (int k = g.from(cell); k < g.to(cell); k++) {
         int e = g.entry(k);
         if (Distance.pointToEdge(this, e, x, y) <= radius) {
-          found[island(ringOf[e])] = true;
+          out.add(e);
         }
       }
     }
-    return java.util.stream.IntStream.range(0, found.length).filter(i -> found[i]).toArray();
+    return out.build().sorted().distinct().toArray();
   }
 
   /** The edge met first on the way to the left, or -1. */
