@@ -24,10 +24,25 @@ final class Reading {
   private final String file;
   private final List<ReadWarning> warnings = new ArrayList<>();
   private final Map<String, Integer> counts = new LinkedHashMap<>();
-  private long pieces;
+  private final Budget budget;
+
+  /** How much has been made of one file, or of all files of a set together. */
+  static final class Budget {
+    private long pieces;
+  }
 
   Reading(String file) {
+    this(file, new Budget());
+  }
+
+  /** A file that shares what may be made with others. */
+  Reading(String file, Budget budget) {
     this.file = file;
+    this.budget = budget;
+  }
+
+  String file() {
+    return file;
   }
 
   UnreadableFile fail(int line, String code, String reason) {
@@ -48,8 +63,8 @@ final class Reading {
   }
 
   void charge(long more, int line) throws UnreadableFile {
-    pieces += more;
-    if (pieces > MAX_PIECES) {
+    budget.pieces += more;
+    if (budget.pieces > MAX_PIECES) {
       throw fail(line, "too-large", "the file comes to more than " + MAX_PIECES + " drawn pieces");
     }
   }
