@@ -46,19 +46,19 @@ final class Reading {
   }
 
   UnreadableFile fail(int line, String code, String reason) {
-    return new UnreadableFile(file, line, code, reason);
+    return new UnreadableFile(file, line, code, Shown.clean(reason));
   }
 
   void warn(int line, String code, String message) {
     if (counts.merge(code, 1, Integer::sum) <= MAX_OF_A_KIND) {
-      warnings.add(new ReadWarning(file, line, code, message));
+      warnings.add(new ReadWarning(file, line, code, Shown.clean(message)));
     }
   }
 
   /** Warns at the first place only: for habits of a tool, which show on every line. */
   void warnOnce(int line, String code, String message) {
     if (counts.merge(code, 1, Integer::sum) == 1) {
-      warnings.add(new ReadWarning(file, line, code, message));
+      warnings.add(new ReadWarning(file, line, code, Shown.clean(message)));
     }
   }
 
