@@ -55,8 +55,21 @@ final class DrillNumbers {
         line, "drill-format", "zero suppression is not part of the exchange format (XNC)");
   }
 
+  /** Obeys the customary comments on the number format: {@code FILE_FORMAT=4:4}. */
+  void comment(String text) {
+    int at = text.startsWith("FILE_FORMAT=") ? 12 : text.startsWith("FORMAT={") ? 8 : text.length();
+    boolean two = text.length() >= at + 3 && text.charAt(at + 1) == ':';
+    if (two && place(text.charAt(at)) && place(text.charAt(at + 2))) {
+      digits(text.charAt(at) - '0', text.charAt(at + 2) - '0');
+    }
+  }
+
+  private static boolean place(char c) {
+    return c >= '1' && c <= '6';
+  }
+
   /** Integer and decimal places of numbers without a point. */
-  void digits(int ints, int decs) {
+  private void digits(int ints, int decs) {
     integers = ints;
     decimals = decs;
     digitsSaid = true;

@@ -139,13 +139,17 @@ final class GerberLexer {
   }
 
   static String printable(byte[] b, int from, int to) {
-    int end = Math.min(to, from + 40);
-    String s = new String(b, from, end - from, StandardCharsets.ISO_8859_1);
+    int end = Math.min(to, from + 41);
+    return printable(new String(b, from, end - from, StandardCharsets.ISO_8859_1));
+  }
+
+  /** Foreign text for a message: plain characters only, cut short. */
+  static String printable(String s) {
     StringBuilder out = new StringBuilder();
-    for (int i = 0; i < s.length(); i++) {
+    for (int i = 0; i < Math.min(s.length(), 40); i++) {
       char c = s.charAt(i);
       out.append(c >= 32 && c < 127 ? c : '?');
     }
-    return end < to ? out + "…" : out.toString();
+    return s.length() > 40 ? out + "…" : out.toString();
   }
 }

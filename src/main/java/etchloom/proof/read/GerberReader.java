@@ -20,7 +20,10 @@ public final class GerberReader {
    * @throws UnreadableFile at the first thing that cannot be read
    */
   public static LayerImage read(String name, byte[] bytes) throws UnreadableFile {
-    Reading reading = new Reading(name);
+    return read(new Reading(name), bytes);
+  }
+
+  static LayerImage read(Reading reading, byte[] bytes) throws UnreadableFile {
     GerberLexer lexer = new GerberLexer(bytes, reading);
     GerberFormat format = new GerberFormat(reading);
     AttributeStore attributes = new AttributeStore(reading);
@@ -43,6 +46,6 @@ public final class GerberReader {
     }
     plotter.finish(lexer.line);
     return new LayerImage(
-        name, attributes.file(), plotter.sink().finished(lexer.line), reading.warnings());
+        reading.file(), attributes.file(), plotter.sink().finished(lexer.line), reading.warnings());
   }
 }

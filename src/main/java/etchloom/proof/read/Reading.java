@@ -24,32 +24,47 @@ final class Reading {
   private final String file;
   private final List<ReadWarning> warnings = new ArrayList<>();
   private final Map<String, Integer> counts = new LinkedHashMap<>();
-  private long pieces;
+  private final Budget budget;
+
+  /** How much has been made of one file, or of all files of a set together. */
+  static final class Budget {
+    private long pieces;
+  }
 
   Reading(String file) {
+    this(file, new Budget());
+  }
+
+  /** A file that shares what may be made with others. */
+  Reading(String file, Budget budget) {
     this.file = file;
+    this.budget = budget;
+  }
+
+  String file() {
+    return file;
   }
 
   UnreadableFile fail(int line, String code, String reason) {
-    return new UnreadableFile(file, line, code, reason);
+    return new UnreadableFile(file, line, code, Shown.clean(reason));
   }
 
   void warn(int line, String code, String message) {
     if (counts.merge(code, 1, Integer::sum) <= MAX_OF_A_KIND) {
-      warnings.add(new ReadWarning(file, line, code, message));
+      warnings.add(new ReadWarning(file, line, code, Shown.clean(message)));
     }
   }
 
   /** Warns at the first place only: for habits of a tool, which show on every line. */
   void warnOnce(int line, String code, String message) {
     if (counts.merge(code, 1, Integer::sum) == 1) {
-      warnings.add(new ReadWarning(file, line, code, message));
+      warnings.add(new ReadWarning(file, line, code, Shown.clean(message)));
     }
   }
 
   void charge(long more, int line) throws UnreadableFile {
-    pieces += more;
-    if (pieces > MAX_PIECES) {
+    budget.pieces += more;
+    if (budget.pieces > MAX_PIECES) {
       throw fail(line, "too-large", "the file comes to more than " + MAX_PIECES + " drawn pieces");
     }
   }
