@@ -10,7 +10,6 @@ import etchloom.proof.ProofExpectation.Track;
 import etchloom.proof.copper.Connectivity;
 import etchloom.proof.copper.CopperDifference.Patch;
 import etchloom.proof.copper.DrawnPiece;
-import etchloom.proof.copper.PieceMatch;
 import etchloom.proof.image.LayerImage;
 import etchloom.proof.plane.Figure;
 import java.util.ArrayList;
@@ -44,12 +43,11 @@ final class LayerProof {
     this.out = out;
   }
 
-  /** Whether the file draws just what the design has; where not, the patches are worked out. */
-  void check() {
-    boolean same =
-        DrawnPiece.of(image.objects())
-            .map(p -> PieceMatch.match(p, groups.pieces()).same())
-            .orElse(false);
+  /**
+   * @param same whether the file is known to draw just the design's pieces; where not, the two are
+   *     laid over each other
+   */
+  void check(boolean same) {
     if (!same) {
       changes = Optional.of(new LayerChanges(groups, copper));
       changes.get().patches().forEach(this::patch);
@@ -159,18 +157,20 @@ final class LayerProof {
     List<Point> found = new ArrayList<>();
     for (Track t : group.tracks()) {
       int last = -1;
-      Point leaving = null;
+      List<Point> bare = new ArrayList<>();
       for (Segment s : t.path().segments()) {
         int n = (int) Math.min(100_000, 1 + Math.ceil(4 * s.lengthMm() / t.widthMm()));
         for (int k = 0; k <= n; k++) {
           Point at = s.at(k / (double) n);
           int here = copper.islandAt(Nm.of(at.x()), Nm.of(at.y()));
           if (here >= 0 && last >= 0 && here != last) {
-            found.add(leaving.plus(at).times(0.5));
+            found.add(bare.isEmpty() ? at : bare.get(bare.size() / 2));
           }
           if (here >= 0) {
             last = here;
-            leaving = at;
+            bare.clear();
+          } else {
+            bare.add(at);
           }
         }
       }
@@ -208,24 +208,20 @@ final class LayerProof {
   void nets() {
     for (var o : image.objects()) {
       List<String> names = o.attributes().nets();
-      if (names.isEmpty()) {
-        continue;
-      }
       Point at = o.match(s -> s.path().start(), f -> f.at(), r -> r.contours().get(0).start());
       TreeSet<String> wanted = new TreeSet<>();
       for (int i : copper.islandsWithin(Nm.of(at.x()), Nm.of(at.y()), 2)) {
         groupsOn.getOrDefault(i, new TreeSet<>()).forEach(g -> wanted.add(groups.group(g).net()));
       }
-      if (!wanted.isEmpty() && !wanted.containsAll(names)) {
+      if (!wanted.isEmpty() && (names.isEmpty() || !wanted.containsAll(names))) {
         out.add(
             ProofNames.NET_NAME,
             image.fileName(),
             o.line(),
             groups.layer,
             at,
-            "net "
-                + String.join(", ", names)
-                + " is drawn on copper of net "
+            (names.isEmpty() ? "no net" : "net '" + String.join(", ", names) + "'")
+                + " is said of copper of net "
                 + String.join(", ", wanted));
       }
     }

@@ -5,6 +5,9 @@ public final class ProofNames {
   /** A file that cannot be read; get it from its maker again. */
   public static final String UNREADABLE = "unreadable";
 
+  /** Something that was read, but that another reader may take differently. */
+  public static final String DOUBTFUL = "doubtful";
+
   /** A file that the set should hold is not there, or nothing says what a file is. */
   public static final String MISSING_FILE = "missing-file";
 

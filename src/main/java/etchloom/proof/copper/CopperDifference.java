@@ -11,11 +11,11 @@ import java.util.List;
  * Where two figures differ by more than the flattening of their arcs.
  *
  * <p>Equal curves that were cut at other places leave slivers as thin as the chord error; a patch
- * counts where it is thicker in the mean than {@link #LEAST_THICKNESS_MM}.
+ * counts where its rim is somewhere farther from the other figure's than {@link #LEAST_DEPTH_MM}.
  */
 public final class CopperDifference {
   /** Twice the chord error: chords of both figures may leave the curve, each to its side. */
-  public static final double LEAST_THICKNESS_MM = 2 * CopperBuilder.CHORD_ERROR_MM;
+  public static final double LEAST_DEPTH_MM = 2 * CopperBuilder.CHORD_ERROR_MM;
 
   private static final int SNAP_NM = 3;
 
@@ -38,15 +38,15 @@ public final class CopperDifference {
   public static List<Patch> between(Figure found, Figure wanted) {
     Overlay.Difference d = Overlay.compare(found, wanted, SNAP_NM);
     List<Patch> out = new ArrayList<>();
-    patches(d.onlyFirst(), true, out);
-    patches(d.onlySecond(), false, out);
+    patches(d.onlyFirst(), wanted, true, out);
+    patches(d.onlySecond(), found, false, out);
     return out;
   }
 
-  private static void patches(Figure f, boolean extra, List<Patch> out) {
+  private static void patches(Figure f, Figure other, boolean extra, List<Patch> out) {
     int n = f.islands();
     double[] area = new double[n];
-    double[] length = new double[n];
+    boolean[] deep = new boolean[n];
     int[] rim = new int[n];
     Arrays.fill(rim, -1);
     for (int r = 0; r < f.rings(); r++) {
@@ -55,17 +55,28 @@ public final class CopperDifference {
       if (!f.hole(r) && (rim[i] < 0 || f.ringAreaMm2(r) > f.ringAreaMm2(rim[i]))) {
         rim[i] = r;
       }
-      int e = f.firstEdge(r);
-      do {
-        length[i] += Math.hypot((double) f.toX(e) - f.fromX(e), (double) f.toY(e) - f.fromY(e));
-        e = f.next(e);
-      } while (e != f.firstEdge(r));
+      deep[i] |= deep(f, r, other);
     }
     for (int i = 0; i < n; i++) {
-      if (2 * area[i] / (length[i] / RingPen.NM) > LEAST_THICKNESS_MM) {
+      if (deep[i]) {
         out.add(patch(f, rim[i], extra, area[i]));
       }
     }
+  }
+
+  private static boolean deep(Figure f, int ring, Figure other) {
+    double depth = LEAST_DEPTH_MM * RingPen.NM;
+    int e = f.firstEdge(ring);
+    do {
+      int mx = (int) (((long) f.fromX(e) + f.toX(e)) / 2);
+      int my = (int) (((long) f.fromY(e) + f.toY(e)) / 2);
+      if (other.edgesWithin(f.fromX(e), f.fromY(e), depth).length == 0
+          || other.edgesWithin(mx, my, depth).length == 0) {
+        return true;
+      }
+      e = f.next(e);
+    } while (e != f.firstEdge(ring));
+    return false;
   }
 
   private static Patch patch(Figure f, int ring, boolean extra, double area) {
@@ -90,6 +101,6 @@ public final class CopperDifference {
     } while (e != f.firstEdge(ring));
     Point middle = Place.mm(ox + mx / sum, oy + my / sum);
     boolean inside = f.islandAt(Place.nm(middle.x()), Place.nm(middle.y())) == f.island(ring);
-    return new Patch(extra, inside ? middle : corners.get(corners.size() / 2), area, corners);
+    return new Patch(extra, inside ? middle : corners.get(corners.size() / 4), area, corners);
   }
 }

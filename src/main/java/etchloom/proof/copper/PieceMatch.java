@@ -26,9 +26,6 @@ public record PieceMatch(List<DrawnPiece> onlyFirst, List<DrawnPiece> onlySecond
 
   private static final double TINY_BOW_MM = 1e-3;
 
-  /** Beyond so many leftovers the drawings are simply different. */
-  private static final int MOST_LEFT = 3000;
-
   public boolean same() {
     return onlyFirst.isEmpty() && onlySecond.isEmpty();
   }
@@ -38,10 +35,21 @@ public record PieceMatch(List<DrawnPiece> onlyFirst, List<DrawnPiece> onlySecond
     DrawnPiece[] b = sorted(second);
     List<DrawnPiece> leftA = without(a, b);
     List<DrawnPiece> leftB = without(b, a);
-    if (leftA.size() + leftB.size() > MOST_LEFT || (leftA.isEmpty() && leftB.isEmpty())) {
-      return new PieceMatch(leftA, leftB);
+    boolean[] doneA = new boolean[leftA.size()];
+    boolean[] doneB = new boolean[leftB.size()];
+    join(leftA, doneA, leftB, doneB);
+    join(leftB, doneB, leftA, doneA);
+    return new PieceMatch(rest(leftA, doneA), rest(leftB, doneB));
+  }
+
+  private static List<DrawnPiece> rest(List<DrawnPiece> some, boolean[] done) {
+    List<DrawnPiece> out = new ArrayList<>();
+    for (int i = 0; i < done.length; i++) {
+      if (!done[i]) {
+        out.add(some.get(i));
+      }
     }
-    return new PieceMatch(uncovered(leftA, leftB), uncovered(leftB, leftA));
+    return out;
   }
 
   private static DrawnPiece[] sorted(List<DrawnPiece> pieces) {
@@ -88,53 +96,50 @@ public record PieceMatch(List<DrawnPiece> onlyFirst, List<DrawnPiece> onlySecond
     return Math.abs(p.x() - q.x()) <= TOLERANCE_MM && Math.abs(p.y() - q.y()) <= TOLERANCE_MM;
   }
 
-  /** The pieces of a that pieces of b do not make up together. */
-  private static List<DrawnPiece> uncovered(List<DrawnPiece> a, List<DrawnPiece> b) {
-    List<DrawnPiece> out = new ArrayList<>();
-    for (DrawnPiece p : a) {
-      if (!madeUp(p, b) && !partOfOne(p, b)) {
-        out.add(p);
-      }
+  /** Pieces of the first that pieces of the second make up together are done, and so are those. */
+  private static void join(
+      List<DrawnPiece> whole, boolean[] doneWhole, List<DrawnPiece> parts, boolean[] doneParts) {
+    PieceEnds ends = new PieceEnds(parts);
+    for (int i = 0; i < doneWhole.length; i++) {
+      List<Integer> chain = doneWhole[i] ? List.of() : chain(whole.get(i), parts, ends);
+      doneWhole[i] |= !chain.isEmpty();
+      chain.forEach(k -> doneParts[k] = true);
     }
-    return out;
   }
 
-  private static boolean partOfOne(DrawnPiece p, List<DrawnPiece> b) {
-    for (DrawnPiece q : b) {
-      if (sameWidth(p, q)
-          && on(p.shape().start(), q.shape())
-          && on(p.shape().end(), q.shape())
-          && on(p.shape().at(0.5), q.shape())) {
-        return true;
-      }
-    }
-    return false;
-  }
-
-  private static boolean madeUp(DrawnPiece p, List<DrawnPiece> b) {
+  /** The pieces that follow each other along p from its start to its end; none if it is not so. */
+  private static List<Integer> chain(DrawnPiece p, List<DrawnPiece> parts, PieceEnds ends) {
+    List<Integer> out = new ArrayList<>();
     if (p.shape().lengthMm() == 0) {
-      return false;
+      return out;
     }
     Point at = p.shape().start();
     double done = 0;
     while (!near(at, p.shape().end())) {
-      Point next = null;
-      for (DrawnPiece q : b) {
-        if (sameWidth(p, q) && on(q.shape().at(0.5), p.shape())) {
-          boolean forward = near(q.shape().start(), at);
-          Point to = forward ? q.shape().end() : q.shape().start();
-          if ((forward || near(q.shape().end(), at)) && share(to, p.shape()) > done) {
-            next = to;
-          }
+      Point from = at;
+      double least = done;
+      int next = -1;
+      for (int k : ends.at(from.x(), TOLERANCE_MM)) {
+        DrawnPiece q = parts.get(k);
+        Point to = near(q.shape().start(), from) ? q.shape().end() : q.shape().start();
+        boolean starts = near(q.shape().start(), from) || near(q.shape().end(), from);
+        if (starts
+            && sameWidth(p, q)
+            && on(q.shape().at(0.5), p.shape())
+            && on(to, p.shape())
+            && share(to, p.shape()) > least) {
+          next = k;
+          least = share(to, p.shape());
+          at = to;
         }
       }
-      if (next == null || !on(next, p.shape())) {
-        return false;
+      if (next < 0) {
+        return List.of();
       }
-      done = share(next, p.shape());
-      at = next;
+      out.add(next);
+      done = least;
     }
-    return true;
+    return out;
   }
 
   private static boolean sameWidth(DrawnPiece p, DrawnPiece q) {

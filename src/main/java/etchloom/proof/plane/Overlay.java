@@ -42,12 +42,11 @@ public final class Overlay {
   /**
    * What two figures do not have in common.
    *
-   * @param toleranceNm corners that are no farther apart are taken for the same, so that figures
-   *     that differ by rounding alone cancel
+   * @param toleranceNm corners no farther apart, or beside an edge, are taken for the same, so that
+   *     figures that differ by rounding alone cancel
    */
   public static Difference compare(Figure a, Figure b, int toleranceNm) {
-    EdgeSet all = a.toEdges(a.circles(), 1);
-    all.addAll(new Snap(a, toleranceNm).moved(b), 0, 0, -1);
+    EdgeSet all = Snap.difference(a, b, toleranceNm);
     Arrangement parts = new Arrangement(all.cancelled());
     return new Difference(
         new Figure(parts, all.circles(), w -> w > 0), new Figure(parts, all.circles(), w -> w < 0));
