@@ -1,6 +1,7 @@
 package etchloom.proof;
 
 import etchloom.geometry.Path;
+import etchloom.geometry.Point;
 import etchloom.geometry.Segment;
 import etchloom.proof.copper.Hole;
 import etchloom.proof.image.DrillFile;
@@ -8,13 +9,21 @@ import etchloom.proof.image.Plating;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
+import java.util.function.Predicate;
 
 /** The holes of drill files as holes of the board. */
 final class DrilledHoles {
   private DrilledHoles() {}
 
-  /** Both kinds; a hole of which no file says what it is counts as not plated. */
+  /** Where no file says whether a hole is plated, it counts as not plated. */
   static List<Hole> of(List<DrillFile> files, int layers) {
+    return of(files, layers, p -> false);
+  }
+
+  /**
+   * @param plated whether a hole at a place is plated where no file says so
+   */
+  static List<Hole> of(List<DrillFile> files, int layers, Predicate<Point> plated) {
     List<Hole> out = new ArrayList<>();
     for (DrillFile f : files) {
       int from = f.fromLayer() > 0 ? f.fromLayer() : 1;
@@ -25,7 +34,7 @@ final class DrilledHoles {
                 h.at(),
                 Optional.empty(),
                 h.diameterMm(),
-                h.plating() == Plating.PLATED,
+                is(h.plating(), h.at(), plated),
                 from,
                 to,
                 h.nets(),
@@ -38,7 +47,7 @@ final class DrilledHoles {
                 middle(s.path()),
                 Optional.of(s.path()),
                 s.widthMm(),
-                s.plating() == Plating.PLATED,
+                is(s.plating(), middle(s.path()), plated),
                 from,
                 to,
                 s.nets(),
@@ -49,7 +58,11 @@ final class DrilledHoles {
     return out;
   }
 
-  private static etchloom.geometry.Point middle(Path path) {
+  private static boolean is(Plating said, Point at, Predicate<Point> otherwise) {
+    return said == Plating.PLATED || (said != Plating.NON_PLATED && otherwise.test(at));
+  }
+
+  private static Point middle(Path path) {
     List<Segment> pieces = path.segments();
     return pieces.get(pieces.size() / 2).at(pieces.size() % 2 == 0 ? 0 : 0.5);
   }

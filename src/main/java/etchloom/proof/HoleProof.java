@@ -36,6 +36,19 @@ final class HoleProof {
     new HoleProof(file, out).check(wanted(e), holes);
   }
 
+  /** Holds the holes of NC files against those of Gerber files, where no design is known. */
+  static void compare(List<Hole> gerber, List<Hole> nc, Findings out) {
+    List<Wanted> wanted = new ArrayList<>();
+    for (Hole h : gerber) {
+      if (h.slot().isEmpty()) {
+        String what = "hole of " + h.file();
+        wanted.add(new Wanted(h.at(), h.diameterMm(), h.plated(), "", what));
+      }
+    }
+    List<Hole> round = nc.stream().filter(h -> h.slot().isEmpty()).toList();
+    new HoleProof(plated -> nc.get(0).file(), out).check(wanted, round);
+  }
+
   private static List<Wanted> wanted(ProofExpectation e) {
     List<Wanted> out = new ArrayList<>();
     for (Pad p : e.pads()) {
@@ -108,7 +121,7 @@ final class HoleProof {
       String message = w.what() + ": the hole is " + is + ", it must be " + mm(w.diameterMm());
       out.add(ProofNames.HOLE_SIZE, h.file(), h.line(), 0, h.at(), message);
     }
-    if (!h.nets().isEmpty() && w.plated() && !h.nets().equals(List.of(w.net()))) {
+    if (!h.nets().isEmpty() && !w.net().isEmpty() && !h.nets().equals(List.of(w.net()))) {
       String message =
           w.what() + " carries net " + String.join(", ", h.nets()) + ", not " + w.net();
       out.add(ProofNames.NET_NAME, h.file(), h.line(), 0, h.at(), message);

@@ -16,6 +16,7 @@ import java.util.Map;
 import java.util.Optional;
 import java.util.OptionalDouble;
 import java.util.OptionalInt;
+import java.util.Set;
 import java.util.SortedMap;
 import java.util.TreeMap;
 import java.util.TreeSet;
@@ -30,9 +31,11 @@ public final class Prover {
   private final ProofExpectation expected;
   private final Findings out = new Findings();
   private final SetFiles set;
+  private final Set<String> names;
 
   private Prover(SortedMap<String, byte[]> files, ProofExpectation expected) {
     this.expected = expected;
+    this.names = files.keySet();
     this.set = new SetFiles(files, Map.of(), out);
   }
 
@@ -57,6 +60,9 @@ public final class Prover {
       }
     }
     List<Hole> holes = holes();
+    new SheetProof(set, out).check(expected);
+    set.job().ifPresent(j -> new JobProof(j, set, out).check(names, expected.layers()));
+    set.netlist().ifPresent(n -> new NetlistProof(n, out).check(expected));
     boolean all = true;
     for (int l = 1; l <= expected.layers(); l++) {
       all &= set.copper().containsKey(l);

@@ -151,6 +151,13 @@ final class SetFiles {
     return ncDrills;
   }
 
+  /** All Gerber files that say what they are, drill files left out. */
+  List<LayerImage> images() {
+    List<LayerImage> all = new ArrayList<>(copper.values());
+    all.addAll(byFunction.values());
+    return all;
+  }
+
   /** Gerber files that do not say what they are. */
   List<LayerImage> unnamed() {
     return unnamed;

@@ -146,6 +146,18 @@ public final class Connectivity {
     return island < 0 ? -1 : piece(layer, island);
   }
 
+  /** The piece at a point of a layer or at most a little beside it, or -1. */
+  public int pieceNear(int layer, Point p, double withinMm) {
+    Figure f = layers.get(layer - 1);
+    int[] some = f.islandsWithin(Place.nm(p.x()), Place.nm(p.y()), withinMm * RingPen.NM);
+    return some.length == 0 ? -1 : piece(layer, some[0]);
+  }
+
+  /** The piece of a plated hole by its number in {@link #plated}. */
+  public int pieceOfHole(int hole) {
+    return find(offset[layers.size()] + hole);
+  }
+
   public int islandAt(int layer, Point p) {
     return layers.get(layer - 1).islandAt(Place.nm(p.x()), Place.nm(p.y()));
   }
