@@ -1,6 +1,5 @@
 package etchloom.proof.read;
 
-import etchloom.geometry.Arc;
 import etchloom.geometry.Line;
 import etchloom.geometry.Path;
 import etchloom.geometry.Point;
@@ -156,7 +155,7 @@ final class DxfEntities {
     Point end = c.plus(Point.polar(r, Math.toRadians(d.endAngle % 360)));
     boolean full = sweep > 360 - 1e-9 || start.equals(end);
     Path path =
-        full ? new Path(Arcs.fullTurn(start, c, true)) : Path.of(new Arc(start, end, c, true));
+        full ? new Path(Arcs.fullTurn(start, c, true)) : Path.of(Arcs.between(start, end, c, true));
     put(new Polyline(layer(d), path, 0, full, d.line), 3);
   }
 

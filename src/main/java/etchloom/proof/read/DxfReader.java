@@ -2,8 +2,10 @@ package etchloom.proof.read;
 
 import etchloom.proof.image.DxfFile;
 import java.util.ArrayList;
+import java.util.HashSet;
 import java.util.List;
 import java.util.Map;
+import java.util.Set;
 
 /**
  * Reads DXF files of text form, R12 and later: LINE, ARC, CIRCLE, TEXT and both kinds of polyline
@@ -74,8 +76,9 @@ public final class DxfReader {
       throw reading.fail(0, "dxf", "the file has no ENTITIES section");
     }
     entities.finish(pairs.line);
+    Set<String> declared = new HashSet<>(layers);
     for (String layer : entities.layersUsed()) {
-      if (!layers.contains(layer) && !layer.equals("0")) {
+      if (!declared.contains(layer) && !layer.equals("0")) {
         reading.warn(0, "dxf-layer", "layer " + layer + " is used but not in the layer table");
       }
     }
