@@ -103,25 +103,28 @@ final class Nesting {
       throws UnreadableFile {
     Node n = nodes.get(index);
     Point p = n.path.segments().get(0).at(0.5);
+    int around = 0;
     int winding = 0;
     int nearest = -1;
     for (Object found : tree.query(new Envelope(new Coordinate(p.x(), p.y())))) {
       int k = (Integer) found;
       // Only a contour of more area can lie around; they come first.
       if (k < index && inside(nodes.get(k).path, p)) {
+        around++;
         winding += nodes.get(k).area > 0 ? 1 : -1;
         nearest = Math.max(nearest, k);
-        winding += evenOdd && nodes.get(k).area < 0 ? 2 : 0;
       }
     }
-    int own = n.area > 0 || evenOdd ? 1 : -1;
-    n.outside = evenOdd ? winding % 2 != 0 : winding != 0;
-    n.inside = evenOdd ? !n.outside : winding + own != 0;
+    n.outside = evenOdd ? around % 2 != 0 : winding != 0;
+    n.inside = evenOdd ? !n.outside : winding + (n.area > 0 ? 1 : -1) != 0;
     n.around = nearest < 0 ? null : nodes.get(nearest);
     if (n.outside && !n.inside) {
       Node ring = n.around;
-      while (!ring.outer()) {
+      while (ring != null && !ring.outer()) {
         ring = ring.around;
+      }
+      if (ring == null) {
+        throw reading.fail(line, "crossing", "contours cross each other near " + Shown.point(p));
       }
       ring.holes.add(n);
     }

@@ -83,19 +83,13 @@ public final class SvgReader {
       throw reading.fail(line, "too-large", "elements more than " + MAX_DEPTH + " deep");
     }
     reading.charge(1, line);
-    if (styles.isEmpty()) {
-      if (!kind.equals("svg")) {
-        throw reading.fail(line, "svg", "the root element is not svg but " + kind);
-      }
-      styles.push(SvgStyle.initial(SvgUnits.of(in, reading, line)));
+    if (styles.isEmpty() != kind.equals("svg")) {
+      throw reading.fail(line, "svg", "an svg element is wanted as the root, and only there");
     }
-    SvgStyle style = style(in, styles.peek(), kind, line);
+    SvgStyle around =
+        styles.isEmpty() ? SvgStyle.initial(SvgUnits.of(in, reading, line)) : styles.peek();
+    SvgStyle style = style(in, around, kind, line);
     styles.push(style);
-    if (styles.size() == 2 && kind.equals("svg")) {
-      // The root has been pushed twice, once as what is around it; the end pops one only.
-      styles.removeLast();
-      return;
-    }
     if (!style.hidden()) {
       draw(in, kind, style, line);
     }
@@ -126,7 +120,7 @@ public final class SvgReader {
   private void draw(XMLStreamReader in, String kind, SvgStyle style, int line)
       throws UnreadableFile {
     switch (kind) {
-      case "g", "a", "title", "desc", "metadata", "text", "tspan" -> {}
+      case "svg", "g", "a", "title", "desc", "metadata", "text", "tspan" -> {}
       case "path" -> canvas.path(attribute(in, "d"), style, line);
       case "circle" ->
           canvas.circle(
