@@ -18,6 +18,7 @@ final class RoleTable {
   private final SetFolder folder;
   private final Reading reading;
   private final Map<String, List<String>> files = new TreeMap<>();
+  private final Map<String, List<String>> functions = new HashMap<>();
   private final Set<String> taken = new HashSet<>();
 
   RoleTable(SetFolder folder, Reading reading) {
@@ -37,6 +38,11 @@ final class RoleTable {
   /** Whether an option has named the file. */
   boolean chosen(String file) {
     return taken.contains(file);
+  }
+
+  /** The file function of a drill or Gerber file, its own or that of the job file. */
+  List<String> function(String file) {
+    return functions.getOrDefault(file, List.of());
   }
 
   /** Obeys {@code L1=FILE}. */
@@ -87,10 +93,14 @@ final class RoleTable {
     for (Map.Entry<String, byte[]> e : folder.files().entrySet()) {
       String file = e.getKey();
       FileKind kind = FileKind.of(e.getValue());
-      if (taken.contains(file) || (kind != FileKind.GERBER && kind != FileKind.NC_DRILL)) {
+      if (kind != FileKind.GERBER && kind != FileKind.NC_DRILL) {
         continue;
       }
       List<String> function = function(file, e.getValue(), listed);
+      functions.put(file, function);
+      if (taken.contains(file)) {
+        continue;
+      }
       Optional<String> role =
           kind == FileKind.NC_DRILL ? Optional.of(Roles.DRILL) : Roles.of(function);
       if (function.isEmpty() && role.isEmpty()) {

@@ -1,13 +1,10 @@
 package etchloom.proof.read;
 
 import etchloom.proof.image.DrillFile;
-import etchloom.proof.image.DrillFile.DrilledHole;
-import etchloom.proof.image.DrillFile.Slot;
 import etchloom.proof.image.JobFile;
 import etchloom.proof.image.LayerImage;
 import etchloom.proof.image.LayerSet;
 import etchloom.proof.image.NetlistFile;
-import etchloom.proof.image.Plating;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
@@ -152,87 +149,18 @@ public final class SetReader {
   }
 
   private List<DrillFile> drills(int layers) throws UnreadableFile {
-    List<DrillFile> gerber = new ArrayList<>();
-    List<DrillFile> nc = new ArrayList<>();
-    List<DrillFile> chosen = new ArrayList<>();
+    SetDrills drills = new SetDrills(reading, layers);
     for (String role : List.of(Roles.DRILL, Roles.PLATED, Roles.NON_PLATED)) {
       for (String file : roles.of(role)) {
-        boolean isNc = FileKind.of(bytes(file)) == FileKind.NC_DRILL;
+        boolean nc = FileKind.of(bytes(file)) == FileKind.NC_DRILL;
         DrillFile read =
-            isNc
+            nc
                 ? DrillReader.read(new Reading(file, budget), bytes(file))
                 : GerberDrill.of(image(file));
-        DrillFile complete = complete(read, role, layers);
-        boolean asked = !role.equals(Roles.DRILL) || roles.chosen(file);
-        (asked ? chosen : isNc ? nc : gerber).add(complete);
+        drills.add(read, role, roles.function(file), nc, roles.chosen(file));
       }
     }
-    chosen.addAll(new DrillChoice(reading).of(gerber, nc));
-    return chosen.stream().map(f -> settled(f)).toList();
-  }
-
-  /** With the plating and the span that the user or the number of layers gives. */
-  private DrillFile complete(DrillFile f, String role, int layers) throws UnreadableFile {
-    int from = f.fromLayer() == 0 ? 1 : f.fromLayer();
-    int to = f.toLayer() == 0 ? layers : f.toLayer();
-    if (from > to || to > layers) {
-      throw new UnreadableFile(
-          f.fileName(),
-          0,
-          "drill-span",
-          "drills from layer " + from + " to " + to + ", but there are " + layers);
-    }
-    Plating plating =
-        role.equals(Roles.PLATED)
-            ? Plating.PLATED
-            : role.equals(Roles.NON_PLATED) ? Plating.NON_PLATED : f.plating();
-    boolean forced = !role.equals(Roles.DRILL);
-    return new DrillFile(
-        f.fileName(),
-        plating,
-        from,
-        to,
-        f.fileAttributes(),
-        f.holes().stream().map(h -> forced ? with(h, plating) : h).toList(),
-        f.slots().stream().map(s -> forced ? with(s, plating) : s).toList(),
-        f.warnings());
-  }
-
-  /** Every hole plated or not. */
-  private DrillFile settled(DrillFile f) {
-    boolean unsaid =
-        f.holes().stream().anyMatch(h -> h.plating() == Plating.UNKNOWN)
-            || f.slots().stream().anyMatch(s -> s.plating() == Plating.UNKNOWN);
-    if (!unsaid) {
-      return f;
-    }
-    reading.warn(
-        0,
-        "plating-unknown",
-        f.fileName()
-            + " does not say whether its holes are plated; taken as plated; --layer"
-            + " nonplated=FILE says otherwise");
-    return new DrillFile(
-        f.fileName(),
-        f.plating(),
-        f.fromLayer(),
-        f.toLayer(),
-        f.fileAttributes(),
-        f.holes().stream()
-            .map(h -> h.plating() == Plating.UNKNOWN ? with(h, Plating.PLATED) : h)
-            .toList(),
-        f.slots().stream()
-            .map(s -> s.plating() == Plating.UNKNOWN ? with(s, Plating.PLATED) : s)
-            .toList(),
-        f.warnings());
-  }
-
-  private static DrilledHole with(DrilledHole h, Plating p) {
-    return new DrilledHole(h.at(), h.diameterMm(), p, h.function(), h.nets(), h.tool(), h.line());
-  }
-
-  private static Slot with(Slot s, Plating p) {
-    return new Slot(s.path(), s.widthMm(), p, s.function(), s.nets(), s.tool(), s.line());
+    return drills.all();
   }
 
   private Optional<NetlistFile> netlist() throws UnreadableFile {
