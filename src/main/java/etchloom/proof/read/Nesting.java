@@ -17,7 +17,7 @@ import org.locationtech.jts.index.strtree.STRtree;
  */
 final class Nesting {
   /** Pieces of path a point may be held against, all contours together; a second's work. */
-  private static final long MAX_TESTS = 50_000_000;
+  private static final long MAX_TESTS = 20_000_000;
 
   private static final class Node {
     final Path path;

@@ -12,7 +12,7 @@ final class FuzzBombs {
 
   static List<Bomb> all() {
     List<Bomb> out = new ArrayList<>();
-    gerber(out, "repeat", "%ADD10C,1*%D10*%SRX1700Y1700I2J2*%X0Y0D03*%SR*%");
+    gerber(out, "repeat", "%ADD10C,1*%D10*%SRX1200Y1200I2J2*%X0Y0D03*%SR*%");
     gerber(
         out,
         "repeat of arcs",

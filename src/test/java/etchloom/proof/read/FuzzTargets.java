@@ -28,7 +28,7 @@ final class FuzzTargets {
         new ReaderFuzz.Target("dxf", FuzzTargets::dxf, texts(DXF, DXF_OLD), 3000),
         new ReaderFuzz.Target("svg", b -> SvgReader.read("f", b), texts(SVG, SVG_TREE), 3000),
         new ReaderFuzz.Target("set", FuzzTargets::set, drillSamples(), 500),
-        new ReaderFuzz.Target("zip", b -> zip(b, scratch), List.of(zipped()), 1000));
+        new ReaderFuzz.Target("zip", b -> zip(b, scratch), List.of(zipped()), 500));
   }
 
   private static Object gerber(byte[] bytes) throws UnreadableFile {

@@ -58,7 +58,7 @@ final class ReaderFuzz {
     byte[] all = joined(t.samples());
     for (int i = 0; i < t.inputs(); i++) {
       byte[] bytes = t.samples().get(i % t.samples().size());
-      for (int n = 1 + random.nextInt(4); n > 0; n--) {
+      for (int n = 1 + random.nextInt(2) * random.nextInt(4); n > 0; n--) {
         bytes = mutated(bytes, all, random);
       }
       one(t.name() + " " + i, t.reader(), bytes);
@@ -152,7 +152,7 @@ final class ReaderFuzz {
     int at = random.nextInt(b.length);
     int most = random.nextInt(4) == 0 ? b.length : 12;
     int end = Math.min(b.length, at + 1 + random.nextInt(most));
-    switch (random.nextInt(7)) {
+    switch (random.nextInt(10)) {
       case 0 -> {
         byte[] out = b.clone();
         out[at] ^= (byte) (1 << random.nextInt(8));
@@ -174,24 +174,30 @@ final class ReaderFuzz {
         return spliced(b, at, at, Arrays.copyOfRange(all, from, to));
       }
       case 5 -> {
-        byte[] out = b.clone();
-        out[at] = (byte) ('0' + random.nextInt(10));
-        return out;
+        int i = digit(b, at);
+        byte[] sign = {(byte) (random.nextBoolean() ? '-' : '.')};
+        return spliced(b, i, i, sign);
+      }
+      case 6 -> {
+        int i = digit(b, at);
+        return spliced(b, i, i, "9".repeat(1 + random.nextInt(8)).getBytes(StandardCharsets.UTF_8));
       }
       default -> {
-        return digitsGrown(b, at, random);
+        byte[] out = b.clone();
+        int i = digit(b, at);
+        out[Math.min(i, b.length - 1)] = (byte) ('0' + random.nextInt(10));
+        return out;
       }
     }
   }
 
-  /** The next number made longer or of the other sign. */
-  private static byte[] digitsGrown(byte[] b, int at, Random random) {
+  /** Where the next digit stands; the end when there is none. */
+  private static int digit(byte[] b, int at) {
     int i = at;
     while (i < b.length && (b[i] < '0' || b[i] > '9')) {
       i++;
     }
-    String put = random.nextBoolean() ? "-" : "9".repeat(1 + random.nextInt(8));
-    return spliced(b, i, i, put.getBytes(StandardCharsets.ISO_8859_1));
+    return i;
   }
 
   private static byte[] spliced(byte[] b, int from, int to, byte[] put) {
