@@ -1,5 +1,6 @@
 package etchloom.proof.read;
 
+import etchloom.proof.image.DrillFile;
 import etchloom.proof.image.LayerImage;
 import java.io.ByteArrayOutputStream;
 import java.io.IOException;
@@ -21,7 +22,7 @@ final class FuzzTargets {
   static List<ReaderFuzz.Target> all(Path scratch) throws IOException {
     return List.of(
         new ReaderFuzz.Target("gerber", FuzzTargets::gerber, gerberSamples(), 9000),
-        new ReaderFuzz.Target("drill", b -> DrillReader.read("f", b), drillSamples(), 4000),
+        new ReaderFuzz.Target("drill", FuzzTargets::drill, drillSamples(), 4000),
         new ReaderFuzz.Target("netlist", b -> NetlistReader.read("f", b), texts(NETLIST), 2000),
         new ReaderFuzz.Target(
             "job", b -> JobReader.read("f", b), List.of(Samples.file("round.gbrjob")), 2000),
@@ -34,6 +35,11 @@ final class FuzzTargets {
   private static Object gerber(byte[] bytes) throws UnreadableFile {
     LayerImage image = GerberReader.read("f", bytes);
     return image.objects().size() < 3000 ? image : image.objects().size();
+  }
+
+  private static Object drill(byte[] bytes) throws UnreadableFile {
+    DrillFile file = DrillReader.read("f", bytes);
+    return file.holes().size() < 3000 ? file : file.holes().size();
   }
 
   private static Object dxf(byte[] bytes) throws UnreadableFile {
