@@ -78,7 +78,7 @@ final class DrillNumbers {
   /**
    * A length in mm.
    *
-   * @param b the text of the number is {@code b[from .. to)}, not empty
+   * @param b the text of the number is {@code b[from .. to)}
    */
   double mm(byte[] b, int from, int to, int line) throws UnreadableFile {
     if (unitMm == 0) {
@@ -89,7 +89,7 @@ final class DrillNumbers {
       point |= b[i] == '.';
     }
     double v = Decimals.parse(b, from, to).orElse(Double.NaN);
-    if (!point) {
+    if (!point && !Double.isNaN(v)) {
       v = suppressed(v, b, from, to, line);
     }
     v *= unitMm;

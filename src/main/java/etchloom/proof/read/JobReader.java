@@ -9,6 +9,7 @@ import java.util.Collections;
 import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
+import java.util.Optional;
 import java.util.OptionalDouble;
 import java.util.OptionalInt;
 
@@ -108,9 +109,9 @@ public final class JobReader {
       if (path.isEmpty()) {
         throw reading.fail(n.line(), "job-value", "an entry of FilesAttributes has no Path");
       }
-      if (EntryName.fault(path) != null) {
-        throw reading.fail(
-            n.line(), "job-value", "the Path '" + path + "' " + EntryName.fault(path));
+      Optional<String> fault = EntryName.fault(path);
+      if (fault.isPresent()) {
+        throw reading.fail(n.line(), "job-value", "the Path '" + path + "' " + fault.get());
       }
       List<String> function = AttributeStore.fields(n.string("FileFunction"));
       boolean none = function.size() == 1 && function.get(0).isEmpty();

@@ -35,8 +35,12 @@ final class TestCopper {
   private TestCopper() {}
 
   static Geometry of(LayerImage image) {
+    return of(image.objects());
+  }
+
+  static Geometry of(List<DrawnObject> objects) {
     Geometry all = FACTORY.createPolygon();
-    for (DrawnObject o : image.objects()) {
+    for (DrawnObject o : objects) {
       Geometry g = shape(o);
       all = o.dark() ? all.union(g) : all.difference(g);
     }
