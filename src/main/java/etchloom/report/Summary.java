@@ -117,17 +117,7 @@ public final class Summary {
   }
 
   private void end(Optional<String> where) {
-    page.blank();
-    int broken = r.rules().findings().size();
-    String fab = r.fab().title();
-    if (r.rules().passed()) {
-      page.good("MAY BE MADE", "every rule checked is kept: " + fab);
-    } else {
-      page.bad(
-          "MAY NOT BE MADE",
-          broken + (broken == 1 ? " place breaks" : " places break") + " the rules: " + fab);
-    }
-    page.item("cautions", Cautions.line(r));
+    Verdicts.add(page, r);
     where.ifPresent(w -> page.item("files", (r.artwork().draft() ? "DRAFT, " : "") + w));
   }
 
