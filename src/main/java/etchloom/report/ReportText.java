@@ -24,7 +24,7 @@ public final class ReportText {
     page.heading(r.artwork().title() + ", revision " + r.artwork().revision());
     Figures.shown(figures).forEach((group, rows) -> group(page, group, rows));
     lacking(page, Absent.of(r, figures));
-    Verdicts.add(page, r);
+    Verdicts.add(page, r, figures);
     return page.text();
   }
 
