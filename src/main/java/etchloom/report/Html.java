@@ -1,9 +1,12 @@
 package etchloom.report;
 
 import java.util.List;
+import java.util.Set;
 
 /** HTML under construction. All text is escaped; only {@link #raw} takes markup. */
 final class Html {
+  private static final Set<String> INLINE = Set.of("a", "em", "strong", "span");
+
   private final StringBuilder out = new StringBuilder();
 
   /**
@@ -18,8 +21,9 @@ final class Html {
     return this;
   }
 
+  /** A line end follows, but not inside a line of text. */
   Html close(String tag) {
-    out.append("</").append(tag).append(">\n");
+    out.append("</").append(tag).append(INLINE.contains(tag) ? ">" : ">\n");
     return this;
   }
 
@@ -48,7 +52,7 @@ final class Html {
     for (List<String> row : rows) {
       open("tr").element("th", row.get(0), "scope=\"row\"");
       for (int c = 1; c < row.size(); c++) {
-        element("td", row.get(c), cell(c, numbers));
+        element("td", Words.symbols(row.get(c)), cell(c, numbers));
       }
       close("tr");
     }

@@ -156,7 +156,7 @@ final class HtmlFigures {
     h.element("th", "Basis", "scope=\"col\"").close("tr").close("thead").open("tbody");
     for (Shown s : rows) {
       h.open("tr").element("th", Words.capital(s.label()), "scope=\"row\"");
-      h.element("td", s.value(), "class=\"n\"").open("td");
+      h.element("td", Words.symbols(s.value()), "class=\"n\"").open("td");
       h.element("a", s.basis().title(), "href=\"#b-" + s.basis().ordinal() + "\"");
       h.close("td").close("tr");
     }

@@ -51,11 +51,11 @@ public final class HtmlReport {
   private void page(Optional<String> picture) {
     String title = r.artwork().title() + ", revision " + r.artwork().revision();
     h.raw("<!DOCTYPE html>\n").open("html", "lang=\"en\"").open("head");
-    h.raw("<meta charset=\"utf-8\">\n");
-    h.raw("<meta name=\"viewport\" content=\"width=device-width, initial-scale=1\">\n");
+    h.raw("<meta charset=\"utf-8\"/>\n");
+    h.raw("<meta name=\"viewport\" content=\"width=device-width, initial-scale=1\"/>\n");
     h.raw(
         "<meta http-equiv=\"Content-Security-Policy\" content=\"default-src 'none'; style-src"
-            + " 'unsafe-inline'\">\n");
+            + " 'unsafe-inline'\"/>\n");
     h.element("title", title).open("style").raw(style()).close("style").close("head");
     h.open("body");
     h.element("a", "Skip to the verdict", "class=\"skip\"", "href=\"#s1\"");

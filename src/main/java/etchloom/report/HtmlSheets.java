@@ -38,7 +38,7 @@ final class HtmlSheets {
     h.element("caption", "Resistance between terminals, worst case of the fab's tolerance");
     h.open("thead").open("tr");
     for (int i = 0; i < head.size(); i++) {
-      h.element("th", head.get(i), "scope=\"col\"", i > 0 && i < 4 ? "class=\"n\"" : "");
+      h.element("th", head.get(i), "scope=\"col\"", i > 0 && i < 4 ? "class=\"n\"" : "class=\"t\"");
     }
     h.close("tr").close("thead").open("tbody");
     ResistanceFigures.lineToLine(r.resistance().terminals()).forEach(this::pair);
@@ -54,8 +54,9 @@ final class HtmlSheets {
     String least = r.resistance().worst().map(w -> OrderLines.ohm(w.minTerminalOhm())).orElse("-");
     String most = r.resistance().worst().map(w -> OrderLines.ohm(w.maxTerminalOhm())).orElse("-");
     h.open("tr").element("th", t.key(), "scope=\"row\"");
-    h.element("td", OrderLines.ohm(t.ohm()), "class=\"n\"");
-    h.element("td", least, "class=\"n\"").element("td", most, "class=\"n\"");
+    h.element("td", Words.symbols(OrderLines.ohm(t.ohm())), "class=\"n\"");
+    h.element("td", Words.symbols(least), "class=\"n\"")
+        .element("td", Words.symbols(most), "class=\"n\"");
     for (int i = 0; i < 3; i++) {
       h.open("td", "class=\"fill\"").close("td");
     }

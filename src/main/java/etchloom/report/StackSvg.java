@@ -57,6 +57,6 @@ final class StackSvg {
 
   private static void label(StringBuilder b, int y, String text) {
     b.append("<text x=\"").append(MARGIN + BOARD + 16).append("\" y=\"").append(y);
-    b.append("\" fill=\"#1b201e\">").append(Html.escaped(text)).append("</text>\n");
+    b.append("\" fill=\"#1b201e\">").append(Html.escaped(Words.symbols(text))).append("</text>\n");
   }
 }

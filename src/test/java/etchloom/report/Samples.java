@@ -1,5 +1,6 @@
 package etchloom.report;
 
+import etchloom.artwork.Artwork;
 import etchloom.board.Assembler;
 import etchloom.board.Assembly;
 import etchloom.electric.resistance.Resistance;
@@ -51,6 +52,30 @@ final class Samples {
   static Results with(Results r, RuleReport rules) {
     return Results.of(
         r.toolVersion(), r.spec(), r.fab(), r.artwork(), r.winding(), rules, r.resistance());
+  }
+
+  static Results titled(Results r, String title) {
+    Artwork a = r.artwork();
+    Artwork named =
+        new Artwork(
+            title,
+            a.slug(),
+            a.revision(),
+            a.draft(),
+            a.stackup(),
+            a.profile(),
+            a.joints(),
+            a.conductors(),
+            a.mountingHoles(),
+            a.maskTop(),
+            a.maskBottom(),
+            a.legend(),
+            a.coils(),
+            a.phases(),
+            a.turnsPerLayer(),
+            a.expectedCircuits());
+    return Results.of(
+        r.toolVersion(), r.spec(), r.fab(), named, r.winding(), r.rules(), r.resistance());
   }
 
   static Finding close() {
