@@ -9,14 +9,14 @@ import java.nio.file.Files;
 import java.nio.file.Path;
 import picocli.CommandLine;
 import picocli.CommandLine.Command;
-import picocli.CommandLine.Mixin;
 import picocli.CommandLine.Model.CommandSpec;
-import picocli.CommandLine.Option;
 import picocli.CommandLine.Spec;
 
 /** The program: its commands, and what becomes of what goes wrong in them. */
 @Command(
     name = "etchloom",
+    mixinStandardHelpOptions = true,
+    version = "etchloom " + Version.TEXT,
     description = {
       "Draws printed-circuit stators: reads one YAML spec, writes the copper, drill, mask, legend"
           + " and netlist files a board fab needs, checks them against the fab's rules, and reports"
@@ -56,18 +56,9 @@ public final class App implements Runnable {
     return code;
   }
 
-  @Mixin private HelpOption help;
-
-  @Option(names = "--version", description = "show the version")
-  private boolean version;
-
   @Override
   public void run() {
-    if (version) {
-      spec.commandLine().getOut().println("etchloom " + Version.TEXT);
-    } else {
-      spec.commandLine().usage(spec.commandLine().getOut());
-    }
+    spec.commandLine().usage(spec.commandLine().getOut());
   }
 
   private static int misused(CommandLine.ParameterException e, String[] args) {

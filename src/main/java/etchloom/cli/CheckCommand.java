@@ -12,6 +12,7 @@ import picocli.CommandLine.Parameters;
 /** {@code check SPEC}: the rule check alone, nothing written. */
 @Command(
     name = "check",
+    mixinStandardHelpOptions = true,
     description = "Checks a spec's board against the fab's rules; writes nothing.",
     sortOptions = false,
     synopsisHeading = "Usage: ")
@@ -22,7 +23,6 @@ final class CheckCommand implements Callable<Integer> {
   private String spec;
 
   @Mixin private CommonOptions options;
-  @Mixin private HelpOption help;
 
   CheckCommand(Console console) {
     this.console = console;
@@ -31,8 +31,8 @@ final class CheckCommand implements Callable<Integer> {
   @Override
   public Integer call() {
     InputFiles.Inputs in = InputFiles.read(spec, options.fab());
-    console.warn(in.warnings());
     Pipeline.Drawn drawn = Pipeline.run(in, false);
+    console.warn(drawn.warnings());
     FindingText.lines(drawn.rules()).forEach(console.err()::println);
     if (options.json()) {
       console.print(ReportJson.writeCheck(drawn.results()));

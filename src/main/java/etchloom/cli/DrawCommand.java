@@ -15,6 +15,7 @@ import picocli.CommandLine.Parameters;
 /** {@code draw SPEC}: the main job, from a spec to a layer set in its folder. */
 @Command(
     name = "draw",
+    mixinStandardHelpOptions = true,
     description = "Draws a spec's board, checks it against the fab's rules, and writes its files.",
     sortOptions = false,
     synopsisHeading = "Usage: ")
@@ -36,7 +37,6 @@ final class DrawCommand implements Callable<Integer> {
   private boolean force;
 
   @Mixin private CommonOptions options;
-  @Mixin private HelpOption help;
 
   DrawCommand(Console console) {
     this.console = console;
@@ -45,8 +45,8 @@ final class DrawCommand implements Callable<Integer> {
   @Override
   public Integer call() {
     InputFiles.Inputs in = InputFiles.read(spec, options.fab());
-    console.warn(in.warnings());
     Pipeline.Drawn drawn = Pipeline.run(in, false);
+    console.warn(drawn.warnings());
     FindingText.lines(drawn.rules()).forEach(console.err()::println);
     boolean passed = drawn.rules().passed();
     if (!passed && !force) {

@@ -18,13 +18,17 @@ final class InputsAsUsed {
     boolean ownClass =
         !InputFiles.isPath(in.fabName()) && in.fabName().equals(in.file().spec().fab());
     if (ownClass) {
-      return in.specBytes();
+      return in.specText().getBytes(StandardCharsets.UTF_8);
     }
     SourceSpan at = in.file().positions().at("fab");
-    String text = new String(in.specBytes(), StandardCharsets.UTF_8);
+    String text = in.specText();
     int start = text.offsetByCodePoints(lineStart(text, at.line()), at.column() - 1);
     int end = text.offsetByCodePoints(start, at.length());
     return (text.substring(0, start) + FAB + text.substring(end)).getBytes(StandardCharsets.UTF_8);
+  }
+
+  static byte[] fab(InputFiles.Inputs in) {
+    return in.fabText().getBytes(StandardCharsets.UTF_8);
   }
 
   /** Lines end as YAML has it: LF, CR LF or CR. */
@@ -33,7 +37,7 @@ final class InputsAsUsed {
     for (int left = line - 1; left > 0; at++) {
       char c = text.charAt(at);
       boolean first = c == '\r' && at + 1 < text.length() && text.charAt(at + 1) == '\n';
-      if (c == '\n' || c == '\r' && !first) {
+      if (c == '\n' || (c == '\r' && !first)) {
         left--;
       }
     }

@@ -2,6 +2,7 @@ package etchloom.cli;
 
 import etchloom.board.Assembler;
 import etchloom.board.Assembly;
+import etchloom.diagnostic.Diagnostic;
 import etchloom.diagnostic.Staged;
 import etchloom.electric.resistance.Resistance;
 import etchloom.electric.resistance.ResistanceFigures;
@@ -9,6 +10,8 @@ import etchloom.report.Results;
 import etchloom.rules.RuleCheck;
 import etchloom.rules.RuleContext;
 import etchloom.rules.RuleReport;
+import java.util.ArrayList;
+import java.util.List;
 
 /** The one way through: from checked inputs to the board, its rule check and its figures. */
 final class Pipeline {
@@ -16,7 +19,14 @@ final class Pipeline {
 
   /** What one run came to. */
   record Drawn(
-      InputFiles.Inputs inputs, Assembly assembly, RuleReport rules, ResistanceFigures resistance) {
+      InputFiles.Inputs inputs,
+      Assembly assembly,
+      RuleReport rules,
+      ResistanceFigures resistance,
+      List<Diagnostic> warnings) {
+    Drawn {
+      warnings = List.copyOf(warnings);
+    }
 
     Results results() {
       return Results.of(
@@ -41,6 +51,8 @@ final class Pipeline {
     ResistanceFigures resistance = Resistance.of(assembly.artwork(), in.fab().tolerance());
     RuleReport rules =
         RuleCheck.check(assembly.artwork(), in.file().spec(), in.fab(), RuleContext.NONE);
-    return new Drawn(in, assembly, rules, resistance);
+    List<Diagnostic> warnings = new ArrayList<>(in.warnings());
+    warnings.addAll(staged.diagnostics());
+    return new Drawn(in, assembly, rules, resistance, warnings);
   }
 }

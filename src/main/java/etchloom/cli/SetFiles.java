@@ -18,7 +18,7 @@ final class SetFiles {
     SortedMap<String, byte[]> files = LayerSet.write(art, OrderSheet.of(results, created));
     files.put("report.json", ReportJson.write(results));
     files.put("spec.yaml", InputsAsUsed.spec(drawn.inputs()));
-    files.put("fab.yaml", drawn.inputs().fabBytes());
+    files.put("fab.yaml", InputsAsUsed.fab(drawn.inputs()));
     return files;
   }
 }

@@ -24,6 +24,7 @@ public final class LayerSet {
     out.put(names.netlist(), IpcWriter.write(art));
     out.put(names.dxf(), DxfWriter.lines(art));
     out.put(names.outlines(), DxfWriter.outlines(art));
+    out.put(names.picture(), SvgWriter.write(art));
     out.put(names.notes(), NotesWriter.write(art, info));
     out.put(names.job(), JobWriter.whole(art, info));
     out.put(names.fabZip(), FabZip.write(art, info, out));

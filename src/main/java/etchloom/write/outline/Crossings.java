@@ -38,7 +38,7 @@ final class Crossings {
 
   private static List<Point> lineCircle(Edge l, Edge c) {
     Point u = l.end.minus(l.start);
-    double length = u.norm();
+    double length = Edge.apart(l.start, l.end);
     if (!(length > 0)) {
       return List.of();
     }

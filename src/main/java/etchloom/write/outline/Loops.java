@@ -7,46 +7,59 @@ import etchloom.geometry.Path;
 import etchloom.geometry.Point;
 import etchloom.geometry.Segment;
 import java.util.ArrayList;
+import java.util.Arrays;
 import java.util.HashMap;
-import java.util.HashSet;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
-import java.util.Set;
 
 /** Joins edges end to end into closed paths, in the order in which they came. */
 final class Loops {
   private record Cell(long x, long y) {}
 
-  /** Two edges between the same points by the same way are one. */
-  private record Same(int from, int to, long x, long y) {}
-
   private final Map<Cell, List<Integer>> cells = new HashMap<>();
   private final List<Point> corners = new ArrayList<>();
   private final List<List<Integer>> leaving = new ArrayList<>();
-  private final List<Integer> balance = new ArrayList<>();
   private final List<Edge> edges = new ArrayList<>();
   private final List<Integer> ends = new ArrayList<>();
-  private final Set<Same> known = new HashSet<>();
+  private Point lastEnd = new Point(Double.NaN, Double.NaN);
 
   void add(Edge e) {
-    int from = corner(e.start);
+    int from = e.start == lastEnd ? ends.get(ends.size() - 1) : corner(e.start);
     int to = corner(e.end);
-    Point m = e.middle();
-    Same same = new Same(from, to, Math.round(m.x() / 1e-4), Math.round(m.y() / 1e-4));
-    if (from == to || !known.add(same)) {
+    if (from == to || known(from, to, e)) {
       return;
     }
     leaving.get(from).add(edges.size());
-    balance.set(from, balance.get(from) + 1);
-    balance.set(to, balance.get(to) - 1);
     edges.add(e);
     ends.add(to);
+    lastEnd = e.end;
+  }
+
+  /** Two edges between the same corners by the same way are one. */
+  private boolean known(int from, int to, Edge e) {
+    for (int i : leaving.get(from)) {
+      if (ends.get(i) == to && Edge.same(edges.get(i).middle(), e.middle())) {
+        return true;
+      }
+    }
+    return false;
+  }
+
+  private boolean balanced() {
+    int[] balance = new int[corners.size()];
+    for (int i = 0; i < corners.size(); i++) {
+      balance[i] = leaving.get(i).size();
+    }
+    for (int to : ends) {
+      balance[to]--;
+    }
+    return Arrays.stream(balance).allMatch(b -> b == 0);
   }
 
   /** The closed paths; empty where edges are left over. */
   Optional<List<Path>> close() {
-    if (balance.stream().anyMatch(b -> b != 0)) {
+    if (!balanced()) {
       return Optional.empty();
     }
     boolean[] used = new boolean[edges.size()];
@@ -94,7 +107,7 @@ final class Loops {
     for (long x = cx - 1; x <= cx + 1; x++) {
       for (long y = cy - 1; y <= cy + 1; y++) {
         for (int i : cells.getOrDefault(new Cell(x, y), List.of())) {
-          if (corners.get(i).distanceTo(p) <= Edge.SAME_MM) {
+          if (Edge.same(corners.get(i), p)) {
             return i;
           }
         }
@@ -103,7 +116,6 @@ final class Loops {
     cells.computeIfAbsent(new Cell(cx, cy), k -> new ArrayList<>(1)).add(corners.size());
     corners.add(Grid.snap(p));
     leaving.add(new ArrayList<>(1));
-    balance.add(0);
     return corners.size() - 1;
   }
 }

@@ -38,7 +38,7 @@ public final class Outline {
     }
     for (int i = 0; i < shapes.count(); i++) {
       for (int j : shapes.touching(i)) {
-        if (i < j) {
+        if (i < j && shapes.mayCross(i, j)) {
           cut(of.get(i), of.get(j));
         }
       }
@@ -83,10 +83,13 @@ public final class Outline {
   }
 
   private static boolean covered(Shapes shapes, Edge part) {
-    Point middle = part.middle();
+    Point middle = null;
     for (int j : shapes.touching(part.shape)) {
-      if (shapes.covers(j, middle, DEEP_MM)) {
-        return true;
+      if (shapes.mayCross(part.shape, j)) {
+        middle = middle == null ? part.middle() : middle;
+        if (shapes.covers(j, middle, DEEP_MM)) {
+          return true;
+        }
       }
     }
     return false;

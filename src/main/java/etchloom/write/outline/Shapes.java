@@ -11,6 +11,7 @@ import etchloom.geometry.Point;
 import etchloom.geometry.Segment;
 import etchloom.geometry.ShapeTree;
 import java.util.ArrayList;
+import java.util.BitSet;
 import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
@@ -23,6 +24,9 @@ final class Shapes {
   private final List<Segment> centres = new ArrayList<>();
   private final List<Double> halves = new ArrayList<>();
   private final List<Edge> edges = new ArrayList<>();
+
+  /** Shapes whose sides are joined to those of the shape before. */
+  private final BitSet joined = new BitSet();
 
   /** For each shape, the numbers of those that touch it. */
   private final List<List<Integer>> touching = new ArrayList<>();
@@ -55,6 +59,11 @@ final class Shapes {
 
   List<Integer> touching(int shape) {
     return touching.get(shape);
+  }
+
+  /** Whether the sides of two shapes may cross: not where one cleanly follows the other. */
+  boolean mayCross(int i, int j) {
+    return Math.abs(i - j) != 1 || !joined.get(Math.max(i, j));
   }
 
   int count() {
@@ -107,6 +116,11 @@ final class Shapes {
     Sides sides = new Sides(half, edges);
     sides.add(path, forward);
     sides.add(reversed, back);
+    if (sides.clean()) {
+      for (int i = 1; i < n; i++) {
+        joined.set(forward[i]);
+      }
+    }
   }
 
   /** The search tree takes arcs of a quarter turn at most. */

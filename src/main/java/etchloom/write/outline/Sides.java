@@ -6,17 +6,26 @@ import etchloom.geometry.Point;
 import etchloom.geometry.Segment;
 import java.util.List;
 
-/** The right side of a track: its centre line shifted by half a width, without the ends. */
+/**
+ * The right side of a track: its centre line shifted by half a width, without the ends. Pieces that
+ * follow each other are joined: smoothly, round the outside of a corner, or cut back inside one.
+ */
 final class Sides {
   /** Shifted ends this near are one corner of a smooth track, mm; rounding sets them apart. */
   private static final double SMOOTH_MM = 3e-5;
 
   private final double half;
   private final List<Edge> out;
+  private boolean clean = true;
 
   Sides(double half, List<Edge> out) {
     this.half = half;
     this.out = out;
+  }
+
+  /** Whether all joints could be made so far; if not, sides of neighbours may cross. */
+  boolean clean() {
+    return clean;
   }
 
   /**
@@ -26,6 +35,7 @@ final class Sides {
     Edge before = null;
     for (int i = 0; i < path.size(); i++) {
       Edge e = shifted(path.get(i), shapes[i]);
+      clean &= e != null;
       if (before != null && e != null) {
         join(before, e, path.get(i).start());
       }
@@ -43,7 +53,7 @@ final class Sides {
 
   private Edge shifted(Line l, int shape) {
     Point u = l.end().minus(l.start());
-    Point right = new Point(u.y(), -u.x()).times(half / u.norm());
+    Point right = new Point(u.y(), -u.x()).times(half / Edge.apart(l.start(), l.end()));
     return Edge.line(shape, l.start().plus(right), l.end().plus(right));
   }
 
@@ -51,19 +61,21 @@ final class Sides {
     double k = a.counterClockwise() ? half : -half;
     Point from = a.start().minus(a.centre());
     Point to = a.end().minus(a.centre());
-    if (from.norm() + k <= Edge.SAME_MM) {
+    double r0 = Edge.apart(a.start(), a.centre());
+    double r1 = Edge.apart(a.end(), a.centre());
+    if (r0 + k <= Edge.SAME_MM) {
       return null;
     }
     return Edge.arc(
         shape,
-        a.start().plus(from.times(k / from.norm())),
-        a.end().plus(to.times(k / to.norm())),
+        a.start().plus(from.times(k / r0)),
+        a.end().plus(to.times(k / r1)),
         a.centre(),
         a.counterClockwise());
   }
 
   private void join(Edge a, Edge b, Point corner) {
-    if (a.end.distanceTo(b.start) <= SMOOTH_MM) {
+    if (Edge.apart(a.end, b.start) <= SMOOTH_MM) {
       Point middle = a.end.plus(b.start).times(0.5);
       a.end = middle;
       b.start = middle;
@@ -77,13 +89,15 @@ final class Sides {
     // Inside a corner the sides run into each other: both end where they cross.
     Point best = null;
     for (Point p : Crossings.of(a, b)) {
-      if (best == null || p.distanceTo(corner) < best.distanceTo(corner)) {
+      if (best == null || Edge.apart(p, corner) < Edge.apart(best, corner)) {
         best = p;
       }
     }
-    if (best != null) {
-      a.end = best;
-      b.start = best;
+    if (best == null) {
+      clean = false;
+      return;
     }
+    a.end = best;
+    b.start = best;
   }
 }
