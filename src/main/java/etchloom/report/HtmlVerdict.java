@@ -1,5 +1,6 @@
 package etchloom.report;
 
+import etchloom.proof.ProofReport;
 import etchloom.rules.Finding;
 import java.util.ArrayList;
 import java.util.List;
@@ -15,6 +16,7 @@ final class HtmlVerdict {
     broken(h, r);
     Verdicts.ripple(r, figures).ifPresent(w -> box(h, "no", w.get(0), w.get(1)));
     duty(h, r);
+    r.proof().ifPresent(p -> proof(h, p));
     h.open("p", "class=\"quiet\"");
     h.text("Gaps are measured on the drawing as it stands, turn against turn; ");
     h.text("a winding is one net, so no test by nets would see a short between turns.").close("p");
@@ -41,6 +43,24 @@ final class HtmlVerdict {
               f.what()));
     }
     h.table("Broken rules", List.of("Rule", "Measured", "Must be", "Place", "What"), rows, 2);
+  }
+
+  private static void proof(Html h, ProofReport p) {
+    box(
+        h,
+        p.passed() ? "yes" : "no",
+        p.passed() ? "FILES PROVEN" : "FILES NOT PROVEN",
+        Verdicts.proof(p)
+            + ". The written files were read back and their copper rebuilt and held against the"
+            + " design, so that a short between turns shows");
+    List<List<String>> rows = new ArrayList<>();
+    p.islands()
+        .forEach(
+            (layer, n) ->
+                rows.add(List.of("L" + layer, "" + n, "" + p.loops().getOrDefault(layer, 0))));
+    h.table(
+        "Copper as read back", List.of("Layer", "Islands", "Gaps closed in by copper"), rows, 2);
+    p.notes().forEach(n -> h.element("p", n));
   }
 
   private static void duty(Html h, Results r) {

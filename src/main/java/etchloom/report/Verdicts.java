@@ -1,5 +1,6 @@
 package etchloom.report;
 
+import etchloom.proof.ProofReport;
 import etchloom.spec.Spec;
 import etchloom.units.Numbers;
 import java.util.List;
@@ -15,6 +16,7 @@ final class Verdicts {
     page.blank();
     made(page, r);
     ripple(r, figures).ifPresent(w -> page.bad(w.get(0), w.get(1)));
+    r.proof().ifPresent(p -> page.item(p.passed() ? "proof" : "NOT PROVEN", proof(p)));
     page.item("cautions", Cautions.line(r));
   }
 
@@ -51,6 +53,20 @@ final class Verdicts {
     } else {
       page.bad(words.get(0), words.get(1));
     }
+  }
+
+  /** The proof in one line. */
+  static String proof(ProofReport p) {
+    String expected =
+        p.circuitsExpected().isPresent() ? " of " + p.circuitsExpected().getAsInt() : "";
+    return Words.count(p.nets(), "net")
+        + ", "
+        + Words.count(p.opens(), "open")
+        + ", "
+        + Words.count(p.shorts(), "short")
+        + ", closed circuits "
+        + p.circuits()
+        + expected;
   }
 
   /** The verdict in capitals, then what it rests on. */

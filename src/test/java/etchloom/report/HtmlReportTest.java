@@ -56,6 +56,7 @@ class HtmlReportTest {
     return Stream.of(
         SMALL,
         Samples.with(SMALL, Samples.broken()),
+        SMALL.withProof(Samples.proof()),
         Samples.titled(SMALL, "<script>alert(1)</script> & \"more\" '\u0007'"));
   }
 

@@ -20,6 +20,7 @@ class SummaryTest {
     return Stream.of(
         SMALL,
         Samples.with(SMALL, Samples.broken()),
+        SMALL.withProof(Samples.proof()),
         Samples.titled(SMALL, longTitle),
         Samples.bare(Specs.wheel(4).connected(Spec.Connection.DELTA)),
         Samples.bare(Specs.wheel(2).connected(Spec.Connection.OPEN)));
