@@ -38,8 +38,8 @@ public final class OrderLines {
       out.add(
           new Line(
               "copper L" + (i + 1),
-              Numbers.trimmed(1000 * c.thicknessMm(), 1)
-                  + " um finished, ordered as "
+              um(c.thicknessMm())
+                  + " finished, ordered as "
                   + Numbers.trimmed(c.ounces(), 2)
                   + " oz"));
       if (i < art.layers() - 1) {
@@ -57,8 +57,8 @@ public final class OrderLines {
         new Line(
             "holes",
             "diameters are finished; plating at least "
-                + Numbers.trimmed(1000 * art.stackup().platingMm(), 1)
-                + " um on the wall"));
+                + um(art.stackup().platingMm())
+                + " on the wall"));
     out.add(new Line("finish", board.finish()));
     out.add(new Line("solder mask", board.mask() + ", both sides, vias tented"));
     out.add(new Line("legend", "top side only"));
@@ -106,7 +106,11 @@ public final class OrderLines {
     return Numbers.engineering(v, "ohm", 4);
   }
 
-  private static String mm(double v) {
+  static String um(double mm) {
+    return Numbers.trimmed(1000 * mm, 1) + " um";
+  }
+
+  static String mm(double v) {
     return Numbers.trimmed(v, 3) + " mm";
   }
 }

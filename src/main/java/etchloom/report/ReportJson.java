@@ -46,6 +46,12 @@ public final class ReportJson {
   }
 
   private static JsonTree tree(Results r) {
+    JsonTree out = body(r);
+    r.proof().ifPresent(p -> out.put("proof", ProofTree.of(p)));
+    return out;
+  }
+
+  private static JsonTree body(Results r) {
     return head(r)
         .put("verdict", new JsonTree().put("made", r.rules().passed()))
         .put("winding", WindingTree.of(r))

@@ -2,10 +2,12 @@ package etchloom.report;
 
 import etchloom.artwork.Artwork;
 import etchloom.electric.resistance.ResistanceFigures;
+import etchloom.proof.ProofReport;
 import etchloom.rules.RuleReport;
 import etchloom.spec.FabRules;
 import etchloom.spec.Spec;
 import etchloom.winding.Winding;
+import java.util.Optional;
 
 /**
  * All that a report is made of. What is not known is empty, and the report says so; nothing is ever
@@ -14,6 +16,7 @@ import etchloom.winding.Winding;
  * @param toolVersion as in {@code 0.1.0}
  * @param fab the rules the board was held against
  * @param artwork before rounding to the grid
+ * @param proof what the written files were found to say; empty where none were written
  */
 public record Results(
     String toolVersion,
@@ -22,7 +25,8 @@ public record Results(
     Artwork artwork,
     Winding winding,
     RuleReport rules,
-    ResistanceFigures resistance) {
+    ResistanceFigures resistance,
+    Optional<ProofReport> proof) {
 
   /** What every run has. */
   public static Results of(
@@ -33,7 +37,14 @@ public record Results(
       Winding winding,
       RuleReport rules,
       ResistanceFigures resistance) {
-    return new Results(toolVersion, spec, fab, artwork, winding, rules, resistance);
+    return new Results(
+        toolVersion, spec, fab, artwork, winding, rules, resistance, Optional.empty());
+  }
+
+  /** The same with what reading the written files back has shown. */
+  public Results withProof(ProofReport report) {
+    return new Results(
+        toolVersion, spec, fab, artwork, winding, rules, resistance, Optional.of(report));
   }
 
   /** Plated holes less terminals. */

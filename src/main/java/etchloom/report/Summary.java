@@ -49,28 +49,24 @@ public final class Summary {
             + mm(b.thicknessMm()));
     page.item(
         "winding",
-        count(r.winding().phases(), "phase")
+        Words.count(r.winding().phases(), "phase")
             + ", "
             + WindingTree.word(spec.winding().connection())
             + ", "
-            + count(r.winding().coils(), "coil")
+            + Words.count(r.winding().coils(), "coil")
             + ", "
             + r.winding().poles()
             + " poles, winding factor "
             + Numbers.fixed(r.winding().windingFactor(), 4));
     page.item(
         "coil",
-        count(r.artwork().turnsPerLayer(), "turn")
+        Words.count(r.artwork().turnsPerLayer(), "turn")
             + " a layer, track "
             + mm(spec.coil().trackMm())
             + ", space "
             + mm(spec.coil().spaceMm())
             + ", "
-            + count((int) r.vias(), "via"));
-  }
-
-  private static String count(int n, String word) {
-    return n + " " + word + (n == 1 ? "" : "s");
+            + Words.count(r.vias(), "via"));
   }
 
   private void rules() {
@@ -117,17 +113,7 @@ public final class Summary {
   }
 
   private void end(Optional<String> where) {
-    page.blank();
-    int broken = r.rules().findings().size();
-    String fab = r.fab().title();
-    if (r.rules().passed()) {
-      page.good("MAY BE MADE", "every rule checked is kept: " + fab);
-    } else {
-      page.bad(
-          "MAY NOT BE MADE",
-          broken + (broken == 1 ? " place breaks" : " places break") + " the rules: " + fab);
-    }
-    page.item("cautions", Cautions.line(r));
+    Verdicts.add(page, r, ReportJson.figures(r));
     where.ifPresent(w -> page.item("files", (r.artwork().draft() ? "DRAFT, " : "") + w));
   }
 

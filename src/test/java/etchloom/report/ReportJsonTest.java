@@ -202,4 +202,26 @@ class ReportJsonTest {
     assertTrue(open.containsKey("resistance.terminalOhm.U1-U2"), open.toString());
     assertFalse(open.containsKey("resistance.terminalOhm.U1-V1"));
   }
+
+  @Test
+  void proof_onlyWhereFilesWereReadBack() throws IOException {
+    assertFalse(read(ReportJson.write(SMALL)).containsKey("proof"));
+    Results proven = SMALL.withProof(Samples.proof());
+    Map<String, Object> flat = ReportJson.figures(proven);
+    assertEquals(7L, flat.get("proof.islands.L1"));
+    assertEquals(1L, flat.get("proof.loops.L2"));
+    assertEquals(0L, flat.get("proof.shorts"));
+    assertEquals(2.5e-7, flat.get("proof.gerberDxfAreaDifferenceMm2"));
+    assertEquals(
+        Set.of(
+            "islands",
+            "loops",
+            "circuits",
+            "circuitsExpected",
+            "nets",
+            "opens",
+            "shorts",
+            "gerberDxfAreaDifferenceMm2"),
+        ((Map<?, ?>) read(ReportJson.write(proven)).get("proof")).keySet());
+  }
 }

@@ -1,9 +1,11 @@
 package etchloom.report;
 
+import etchloom.artwork.Artwork;
 import etchloom.board.Assembler;
 import etchloom.board.Assembly;
 import etchloom.electric.resistance.Resistance;
 import etchloom.geometry.Point;
+import etchloom.proof.ProofReport;
 import etchloom.rules.Finding;
 import etchloom.rules.RuleCheck;
 import etchloom.rules.RuleContext;
@@ -16,6 +18,9 @@ import etchloom.spec.Templates;
 import etchloom.testing.Specs;
 import java.util.List;
 import java.util.Map;
+import java.util.OptionalDouble;
+import java.util.OptionalInt;
+import java.util.TreeMap;
 
 /** Results of whole boards, drawn and checked. */
 final class Samples {
@@ -53,6 +58,30 @@ final class Samples {
         r.toolVersion(), r.spec(), r.fab(), r.artwork(), r.winding(), rules, r.resistance());
   }
 
+  static Results titled(Results r, String title) {
+    Artwork a = r.artwork();
+    Artwork named =
+        new Artwork(
+            title,
+            a.slug(),
+            a.revision(),
+            a.draft(),
+            a.stackup(),
+            a.profile(),
+            a.joints(),
+            a.conductors(),
+            a.mountingHoles(),
+            a.maskTop(),
+            a.maskBottom(),
+            a.legend(),
+            a.coils(),
+            a.phases(),
+            a.turnsPerLayer(),
+            a.expectedCircuits());
+    return Results.of(
+        r.toolVersion(), r.spec(), r.fab(), named, r.winding(), r.rules(), r.resistance());
+  }
+
   static Finding close() {
     return new Finding(
         "space",
@@ -71,5 +100,19 @@ final class Samples {
   static RuleReport broken() {
     return new RuleReport(
         List.of(close(), deep()), List.of(close(), deep()), List.of("space: 51 places"));
+  }
+
+  static ProofReport proof() {
+    return new ProofReport(
+        new TreeMap<>(Map.of(1, 7, 2, 6)),
+        new TreeMap<>(Map.of(1, 0, 2, 1)),
+        0,
+        OptionalInt.of(0),
+        1,
+        0,
+        0,
+        OptionalDouble.of(2.5e-7),
+        List.of(),
+        List.of());
   }
 }

@@ -4,7 +4,6 @@ import static org.junit.jupiter.api.Assertions.assertEquals;
 import static org.junit.jupiter.api.Assertions.assertFalse;
 import static org.junit.jupiter.api.Assertions.assertTrue;
 
-import etchloom.artwork.Artwork;
 import etchloom.spec.Spec;
 import etchloom.testing.Specs;
 import java.util.Optional;
@@ -21,33 +20,10 @@ class SummaryTest {
     return Stream.of(
         SMALL,
         Samples.with(SMALL, Samples.broken()),
-        titled(SMALL, longTitle),
+        SMALL.withProof(Samples.proof()),
+        Samples.titled(SMALL, longTitle),
         Samples.bare(Specs.wheel(4).connected(Spec.Connection.DELTA)),
         Samples.bare(Specs.wheel(2).connected(Spec.Connection.OPEN)));
-  }
-
-  private static Results titled(Results r, String title) {
-    Artwork a = r.artwork();
-    Artwork named =
-        new Artwork(
-            title,
-            a.slug(),
-            a.revision(),
-            true,
-            a.stackup(),
-            a.profile(),
-            a.joints(),
-            a.conductors(),
-            a.mountingHoles(),
-            a.maskTop(),
-            a.maskBottom(),
-            a.legend(),
-            a.coils(),
-            a.phases(),
-            a.turnsPerLayer(),
-            a.expectedCircuits());
-    return Results.of(
-        r.toolVersion(), r.spec(), r.fab(), named, r.winding(), r.rules(), r.resistance());
   }
 
   @ParameterizedTest
