@@ -85,8 +85,10 @@ public final class QuantityText {
     if (dimension.bareAllowed()) {
       return Unit.exact("", "1");
     }
+    if (dimension == Dimension.COPPER) { // an ounce is no millimetre
+      return wanted;
+    }
     return dimension.units().stream()
-        .filter(u -> dimension != Dimension.COPPER) // an ounce is no millimetre
         .filter(u -> u.scale() == 1 && u.factor().compareTo(BigDecimal.ONE) == 0)
         .findFirst()
         .orElse(wanted);
