@@ -16,11 +16,18 @@ import org.junit.jupiter.api.Test;
 class EdgeRuleTest {
   private static final double TINY = 1e-9;
 
+  /** The finding about the track; its end pads are found too. */
+  private static Finding track(Boards b) {
+    RuleReport r = b.check();
+    assertTrue(r.findings().stream().allMatch(f -> f.rule().equals("edge")));
+    return r.findings().stream().filter(f -> f.what().contains("turn 1")).findFirst().orElseThrow();
+  }
+
   @Test
   void ringTooNearTheEdge() {
     Boards b = new Boards();
     b.track(2, Path.of(Arc.of(Point.ORIGIN, 41.65, 0.2, 1)), 4);
-    Finding f = Boards.only(b.check(), "edge");
+    Finding f = track(b);
     // 42 - 41.65 - 0.1.
     assertEquals(0.25, f.measured(), TINY);
     assertEquals(0.3, f.required(), TINY);
@@ -34,11 +41,7 @@ class EdgeRuleTest {
   void copperTooNearTheBore() {
     Boards b = new Boards();
     b.track(1, Path.of(new Line(new Point(7.3, 0), new Point(7.3, 9))), 2);
-    Finding f =
-        Boards.findings(b.check(), "edge").stream()
-            .filter(x -> x.what().contains("turn 1"))
-            .findFirst()
-            .orElseThrow();
+    Finding f = track(b);
     // 7.3 - 7 - 0.1 at the line's foot.
     assertEquals(0.2, f.measured(), TINY);
     assertTrue(f.what().endsWith("and the bore"), f.what());
