@@ -52,9 +52,18 @@ final class LegendBuilder {
   Assembler.PlacedLegend build(boolean draft) {
     terminalMarks();
     datum();
-    String text = spec.title() + " " + spec.revision() + (draft ? " DRAFT" : "");
-    if (!alongAnArc(StrokeFont.plain(text), text)) {
-      leftOut.add("title");
+    String draftMark = draft ? " DRAFT" : "";
+    List<String> texts =
+        List.of(
+            spec.title() + " " + spec.revision() + draftMark,
+            spec.title() + draftMark,
+            ("REV " + spec.revision() + draftMark).strip());
+    int done = 0;
+    while (done < texts.size() && !alongAnArc(StrokeFont.plain(texts.get(done)), "title")) {
+      done++;
+    }
+    if (done > 0) {
+      leftOut.add(done == 1 ? "the revision" : "the title");
     }
     return new Assembler.PlacedLegend(strokes, leftOut);
   }
@@ -80,7 +89,7 @@ final class LegendBuilder {
         }
       }
       if (!done) {
-        leftOut.add("mark " + j.mark());
+        leftOut.add("terminal mark " + j.mark());
       }
     }
   }
@@ -100,7 +109,7 @@ final class LegendBuilder {
         return;
       }
     }
-    leftOut.add("datum");
+    leftOut.add("the datum mark");
   }
 
   /** Upright text about a middle point. */
