@@ -37,11 +37,9 @@ public final class ShapeTree {
     double visit(int i, double limitMm);
   }
 
-  private final Segment[] shapes;
+  private final FlatShapes shapes;
   private final double[] fatMm;
   private final int[] order;
-  private final double[][] feature;
-  private final double[] itemBox;
   private final int[] lo;
   private final int[] hi;
   private final int[] left;
@@ -55,14 +53,13 @@ public final class ShapeTree {
    */
   public ShapeTree(List<? extends Segment> shapes, double[] fatMm) {
     int n = shapes.size();
-    this.shapes = shapes.toArray(new Segment[0]);
-    this.fatMm = fatMm.clone();
     if (fatMm.length != n) {
       throw new IllegalArgumentException(n + " shapes, but " + fatMm.length + " distances");
     }
+    this.shapes = new FlatShapes(shapes, fatMm);
+    this.fatMm = fatMm.clone();
     order = new int[n];
-    feature = new double[6][n];
-    itemBox = new double[4 * n];
+    double[][] feature = new double[6][n];
     int most = Math.max(1, 2 * n);
     lo = new int[most];
     hi = new int[most];
@@ -72,15 +69,15 @@ public final class ShapeTree {
     box = new double[4 * most];
     for (int i = 0; i < n; i++) {
       order[i] = i;
-      describe(i);
+      describe(shapes.get(i), i, feature);
     }
     if (n > 0) {
-      build(0, n);
+      build(0, n, feature);
     }
   }
 
-  private void describe(int i) {
-    Segment s = shapes[i];
+  /** Both ends, in an order that does not depend on the walking direction, and the middle. */
+  private static void describe(Segment s, int i, double[][] feature) {
     if (s instanceof Arc a && !(Math.abs(a.sweepRad()) <= MAX_SWEEP_RAD)) {
       throw new IllegalArgumentException(
           "arc bends " + a.sweepRad() + " rad, too far for the tree");
@@ -96,10 +93,9 @@ public final class ShapeTree {
     feature[3][i] = m.y();
     feature[4][i] = to.x();
     feature[5][i] = to.y();
-    ShapeBounds.box(s, fatMm[i], itemBox, 4 * i);
   }
 
-  private int build(int from, int to) {
+  private int build(int from, int to, double[][] feature) {
     int node = nodes++;
     lo[node] = from;
     hi[node] = to;
@@ -109,18 +105,18 @@ public final class ShapeTree {
     box[at + 2] = box[at + 3] = Double.NEGATIVE_INFINITY;
     for (int k = from; k < to; k++) {
       int i = 4 * order[k];
-      box[at] = Math.min(box[at], itemBox[i]);
-      box[at + 1] = Math.min(box[at + 1], itemBox[i + 1]);
-      box[at + 2] = Math.max(box[at + 2], itemBox[i + 2]);
-      box[at + 3] = Math.max(box[at + 3], itemBox[i + 3]);
+      box[at] = Math.min(box[at], shapes.box[i]);
+      box[at + 1] = Math.min(box[at + 1], shapes.box[i + 1]);
+      box[at + 2] = Math.max(box[at + 2], shapes.box[i + 2]);
+      box[at + 3] = Math.max(box[at + 3], shapes.box[i + 3]);
     }
     if (to - from > LEAF) {
-      double[] key = feature[widest(from, to)];
+      double[] key = feature[widest(from, to, feature)];
       int mid = (from + to) >>> 1;
       Selection.split(order, key, from, to, mid);
       middle[node] = order[mid];
-      left[node] = build(from, mid);
-      int right = build(mid, to);
+      left[node] = build(from, mid, feature);
+      int right = build(mid, to, feature);
       reachMm[node] =
           to - from <= MEASURED
               ? reach(from, to, middle[node])
@@ -132,7 +128,7 @@ public final class ShapeTree {
     return node;
   }
 
-  private int widest(int from, int to) {
+  private int widest(int from, int to, double[][] feature) {
     int best = 0;
     double most = -1;
     for (int f = 0; f < feature.length; f++) {
@@ -155,7 +151,7 @@ public final class ShapeTree {
     double reach = 0;
     for (int k = from; k < to; k++) {
       int i = order[k];
-      double own = i == c ? 0 : ShapeBounds.reach(shapes[i], shapes[c]);
+      double own = i == c ? 0 : shapes.reach(i, c);
       reach = Math.max(reach, own + fatMm[i]);
     }
     return reach;
@@ -163,7 +159,7 @@ public final class ShapeTree {
 
   private double viaHalf(int half, int c) {
     int m = middle[half];
-    return reachMm[half] + (m == c ? 0 : ShapeBounds.reach(shapes[m], shapes[c]));
+    return reachMm[half] + (m == c ? 0 : shapes.reach(m, c));
   }
 
   private int right(int node) {
@@ -205,7 +201,8 @@ public final class ShapeTree {
   }
 
   private double items(int i, int j, double limit, PairVisitor visitor) {
-    if (boxesApart(itemBox, 4 * i, itemBox, 4 * j, limit)) {
+    if (boxesApart(shapes.box, 4 * i, shapes.box, 4 * j, limit)
+        || FlatShapes.apart(shapes, i, shapes, j, fatMm[i] + fatMm[j] + limit)) {
       return limit;
     }
     return Math.max(0, visitor.visit(Math.min(i, j), Math.max(i, j), limit));
@@ -238,32 +235,32 @@ public final class ShapeTree {
       return true;
     }
     double held = reachMm[u] + reachMm[v] + limit;
-    return Distance.exceeds(shapes[middle[u]], shapes[middle[v]], held);
+    return FlatShapes.apart(shapes, middle[u], shapes, middle[v], held);
   }
 
   /** Visits every shape that may be as near to the given one as the limit, in a fixed order. */
   public void near(Segment shape, double shapeFatMm, double limitMm, Visitor visitor) {
     if (nodes > 0) {
-      double[] own = new double[4];
-      ShapeBounds.box(shape, shapeFatMm, own, 0);
-      near(0, shape, shapeFatMm, own, limitMm, visitor);
+      FlatShapes own = new FlatShapes(List.of(shape), new double[] {shapeFatMm});
+      near(0, own, shapeFatMm, limitMm, visitor);
     }
   }
 
-  private double near(
-      int u, Segment shape, double shapeFat, double[] own, double limit, Visitor visitor) {
-    if (boxesApart(own, 0, box, 4 * u, limit)
-        || Distance.exceeds(shape, shapes[middle[u]], shapeFat + reachMm[u] + limit)) {
+  private double near(int u, FlatShapes own, double ownFat, double limit, Visitor visitor) {
+    if (boxesApart(own.box, 0, box, 4 * u, limit)
+        || FlatShapes.apart(own, 0, shapes, middle[u], ownFat + reachMm[u] + limit)) {
       return limit;
     }
     double now = limit;
     if (left[u] >= 0) {
-      now = near(left[u], shape, shapeFat, own, now, visitor);
-      return near(right(u), shape, shapeFat, own, now, visitor);
+      now = near(left[u], own, ownFat, now, visitor);
+      return near(right(u), own, ownFat, now, visitor);
     }
     for (int k = lo[u]; k < hi[u]; k++) {
-      if (!boxesApart(own, 0, itemBox, 4 * order[k], now)) {
-        now = Math.max(0, visitor.visit(order[k], now));
+      int i = order[k];
+      if (!boxesApart(own.box, 0, shapes.box, 4 * i, now)
+          && !FlatShapes.apart(own, 0, shapes, i, ownFat + fatMm[i] + now)) {
+        now = Math.max(0, visitor.visit(i, now));
       }
     }
     return now;

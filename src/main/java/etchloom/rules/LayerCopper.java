@@ -25,6 +25,8 @@ final class LayerCopper {
   private final List<Piece> pieces;
   private final ShapeTree tree;
   private final Walk walk;
+  private final List<Segment> shapes;
+  private final double[] fatMm;
 
   /**
    * @param spaceMm the greatest space that will be asked for
@@ -40,15 +42,17 @@ final class LayerCopper {
       add(out, artwork, c);
     }
     pieces = List.copyOf(out);
-    double[] fat = new double[pieces.size()];
-    for (int i = 0; i < fat.length; i++) {
-      fat[i] = pieces.get(i).fatMm();
+    fatMm = new double[pieces.size()];
+    shapes = new ArrayList<>(fatMm.length);
+    for (int i = 0; i < fatMm.length; i++) {
+      fatMm[i] = pieces.get(i).fatMm();
+      shapes.add(pieces.get(i).shape());
     }
-    tree = new ShapeTree(pieces.stream().map(Piece::shape).toList(), fat);
+    tree = new ShapeTree(shapes, fatMm);
     walk = new Walk(artwork, tracks, spaceMm);
   }
 
-  int layer() {
+  int number() {
     return layer;
   }
 
@@ -64,21 +68,38 @@ final class LayerCopper {
     return walk;
   }
 
+  /** A search for what lies near other shapes, with no memory of earlier ones. */
+  Nearby nearby() {
+    return new Nearby(tree, shapes, fatMm);
+  }
+
   private static void add(List<Piece> out, Artwork artwork, Conductor c) {
     List<Segment> path = c.path().segments();
     Joint first = artwork.joints().get(c.fromJoint());
     Joint last = artwork.joints().get(c.toJoint());
     double at = 0;
+    double turn = 0;
     for (int k = 0; k < path.size(); k++) {
       Segment s = path.get(k);
       double length = s.lengthMm();
+      turn += k == 0 ? 0 : corner(path.get(k - 1), s);
+      double turned = turn + (s instanceof Arc a ? Math.abs(a.sweepRad()) : 0);
       double from = k == 0 ? hidden(s, first, c) : 0;
       double to = length - (k == path.size() - 1 ? hidden(s.reversed(), last, c) : 0);
       if (to - from > SLIVER_MM) {
-        cut(out, new Piece(s, c.widthMm() / 2, c.id(), k, at, at + length, -1), at + from, at + to);
+        Piece whole = new Piece(s, c.widthMm() / 2, c.id(), k, at, at + length, turn, turned, -1);
+        cut(out, whole, at + from, at + to);
       }
       at += length;
+      turn = turned;
     }
+  }
+
+  /** The angle, never negative, between the end of one piece and the start of the next. */
+  private static double corner(Segment before, Segment after) {
+    Point a = before.tangent(1);
+    Point b = after.tangent(0);
+    return Math.abs(Math.atan2(a.cross(b), a.dot(b)));
   }
 
   /** How much of the piece's beginning lies wholly under its joint's pad, mm. */
@@ -98,9 +119,9 @@ final class LayerCopper {
 
   private static void cut(List<Piece> out, Piece whole, double fromMm, double toMm) {
     int n = 1;
-    if (whole.shape() instanceof Arc a) {
-      double sweep = Math.abs(a.sweepRad()) * (toMm - fromMm) / whole.lengthMm();
-      n = (int) Math.ceil(sweep / ShapeTree.MAX_SWEEP_RAD);
+    if (whole.shape() instanceof Arc) {
+      double sweep = (whole.turnToRad() - whole.turnFromRad()) * (toMm - fromMm) / whole.lengthMm();
+      n = ArcPieces.count(sweep);
     }
     if (n == 1 && fromMm == whole.fromMm() && toMm == whole.toMm()) {
       out.add(whole);
@@ -123,10 +144,5 @@ final class LayerCopper {
   /** {@code terminal U1}, or what the joint is called. */
   static String jointWords(Joint j) {
     return j.terminal() ? "terminal " + j.mark() : j.what();
-  }
-
-  /** A point of the piece, to tell its place. */
-  static Point place(Piece p) {
-    return p.shape().at(0.5);
   }
 }
