@@ -22,8 +22,8 @@ import org.locationtech.jts.operation.union.UnaryUnionOp;
  * <p>Away from joints a track covers width times length exactly (lines and arcs, tangent to each
  * other; a corner of another angle is taken into account). Only what lies near joints, where tracks
  * and pads cover each other, is merged as polygons. That holds where copper keeps apart elsewhere;
- * a layer where the check found copper touching is merged whole, which is slow. Discs are polygons of
- * the same area and arcs there are chords: good to 1e-4 of the area.
+ * a layer where the check found copper touching is merged whole, which is slow. Discs are polygons
+ * of the same area and arcs there are chords: good to 1e-4 of the area.
  */
 final class CopperArea {
   private static final GeometryFactory GEOMETRY = new GeometryFactory();

@@ -45,7 +45,9 @@ final class Page {
     int each = Math.max(1, (COLUMNS - LABEL + GAP.length()) / width);
     for (int i = 0; i < cells.size(); i += each) {
       StringBuilder s = new StringBuilder(Text.left(i == 0 ? label : "", LABEL));
-      cells.subList(i, Math.min(cells.size(), i + each)).forEach(c -> s.append(Text.left(c, width)));
+      cells
+          .subList(i, Math.min(cells.size(), i + each))
+          .forEach(c -> s.append(Text.left(c, width)));
       line(s.toString());
     }
   }

@@ -82,7 +82,8 @@ public final class Summary {
       page.row(
           f.rule(),
           FindingText.value(f.measured(), f, broken),
-          (FindingText.upperBound(f, broken) ? "<= " : ">= ") + FindingText.value(f.required(), f, broken),
+          (FindingText.upperBound(f, broken) ? "<= " : ">= ")
+              + FindingText.value(f.required(), f, broken),
           at + (broken ? "  BROKEN" : ""));
     }
     r.rules().notes().forEach(n -> page.item("note", n));

@@ -10,7 +10,7 @@ import java.util.List;
  */
 final class Clusters {
   /** A cluster of no more filaments is not halved. */
-  static final int LEAF = Integer.getInteger("el.leaf", 12);
+  static final int LEAF = 20;
 
   /** Exact for the moments of a straight piece up to the fifth degree. */
   private static final GaussRule ALONG = new GaussRule(3);

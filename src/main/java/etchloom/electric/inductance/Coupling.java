@@ -7,14 +7,13 @@ package etchloom.electric.inductance;
  * distance of their centres.
  */
 final class Coupling {
-  static final double OPENING = Double.parseDouble(System.getProperty("el.open", "0.6"));
+  static final double OPENING = 0.75;
 
   private final Clusters a;
   private final Clusters b;
   private final Mirror mirror;
   private final PairSum pairs;
   private final Expansion expansion = new Expansion();
-  long far, near;
 
   Coupling(Clusters a, Clusters b, Mirror mirror, Distances distances) {
     this.a = a;
@@ -27,7 +26,6 @@ final class Coupling {
   double within(int c) {
     int child = a.child[c];
     if (child == 0) {
-      near+=(a.to[c]-a.from[c])*(long)(a.to[c]-a.from[c])/2;
       return pairs.within(a.from[c], a.to[c]);
     }
     return within(child) + within(child + 1) + 2 * between(child, child + 1);
@@ -36,7 +34,6 @@ final class Coupling {
   /** One cluster of the first body with one of the second. */
   double between(int i, int j) {
     if (far(i, j)) {
-      far++;
       return expansion.couple(
           b.x[j] - a.x[i],
           b.y[j] - a.y[i],
@@ -50,7 +47,6 @@ final class Coupling {
     int ci = a.child[i];
     int cj = b.child[j];
     if (ci == 0 && cj == 0) {
-      near+=(a.to[i]-a.from[i])*(long)(b.to[j]-b.from[j]);
       return pairs.block(a.from[i], a.to[i], b.from[j], b.to[j]);
     }
     return splitFirst(i, j)

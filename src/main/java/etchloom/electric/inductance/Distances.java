@@ -6,9 +6,9 @@ import java.util.List;
  * Geometric mean distances between all cross-sections of a board, or between them and their images,
  * as functions of the sideways offset.
  *
- * <p>Near ones come from tables over the offset (closed form at the knots, cubic between them, error
- * of the logarithm below 1e-3 and that only inside one width), far ones from the second moments of
- * the sections: (w² − t²)/12 each, which leaves 1e-4 of the logarithm at three widths.
+ * <p>Near ones come from tables over the offset (closed form at the knots, cubic between them,
+ * error of the logarithm below 1e-3 and that only inside one width), far ones from the second
+ * moments of the sections: (w² − t²)/12 each, which leaves 1e-4 of the logarithm at three widths.
  */
 final class Distances {
   private static final int REACH = 3;
@@ -49,8 +49,7 @@ final class Distances {
   }
 
   private static double size(CrossSection a, CrossSection b) {
-    return Math.max(
-        Math.max(a.widthMm(), b.widthMm()), Math.max(a.thicknessMm(), b.thicknessMm()));
+    return Math.max(Math.max(a.widthMm(), b.widthMm()), Math.max(a.thicknessMm(), b.thicknessMm()));
   }
 
   /** What is to be added to the square of the distance; one knot before 0, two after the reach. */

@@ -13,7 +13,7 @@ package etchloom.electric.inductance;
  * (2001), recalled and held against differences by a test.
  */
 final class Expansion {
-  static final int ORDER = Integer.getInteger("el.order", 6);
+  static final int ORDER = 4;
   static final int TERMS = (ORDER + 1) * (ORDER + 2) * (ORDER + 3) / 6;
 
   /** Powers of x, y and z of each term, by total degree. */
@@ -59,8 +59,7 @@ final class Expansion {
       int room = DEGREE_FROM[ORDER - degree(m) + 1];
       SUM[m] = new int[room];
       for (int n = 0; n < room; n++) {
-        SUM[m][n] =
-            at[POWER_X[m] + POWER_X[n]][POWER_Y[m] + POWER_Y[n]][POWER_Z[m] + POWER_Z[n]];
+        SUM[m][n] = at[POWER_X[m] + POWER_X[n]][POWER_Y[m] + POWER_Y[n]][POWER_Z[m] + POWER_Z[n]];
       }
     }
   }

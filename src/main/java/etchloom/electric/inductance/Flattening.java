@@ -9,16 +9,17 @@ import etchloom.geometry.Segment;
 /**
  * Cuts centre lines into straight filaments.
  *
- * <p>A chord of an arc is set outwards so that it encloses the arc's own area about the centre: what
- * a coil sees from afar is then exact, and the error falls as the fourth power of the chord's angle
- * instead of the second. A chord's ends stand up to the chord error apart from its neighbours'.
+ * <p>A chord is as long as one between two of the arc's points, so that it is the arc's own current
+ * vector, but stands further out, so that it encloses the arc's own area about the centre: what a
+ * coil sees from afar is then exact, and what is left is an order smaller than with chords between
+ * points. A chord's ends stand up to the chord error apart from its neighbours'.
  *
  * @param chordErrorMm largest distance between an arc and a chord between two of its points
  * @param longestMm no filament is longer, so that clusters can be small
  */
 record Flattening(double chordErrorMm, double longestMm) {
   /** The sharpest turn of one chord, rad. */
-  private static final double WIDEST_RAD = Math.PI / 6;
+  private static final double WIDEST_RAD = Math.PI / 4;
 
   Flattening {
     if (!(chordErrorMm > 0 && longestMm > 0)) {
@@ -62,21 +63,18 @@ record Flattening(double chordErrorMm, double longestMm) {
     widest = Math.min(widest, Math.min(WIDEST_RAD, longestMm / r));
     int n = (int) Math.max(1, Math.ceil(Math.abs(sweep) / widest));
     double half = sweep / n / 2;
-    double tan = Math.tan(half);
-    double middle = r * half / tan;
+    // The chord stands for the arc's own current vector and for its moment about the centre.
+    double halfChord = r * Math.sin(half);
+    double middle = r * half / Math.sin(half);
     double start = arc.startRad();
     Point c = arc.centre();
     for (int i = 0; i < n; i++) {
       double a = start + (2 * i + 1) * half;
-      double ux = Math.cos(a) * middle;
-      double uy = Math.sin(a) * middle;
-      out.add(
-          c.x() + ux + uy * tan,
-          c.y() + uy - ux * tan,
-          c.x() + ux - uy * tan,
-          c.y() + uy + ux * tan,
-          section,
-          ampere);
+      double x = c.x() + Math.cos(a) * middle;
+      double y = c.y() + Math.sin(a) * middle;
+      double dx = -Math.sin(a) * halfChord;
+      double dy = Math.cos(a) * halfChord;
+      out.add(x - dx, y - dy, x + dx, y + dy, section, ampere);
     }
   }
 }

@@ -67,7 +67,8 @@ final class MeanDistance {
   static double annulusMm(double outerRadiusMm, double innerRadiusMm) {
     double o = outerRadiusMm * outerRadiusMm;
     double i = innerRadiusMm * innerRadiusMm;
-    double ratio = i == 0 ? 0 : i * i / ((o - i) * (o - i)) * Math.log(outerRadiusMm / innerRadiusMm);
+    double ratio =
+        i == 0 ? 0 : i * i / ((o - i) * (o - i)) * Math.log(outerRadiusMm / innerRadiusMm);
     return outerRadiusMm * Math.exp(-ratio + (3 * i - o) / (4 * (o - i)));
   }
 }

@@ -6,28 +6,36 @@ import etchloom.electric.field.GaussRule;
  * Neumann's integral over pairs of straight bars, {@code ∬ dl·dl' / r}, mm, each weighted with both
  * currents. The magnetic constant over 4π makes it an inductance.
  *
- * <p>Pairs {@value #APART} times the longer bar's size apart: the integral's expansion to second
- * order in the bars' lengths, widths and thicknesses; worst error of a pair 1e-3, where it is in
- * line, and next to nothing in a sum over directions. Nearer ones: bars whose sideways distance
- * hardly changes along them in closed form, others with the closed form of the longer bar's potential
- * and Gauss's rule along the shorter; both at the geometric mean distance of the two sections, which
- * is also what keeps a bar apart from itself and from the next one of the same run.
+ * <p>Pairs two times the longer bar's size apart: the integral's expansion to second order in the
+ * bars' lengths, widths and thicknesses; worst error of a pair 1e-3, where it is in line, and next
+ * to nothing in a sum over directions. Nearer ones: bars whose sideways distance hardly changes
+ * along them in closed form, others with the closed form of the longer bar's potential and Gauss's
+ * rule along the shorter; both at the geometric mean distance of the two sections, which is also
+ * what keeps a bar apart from itself and from the next one of the same run.
  *
- * <p>Sources: F. E. Neumann 1845; closed forms of parallel filaments as in E. B. Rosa, "The self and
- * mutual inductances of linear conductors", Bulletin of the Bureau of Standards 4 (1908).
+ * <p>Sources: F. E. Neumann 1845; closed forms of parallel filaments as in E. B. Rosa, "The self
+ * and mutual inductances of linear conductors", Bulletin of the Bureau of Standards 4 (1908).
  */
 final class PairSum {
   /** Square of how many sizes apart a pair counts as apart. */
-  private static final double APART = 2.5 * 2.5;
+  private static final double APART = 2 * 2;
 
   /** Sideways change over mean distance up to which bars count as parallel. */
   private static final double PARALLEL = 0.2;
 
+  /** Length of the shorter bar over the distance from which the closed form is the cheaper way. */
+  private static final double CLOSED_FORM_FROM = 1.2;
+
   private static final GaussRule[] RULES = {
-    new GaussRule(2), new GaussRule(3), new GaussRule(5), new GaussRule(8), new GaussRule(16)
+    new GaussRule(1),
+    new GaussRule(2),
+    new GaussRule(3),
+    new GaussRule(5),
+    new GaussRule(8),
+    new GaussRule(16)
   };
 
-  private static final double[] RULE_UP_TO = {0.5, 1.2, 3, 6};
+  private static final double[] RULE_UP_TO = {0.1, 0.5, 1.2, 3, 6};
 
   private final Pieces a;
   private final Pieces b;
@@ -125,12 +133,13 @@ final class PairSum {
     double along = dx * ux + dy * uy;
     double aside = ux * dy - uy * dx;
     double square = distances.squaredMm2(sa, sb, aside);
-    double sideways = Math.abs(sin) * shorter;
-    if (sideways * sideways < PARALLEL * PARALLEL * square) {
-      return cos * parallel(along, longer, shorter, Math.sqrt(square));
-    }
     double beyond = Math.max(0, Math.abs(along) - longer / 2);
     double ratio = shorter / Math.sqrt(square + beyond * beyond);
+    double sideways = sin * shorter;
+    boolean even = sideways * sideways < PARALLEL * PARALLEL * square;
+    if (even && ratio > CLOSED_FORM_FROM) {
+      return cos * parallel(along, longer, shorter, Math.sqrt(square));
+    }
     int r = 0;
     while (r < RULE_UP_TO.length && ratio > RULE_UP_TO[r]) {
       r++;
@@ -139,7 +148,7 @@ final class PairSum {
     double sum = 0;
     for (int g = 0; g < rule.size(); g++) {
       double t = shorter / 2 * rule.node(g);
-      double m2 = distances.squaredMm2(sa, sb, aside + t * sin);
+      double m2 = even ? square : distances.squaredMm2(sa, sb, aside + t * sin);
       sum += rule.weight(g) * potential(along + t * cos, longer / 2, m2);
     }
     return cos * shorter / 2 * sum;
@@ -156,9 +165,7 @@ final class PairSum {
     }
     double far = to + Math.sqrt(to * to + square);
     double near = Math.sqrt(from * from + square);
-    return from < 0
-        ? Math.log(far * (near - from) / square)
-        : Math.log(far / (near + from));
+    return from < 0 ? Math.log(far * (near - from) / square) : Math.log(far / (near + from));
   }
 
   /** Two parallel filaments, the second's middle {@code along} further on than the first's. */

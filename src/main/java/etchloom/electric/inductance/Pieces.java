@@ -3,7 +3,8 @@ package etchloom.electric.inductance;
 import java.util.List;
 
 /**
- * Filaments laid out for sums over pairs, in an order that keeps neighbours together. Lengths in mm.
+ * Filaments laid out for sums over pairs, in an order that keeps neighbours together. Lengths in
+ * mm.
  *
  * <p>{@code qxx} and the like are the second moments of the piece as a bar (length, width,
  * thickness) over 2, for pairs some lengths apart.
