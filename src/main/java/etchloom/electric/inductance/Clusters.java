@@ -58,6 +58,34 @@ final class Clusters {
     }
   }
 
+  /** Another's clusters, turned counter-clockwise about the shaft. */
+  private Clusters(Clusters other, double rad) {
+    double c = Math.cos(rad);
+    double s = Math.sin(rad);
+    filaments = other.filaments;
+    sections = other.sections;
+    order = other.order;
+    from = other.from;
+    to = other.to;
+    child = other.child;
+    z = other.z;
+    radius = other.radius;
+    count = other.count;
+    x = new double[count];
+    y = new double[count];
+    for (int i = 0; i < count; i++) {
+      x[i] = c * other.x[i] - s * other.y[i];
+      y[i] = s * other.x[i] + c * other.y[i];
+    }
+    pieces = other.pieces.turned(c, s);
+    moment = new Turn(c, s).of(other.moment);
+  }
+
+  /** The same body turned counter-clockwise about the shaft. */
+  Clusters turned(double rad) {
+    return new Clusters(this, rad);
+  }
+
   int size() {
     return pieces.size;
   }

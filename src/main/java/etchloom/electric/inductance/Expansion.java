@@ -17,17 +17,17 @@ final class Expansion {
   static final int TERMS = (ORDER + 1) * (ORDER + 2) * (ORDER + 3) / 6;
 
   /** Powers of x, y and z of each term, by total degree. */
-  private static final int[] POWER_X = new int[TERMS];
+  static final int[] POWER_X = new int[TERMS];
 
-  private static final int[] POWER_Y = new int[TERMS];
-  private static final int[] POWER_Z = new int[TERMS];
+  static final int[] POWER_Y = new int[TERMS];
+  static final int[] POWER_Z = new int[TERMS];
   private static final double[] FACTORIAL = new double[TERMS];
 
   /** The term with one power of x, y, z fewer; of two fewer; -1 where there is none. */
   private static final int[][] LESS = new int[6][TERMS];
 
   /** First term of each degree, and one past the last. */
-  private static final int[] DEGREE_FROM = new int[ORDER + 2];
+  static final int[] DEGREE_FROM = new int[ORDER + 2];
 
   /** {@code SUM[m][n]}: the term whose powers are those of m and n added. */
   private static final int[][] SUM = new int[TERMS][];
@@ -67,11 +67,11 @@ final class Expansion {
   private final double[] power = new double[TERMS];
   private final double[] derivative = new double[TERMS];
 
-  private static double factorial(int n) {
+  static double factorial(int n) {
     return n < 2 ? 1 : n * factorial(n - 1);
   }
 
-  private static int degree(int m) {
+  static int degree(int m) {
     return POWER_X[m] + POWER_Y[m] + POWER_Z[m];
   }
 
