@@ -24,6 +24,7 @@ final class Pieces {
   final double[] qyy;
   final double[] qzz;
   final double[] height;
+  final double[] width;
   final double[] reach;
   final int[] section;
 
@@ -45,6 +46,7 @@ final class Pieces {
     qyy = new double[size];
     qzz = new double[size];
     height = new double[size];
+    width = new double[size];
     reach = new double[size];
     section = new int[size];
     for (int i = 0; i < size; i++) {
@@ -59,6 +61,7 @@ final class Pieces {
     length = o.length;
     ampere = o.ampere;
     height = o.height;
+    width = o.width;
     reach = o.reach;
     section = o.section;
     qzz = o.qzz;
@@ -115,6 +118,7 @@ final class Pieces {
     qyy[i] = along * uy[i] * uy[i] + across * ux[i] * ux[i];
     qzz[i] = s.thicknessMm() * s.thicknessMm() / 24;
     height[i] = s.heightMm();
+    width[i] = s.widthMm();
     double size = Math.max(length[i], Math.max(s.widthMm(), s.thicknessMm()));
     reach[i] = size * size;
   }
