@@ -5,6 +5,9 @@ import java.util.List;
 
 /** A magnet array's harmonics, tabled over the radius at each layer's height. */
 public final class RotorField implements AxialField, RadialField {
+  /** Heights are told apart to a nanometre: the field changes over a tenth of a millimetre. */
+  private static final double SAME_MM = 1e-6;
+
   private final int polePairs;
   private final int orders;
   private final double[] scaleMm;
@@ -31,8 +34,22 @@ public final class RotorField implements AxialField, RadialField {
     scaleMm = new double[heightMm.length];
     for (int i = 0; i < heightMm.length; i++) {
       scaleMm[i] = array.clearanceMm(heightMm[i]);
-      layers.add(new LayerTable(array, heightMm[i], innerMm, outerMm, orders));
+      int twin = array.even() ? mirrored(heightMm, i) : -1;
+      layers.add(
+          twin >= 0
+              ? layers.get(twin)
+              : new LayerTable(array, heightMm[i], innerMm, outerMm, orders));
     }
+  }
+
+  /** An earlier layer as far from the mid-plane on its other side, or -1. */
+  private static int mirrored(double[] heightMm, int layer) {
+    for (int i = 0; i < layer; i++) {
+      if (Math.abs(heightMm[i] + heightMm[layer]) < SAME_MM) {
+        return i;
+      }
+    }
+    return -1;
   }
 
   private static int ordersFor(MagnetArray array, double[] heightMm) {

@@ -14,7 +14,11 @@ import etchloom.units.Constants;
  * between the charges on its two sides (textbook). In harmonics: {@code π/(2μ0) Σ ∫ b² r dr}.
  */
 public final class AxialPull {
-  private static final double REACH = 3;
+  /** Beyond the magnets the field falls as the radius to the pole pairs and more. */
+  private static final double REACH = 4;
+
+  /** Panels of the sum over the radius, over the distance in which the field changes. */
+  private static final double PANEL = 0.5;
 
   private AxialPull() {}
 
@@ -24,25 +28,23 @@ public final class AxialPull {
    * @param planeMm height of the plane of symmetry over the board's mid-plane
    */
   public static double newton(MagnetArray array, double planeMm) {
-    double outer = REACH * array.shape().outerMm();
-    RotorField field = new RotorField(array, new double[] {planeMm}, 0, outer);
+    double away = REACH / array.polePairs();
+    double outer = (1 + away) * array.shape().outerMm();
+    double inner = Math.max(0, 1 - away) * array.shape().innerMm();
+    RotorField field = new RotorField(array, new double[] {planeMm}, inner, outer);
     GaussRule rule = new GaussRule(4);
     double[] b = new double[field.orders()];
-    double step = 0.5 * field.scaleMm(1);
+    int panels = (int) Math.ceil((outer - inner) / (PANEL * field.scaleMm(1)));
+    double half = (outer - inner) / panels / 2;
     double sum = 0;
-    double from = 0;
-    while (from < outer) {
-      // Beyond the magnets the field only dies away, over a length that grows with the radius.
-      double grown = from > array.shape().outerMm() + 4 * step ? Math.max(step, 0.05 * from) : step;
-      double half = Math.min(grown, outer - from) / 2;
+    for (int k = 0; k < panels; k++) {
       for (int j = 0; j < rule.size(); j++) {
-        double r = from + half * (1 + rule.node(j));
+        double r = inner + half * (2 * k + 1 + rule.node(j));
         field.amplitudes(1, r, b);
         for (double v : b) {
           sum += v * v * r * half * rule.weight(j);
         }
       }
-      from += 2 * half;
     }
     return Math.PI / (2 * Constants.MU_0) * sum * 1e-6;
   }

@@ -106,13 +106,44 @@ final class PairParts {
     return ohm[pair][group];
   }
 
-  /** A pair's resistance with each group's nominal part times a factor. */
-  double ohm(int pair, double[] factor) {
+  /** A pair's nominal resistance, Ω. */
+  double nominal(int pair) {
+    double sum = 0;
+    for (double part : ohm[pair]) {
+      sum += part;
+    }
+    return sum;
+  }
+
+  private double ohm(int pair, double[] factor) {
     double sum = 0;
     for (int g = 0; g < factor.length; g++) {
       sum += ohm[pair][g] * factor[g];
     }
     return sum;
+  }
+
+  /** The largest relative departure of any pair, each group's part taken times a factor. */
+  double farthest(double[] factor) {
+    double most = 0;
+    for (int p = 0; p < pairs(); p++) {
+      most = Math.max(most, Math.abs(ohm(p, factor) / nominal(p) - 1));
+    }
+    return most;
+  }
+
+  /** Largest less smallest pair over their mean, each group's part taken times a factor. */
+  double imbalance(double[] factor) {
+    double least = Double.POSITIVE_INFINITY;
+    double most = 0;
+    double sum = 0;
+    for (int p = 0; p < pairs(); p++) {
+      double ohm = ohm(p, factor);
+      least = Math.min(least, ohm);
+      most = Math.max(most, ohm);
+      sum += ohm;
+    }
+    return (most - least) / (sum / pairs());
   }
 
   /**
