@@ -63,13 +63,18 @@ final class Ascii {
         .replace("\u00d7", "x");
   }
 
-  /** Text of an XML element or attribute; beyond ASCII as a numeric reference. */
+  /**
+   * Text of an XML element or attribute; beyond ASCII as a numeric reference, what XML does not
+   * allow at all as {@code ?}.
+   */
   static String xml(String text) {
     StringBuilder s = new StringBuilder(text.length());
     text.codePoints()
         .forEach(
             c -> {
-              if (c == '&' || c == '<' || c == '>' || c == '"' || c > 126) {
+              if (c >= 0xD800 && c <= 0xDFFF || c == 0xFFFE || c == 0xFFFF) {
+                s.append('?');
+              } else if (c == '&' || c == '<' || c == '>' || c == '"' || c > 126) {
                 s.append("&#").append(c).append(';');
               } else {
                 s.append(c < 32 ? ' ' : (char) c);

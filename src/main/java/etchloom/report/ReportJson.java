@@ -1,0 +1,62 @@
+package etchloom.report;
+
+import etchloom.rules.RuleReport;
+import java.util.Map;
+
+/**
+ * The report for programs. Its keys are bound by the spec page; what is not known has no key.
+ *
+ * <p>Numbers hold 15 significant digits, so they agree with the figures to 1e-14. Layers are named
+ * {@code L1} to {@code Ln}.
+ */
+public final class ReportJson {
+  private ReportJson() {}
+
+  /** The whole of {@code report.json}, UTF-8. */
+  public static byte[] write(Results r) {
+    return tree(r).bytes();
+  }
+
+  /** What {@code check SPEC --json} prints: the version, what was checked, and {@code check}. */
+  public static byte[] writeCheck(Results r) {
+    return head(r).put("check", CheckTree.of(r.rules())).bytes();
+  }
+
+  /** The check of a folder of files, which have neither title nor revision. */
+  public static byte[] writeCheck(String toolVersion, RuleReport rules) {
+    return new JsonTree()
+        .put("tool", new JsonTree().put("version", toolVersion))
+        .put("check", CheckTree.of(rules))
+        .bytes();
+  }
+
+  /**
+   * The report's single figures by their path, {@code resistance.phaseOhm.U}, in the file's order:
+   * a {@code Double}, {@code Long}, {@code Boolean} or {@code String} each.
+   */
+  public static Map<String, Object> figures(Results r) {
+    return tree(r).flat();
+  }
+
+  private static JsonTree head(Results r) {
+    return new JsonTree()
+        .put("tool", new JsonTree().put("version", r.toolVersion()))
+        .put("title", r.artwork().title())
+        .put("revision", r.artwork().revision());
+  }
+
+  private static JsonTree tree(Results r) {
+    JsonTree out = body(r);
+    r.proof().ifPresent(p -> out.put("proof", ProofTree.of(p)));
+    return out;
+  }
+
+  private static JsonTree body(Results r) {
+    return head(r)
+        .put("verdict", new JsonTree().put("made", r.rules().passed()))
+        .put("winding", WindingTree.of(r))
+        .put("geometry", GeometryTree.of(r))
+        .put("resistance", ResistanceTree.of(r))
+        .put("check", CheckTree.of(r.rules()));
+  }
+}
