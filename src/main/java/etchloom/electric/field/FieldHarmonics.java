@@ -2,8 +2,9 @@ package etchloom.electric.field;
 
 import java.util.Arrays;
 import java.util.List;
+import java.util.function.Predicate;
 
-/** Amplitudes of the axial field of a magnet array with all its images, at any place. */
+/** Amplitudes of the field of a magnet array with all its images, at any place. */
 public final class FieldHarmonics {
   /** Orders end where the space between magnet and copper has taken this much of them. */
   private static final double FAINT = 1e-4;
@@ -37,31 +38,62 @@ public final class FieldHarmonics {
   }
 
   /**
-   * The amplitudes at a place, T, entry i for order 2i + 1.
+   * The axial amplitudes at a place, T, entry i for order 2i + 1.
    *
    * @param heightMm over the board's mid-plane, not on a magnet's face
    */
   public double[] at(double radiusMm, double heightMm) {
+    return sum(radiusMm, heightMm, false, s -> true);
+  }
+
+  /** The amplitudes of the field along the radius, outwards, T. */
+  public double[] radialAt(double radiusMm, double heightMm) {
+    return sum(radiusMm, heightMm, true, s -> true);
+  }
+
+  /** The part of {@link #at} that comes from some of the sheets and images. */
+  double[] at(double radiusMm, double heightMm, Predicate<ChargeSheet> which) {
+    return sum(radiusMm, heightMm, false, which);
+  }
+
+  private double[] sum(
+      double radiusMm, double heightMm, boolean radial, Predicate<ChargeSheet> which) {
     double[] sum = new double[orders];
+    IronPlanes iron = array.iron();
     int k = 0;
     while (true) {
-      double most = add(array.iron().group(array.sheets(), k), radiusMm, heightMm, sum);
+      List<ChargeSheet> group = iron.group(array.sheets(), k);
+      double most = add(group, which, radiusMm, heightMm, radial, sum);
       boolean small = k > 0 && most <= MagnetArray.IMAGE_SHARE * largest(sum);
-      if (!array.iron().endless() || small || k == MagnetArray.MOST_GROUPS) {
+      if (!iron.endless() || small || k == MagnetArray.MOST_GROUPS) {
         break;
       }
       k++;
     }
-    add(array.iron().tail(array.sheets(), k), radiusMm, heightMm, sum);
+    add(iron.tail(array.sheets(), k), which, radiusMm, heightMm, radial, sum);
     return sum;
   }
 
   /** Adds a group's part and gives its largest amplitude. */
-  private double add(List<ChargeSheet> group, double radiusMm, double heightMm, double[] sum) {
+  private double add(
+      List<ChargeSheet> group,
+      Predicate<ChargeSheet> which,
+      double radiusMm,
+      double heightMm,
+      boolean radial,
+      double[] sum) {
     Arrays.fill(part, 0);
     for (ChargeSheet s : group) {
+      if (!which.test(s)) {
+        continue;
+      }
       double charge = s.charge() * array.remanenceTesla();
-      sheet.add(radiusMm, heightMm - s.heightMm(), charge, part);
+      double over = heightMm - s.heightMm();
+      if (radial) {
+        sheet.addRadial(radiusMm, over, charge, part);
+      } else {
+        sheet.add(radiusMm, over, charge, part);
+      }
     }
     for (int i = 0; i < orders; i++) {
       sum[i] += part[i];
