@@ -15,6 +15,14 @@ final class Verdicts {
   static void add(Page page, Results r, Map<String, Object> figures) {
     page.blank();
     made(page, r);
+    DutyAnswer duty = DutyAnswer.of(r);
+    if (duty.met().isEmpty()) {
+      page.item("duty", "not judged: " + duty.text());
+    } else if (duty.met().get()) {
+      page.good(duty.word(), duty.text());
+    } else {
+      page.bad(duty.word(), duty.text());
+    }
     ripple(r, figures).ifPresent(w -> page.bad(w.get(0), w.get(1)));
     r.proof().ifPresent(p -> page.item(p.passed() ? "proof" : "NOT PROVEN", proof(p)));
     page.item("cautions", Cautions.line(r));
