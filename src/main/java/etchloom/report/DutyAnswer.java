@@ -24,7 +24,8 @@ record DutyAnswer(Optional<Boolean> met, String word, String text, List<Row> row
 
   static DutyAnswer of(Results r) {
     if (r.spec().duty().isEmpty()) {
-      return open("the spec has no duty; add duty, and the report says whether the machine does it");
+      return open(
+          "the spec has no duty; add duty, and the report says whether the machine does it");
     }
     if (r.machine().isEmpty()) {
       return open("the machine's figures are not in this report");
@@ -48,8 +49,7 @@ record DutyAnswer(Optional<Boolean> met, String word, String text, List<Row> row
   }
 
   private static String met(MachineFigures m) {
-    return "as far as asked: "
-        + String.join(", ", m.verdict().stream().map(Need::what).toList());
+    return "as far as asked: " + String.join(", ", m.verdict().stream().map(Need::what).toList());
   }
 
   private static String failure(Need n) {
@@ -83,7 +83,7 @@ record DutyAnswer(Optional<Boolean> met, String word, String text, List<Row> row
         bound(n) + value(n.needed(), n.unit()),
         got(n),
         n.met() ? "yes" : "NO",
-        n.limitedBy());
+        n.met() && n.unit().equals("C") ? "" : n.limitedBy());
   }
 
   /** Temperatures must not be passed, all else must be reached. */

@@ -1,5 +1,6 @@
 package etchloom.report;
 
+import etchloom.electric.inductance.InductanceFigures;
 import etchloom.electric.machine.DriveFigures;
 import etchloom.electric.machine.EmfFigures;
 import etchloom.electric.machine.GeneratorFigures;
@@ -11,9 +12,18 @@ import etchloom.electric.machine.TorqueFigures;
 import etchloom.electric.machine.spread.SpreadFigures;
 import java.util.List;
 
-/** The parts of the report that the machine's figures make, a key each. */
+/** The parts of the report that the inductances and the machine's figures make, a key each. */
 final class MachineTree {
   private MachineTree() {}
+
+  static JsonTree inductance(InductanceFigures f) {
+    return new JsonTree()
+        .put("coilHenry", f.coilHenry())
+        .put("phaseSelfHenry", f.phaseSelfHenry())
+        .put("phaseMutualHenry", f.phaseMutualHenry())
+        .put("synchronousHenry", f.synchronousHenry())
+        .put("terminalHenry", f.terminalHenry());
+  }
 
   static JsonTree emf(EmfFigures f, List<String> marks) {
     return new JsonTree()

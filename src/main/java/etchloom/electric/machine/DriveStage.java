@@ -145,8 +145,7 @@ final class DriveStage {
     if (!s.duty().generator() || linked.isEmpty() || !s.ledger().has("generator", s.speed())) {
       return Optional.empty();
     }
-    double open =
-        Generator.openVoltRms(s.circuit(), linked.get().fluxWeber(), s.radPerSecond());
+    double open = Generator.openVoltRms(s.circuit(), linked.get().fluxWeber(), s.radPerSecond());
     if (!s.ledger().has("generator.powerWatt", Given.of("duty.load", s.duty().loadOhm()))) {
       OptionalDouble none = OptionalDouble.empty();
       return Optional.of(new GeneratorFigures(open, none, none, none, none, none));

@@ -47,8 +47,8 @@ public record EmfFigures(
 
   /**
    * @param peakVoltSecondPerRadian fundamental of this phase, its leads included
-   * @param axisRad mechanical angle in [0, 2π/pole pairs) where current into the phase's start makes
-   *     field out of L1, by the copper as drawn
+   * @param axisRad mechanical angle in [0, 2π/pole pairs) where current into the phase's start
+   *     makes field out of L1, by the copper as drawn
    * @param restRad rotor angle in [0, 2π/pole pairs) to which such a current pulls the rotor: half
    *     an electrical turn from the axis, since a north face at angle 0 sends its field into L1
    */

@@ -74,7 +74,8 @@ final class FieldStage {
       return Optional.of(linked);
     }
     s.ledger()
-        .caution("no-flux", "the phases link no flux of the magnets: magnets and coils do not meet");
+        .caution(
+            "no-flux", "the phases link no flux of the magnets: magnets and coils do not meet");
     FIGURES.stream()
         .filter(f -> !f.equals("loss.eddyWatt") && !f.equals("rotor.axialPullNewton"))
         .forEach(f -> s.ledger().absent(f, "rotor.magnet"));

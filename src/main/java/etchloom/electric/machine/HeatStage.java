@@ -212,11 +212,7 @@ final class HeatStage {
     }
     return s.ledger().has("emf.deltaCirculatingAmpere", s.speed())
         ? OptionalDouble.of(
-            linked
-                .get()
-                .circulating()
-                .orElseThrow()
-                .ampereRms(s.radPerSecond(), thermal.hotC()))
+            linked.get().circulating().orElseThrow().ampereRms(s.radPerSecond(), thermal.hotC()))
         : OptionalDouble.empty();
   }
 

@@ -9,10 +9,7 @@ package etchloom.electric.machine;
  * @param terminalHenry between two terminals
  */
 public record InductanceValues(
-    double phaseSelfHenry,
-    double phaseMutualHenry,
-    double synchronousHenry,
-    double terminalHenry) {
+    double phaseSelfHenry, double phaseMutualHenry, double synchronousHenry, double terminalHenry) {
   public InductanceValues {
     positive("self", phaseSelfHenry);
     positive("synchronous", synchronousHenry);

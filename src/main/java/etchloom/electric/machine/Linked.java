@@ -39,9 +39,7 @@ record Linked(
         Math.max(forward, backward) / coupling.polePairs(),
         forward >= backward,
         EddyLoss.of(s.artwork(), coupling),
-        delta
-            ? Optional.of(new CirculatingCurrent(s.circuit(), phases))
-            : Optional.empty());
+        delta ? Optional.of(new CirculatingCurrent(s.circuit(), phases)) : Optional.empty());
   }
 
   /** Peak of the symmetrical component of the fundamental, V·s/rad (textbook, Fortescue). */

@@ -48,14 +48,12 @@ final class RotorStage {
         axial);
   }
 
-  private static OptionalDouble axial(
-      Setting s, Spec.Rotor rotor, Optional<MagnetArray> array) {
+  private static OptionalDouble axial(Setting s, Spec.Rotor rotor, Optional<MagnetArray> array) {
     if (array.isEmpty()) {
       return OptionalDouble.empty();
     }
     MagnetArray a = array.get();
-    OptionalDouble plane =
-        rotor.twoSided() ? OptionalDouble.of(0) : a.iron().belowMm();
+    OptionalDouble plane = rotor.twoSided() ? OptionalDouble.of(0) : a.iron().belowMm();
     if (plane.isEmpty()) {
       s.ledger().absent("rotor.axialPullNewton", "rotor.counter-plate");
       return OptionalDouble.empty();

@@ -50,13 +50,16 @@ final class VerdictStage {
         s.ledger().has("verdict.duty.torque", Given.of("duty.torque", d.torqueNm()), s.speed());
     if (asked && line.isPresent()) {
       TorqueSpeed.Point p = line.get().at(s.radPerSecond());
-      least("torque at speed", "N m", d.torqueNm().getAsDouble(), p.newtonMetre(), p.limit().word());
+      least(
+          "torque at speed", "N m", d.torqueNm().getAsDouble(), p.newtonMetre(), p.limit().word());
     } else if (asked) {
       s.ledger().absent("verdict.duty.torque", "rotor.magnet");
     }
   }
 
-  /** The speed up to which the needed torque is there, or the no-load speed where none is needed. */
+  /**
+   * The speed up to which the needed torque is there, or the no-load speed where none is needed.
+   */
   private void speed() {
     if (drive.speedLimitRpm().isEmpty() || !s.ledger().has("verdict.duty.speed", s.speed())) {
       return;
@@ -94,9 +97,10 @@ final class VerdictStage {
 
   private void load() {
     OptionalDouble current = s.duty().currentAmpereRms();
-    OptionalDouble got = generator.flatMap(g -> box(g.ampereRms())).stream()
-        .mapToDouble(Double::doubleValue)
-        .findFirst();
+    OptionalDouble got =
+        generator.flatMap(g -> box(g.ampereRms())).stream()
+            .mapToDouble(Double::doubleValue)
+            .findFirst();
     if (current.isPresent() && got.isPresent()) {
       least("load current", "A", current.getAsDouble(), got.getAsDouble(), "load");
     }

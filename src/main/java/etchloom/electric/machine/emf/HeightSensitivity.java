@@ -13,7 +13,9 @@ import java.util.List;
  * differences of the fundamental along the first coil; all coils are alike in this.
  */
 public final class HeightSensitivity {
-  /** Step of the differences, mm: small beside any air gap's field, large beside the tables' error. */
+  /**
+   * Step of the differences, mm: small beside any air gap's field, large beside the tables' error.
+   */
   private static final double STEP_MM = 0.04;
 
   private final Artwork artwork;
@@ -52,7 +54,8 @@ public final class HeightSensitivity {
     double[] byDepth = changes(MagnetArray.of(rotor, board), -STEP_MM);
     double byThickness = 0;
     if (rotor.twoSided() || rotor.counterPlateGapMm().isPresent()) {
-      // The same depths under L1's face in a board that is thicker: its middle lies half a step off.
+      // The same depths under L1's face in a board that is thicker: its middle lies half a step
+      // off.
       for (double c : changes(MagnetArray.of(rotor, board + STEP_MM), STEP_MM / 2)) {
         byThickness += c;
       }

@@ -16,7 +16,8 @@ final class RandomBoards {
 
   /**
    * @param resistance whether resistances are drawn too; not where a track may vanish
-   * @param torquePerCopper relative change of the torque with each layer's relative change of copper
+   * @param torquePerCopper relative change of the torque with each layer's relative change of
+   *     copper
    */
   RandomBoards(PairParts pairs, Tolerances tol, double[] torquePerCopper, boolean resistance) {
     Random random = new Random(SEED);
