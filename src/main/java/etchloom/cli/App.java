@@ -80,8 +80,7 @@ public final class App implements Runnable {
       console.err().println("error[disk]: " + e.getMessage());
       return ExitCode.DISK;
     }
-    console.err().println("error[fault]: a fault in Etchloom itself: " + trace(e));
-    return ExitCode.FAULT;
+    return crashed(e, console);
   }
 
   /** Where the full trace was put; a user gets one line. */
@@ -91,10 +90,15 @@ public final class App implements Runnable {
     try {
       Path file = Files.createTempFile("etchloom-fault-", ".txt");
       Files.writeString(file, text.toString());
-      return e.getClass().getSimpleName() + "; the full trace is in " + file;
+      return headline(e) + "; the full trace is in " + file;
     } catch (IOException io) {
       return e + "; no trace could be kept";
     }
+  }
+
+  private static String headline(Throwable e) {
+    String message = e.getMessage() == null ? "" : ": " + e.getMessage().lines().findFirst().orElse("");
+    return e.getClass().getSimpleName() + message;
   }
 
   /** A fault outside picocli's reach, such as memory running out. */

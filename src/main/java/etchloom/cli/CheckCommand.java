@@ -33,7 +33,7 @@ final class CheckCommand implements Callable<Integer> {
     InputFiles.Inputs in = InputFiles.read(spec, options.fab());
     Pipeline.Drawn drawn = Pipeline.run(in, false);
     console.warn(drawn.warnings());
-    FindingText.lines(drawn.rules()).forEach(console.err()::println);
+    drawn.rules().findings().forEach(f -> console.err().println(FindingText.line(f)));
     if (options.json()) {
       console.print(ReportJson.writeCheck(drawn.results()));
     } else if (!options.quiet()) {

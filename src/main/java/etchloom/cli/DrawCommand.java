@@ -1,11 +1,11 @@
 package etchloom.cli;
 
 import etchloom.report.FindingText;
-import etchloom.report.ReportJson;
 import etchloom.report.Summary;
+import etchloom.write.PublishFailure;
+import etchloom.write.Publisher;
 import java.nio.file.Path;
 import java.util.Optional;
-import java.util.SortedMap;
 import java.util.concurrent.Callable;
 import picocli.CommandLine.Command;
 import picocli.CommandLine.Mixin;
@@ -47,7 +47,7 @@ final class DrawCommand implements Callable<Integer> {
     InputFiles.Inputs in = InputFiles.read(spec, options.fab());
     Pipeline.Drawn drawn = Pipeline.run(in, false);
     console.warn(drawn.warnings());
-    FindingText.lines(drawn.rules()).forEach(console.err()::println);
+    drawn.rules().findings().forEach(f -> console.err().println(FindingText.line(f)));
     boolean passed = drawn.rules().passed();
     if (!passed && !force) {
       console.err().println("nothing was written; --force writes a set marked DRAFT");
@@ -57,15 +57,23 @@ final class DrawCommand implements Callable<Integer> {
       drawn = Pipeline.run(in, true);
     }
     Path target = target(in);
-    SortedMap<String, byte[]> files = SetFiles.of(drawn, OrderSheet.created(console));
-    Publishing.publish(target, files);
+    SetFiles set = SetFiles.of(drawn, OrderSheet.created(console));
+    publish(target, set);
     if (options.json()) {
-      console.print(ReportJson.write(drawn.results()));
+      console.print(set.files().get("report.json"));
     } else if (!options.quiet()) {
-      String where = target + ", " + files.size() + " files";
-      console.out().print(Summary.text(drawn.results(), Optional.of(where), console.colour()));
+      String where = target + ", " + set.files().size() + " files";
+      console.out().print(Summary.text(set.results(), Optional.of(where), console.colour()));
     }
     return passed ? ExitCode.DONE : ExitCode.REFUSED;
+  }
+
+  private static void publish(Path target, SetFiles set) {
+    try {
+      Publisher.publish(target, set.files());
+    } catch (PublishFailure e) {
+      throw new DiskTrouble(e.getMessage());
+    }
   }
 
   private Path target(InputFiles.Inputs in) {

@@ -9,7 +9,6 @@ import etchloom.proof.image.Plating;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
-import java.util.function.Predicate;
 
 /** The holes of drill files as holes of the board. */
 final class DrilledHoles {
@@ -17,13 +16,6 @@ final class DrilledHoles {
 
   /** Where no file says whether a hole is plated, it counts as not plated. */
   static List<Hole> of(List<DrillFile> files, int layers) {
-    return of(files, layers, p -> false);
-  }
-
-  /**
-   * @param plated whether a hole at a place is plated where no file says so
-   */
-  static List<Hole> of(List<DrillFile> files, int layers, Predicate<Point> plated) {
     List<Hole> out = new ArrayList<>();
     for (DrillFile f : files) {
       int from = f.fromLayer() > 0 ? f.fromLayer() : 1;
@@ -34,7 +26,7 @@ final class DrilledHoles {
                 h.at(),
                 Optional.empty(),
                 h.diameterMm(),
-                is(h.plating(), h.at(), plated),
+                h.plating() == Plating.PLATED,
                 from,
                 to,
                 h.nets(),
@@ -47,7 +39,7 @@ final class DrilledHoles {
                 middle(s.path()),
                 Optional.of(s.path()),
                 s.widthMm(),
-                is(s.plating(), middle(s.path()), plated),
+                s.plating() == Plating.PLATED,
                 from,
                 to,
                 s.nets(),
@@ -56,10 +48,6 @@ final class DrilledHoles {
       }
     }
     return out;
-  }
-
-  private static boolean is(Plating said, Point at, Predicate<Point> otherwise) {
-    return said == Plating.PLATED || (said != Plating.NON_PLATED && otherwise.test(at));
   }
 
   private static Point middle(Path path) {

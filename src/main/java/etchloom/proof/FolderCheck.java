@@ -6,8 +6,13 @@ import etchloom.proof.copper.CopperBuilder;
 import etchloom.proof.copper.Hole;
 import etchloom.proof.image.DrawnObject;
 import etchloom.proof.image.LayerImage;
+import etchloom.proof.image.LayerSet;
+import etchloom.proof.image.ReadWarning;
 import etchloom.proof.plane.Figure;
 import etchloom.proof.plane.OutOfRange;
+import etchloom.proof.read.SetFolder;
+import etchloom.proof.read.SetReader;
+import etchloom.proof.read.UnreadableFile;
 import java.util.Comparator;
 import java.util.List;
 import java.util.Locale;
@@ -17,7 +22,6 @@ import java.util.OptionalDouble;
 import java.util.OptionalInt;
 import java.util.SortedMap;
 import java.util.TreeMap;
-import java.util.function.Predicate;
 
 /**
  * Judges a folder of layer and drill files from any tool by what they say themselves: what hangs
@@ -30,66 +34,47 @@ public final class FolderCheck {
   /** Loops that are told by place. */
   private static final int TOLD = 12;
 
-  private final Request request;
+  private final OptionalInt circuits;
   private final Findings out = new Findings();
-  private final SetFiles set;
+  private final LayerSet set;
+  private final TreeMap<Integer, LayerImage> copper = new TreeMap<>();
+
+  private FolderCheck(LayerSet set, OptionalInt circuits) {
+    this.circuits = circuits;
+    this.set = set;
+    for (LayerImage i : set.copper()) {
+      copper.put(copper.size() + 1, i);
+    }
+  }
 
   /**
-   * @param layersByFile copper layers of files that do not say it themselves, by file name
+   * @param layerOptions as of {@link SetReader#read}
    * @param circuits independent closed circuits that the whole conductor should have
+   * @throws UnreadableFile when a file cannot be read, an option is wrong, or the copper layers are
+   *     not complete
    */
-  public record Request(Map<String, Integer> layersByFile, OptionalInt circuits) {
-    public Request {
-      layersByFile = new TreeMap<>(layersByFile);
-    }
-  }
-
-  private FolderCheck(SortedMap<String, byte[]> files, Request request) {
-    this.request = request;
-    this.set = new SetFiles(files, request.layersByFile(), out);
-  }
-
-  public static ProofReport check(SortedMap<String, byte[]> files, Request request) {
-    FolderCheck c = new FolderCheck(files, request);
+  public static ProofReport check(SetFolder folder, List<String> layerOptions, OptionalInt circuits)
+      throws UnreadableFile {
+    LayerSet set = SetReader.read(folder, layerOptions);
     try {
-      return c.check(files);
+      return new FolderCheck(set, circuits).check();
     } catch (OutOfRange r) {
-      c.out.add(ProofNames.UNREADABLE, "", r.getMessage());
-      return c.report(Optional.empty());
+      throw new UnreadableFile(folder.name(), 0, "copper", r.getMessage());
     }
   }
 
-  private ProofReport check(SortedMap<String, byte[]> files) {
-    set.warnings().forEach(w -> out.note(w.text()));
-    for (String name : request.layersByFile().keySet()) {
-      if (!files.containsKey(name)) {
-        out.add(ProofNames.MISSING_FILE, name, "there is no such file");
-      }
+  private ProofReport check() {
+    for (ReadWarning w : set.allWarnings()) {
+      out.note(w.file() + (w.line() > 0 ? ":" + w.line() : "") + ": " + w.message());
     }
-    set.unnamed()
-        .forEach(i -> out.note(i.fileName() + " does not say what it is and was left out"));
-    int layers = set.copper().isEmpty() ? 0 : set.copper().lastKey();
-    for (int l = 1; l <= layers; l++) {
-      if (!set.copper().containsKey(l)) {
-        out.add(ProofNames.MISSING_FILE, "", "no file says that it is copper L" + l);
-      }
+    List<Hole> holes = DrilledHoles.of(set.drills(), copper.size());
+    if (holes.isEmpty()) {
+      out.note("there is no drill file: layers count as not joined");
     }
-    if (layers == 0) {
-      out.add(
-          ProofNames.MISSING_FILE,
-          "",
-          "no file says that it is copper; name the layers with --layer L1=FILE");
-    }
-    set.job().ifPresent(j -> new JobProof(j, set, out).check(files.keySet(), layers));
-    if (layers == 0 || set.copper().size() < layers) {
-      return report(Optional.empty());
-    }
-    List<Figure> figures = figures(set.copper());
-    List<Hole> holes = holes(figures);
-    Connectivity net = new Connectivity(figures, holes);
+    Connectivity net = new Connectivity(figures(copper), holes);
     nets(net, holes);
     circuits(net);
-    return report(Optional.of(net));
+    return report(net);
   }
 
   private static List<Figure> figures(SortedMap<Integer, LayerImage> copper) {
@@ -97,26 +82,11 @@ public final class FolderCheck {
     return copper.values().stream().map(i -> builder.build(i.objects())).toList();
   }
 
-  /** A hole of which no file says whether it is plated counts as plated where it is in copper. */
-  private List<Hole> holes(List<Figure> copper) {
-    Predicate<Point> inCopper =
-        p -> copper.stream().anyMatch(f -> f.islandAt(Nm.of(p.x()), Nm.of(p.y())) >= 0);
-    List<Hole> gerber = DrilledHoles.of(set.gerberDrills(), copper.size(), inCopper);
-    List<Hole> nc = DrilledHoles.of(set.ncDrills(), copper.size(), inCopper);
-    if (gerber.isEmpty() && nc.isEmpty()) {
-      out.note("there is no drill file: layers count as not joined");
-    }
-    if (!gerber.isEmpty() && !nc.isEmpty()) {
-      HoleProof.compare(gerber, nc, out);
-    }
-    return gerber.isEmpty() ? nc : gerber;
-  }
-
   /** Parts etched from copper join nets by intent, so names are judged without them. */
   private void nets(Connectivity whole, List<Hole> holes) {
     TreeMap<Integer, LayerImage> wired = new TreeMap<>();
     boolean parts = false;
-    for (Map.Entry<Integer, LayerImage> e : set.copper().entrySet()) {
+    for (Map.Entry<Integer, LayerImage> e : copper.entrySet()) {
       LayerImage i = e.getValue();
       List<DrawnObject> some =
           i.objects().stream()
@@ -153,14 +123,14 @@ public final class FolderCheck {
                     ? " and at " + (net.loops().size() - TOLD) + " more places"
                     : "");
     String found = "the conductor closes on itself in " + is + (is == 1 ? " way" : " ways");
-    if (request.circuits().isEmpty()) {
+    if (circuits.isEmpty()) {
       out.note(
           found
               + "; whether that is right cannot be judged unless --circuits says how many are meant"
               + loops);
-    } else if (request.circuits().getAsInt() != is) {
+    } else if (circuits.getAsInt() != is) {
       Optional<Point> at = net.loops().stream().map(Connectivity.Loop::at).findFirst();
-      String message = found + ", it should in " + request.circuits().getAsInt() + loops;
+      String message = found + ", it should in " + circuits.getAsInt() + loops;
       out.add(new ProofFinding(ProofNames.CIRCUITS, "", 0, "", at, message));
     }
   }
@@ -175,22 +145,19 @@ public final class FolderCheck {
         l.areaMm2());
   }
 
-  private ProofReport report(Optional<Connectivity> net) {
+  private ProofReport report(Connectivity net) {
     TreeMap<Integer, Integer> islands = new TreeMap<>();
     TreeMap<Integer, Integer> loops = new TreeMap<>();
-    net.ifPresent(
-        n -> {
-          for (int l = 1; l <= n.layers(); l++) {
-            islands.put(l, n.copper(l).islands());
-            loops.put(l, n.loopsOn(l));
-          }
-        });
+    for (int l = 1; l <= net.layers(); l++) {
+      islands.put(l, net.copper(l).islands());
+      loops.put(l, net.loopsOn(l));
+    }
     return new ProofReport(
         islands,
         loops,
-        net.map(Connectivity::circuits).orElse(0),
-        request.circuits(),
-        net.map(Connectivity::pieces).orElse(0),
+        net.circuits(),
+        circuits,
+        net.pieces(),
         out.count(ProofNames.OPEN),
         out.count(ProofNames.SHORT),
         OptionalDouble.empty(),

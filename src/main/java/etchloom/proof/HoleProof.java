@@ -36,19 +36,6 @@ final class HoleProof {
     new HoleProof(file, out).check(wanted(e), holes);
   }
 
-  /** Holds the holes of NC files against those of Gerber files, where no design is known. */
-  static void compare(List<Hole> gerber, List<Hole> nc, Findings out) {
-    List<Wanted> wanted = new ArrayList<>();
-    for (Hole h : gerber) {
-      if (h.slot().isEmpty()) {
-        String what = "hole of " + h.file();
-        wanted.add(new Wanted(h.at(), h.diameterMm(), h.plated(), "", what));
-      }
-    }
-    List<Hole> round = nc.stream().filter(h -> h.slot().isEmpty()).toList();
-    new HoleProof(plated -> nc.get(0).file(), out).check(wanted, round);
-  }
-
   private static List<Wanted> wanted(ProofExpectation e) {
     List<Wanted> out = new ArrayList<>();
     for (Pad p : e.pads()) {

@@ -36,7 +36,7 @@ public final class Prover {
   private Prover(SortedMap<String, byte[]> files, ProofExpectation expected) {
     this.expected = expected;
     this.names = files.keySet();
-    this.set = new SetFiles(files, Map.of(), out);
+    this.set = new SetFiles(files, out);
   }
 
   /**

@@ -1,51 +1,47 @@
 package etchloom.proof;
 
 import etchloom.proof.image.DrillFile;
+import etchloom.proof.image.DxfFile;
 import etchloom.proof.image.JobFile;
 import etchloom.proof.image.LayerImage;
 import etchloom.proof.image.NetlistFile;
 import etchloom.proof.image.ReadWarning;
+import etchloom.proof.image.SvgFile;
 import etchloom.proof.read.DrillReader;
+import etchloom.proof.read.DxfReader;
 import etchloom.proof.read.GerberDrill;
 import etchloom.proof.read.GerberReader;
 import etchloom.proof.read.JobReader;
 import etchloom.proof.read.NetlistReader;
+import etchloom.proof.read.SvgReader;
 import etchloom.proof.read.UnreadableFile;
-import java.nio.charset.StandardCharsets;
 import java.util.ArrayList;
 import java.util.List;
-import java.util.Locale;
 import java.util.Map;
 import java.util.Optional;
 import java.util.SortedMap;
 import java.util.TreeMap;
 
 /**
- * The files of a set, read and sorted by what they say they are.
- *
- * <p>A file's name only tells its format; which layer it is comes from its attributes, unless the
- * caller says so.
+ * The files of a set that was just written, read and sorted by what they say they are: a file's
+ * name only tells its format, which layer it is comes from its attributes. A file that cannot be
+ * read is a finding, and the others are read all the same.
  */
 final class SetFiles {
-  private static final int SNIFFED = 4096;
-
   private final Findings out;
-  private final Map<String, Integer> said;
   private final TreeMap<Integer, LayerImage> copper = new TreeMap<>();
   private final TreeMap<String, LayerImage> byFunction = new TreeMap<>();
   private final List<DrillFile> gerberDrills = new ArrayList<>();
   private final List<DrillFile> ncDrills = new ArrayList<>();
   private final List<ProofFinding> warnings = new ArrayList<>();
-  private final List<LayerImage> unnamed = new ArrayList<>();
   private Optional<JobFile> job = Optional.empty();
   private Optional<NetlistFile> netlist = Optional.empty();
+  private Optional<DxfFile> drawing = Optional.empty();
+  private Optional<DxfFile> outlines = Optional.empty();
+  private Optional<SvgFile> picture = Optional.empty();
 
-  /**
-   * @param said copper layers of files whose attributes do not tell, by file name
-   */
-  SetFiles(SortedMap<String, byte[]> files, Map<String, Integer> said, Findings out) {
+  SetFiles(SortedMap<String, byte[]> files, Findings out) {
     this.out = out;
-    this.said = said;
     for (Map.Entry<String, byte[]> e : files.entrySet()) {
       try {
         read(e.getKey(), e.getValue());
@@ -57,23 +53,29 @@ final class SetFiles {
     }
   }
 
-  /** Formats by name; a folder of another tool has other names, so the first bytes tell too. */
   private void read(String name, byte[] bytes) throws UnreadableFile {
-    String low = name.toLowerCase(Locale.ROOT);
-    String head =
-        new String(bytes, 0, Math.min(bytes.length, SNIFFED), StandardCharsets.ISO_8859_1);
-    if (low.endsWith(".gbrjob")) {
-      job = Optional.of(JobReader.read(name, bytes));
-      warn(job.get().warnings());
-    } else if (low.endsWith(".ipc") || low.endsWith(".356") || low.endsWith(".d356")) {
-      netlist = Optional.of(NetlistReader.read(name, bytes));
-      warn(netlist.get().warnings());
-    } else if (low.endsWith(".xnc") || head.contains("M48")) {
+    if (name.endsWith(".gbr")) {
+      gerber(GerberReader.read(name, bytes));
+    } else if (name.endsWith(".xnc")) {
       DrillFile drill = DrillReader.read(name, bytes);
       ncDrills.add(drill);
       warn(drill.warnings());
-    } else if (low.endsWith(".gbr") || said.containsKey(name) || head.contains("%FS")) {
-      gerber(GerberReader.read(name, bytes));
+    } else if (name.endsWith(".gbrjob")) {
+      job = Optional.of(JobReader.read(name, bytes));
+      warn(job.get().warnings());
+    } else if (name.endsWith(".ipc")) {
+      netlist = Optional.of(NetlistReader.read(name, bytes));
+      warn(netlist.get().warnings());
+    } else if (name.endsWith(".dxf")) {
+      DxfFile dxf = DxfReader.read(name, bytes);
+      warn(dxf.warnings());
+      if (name.endsWith("-outlines.dxf")) {
+        outlines = Optional.of(dxf);
+      } else {
+        drawing = Optional.of(dxf);
+      }
+    } else if (name.endsWith(".svg")) {
+      picture = Optional.of(SvgReader.read(name, bytes));
     }
   }
 
@@ -89,7 +91,7 @@ final class SetFiles {
     warn(image.warnings());
     List<String> function = image.fileAttribute(".FileFunction");
     String kind = function.isEmpty() ? "" : function.get(0);
-    int layer = said.getOrDefault(image.fileName(), kind.equals("Copper") ? layer(function) : 0);
+    int layer = kind.equals("Copper") ? layer(function) : 0;
     if (layer > 0) {
       LayerImage before = copper.putIfAbsent(layer, image);
       if (before != null) {
@@ -97,8 +99,6 @@ final class SetFiles {
       }
     } else if (kind.equals("Plated") || kind.equals("NonPlated")) {
       gerberDrills.add(GerberDrill.of(image));
-    } else if (kind.isEmpty()) {
-      unnamed.add(image);
     } else {
       String full =
           kind.equals("Profile") ? kind : kind + (function.size() > 1 ? "," + function.get(1) : "");
@@ -158,11 +158,6 @@ final class SetFiles {
     return all;
   }
 
-  /** Gerber files that do not say what they are. */
-  List<LayerImage> unnamed() {
-    return unnamed;
-  }
-
   /** What the readers took with a doubt. */
   List<ProofFinding> warnings() {
     return warnings;
@@ -174,5 +169,19 @@ final class SetFiles {
 
   Optional<NetlistFile> netlist() {
     return netlist;
+  }
+
+  /** Centre lines with width. */
+  Optional<DxfFile> drawing() {
+    return drawing;
+  }
+
+  /** Closed outlines of the copper. */
+  Optional<DxfFile> outlines() {
+    return outlines;
+  }
+
+  Optional<SvgFile> picture() {
+    return picture;
   }
 }

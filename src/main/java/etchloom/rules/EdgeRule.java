@@ -12,7 +12,7 @@ final class EdgeRule implements LayerRule {
   @Override
   public void check(Layer layer, Verdicts verdicts) {
     Outline outline = layer.board().outline();
-    Nearby copper = layer.copper().nearby();
+    Nearby copper = layer.copper().nearby(Double.POSITIVE_INFINITY);
     for (Outline.Edge e : outline.edges()) {
       copper.look(
           e.shape(),

@@ -69,7 +69,7 @@ final class LegendRule implements Rule {
       for (int i = 0; i < fatMm.length; i++) {
         fatMm[i] = owner.get(i).widthMm() / 2;
       }
-      nearby = new Nearby(new ShapeTree(shapes, fatMm), shapes, fatMm);
+      nearby = new Nearby(new ShapeTree(shapes, fatMm), shapes, fatMm, Double.POSITIVE_INFINITY);
     }
 
     void check() {

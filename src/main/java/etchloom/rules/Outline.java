@@ -13,7 +13,7 @@ import java.util.List;
 /** The board's edge and its cut-outs: how large the board is, and what lies how deep in it. */
 final class Outline {
   /** Edges are cut into arcs no longer than this, so that searches along them stay local. */
-  private static final double PIECE_RAD = Math.PI / 16;
+  private static final double PIECE_RAD = Math.PI / 8;
 
   /**
    * A piece of the outline.

@@ -1,6 +1,7 @@
 package etchloom.proof;
 
 import static org.junit.jupiter.api.Assertions.assertEquals;
+import static org.junit.jupiter.api.Assertions.assertThrows;
 import static org.junit.jupiter.api.Assertions.assertTrue;
 
 import etchloom.artwork.Artwork;
@@ -10,8 +11,9 @@ import etchloom.geometry.Distance;
 import etchloom.geometry.Nearest;
 import etchloom.geometry.Point;
 import etchloom.geometry.Segment;
+import etchloom.proof.read.SetFolder;
+import etchloom.proof.read.UnreadableFile;
 import java.util.List;
-import java.util.Map;
 import java.util.OptionalInt;
 import java.util.SortedMap;
 import java.util.TreeMap;
@@ -29,8 +31,15 @@ class FolderCheckTest {
     windSet = WrittenSets.withoutSums(WrittenSets.write(wind));
   }
 
-  private static ProofReport check(SortedMap<String, byte[]> files, OptionalInt circuits) {
-    return FolderCheck.check(files, new FolderCheck.Request(Map.of(), circuits));
+  private static ProofReport check(
+      SortedMap<String, byte[]> files, OptionalInt circuits, String... layers) {
+    SortedMap<String, byte[]> readable = new TreeMap<>(files);
+    readable.keySet().removeIf(n -> n.endsWith(".txt") || n.endsWith(".zip"));
+    try {
+      return FolderCheck.check(new SetFolder("set", readable), List.of(layers), circuits);
+    } catch (UnreadableFile u) {
+      throw new AssertionError(u.getMessage(), u);
+    }
   }
 
   private static List<String> names(ProofReport r) {
@@ -95,12 +104,14 @@ class FolderCheckTest {
   }
 
   @Test
-  void missingVia_isAnOpenNet_andBothDrillFilesAreHeldAgainstEachOther() {
+  void missingVia_isAnOpenNet() {
     Joint j = wind.joints().stream().filter(x -> x.kind() == Joint.Kind.EYE).findFirst().get();
     String file = wind.slug() + "-plated.gbr";
-    ProofReport r = check(edited(file, xy(j.at()) + "D03*\n", ""), OptionalInt.empty());
-    assertEquals(List.of(ProofNames.EXTRA_HOLE, ProofNames.OPEN), names(r));
-    assertTrue(r.opens() == 1, r::toString);
+    SortedMap<String, byte[]> set = edited(file, xy(j.at()) + "D03*\n", "");
+    ProofReport r = check(set, OptionalInt.empty(), "plated=" + file);
+    assertEquals(List.of(ProofNames.OPEN), names(r));
+    assertTrue(r.findings().get(0).message().contains(j.net()), r::toString);
+    assertThrows(AssertionError.class, () -> check(set, OptionalInt.empty()));
   }
 
   @Test
@@ -109,11 +120,7 @@ class FolderCheckTest {
     files.put("a.gtl", gerber("X0Y0D02*\nX5000000Y0D01*\n"));
     files.put("b.gbl", gerber("X5000000Y0D02*\nX9000000Y0D01*\n"));
     files.put("h.drl", "M48\nMETRIC\nT01C0.3\n%\nT01\nX5.0Y0.0\nM30\n".getBytes(WrittenSets.ASCII));
-    ProofReport none = check(files, OptionalInt.empty());
-    assertEquals(List.of(ProofNames.MISSING_FILE), names(none));
-    ProofReport r =
-        FolderCheck.check(
-            files, new FolderCheck.Request(Map.of("a.gtl", 1, "b.gbl", 2), OptionalInt.of(0)));
+    ProofReport r = check(files, OptionalInt.of(0), "L1=a.gtl", "L2=b.gbl");
     assertEquals(List.of(), r.findings());
     assertEquals(1, r.nets());
     assertTrue(r.notes().stream().anyMatch(n -> n.contains("no file names any net")), r::toString);
