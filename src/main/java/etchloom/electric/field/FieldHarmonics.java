@@ -51,8 +51,15 @@ public final class FieldHarmonics {
     return sum(radiusMm, heightMm, true, s -> true);
   }
 
-  /** The part of {@link #at} that comes from some of the sheets and images. */
-  double[] at(double radiusMm, double heightMm, Predicate<ChargeSheet> which) {
+  /** The axial part of some sheets, T. */
+  double[] at(double radiusMm, double heightMm, List<ChargeSheet> some) {
+    double[] sum = new double[orders];
+    add(some, radiusMm, heightMm, false, sum);
+    return sum;
+  }
+
+  /** The axial part of all sheets and images but some, T; no tail may be among those. */
+  double[] rest(double radiusMm, double heightMm, Predicate<ChargeSheet> which) {
     return sum(radiusMm, heightMm, false, which);
   }
 
@@ -63,30 +70,25 @@ public final class FieldHarmonics {
     int k = 0;
     while (true) {
       List<ChargeSheet> group = iron.group(array.sheets(), k);
-      double most = add(group, which, radiusMm, heightMm, radial, sum);
-      boolean small = k > 0 && most <= MagnetArray.IMAGE_SHARE * largest(sum);
+      List<ChargeSheet> some = group.stream().filter(which).toList();
+      double most = add(some, radiusMm, heightMm, radial, sum);
+      // Only whole groups add up to nought and so fall fast enough to be judged by.
+      boolean whole = k > 0 && some.size() == group.size();
+      boolean small = whole && most <= MagnetArray.IMAGE_SHARE * largest(sum);
       if (!iron.endless() || small || k == MagnetArray.MOST_GROUPS) {
         break;
       }
       k++;
     }
-    add(iron.tail(array.sheets(), k), which, radiusMm, heightMm, radial, sum);
+    add(iron.tail(array.sheets(), k), radiusMm, heightMm, radial, sum);
     return sum;
   }
 
   /** Adds a group's part and gives its largest amplitude. */
   private double add(
-      List<ChargeSheet> group,
-      Predicate<ChargeSheet> which,
-      double radiusMm,
-      double heightMm,
-      boolean radial,
-      double[] sum) {
+      List<ChargeSheet> group, double radiusMm, double heightMm, boolean radial, double[] sum) {
     Arrays.fill(part, 0);
     for (ChargeSheet s : group) {
-      if (!which.test(s)) {
-        continue;
-      }
       double charge = s.charge() * array.remanenceTesla();
       double over = heightMm - s.heightMm();
       if (radial) {

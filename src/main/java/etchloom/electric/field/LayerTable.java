@@ -3,7 +3,6 @@ package etchloom.electric.field;
 import java.util.ArrayList;
 import java.util.Arrays;
 import java.util.List;
-import java.util.function.Predicate;
 
 /**
  * The harmonics at one height over the radius, in a few tables by the faces' distance: a near
@@ -33,10 +32,19 @@ final class LayerTable {
       boolean last = tables.size() == MOST_TABLES - 1;
       double least = from;
       double most = last ? Double.POSITIVE_INFINITY : BAND * scale;
-      Predicate<ChargeSheet> which = s -> off(s, heightMm) > least && off(s, heightMm) <= most;
-      int some = Math.min(orders, FieldHarmonics.ordersFor(array, scale));
+      FieldHarmonics harmonics =
+          new FieldHarmonics(array, Math.min(orders, FieldHarmonics.ordersFor(array, scale)));
+      List<ChargeSheet> band =
+          upTo(array, heightMm, most).stream().filter(s -> off(s, heightMm) > least).toList();
       double[] knot = knots(array.shape(), scale, innerMm, outerMm);
-      tables.add(table(new FieldHarmonics(array, some), knot, heightMm, which));
+      double[][] rows = new double[knot.length][];
+      for (int i = 0; i < knot.length; i++) {
+        rows[i] =
+            last
+                ? harmonics.rest(knot[i], heightMm, s -> off(s, heightMm) > least)
+                : harmonics.at(knot[i], heightMm, band);
+      }
+      tables.add(new RadialTable(knot, rows));
       from = most;
       scale = nearest(array, heightMm, from);
     }
@@ -46,26 +54,40 @@ final class LayerTable {
     return Math.abs(s.heightMm() - heightMm);
   }
 
+  /** All faces and images up to a distance; those of the first group only where it is infinite. */
+  private static List<ChargeSheet> upTo(MagnetArray array, double heightMm, double mostMm) {
+    List<ChargeSheet> out = new ArrayList<>();
+    for (int k = 0; k <= MagnetArray.MOST_GROUPS; k++) {
+      List<ChargeSheet> group = array.iron().group(array.sheets(), k);
+      out.addAll(group.stream().filter(s -> off(s, heightMm) <= mostMm).toList());
+      boolean beyond = group.stream().allMatch(s -> off(s, heightMm) > mostMm);
+      if (!array.iron().endless() || beyond || mostMm == Double.POSITIVE_INFINITY) {
+        break;
+      }
+    }
+    return out;
+  }
+
   /** Distance of the nearest face or image beyond a distance; infinite where there is none. */
   private static double nearest(MagnetArray array, double heightMm, double beyondMm) {
     double least = Double.POSITIVE_INFINITY;
-    for (int k = 0; k < (array.iron().endless() ? MOST_TABLES : 1); k++) {
+    if (beyondMm == Double.POSITIVE_INFINITY) {
+      return least;
+    }
+    boolean found = false;
+    for (int k = 0; k <= MagnetArray.MOST_GROUPS; k++) {
       for (ChargeSheet s : array.iron().group(array.sheets(), k)) {
         if (off(s, heightMm) > beyondMm) {
           least = Math.min(least, off(s, heightMm));
         }
       }
+      // The group after the first that has any may still hold a nearer one; later ones may not.
+      if (!array.iron().endless() || found) {
+        break;
+      }
+      found = least < Double.POSITIVE_INFINITY;
     }
     return least;
-  }
-
-  private static RadialTable table(
-      FieldHarmonics harmonics, double[] knot, double heightMm, Predicate<ChargeSheet> which) {
-    double[][] rows = new double[knot.length][];
-    for (int i = 0; i < knot.length; i++) {
-      rows[i] = harmonics.at(knot[i], heightMm, which);
-    }
-    return new RadialTable(knot, rows);
   }
 
   private static double[] knots(MagnetShape shape, double scale, double inner, double outer) {

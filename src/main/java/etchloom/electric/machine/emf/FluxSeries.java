@@ -9,7 +9,10 @@ public final class FluxSeries {
   private final double[] re;
   private final double[] im;
 
-  FluxSeries(int polePairs, double[] re, double[] im) {
+  /**
+   * @param re of each odd order, the fundamental first, V·s/rad
+   */
+  public FluxSeries(int polePairs, double[] re, double[] im) {
     this.polePairs = polePairs;
     this.re = re.clone();
     this.im = im.clone();
