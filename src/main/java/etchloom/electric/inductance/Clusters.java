@@ -1,150 +1,117 @@
 package etchloom.electric.inductance;
 
 import etchloom.electric.field.GaussRule;
-import java.util.Arrays;
 import java.util.List;
 
 /**
- * Filaments in a tree of clusters: each is halved across its longest side until few are left. Every
- * cluster knows the ball that holds its filaments and its multipole moments.
+ * A body of filaments in a tree of clusters. Every cluster knows the ball that holds its copper and
+ * its multipole moments.
  */
 final class Clusters {
-  /** A cluster of no more filaments is not halved. */
-  static final int LEAF = 20;
+  /** Most filaments of a cluster without children: where pairs and moments cost about the same. */
+  private static final int LEAF = 20;
 
-  /** Exact for the moments of a straight piece up to the fifth degree. */
+  /**
+   * Sum of radii over distance at which leaves count as far. With the fourth order this leaves a
+   * coupling 1e-5 of the larger self coupling off.
+   */
+  private static final double OPENING = 0.75;
+
+  /** Larger clusters must be further apart, by this power of their size: more is at stake. */
+  private static final double GROWTH = 0.1;
+
+  /** Exact for a straight piece's moments up to the fifth degree. */
   private static final GaussRule ALONG = new GaussRule(3);
 
   final Pieces pieces;
-  private final List<CrossSection> sections;
-  private final Filaments filaments;
-  private final int[] order;
 
-  /** Range of pieces, and the first child (the other follows it) or 0 for a leaf. */
-  int[] from = new int[64];
+  /** Each cluster's range of pieces. */
+  final int[] from;
 
-  int[] to = new int[64];
-  int[] child = new int[64];
-  double[] x = new double[64];
-  double[] y = new double[64];
-  double[] z = new double[64];
-  double[] radius = new double[64];
-  double[] moment;
-  private int count;
+  final int[] to;
 
-  Clusters(Filaments f, List<CrossSection> sections) {
-    if (f.size() == 0) {
+  /** Each cluster's first child, the second follows it; 0 for a leaf. */
+  final int[] child;
+
+  /** Centres. */
+  final double[] x;
+
+  final double[] y;
+  final double[] z;
+
+  /** Two clusters are far when these two add up to less than the distance of their centres. */
+  final double[] reach;
+
+  /** All clusters' moments, {@link Expansion#VALUES} each. */
+  final double[] moment;
+
+  private final double[] radius;
+
+  Clusters(Filaments filaments, List<CrossSection> sections) {
+    if (filaments.size() == 0) {
       throw new IllegalArgumentException("no filaments");
     }
-    this.filaments = f;
-    this.sections = sections;
-    order = new int[f.size()];
-    for (int i = 0; i < order.length; i++) {
-      order[i] = i;
-    }
-    add(0, order.length);
-    for (int c = 0; c < count; c++) {
-      halve(c);
-    }
-    pieces = new Pieces(f, sections, order);
-    moment = new double[count * 2 * Expansion.TERMS];
+    Halving tree = new Halving(filaments, sections, LEAF);
+    pieces = new Pieces(filaments, sections, tree.order);
+    from = tree.from;
+    to = tree.to;
+    child = tree.child;
+    int n = tree.count;
+    x = new double[n];
+    y = new double[n];
+    z = new double[n];
+    radius = new double[n];
+    reach = new double[n];
+    moment = new double[n * Expansion.VALUES];
     Expansion expansion = new Expansion();
-    for (int c = count - 1; c >= 0; c--) {
+    for (int c = n - 1; c >= 0; c--) {
       if (child[c] == 0) {
         leaf(c, expansion);
       } else {
         join(c, expansion);
       }
+      double size = (double) (to[c] - from[c]) / LEAF;
+      reach[c] = radius[c] * Math.pow(size, GROWTH) / OPENING;
     }
+  }
+
+  /** Another's clusters, turned. */
+  private Clusters(Clusters other, double c, double s) {
+    pieces = other.pieces.turned(c, s);
+    from = other.from;
+    to = other.to;
+    child = other.child;
+    z = other.z;
+    radius = other.radius;
+    reach = other.reach;
+    x = new double[z.length];
+    y = new double[z.length];
+    for (int i = 0; i < z.length; i++) {
+      x[i] = c * other.x[i] - s * other.y[i];
+      y[i] = s * other.x[i] + c * other.y[i];
+    }
+    moment = new Turn(c, s).of(other.moment);
+  }
+
+  /** The same body turned counter-clockwise about the shaft. */
+  Clusters turned(double rad) {
+    return new Clusters(this, Math.cos(rad), Math.sin(rad));
   }
 
   int size() {
     return pieces.size;
   }
 
-  /** Where a cluster's moments begin. */
-  static int moments(int cluster) {
-    return cluster * 2 * Expansion.TERMS;
-  }
-
-  private int add(int first, int last) {
-    if (count == from.length) {
-      from = Arrays.copyOf(from, 2 * count);
-      to = Arrays.copyOf(to, 2 * count);
-      child = Arrays.copyOf(child, 2 * count);
-      x = Arrays.copyOf(x, 2 * count);
-      y = Arrays.copyOf(y, 2 * count);
-      z = Arrays.copyOf(z, 2 * count);
-      radius = Arrays.copyOf(radius, 2 * count);
-    }
-    from[count] = first;
-    to[count] = last;
-    return count++;
-  }
-
-  /** Finds a cluster's centre and, if it is large, cuts it in two. */
-  private void halve(int c) {
-    double[] least = {Double.MAX_VALUE, Double.MAX_VALUE, Double.MAX_VALUE};
-    double[] most = {-Double.MAX_VALUE, -Double.MAX_VALUE, -Double.MAX_VALUE};
-    for (int k = from[c]; k < to[c]; k++) {
-      for (int axis = 0; axis < 3; axis++) {
-        double at = place(order[k], axis);
-        double half = axis == 2 ? 0 : halfExtent(order[k], axis);
-        least[axis] = Math.min(least[axis], at - half);
-        most[axis] = Math.max(most[axis], at + half);
-      }
-    }
-    x[c] = (least[0] + most[0]) / 2;
-    y[c] = (least[1] + most[1]) / 2;
-    z[c] = (least[2] + most[2]) / 2;
-    int n = to[c] - from[c];
-    if (n <= LEAF) {
-      return;
-    }
-    int axis = 0;
-    for (int k = 1; k < 3; k++) {
-      if (most[k] - least[k] > most[axis] - least[axis]) {
-        axis = k;
-      }
-    }
-    int middle = part(from[c], to[c], axis, (least[axis] + most[axis]) / 2);
-    if (middle == from[c] || middle == to[c]) {
-      middle = from[c] + n / 2;
-    }
-    child[c] = add(from[c], middle);
-    add(middle, to[c]);
-  }
-
-  private double place(int i, int axis) {
-    return axis == 0
-        ? filaments.x(i)
-        : axis == 1 ? filaments.y(i) : sections.get(filaments.section(i)).heightMm();
-  }
-
-  private double halfExtent(int i, int axis) {
-    return Math.abs(axis == 0 ? filaments.ux(i) : filaments.uy(i)) * filaments.length(i) / 2;
-  }
-
-  /** Those below the cut first; gives where the others begin. */
-  private int part(int first, int last, int axis, double cut) {
-    int low = first;
-    int high = last - 1;
-    while (low <= high) {
-      if (place(order[low], axis) < cut) {
-        low++;
-      } else {
-        int swap = order[low];
-        order[low] = order[high];
-        order[high--] = swap;
-      }
-    }
-    return low;
-  }
-
   private void leaf(int c, Expansion expansion) {
     Pieces p = pieces;
-    int at = moments(c);
-    double r2 = 0;
+    for (int i = from[c]; i < to[c]; i++) {
+      double share = 1.0 / (to[c] - from[c]);
+      x[c] += share * p.x[i];
+      y[c] += share * p.y[i];
+      z[c] += share * p.height[i];
+    }
+    int at = c * Expansion.VALUES;
+    double square = 0;
     for (int i = from[c]; i < to[c]; i++) {
       double half = p.length[i] / 2;
       double dx = p.x[i] - x[c];
@@ -153,31 +120,45 @@ final class Clusters {
       for (int g = 0; g < ALONG.size(); g++) {
         double t = half * ALONG.node(g);
         double w = ALONG.weight(g) / 2;
-        expansion.addPoint(
-            dx + t * p.ux[i], dy + t * p.uy[i], dz, w * p.jx[i], w * p.jy[i], moment, at);
+        double px = dx + t * p.ux[i];
+        double py = dy + t * p.uy[i];
+        expansion.addPoint(px, py, dz, w * p.jx[i], w * p.jy[i], moment, at);
       }
-      CrossSection s = sections.get(p.section[i]);
-      double across = s.widthMm() * s.widthMm() / 24;
-      double xx = across * p.uy[i] * p.uy[i];
-      double xy = -across * p.ux[i] * p.uy[i];
-      double yy = across * p.ux[i] * p.ux[i];
-      Expansion.addSpread(xx, xy, yy, p.qzz[i], p.jx[i], moment, at);
-      Expansion.addSpread(xx, xy, yy, p.qzz[i], p.jy[i], moment, at + Expansion.TERMS);
+      double along = p.length[i] * p.length[i] / 24;
+      double xx = p.qxx[i] - along * p.ux[i] * p.ux[i];
+      double xy = p.qxy[i] - along * p.ux[i] * p.uy[i];
+      double yy = p.qyy[i] - along * p.uy[i] * p.uy[i];
+      expansion.addSpread(xx, xy, yy, p.qzz[i], p.jx[i], p.jy[i], moment, at);
       double end = Math.abs(dx * p.ux[i] + dy * p.uy[i]) + half;
-      double aside = dx * p.uy[i] - dy * p.ux[i];
-      r2 = Math.max(r2, end * end + aside * aside + dz * dz);
+      double aside = Math.abs(dx * p.uy[i] - dy * p.ux[i]) + p.width[i] / 2;
+      square = Math.max(square, end * end + aside * aside + dz * dz);
     }
-    radius[c] = Math.sqrt(r2);
+    radius[c] = Math.sqrt(square);
   }
 
   private void join(int c, Expansion expansion) {
-    for (int k = child[c]; k < child[c] + 2; k++) {
-      double dx = x[k] - x[c];
-      double dy = y[k] - y[c];
-      double dz = z[k] - z[c];
-      expansion.addShifted(dx, dy, dz, moment, moments(k), moment, moments(c));
-      double far = Math.sqrt(dx * dx + dy * dy + dz * dz) + radius[k];
-      radius[c] = Math.max(radius[c], far);
+    int first = child[c];
+    int second = first + 1;
+    double dx = x[second] - x[first];
+    double dy = y[second] - y[first];
+    double dz = z[second] - z[first];
+    double apart = Math.sqrt(dx * dx + dy * dy + dz * dz);
+    radius[c] = Math.max((apart + radius[first] + radius[second]) / 2, radius[first]);
+    radius[c] = Math.max(radius[c], radius[second]);
+    // The smallest ball round both: from the far side of the one to the far side of the other.
+    double t = apart == 0 ? 0 : (radius[c] - radius[first]) / apart;
+    t = Math.max(0, Math.min(1, t));
+    x[c] = x[first] + t * dx;
+    y[c] = y[first] + t * dy;
+    z[c] = z[first] + t * dz;
+    for (int k = first; k <= second; k++) {
+      expansion.addShifted(
+          x[k] - x[c],
+          y[k] - y[c],
+          z[k] - z[c],
+          moment,
+          k * Expansion.VALUES,
+          c * Expansion.VALUES);
     }
   }
 }

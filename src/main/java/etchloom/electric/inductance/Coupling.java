@@ -1,14 +1,7 @@
 package etchloom.electric.inductance;
 
-/**
- * Neumann's integral between two bodies of filaments, mm, clusters far apart taken as wholes.
- *
- * <p>Two clusters count as far where their radii together are at most {@value #OPENING} of the
- * distance of their centres.
- */
+/** Neumann's integral between two bodies of filaments, mm, clusters far apart taken as wholes. */
 final class Coupling {
-  static final double OPENING = 0.75;
-
   private final Clusters a;
   private final Clusters b;
   private final Mirror mirror;
@@ -39,9 +32,9 @@ final class Coupling {
           b.y[j] - a.y[i],
           mirror.heightMm(b.z[j]) - a.z[i],
           a.moment,
-          Clusters.moments(i),
+          i * Expansion.VALUES,
           b.moment,
-          Clusters.moments(j),
+          j * Expansion.VALUES,
           mirror.sign() < 0);
     }
     int ci = a.child[i];
@@ -58,12 +51,12 @@ final class Coupling {
     double dx = b.x[j] - a.x[i];
     double dy = b.y[j] - a.y[i];
     double dz = mirror.heightMm(b.z[j]) - a.z[i];
-    double radii = a.radius[i] + b.radius[j];
-    return radii * radii < OPENING * OPENING * (dx * dx + dy * dy + dz * dz);
+    double reach = a.reach[i] + b.reach[j];
+    return reach * reach < dx * dx + dy * dy + dz * dz;
   }
 
   /** Whether the first is to be halved rather than the second; not both leaves. */
   boolean splitFirst(int i, int j) {
-    return b.child[j] == 0 || a.child[i] != 0 && a.radius[i] >= b.radius[j];
+    return b.child[j] == 0 || a.child[i] != 0 && a.reach[i] >= b.reach[j];
   }
 }

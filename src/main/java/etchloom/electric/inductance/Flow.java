@@ -52,9 +52,11 @@ record Flow(Artwork artwork, Currents coil, List<Currents> phases) {
   Filaments phaseFilaments(BoardCopper copper, int phase, boolean coilsToo, boolean closed) {
     Filaments out = new Filaments();
     Currents currents = phases.get(phase);
+    boolean[] inCoil = new boolean[artwork.conductors().size()];
+    artwork.coils().forEach(c -> c.conductors().forEach(id -> inCoil[id] = true));
     for (Conductor c : artwork.conductors()) {
       double ampere = currents.ofConductor(c.id());
-      if (ampere != 0 && (coilsToo || c.what().coil() == 0)) {
+      if (ampere != 0 && (coilsToo || !inCoil[c.id()])) {
         copper.add(c.id(), ampere, out);
       }
     }

@@ -15,6 +15,10 @@ final class PhaseBodies {
 
   private final int phases;
   private final List<Filaments> filaments = new ArrayList<>();
+
+  /** By how much each body is turned from the one that its filaments are. */
+  private final List<Double> turnRad = new ArrayList<>();
+
   private final List<Term> terms = new ArrayList<>();
   private Clusters[] bodies = {};
 
@@ -61,9 +65,7 @@ final class PhaseBodies {
   private void coils(Filaments coil, Repeats repeats) {
     int n = repeats.coils();
     for (int k = 0; k <= n / 2; k++) {
-      Filaments f = new Filaments();
-      f.addTurned(coil, k * repeats.pitchRad(), 1);
-      double[] share = term(0, body(f));
+      double[] share = term(0, body(coil, k * repeats.pitchRad()));
       share[0] = k == 0 ? 1 : 0;
       for (int i = 0; i < n; i++) {
         for (int j = 0; j < n; j++) {
@@ -113,7 +115,12 @@ final class PhaseBodies {
   }
 
   private int body(Filaments f) {
+    return body(f, 0);
+  }
+
+  private int body(Filaments f, double rad) {
     filaments.add(f);
+    turnRad.add(rad);
     return filaments.size() - 1;
   }
 
@@ -125,7 +132,20 @@ final class PhaseBodies {
 
   private PhaseBodies clustered(BoardCopper copper) {
     bodies = new Clusters[filaments.size()];
-    Workers.run(bodies.length, i -> bodies[i] = new Clusters(filaments.get(i), copper.sections()));
+    Workers.run(
+        bodies.length,
+        i -> {
+          if (turnRad.get(i) == 0) {
+            bodies[i] = new Clusters(filaments.get(i), copper.sections());
+          }
+        });
+    Workers.run(
+        bodies.length,
+        i -> {
+          if (turnRad.get(i) != 0) {
+            bodies[i] = bodies[filaments.indexOf(filaments.get(i))].turned(turnRad.get(i));
+          }
+        });
     return this;
   }
 
