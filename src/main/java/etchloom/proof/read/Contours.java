@@ -45,10 +45,14 @@ final class Contours {
 
   /** Cut at its top and bottom, between which y only rises or falls. */
   private static boolean crosses(Arc a, Point p) {
+    double r = a.radiusMm();
+    double reach = r + 2 * Arc.RADIUS_SLACK_MM;
+    if (Math.abs(p.y() - a.centre().y()) > reach || p.x() > a.centre().x() + reach) {
+      return false;
+    }
     boolean in = false;
     double from = a.startRad();
     double sweep = a.sweepRad();
-    double r = a.radiusMm();
     double at = from;
     double lastY = a.start().y();
     double end = from + sweep;
