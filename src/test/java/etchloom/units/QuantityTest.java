@@ -11,6 +11,7 @@ import java.util.Random;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.CsvSource;
+import org.junit.jupiter.params.provider.EnumSource;
 
 /** Numbers with units, read and written. */
 class QuantityTest {
@@ -148,14 +149,13 @@ class QuantityTest {
     assertEquals(text, QuantityText.of(base, dimension, unit));
   }
 
-  @Test
-  void written_readsBackToTheLastBit() {
+  @ParameterizedTest(name = "{0}")
+  @EnumSource
+  void written_readsBackToTheLastBit(Dimension d) {
     Random random = new Random(5);
-    for (int i = 0; i < 20_000; i++) {
-      Dimension d = Dimension.values()[random.nextInt(Dimension.values().length)];
+    for (int i = 0; i < 1_000; i++) {
       Unit unit = d.units().get(random.nextInt(d.units().size()));
-      double exponent = Math.pow(10, random.nextInt(12) - 6);
-      double base = (random.nextDouble() - 0.5) * exponent;
+      double base = (random.nextDouble() - 0.5) * Math.pow(10, random.nextInt(12) - 6);
       String text = QuantityText.of(base, d, unit.symbol());
       assertEquals(base, Quantity.read(text, d).value(), 0, text);
       assertEquals(base, Quantity.readBare(QuantityText.bare(base)).value(), 0);
