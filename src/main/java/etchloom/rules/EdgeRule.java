@@ -58,7 +58,7 @@ final class EdgeRule implements LayerRule {
                 at,
                 depthMm,
                 layer.board().fab().edge().copperMm(),
-                () -> layer.words(layer.copper().pieces().get(i)) + " and " + edge)
+                Words.of(layer.words(layer.copper().pieces().get(i)), " and ", edge))
             .byMargin()
             .ids(i, 0));
   }
