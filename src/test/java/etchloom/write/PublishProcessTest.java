@@ -15,7 +15,7 @@ import org.junit.jupiter.api.io.TempDir;
 /** The publisher against real processes: killed by the system, and two of them at once. */
 class PublishProcessTest {
   /** More with {@code -Detchloom.kills=50}; each costs the start of a Java machine. */
-  private static final int KILLS = Integer.getInteger("etchloom.kills", 10);
+  private static final int KILLS = Integer.getInteger("etchloom.kills", 20);
 
   private static final int FOREVER = 1_000_000;
 
