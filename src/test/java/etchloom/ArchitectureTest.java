@@ -42,7 +42,19 @@ class ArchitectureTest {
               List.of(
                   "geometry", "spec", "winding", "coil", "rim", "artwork", "diagnostic", "units")),
           Map.entry("write", List.of("artwork", "geometry", "units")),
-          Map.entry("proof", List.of("artwork", "geometry", "units", "diagnostic")));
+          Map.entry("proof", List.of("artwork", "geometry", "units", "diagnostic")),
+          Map.entry(
+              "report",
+              List.of(
+                  "artwork",
+                  "winding",
+                  "spec",
+                  "rules",
+                  "electric",
+                  "proof",
+                  "units",
+                  "geometry",
+                  "diagnostic")));
 
   static Stream<String> packages() {
     return MAY_USE.keySet().stream().sorted();

@@ -53,7 +53,9 @@ public final class Assembler {
       Spec spec, FabRules fab, Positions positions, boolean draft) {
     Assembler a = new Assembler(spec, fab, positions, draft);
     Optional<Assembly> out = a.assemble();
-    return a.problems.any() ? Staged.failed(a.problems.list()) : Staged.of(out.orElseThrow());
+    return a.problems.any()
+        ? Staged.failed(a.problems.list())
+        : Staged.of(out.orElseThrow(), a.problems.list());
   }
 
   private Optional<Assembly> assemble() {
@@ -191,6 +193,12 @@ public final class Assembler {
     Mask mask = Mask.over(copper.joints(), holes, fab.mask().expansionMm());
     PlacedLegend legend =
         new LegendBuilder(spec, fab, copper.joints(), holes, mask.top()).build(draft);
+    if (!legend.leftOut().isEmpty()) {
+      problems.warn(
+          "legend",
+          "board.diameter",
+          "the legend has no room for " + String.join(", ", legend.leftOut()));
+    }
     Artwork art =
         new Artwork(
             spec.title(),

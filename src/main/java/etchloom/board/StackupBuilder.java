@@ -82,6 +82,7 @@ final class StackupBuilder {
               b.thicknessMm()));
       rest = 0.1 * gaps;
     }
+    double room = rest;
     List<Double> given = b.stackupMm();
     if (given.isEmpty()) {
       given =
@@ -89,6 +90,7 @@ final class StackupBuilder {
               .filter(s -> s.layers() == b.layers())
               .filter(s -> Math.abs(s.thicknessMm() - b.thicknessMm()) < SAME_THICKNESS_MM)
               .map(FabRules.Stackup::dielectricsMm)
+              .filter(d -> fits(d, room)) // made for lighter copper: not this board's
               .findFirst()
               .orElse(List.of());
     }
@@ -102,11 +104,16 @@ final class StackupBuilder {
     return fitted(given, rest, problems);
   }
 
+  private static boolean fits(List<Double> given, double rest) {
+    double sum = given.stream().mapToDouble(Double::doubleValue).sum();
+    return Math.abs(rest - sum) <= FIT * rest;
+  }
+
   /** The thickest dielectrics take up what is left over, so that all adds up to the thickness. */
   private static List<Double> fitted(List<Double> given, double rest, Problems problems) {
     double sum = given.stream().mapToDouble(Double::doubleValue).sum();
     double over = rest - sum;
-    if (Math.abs(over) > FIT * rest) {
+    if (!fits(given, rest)) {
       problems.add(
           "stackup",
           "board.stackup",

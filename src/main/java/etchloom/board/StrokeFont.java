@@ -97,7 +97,8 @@ final class StrokeFont {
             .replaceAll("\\p{M}", "")
             .toUpperCase(Locale.ROOT);
     StringBuilder out = new StringBuilder();
-    for (char c : upper.toCharArray()) {
+    for (int i = 0; i < upper.length(); i++) {
+      char c = upper.charAt(i);
       out.append(c == ' ' || GLYPHS.containsKey(c) ? c : '-');
     }
     return out.toString();

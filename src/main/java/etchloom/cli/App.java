@@ -15,6 +15,8 @@ import picocli.CommandLine.Spec;
 /** The program: its commands, and what becomes of what goes wrong in them. */
 @Command(
     name = "etchloom",
+    mixinStandardHelpOptions = true,
+    version = "etchloom " + Version.TEXT,
     description = {
       "Draws printed-circuit stators: reads one YAML spec, writes the copper, drill, mask, legend"
           + " and netlist files a board fab needs, checks them against the fab's rules, and reports"
@@ -45,10 +47,7 @@ public final class App implements Runnable {
     PrintWriter err = new PrintWriter(console.err(), true, StandardCharsets.UTF_8);
     line.setOut(out).setErr(err);
     line.setUsageHelpWidth(80).setUsageHelpAutoWidth(false);
-    boolean colour = console.variable("NO_COLOR").isEmpty() && System.console() != null;
-    line.setColorScheme(
-        CommandLine.Help.defaultColorScheme(
-            colour ? CommandLine.Help.Ansi.AUTO : CommandLine.Help.Ansi.OFF));
+    line.setColorScheme(CommandLine.Help.defaultColorScheme(CommandLine.Help.Ansi.OFF));
     line.setParameterExceptionHandler(App::misused);
     line.setExecutionExceptionHandler((e, c, r) -> failed(e, console));
     int code = line.execute(args);
@@ -57,22 +56,9 @@ public final class App implements Runnable {
     return code;
   }
 
-  @picocli.CommandLine.Option(
-      names = {"-h", "--help"},
-      usageHelp = true,
-      description = "show this text")
-  private boolean help;
-
-  @picocli.CommandLine.Option(names = "--version", description = "show the version")
-  private boolean version;
-
   @Override
   public void run() {
-    if (version) {
-      spec.commandLine().getOut().println("etchloom " + Version.TEXT);
-    } else {
-      spec.commandLine().usage(spec.commandLine().getOut());
-    }
+    spec.commandLine().usage(spec.commandLine().getOut());
   }
 
   private static int misused(CommandLine.ParameterException e, String[] args) {
@@ -94,8 +80,7 @@ public final class App implements Runnable {
       console.err().println("error[disk]: " + e.getMessage());
       return ExitCode.DISK;
     }
-    console.err().println("error[fault]: a fault in Etchloom itself: " + trace(e));
-    return ExitCode.FAULT;
+    return crashed(e, console);
   }
 
   /** Where the full trace was put; a user gets one line. */
@@ -105,10 +90,16 @@ public final class App implements Runnable {
     try {
       Path file = Files.createTempFile("etchloom-fault-", ".txt");
       Files.writeString(file, text.toString());
-      return e.getClass().getSimpleName() + "; the full trace is in " + file;
+      return headline(e) + "; the full trace is in " + file;
     } catch (IOException io) {
       return e + "; no trace could be kept";
     }
+  }
+
+  private static String headline(Throwable e) {
+    String message =
+        e.getMessage() == null ? "" : ": " + e.getMessage().lines().findFirst().orElse("");
+    return e.getClass().getSimpleName() + message;
   }
 
   /** A fault outside picocli's reach, such as memory running out. */

@@ -1,12 +1,44 @@
 package etchloom.cli;
 
+import etchloom.report.FindingText;
+import etchloom.report.ReportJson;
+import etchloom.report.Summary;
+import java.util.Optional;
 import java.util.concurrent.Callable;
+import picocli.CommandLine.Command;
+import picocli.CommandLine.Mixin;
+import picocli.CommandLine.Parameters;
 
+/** {@code check SPEC}: the rule check alone, nothing written. */
+@Command(
+    name = "check",
+    mixinStandardHelpOptions = true,
+    description = "Checks a spec's board against the fab's rules; writes nothing.",
+    sortOptions = false,
+    synopsisHeading = "Usage: ")
 final class CheckCommand implements Callable<Integer> {
-  CheckCommand(Console console) {}
+  private final Console console;
+
+  @Parameters(paramLabel = "SPEC", description = "the spec, a YAML file")
+  private String spec;
+
+  @Mixin private CommonOptions options;
+
+  CheckCommand(Console console) {
+    this.console = console;
+  }
 
   @Override
   public Integer call() {
-    return 0;
+    InputFiles.Inputs in = InputFiles.read(spec, options.fab());
+    Pipeline.Drawn drawn = Pipeline.run(in, false);
+    console.warn(drawn.warnings());
+    drawn.rules().findings().forEach(f -> console.err().println(FindingText.line(f)));
+    if (options.json()) {
+      console.print(ReportJson.writeCheck(drawn.results()));
+    } else if (!options.quiet()) {
+      console.out().print(Summary.text(drawn.results(), Optional.empty(), console.colour()));
+    }
+    return drawn.rules().passed() ? ExitCode.DONE : ExitCode.REFUSED;
   }
 }

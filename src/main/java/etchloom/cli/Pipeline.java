@@ -2,12 +2,16 @@ package etchloom.cli;
 
 import etchloom.board.Assembler;
 import etchloom.board.Assembly;
+import etchloom.diagnostic.Diagnostic;
 import etchloom.diagnostic.Staged;
 import etchloom.electric.resistance.Resistance;
 import etchloom.electric.resistance.ResistanceFigures;
+import etchloom.report.Results;
 import etchloom.rules.RuleCheck;
 import etchloom.rules.RuleContext;
 import etchloom.rules.RuleReport;
+import java.util.ArrayList;
+import java.util.List;
 
 /** The one way through: from checked inputs to the board, its rule check and its figures. */
 final class Pipeline {
@@ -18,7 +22,23 @@ final class Pipeline {
       InputFiles.Inputs inputs,
       Assembly assembly,
       RuleReport rules,
-      ResistanceFigures resistance) {}
+      ResistanceFigures resistance,
+      List<Diagnostic> warnings) {
+    Drawn {
+      warnings = List.copyOf(warnings);
+    }
+
+    Results results() {
+      return Results.of(
+          Version.TEXT,
+          inputs.file().spec(),
+          inputs.fab(),
+          assembly.artwork(),
+          assembly.winding(),
+          rules,
+          resistance);
+    }
+  }
 
   /**
    * @param draft whether the board is to be marked as one that breaks rules
@@ -31,6 +51,8 @@ final class Pipeline {
     ResistanceFigures resistance = Resistance.of(assembly.artwork(), in.fab().tolerance());
     RuleReport rules =
         RuleCheck.check(assembly.artwork(), in.file().spec(), in.fab(), RuleContext.NONE);
-    return new Drawn(in, assembly, rules, resistance);
+    List<Diagnostic> warnings = new ArrayList<>(in.warnings());
+    warnings.addAll(staged.diagnostics());
+    return new Drawn(in, assembly, rules, resistance, warnings);
   }
 }

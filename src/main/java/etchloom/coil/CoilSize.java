@@ -47,9 +47,10 @@ public record CoilSize(
     return -a + a * (2 * node + 1) / nodes();
   }
 
-  /** Distance between neighbouring eye vias along the axis. */
+  /** Distance between neighbouring eye vias along the axis; a track may end between two pads. */
   public double eyePitchMm() {
-    return Math.max(padMm + spaceMm, holeMm + holeGapMm);
+    double copper = (padMm + Math.max(padMm, trackMm)) / 2 + spaceMm;
+    return Math.max(copper, holeMm + holeGapMm);
   }
 
   /** Distance a pad's centre must keep from a track's centre line. */

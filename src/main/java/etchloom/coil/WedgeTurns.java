@@ -83,7 +83,7 @@ final class WedgeTurns {
     if (!(innermost >= least)) {
       return false;
     }
-    double exit = exitFillet();
+    double exit = exitFillet(r);
     double foot = outerTangent(side(last), innermost, exit);
     return foot >= innerTangent(last, r) && cornerAngle(side(last), innermost, exit) > 0;
   }
@@ -131,7 +131,12 @@ final class WedgeTurns {
 
   /** Fillet with which the last right side turns in to its eye via. */
   double exitFillet() {
-    return size.pitchMm() / 2;
+    return exitFillet(fillet[count() - 1]);
+  }
+
+  /** No sharper than the corner around it by more than a pitch, which would close their gap. */
+  private double exitFillet(double r) {
+    return Math.max(size.pitchMm() / 2, r - size.pitchMm());
   }
 
   boolean hasInnerArc(int turn, double r) {

@@ -1,45 +1,52 @@
 package etchloom.rules;
 
-import etchloom.artwork.Artwork;
 import etchloom.rules.Verdicts.Measured;
-import etchloom.spec.FabRules;
-import java.util.Optional;
+import java.util.List;
 
 /**
  * {@code space}: the gap between any two pieces of copper on a layer, whatever their nets, for a
  * winding is one net and a short between its turns is still a short.
  */
-final class SpaceRule implements Rule {
+final class SpaceRule implements LayerRule {
   @Override
-  public void check(Board board, Verdicts verdicts) {
-    for (LayerCopper copper : board.copper()) {
-      Optional<FabRules.CopperRow> row = board.row(copper.layer());
-      if (row.isPresent()) {
-        check(board, copper, row.get().spaceMm(), verdicts);
-      }
-    }
+  public List<PairWatch> watches(Layer layer, Verdicts verdicts) {
+    return layer.row().isEmpty()
+        ? List.of()
+        : List.of(new Watch(layer, layer.row().get().spaceMm(), verdicts));
   }
 
-  private static void check(Board board, LayerCopper copper, double required, Verdicts verdicts) {
-    double limit = Math.max(required, board.spec().coil().spaceMm()) + Board.SLACK_MM;
-    for (Close c : board.close(copper.layer()).nearest(limit, board.sizeMm())) {
-      if (!c.bend() || c.gapMm() < required - Board.SLACK_MM) {
+  private static final class Watch implements PairWatch {
+    private final Layer layer;
+    private final double requiredMm;
+    private final Verdicts verdicts;
+    private double bestMm = Double.POSITIVE_INFINITY;
+
+    Watch(Layer layer, double requiredMm, Verdicts verdicts) {
+      this.layer = layer;
+      this.requiredMm = requiredMm;
+      this.verdicts = verdicts;
+    }
+
+    @Override
+    public double wantedMm() {
+      return Math.max(requiredMm, bestMm - Board.SLACK_MM);
+    }
+
+    @Override
+    public void see(Close c) {
+      boolean broken = c.gapMm() < requiredMm - Board.SLACK_MM;
+      if (broken || (!c.bend() && c.gapMm() < bestMm)) {
+        bestMm = Math.min(bestMm, c.gapMm());
         verdicts.add(
             Measured.atLeast(
                     RuleName.SPACE,
-                    copper.layer(),
+                    layer.number(),
                     c.at(),
                     c.gapMm(),
-                    required,
-                    () -> words(board.artwork(), copper, c))
+                    requiredMm,
+                    () -> layer.words(c.p(), c.q()))
                 .ids(c.first(), c.second()));
       }
     }
-  }
-
-  static String words(Artwork artwork, LayerCopper copper, Close c) {
-    return LayerCopper.words(artwork, copper.pieces().get(c.first()))
-        + " and "
-        + LayerCopper.words(artwork, copper.pieces().get(c.second()));
   }
 }

@@ -1,6 +1,7 @@
 package etchloom.spec;
 
 import etchloom.spec.Spec.CoilOutline;
+import etchloom.spec.Spec.TerminalKind;
 import java.util.Optional;
 
 /**
@@ -10,13 +11,16 @@ import java.util.Optional;
 final class NotBuiltYet {
   private NotBuiltYet() {}
 
-  static void check(WindingDraft winding, CoilDraft coil, ViaDraft via) {
+  static void check(WindingDraft winding, CoilDraft coil, ViaDraft via, BoardDraft board) {
     Optional<CoilOutline> outline = coil.outline();
     if (outline.isPresent() && outline.get() != CoilOutline.WEDGE) {
       refuse(coil.section(), "outline", "only `outline: wedge`");
     }
     if (coil.parallelLayers()) {
       refuse(coil.section(), "layers", "only `layers: series`");
+    }
+    if (coil.taper()) {
+      refuse(coil.section(), "taper", "only `taper: off`");
     }
     if (winding.paths() > 1) {
       refuse(winding.section(), "parallel-paths", "only `parallel-paths: 1`");
@@ -26,6 +30,13 @@ final class NotBuiltYet {
     }
     if (via.count() > 1) {
       refuse(via.section(), "count", "only `count: 1`");
+    }
+    if (board.tab().isPresent()) {
+      refuse(board.section(), "tab", "a round board without a tab");
+    }
+    TerminalsDraft terminals = board.terminals();
+    if (terminals.kind() == TerminalKind.PAD) {
+      refuse(terminals.section().orElseThrow(), "kind", "only `kind: hole`");
     }
   }
 

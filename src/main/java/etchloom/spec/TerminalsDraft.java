@@ -7,8 +7,14 @@ import java.util.Map;
 import java.util.Optional;
 
 /** The terminals' keys as read, with their defaults. */
-record TerminalsDraft(TerminalKind kind, double start, double pitch, double hole, double pad) {
-  private static final Map<String, TerminalKind> KINDS =
+record TerminalsDraft(
+    Optional<Section> section,
+    TerminalKind kind,
+    double start,
+    double pitch,
+    double hole,
+    double pad) {
+  static final Map<String, TerminalKind> KINDS =
       Words.of("hole", TerminalKind.HOLE).and("pad", TerminalKind.PAD).map();
 
   private static final double START_RAD = Math.PI / 2;
@@ -17,7 +23,7 @@ record TerminalsDraft(TerminalKind kind, double start, double pitch, double hole
   private static final double PAD_MM = 2.0;
 
   static final TerminalsDraft DEFAULT =
-      new TerminalsDraft(TerminalKind.HOLE, START_RAD, PITCH_MM, HOLE_MM, PAD_MM);
+      new TerminalsDraft(Optional.empty(), TerminalKind.HOLE, START_RAD, PITCH_MM, HOLE_MM, PAD_MM);
 
   static TerminalsDraft read(Section s) {
     WordField<TerminalKind> kind = s.word("kind", KINDS);
@@ -39,7 +45,7 @@ record TerminalsDraft(TerminalKind kind, double start, double pitch, double hole
               + Show.mm(pad)
               + ": terminals would touch");
     }
-    return new TerminalsDraft(kind.or(TerminalKind.HOLE), start, pitch, hole, pad);
+    return new TerminalsDraft(Optional.of(s), kind.or(TerminalKind.HOLE), start, pitch, hole, pad);
   }
 
   Terminals build() {

@@ -65,7 +65,7 @@ public record ResistanceFigures(
   }
 
   /** The pairs that do not end at a star point; all of them should there be no other. */
-  static List<TerminalOhm> lineToLine(List<TerminalOhm> all) {
+  public static List<TerminalOhm> lineToLine(List<TerminalOhm> all) {
     List<TerminalOhm> some =
         all.stream().filter(t -> !t.from().endsWith("N") && !t.to().endsWith("N")).toList();
     return some.isEmpty() ? all : some;

@@ -1,0 +1,167 @@
+package etchloom.proof;
+
+import etchloom.geometry.Point;
+import etchloom.proof.copper.Connectivity;
+import etchloom.proof.copper.CopperBuilder;
+import etchloom.proof.copper.Hole;
+import etchloom.proof.image.DrawnObject;
+import etchloom.proof.image.LayerImage;
+import etchloom.proof.image.LayerSet;
+import etchloom.proof.image.ReadWarning;
+import etchloom.proof.plane.Figure;
+import etchloom.proof.plane.OutOfRange;
+import etchloom.proof.read.SetFolder;
+import etchloom.proof.read.SetReader;
+import etchloom.proof.read.UnreadableFile;
+import java.util.Comparator;
+import java.util.List;
+import java.util.Locale;
+import java.util.Map;
+import java.util.Optional;
+import java.util.OptionalDouble;
+import java.util.OptionalInt;
+import java.util.SortedMap;
+import java.util.TreeMap;
+
+/**
+ * Judges a folder of layer and drill files from any tool by what they say themselves: what hangs
+ * together, and whether that is what the net names claim.
+ *
+ * <p>A winding is one net, so names cannot show a short between its turns; the number of closed
+ * circuits can, if the caller knows how many there should be.
+ */
+public final class FolderCheck {
+  /** Loops that are told by place. */
+  private static final int TOLD = 12;
+
+  private final OptionalInt circuits;
+  private final Findings out = new Findings();
+  private final LayerSet set;
+  private final TreeMap<Integer, LayerImage> copper = new TreeMap<>();
+
+  private FolderCheck(LayerSet set, OptionalInt circuits) {
+    this.circuits = circuits;
+    this.set = set;
+    for (LayerImage i : set.copper()) {
+      copper.put(copper.size() + 1, i);
+    }
+  }
+
+  /**
+   * @param layerOptions as of {@link SetReader#read}
+   * @param circuits independent closed circuits that the whole conductor should have
+   * @throws UnreadableFile when a file cannot be read, an option is wrong, or the copper layers are
+   *     not complete
+   */
+  public static ProofReport check(SetFolder folder, List<String> layerOptions, OptionalInt circuits)
+      throws UnreadableFile {
+    LayerSet set = SetReader.read(folder, layerOptions);
+    try {
+      return new FolderCheck(set, circuits).check();
+    } catch (OutOfRange r) {
+      throw new UnreadableFile(folder.name(), 0, "copper", r.getMessage());
+    }
+  }
+
+  private ProofReport check() {
+    for (ReadWarning w : set.allWarnings()) {
+      out.note(w.file() + (w.line() > 0 ? ":" + w.line() : "") + ": " + w.message());
+    }
+    List<Hole> holes = DrilledHoles.of(set.drills(), copper.size());
+    if (holes.isEmpty()) {
+      out.note("there is no drill file: layers count as not joined");
+    }
+    Connectivity net = new Connectivity(figures(copper), holes);
+    nets(net, holes);
+    circuits(net);
+    return report(net);
+  }
+
+  private static List<Figure> figures(SortedMap<Integer, LayerImage> copper) {
+    CopperBuilder builder = new CopperBuilder();
+    return copper.values().stream().map(i -> builder.build(i.objects())).toList();
+  }
+
+  /** Parts etched from copper join nets by intent, so names are judged without them. */
+  private void nets(Connectivity whole, List<Hole> holes) {
+    TreeMap<Integer, LayerImage> wired = new TreeMap<>();
+    boolean parts = false;
+    for (Map.Entry<Integer, LayerImage> e : copper.entrySet()) {
+      LayerImage i = e.getValue();
+      List<DrawnObject> some =
+          i.objects().stream()
+              .filter(o -> !o.attributes().function().equals("EtchedComponent"))
+              .toList();
+      parts |= some.size() < i.objects().size();
+      wired.put(e.getKey(), new LayerImage(i.fileName(), i.fileAttributes(), some, List.of()));
+    }
+    Connectivity net = parts ? new Connectivity(figures(wired), holes) : whole;
+    DeclaredNets names = new DeclaredNets(net, wired, out);
+    names.check(set.netlist());
+    if (names.names() == 0) {
+      out.note("no file names any net: opens and shorts between nets cannot be judged");
+    }
+  }
+
+  private void circuits(Connectivity net) {
+    int is = net.circuits();
+    List<String> places =
+        net.loops().stream()
+            .sorted(
+                Comparator.comparingInt(Connectivity.Loop::layer)
+                    .thenComparing(l -> -l.areaMm2())
+                    .thenComparing(l -> l.at().x()))
+            .limit(TOLD)
+            .map(FolderCheck::words)
+            .toList();
+    String loops =
+        places.isEmpty()
+            ? ""
+            : "; copper encloses a gap "
+                + String.join(", ", places)
+                + (net.loops().size() > TOLD
+                    ? " and at " + (net.loops().size() - TOLD) + " more places"
+                    : "");
+    String found = "the conductor closes on itself in " + is + (is == 1 ? " way" : " ways");
+    if (circuits.isEmpty()) {
+      out.note(
+          found
+              + "; whether that is right cannot be judged unless --circuits says how many are meant"
+              + loops);
+    } else if (circuits.getAsInt() != is) {
+      Optional<Point> at = net.loops().stream().map(Connectivity.Loop::at).findFirst();
+      String message = found + ", it should in " + circuits.getAsInt() + loops;
+      out.add(new ProofFinding(ProofNames.CIRCUITS, "", 0, "", at, message));
+    }
+  }
+
+  private static String words(Connectivity.Loop l) {
+    return String.format(
+        Locale.ROOT,
+        "on L%d at (%.3f, %.3f) mm (%.3f mm2)",
+        l.layer(),
+        l.at().x() + 0.0,
+        l.at().y() + 0.0,
+        l.areaMm2());
+  }
+
+  private ProofReport report(Connectivity net) {
+    TreeMap<Integer, Integer> islands = new TreeMap<>();
+    TreeMap<Integer, Integer> loops = new TreeMap<>();
+    for (int l = 1; l <= net.layers(); l++) {
+      islands.put(l, net.copper(l).islands());
+      loops.put(l, net.loopsOn(l));
+    }
+    return new ProofReport(
+        islands,
+        loops,
+        net.circuits(),
+        circuits,
+        net.pieces(),
+        out.count(ProofNames.OPEN),
+        out.count(ProofNames.SHORT),
+        OptionalDouble.empty(),
+        out.sorted(),
+        out.notes());
+  }
+}

@@ -1,0 +1,112 @@
+package etchloom.report;
+
+import etchloom.electric.resistance.ResistanceFigures;
+import etchloom.electric.resistance.ResistanceFigures.PhaseOhm;
+import etchloom.electric.resistance.ResistanceFigures.TerminalOhm;
+import etchloom.rules.Finding;
+import etchloom.spec.Spec;
+import etchloom.units.Numbers;
+import java.util.Map;
+import java.util.Optional;
+
+/**
+ * What a command ends in on the terminal: within 80 columns, the verdict in words, colour only on
+ * top of that.
+ */
+public final class Summary {
+  private Summary() {}
+
+  /**
+   * @param where the folder that was written, as the user may type it
+   * @param colour whether the terminal takes colours and its user wants them
+   * @return lines, each with its end
+   */
+  public static String text(Results r, Optional<String> where, boolean colour) {
+    Page page = new Page(colour);
+    board(page, r);
+    rules(page, r);
+    resistance(page, r.resistance());
+    end(page, r, ReportJson.figures(r), where);
+    return page.text();
+  }
+
+  static void board(Page page, Results r) {
+    Spec spec = r.spec();
+    page.heading(r.artwork().title() + ", revision " + r.artwork().revision());
+    Spec.Board b = spec.board();
+    page.item(
+        "board",
+        OrderLines.mm(b.diameterMm())
+            + (b.boreMm() > 0 ? ", bore " + OrderLines.mm(b.boreMm()) : ", no bore")
+            + ", "
+            + b.layers()
+            + " layers, "
+            + OrderLines.mm(b.thicknessMm()));
+    page.item(
+        "winding",
+        Words.count(r.winding().phases(), "phase")
+            + ", "
+            + WindingTree.word(spec.winding().connection())
+            + ", "
+            + Words.count(r.winding().coils(), "coil")
+            + ", "
+            + r.winding().poles()
+            + " poles, winding factor "
+            + Numbers.fixed(r.winding().windingFactor(), 4));
+    page.item(
+        "coil",
+        Words.count(r.artwork().turnsPerLayer(), "turn")
+            + " a layer, track "
+            + OrderLines.mm(spec.coil().trackMm())
+            + ", space "
+            + OrderLines.mm(spec.coil().spaceMm())
+            + ", "
+            + Words.count(r.vias(), "via"));
+  }
+
+  static void rules(Page page, Results r) {
+    page.blank();
+    page.row("rule", "measured", "required", "tightest at");
+    for (Finding f : r.rules().minima()) {
+      boolean broken = FindingText.broken(r.rules(), f.rule());
+      page.row(
+          f.rule(),
+          FindingText.value(f.measured(), f, broken),
+          (FindingText.upperBound(f, broken) ? "<= " : ">= ")
+              + FindingText.value(f.required(), f, broken),
+          FindingText.shortPlace(f) + (broken ? "  BROKEN" : ""));
+    }
+    r.rules().notes().forEach(n -> page.item("note", n));
+  }
+
+  private static void resistance(Page page, ResistanceFigures f) {
+    page.blank();
+    page.row("resistance at 20 C", "", "", "");
+    page.cells("phase", f.phases(), Summary::phase);
+    page.cells("terminals", f.terminals(), Summary::terminals);
+    page.item(
+        "limits",
+        f.worst()
+            .map(
+                l ->
+                    OrderLines.ohm(l.minTerminalOhm())
+                        + " to "
+                        + OrderLines.ohm(l.maxTerminalOhm())
+                        + " between terminals, worst case of the fab")
+            .orElse("none: within the fab's tolerance a track could be etched away"));
+    page.item("imbalance", Numbers.fixed(f.imbalancePercent(), 2) + " %");
+  }
+
+  private static String phase(PhaseOhm p) {
+    return p.mark() + " " + OrderLines.ohm(p.ohm());
+  }
+
+  private static String terminals(TerminalOhm t) {
+    return t.key() + " " + OrderLines.ohm(t.ohm());
+  }
+
+  static void end(Page page, Results r, Map<String, Object> figures, Optional<String> where) {
+    Verdicts.add(page, r, figures);
+    where.ifPresent(w -> page.item("files", (r.artwork().draft() ? "DRAFT, " : "") + w));
+  }
+}

@@ -1,0 +1,117 @@
+package etchloom.cli;
+
+import static org.junit.jupiter.api.Assertions.assertEquals;
+import static org.junit.jupiter.api.Assertions.assertFalse;
+import static org.junit.jupiter.api.Assertions.assertTrue;
+
+import etchloom.artwork.Artwork;
+import etchloom.artwork.Coil;
+import etchloom.artwork.Conductor;
+import etchloom.artwork.Phase;
+import etchloom.diagnostic.Diagnostic;
+import etchloom.spec.Spec;
+import etchloom.testing.RandomSpecs;
+import java.io.IOException;
+import java.nio.file.Files;
+import java.nio.file.Path;
+import java.util.ArrayList;
+import java.util.HashMap;
+import java.util.List;
+import java.util.Map;
+import java.util.TreeMap;
+import org.junit.jupiter.api.Test;
+import org.junit.jupiter.api.io.TempDir;
+
+/** Whatever the spec: a whole board, or a refusal that names a key. */
+class RandomSpecsTest {
+  private static final int SEEDS = Integer.getInteger("etchloom.seeds", 300);
+
+  @TempDir Path folder;
+
+  @Test
+  void everySpecIsDrawnCleanOrRefusedByKey() throws IOException {
+    int drawn = 0;
+    Map<String, Integer> refusals = new TreeMap<>();
+    for (long seed = 0; seed < SEEDS; seed++) {
+      String yaml = RandomSpecs.yaml(seed);
+      String name = "seed " + seed + "\n" + yaml;
+      Path spec = Files.writeString(folder.resolve("s" + seed + ".yaml"), yaml);
+      try {
+        InputFiles.Inputs in = InputFiles.read(spec.toString(), java.util.Optional.empty());
+        Pipeline.Drawn d = Pipeline.run(in, false);
+        assertEquals(List.of(), d.rules().findings(), name);
+        everyPhaseIsOneChain(d, name);
+        everyNumberIsFinite(d, name);
+        drawn++;
+      } catch (BadInput e) {
+        for (Diagnostic x : e.diagnostics()) {
+          assertFalse(x.key().isEmpty(), () -> name + x);
+          assertTrue(x.where().line() > 0 || x.key().contains("."), () -> name + x);
+          refusals.merge(x.key(), 1, Integer::sum);
+        }
+      }
+    }
+    int atLeast = SEEDS / 4;
+    assertTrue(drawn >= atLeast, drawn + " of " + SEEDS + " drawn; refused: " + refusals);
+    System.out.println(drawn + " of " + SEEDS + " drawn; refused: " + refusals);
+  }
+
+  /** Each phase passes each spiral of each of its coils once, end to end, in the coil's sense. */
+  private static void everyPhaseIsOneChain(Pipeline.Drawn d, String name) {
+    Artwork art = d.assembly().artwork();
+    int[] passes = new int[art.conductors().size()];
+    for (Phase p : art.phases()) {
+      int at = p.entryJoint();
+      for (Phase.Step s : p.steps()) {
+        Conductor c = art.conductors().get(s.conductor());
+        assertEquals(at, s.forward() ? c.fromJoint() : c.toJoint(), name + p.mark());
+        at = s.forward() ? c.toJoint() : c.fromJoint();
+        passes[s.conductor()] += s.forward() ? 1 : -1;
+      }
+      assertEquals(p.exitJoint(), at, name + p.mark());
+    }
+    for (Coil c : art.coils()) {
+      for (int id : c.conductors()) {
+        assertEquals(c.sign(), passes[id], name + "coil " + c.number());
+      }
+    }
+    Spec.Connection connection = d.inputs().file().spec().winding().connection();
+    int pieces = pieces(art);
+    int nodes = art.joints().size();
+    int loops = art.conductors().size() - nodes + pieces;
+    assertEquals(connection == Spec.Connection.OPEN ? 3 : 1, pieces, name);
+    assertEquals(connection == Spec.Connection.DELTA ? 1 : 0, loops, name);
+  }
+
+  /** Connected pieces of the whole copper as a graph. */
+  private static int pieces(Artwork art) {
+    Map<Integer, List<Integer>> next = new HashMap<>();
+    for (Conductor c : art.conductors()) {
+      next.computeIfAbsent(c.fromJoint(), k -> new ArrayList<>()).add(c.toJoint());
+      next.computeIfAbsent(c.toJoint(), k -> new ArrayList<>()).add(c.fromJoint());
+    }
+    boolean[] seen = new boolean[art.joints().size()];
+    int pieces = 0;
+    for (int j = 0; j < seen.length; j++) {
+      if (seen[j]) {
+        continue;
+      }
+      pieces++;
+      List<Integer> stack = new ArrayList<>(List.of(j));
+      while (!stack.isEmpty()) {
+        int k = stack.remove(stack.size() - 1);
+        if (!seen[k]) {
+          seen[k] = true;
+          stack.addAll(next.getOrDefault(k, List.of()));
+        }
+      }
+    }
+    return pieces;
+  }
+
+  private static void everyNumberIsFinite(Pipeline.Drawn d, String name) {
+    assertTrue(Double.isFinite(d.resistance().coilOhm()) && d.resistance().coilOhm() > 0, name);
+    d.resistance().terminals().forEach(t -> assertTrue(t.ohm() > 0 && t.ohm() < 1e6, name));
+    assertTrue(d.resistance().imbalancePercent() >= 0, name);
+  }
+}

@@ -1,0 +1,41 @@
+package etchloom.proof;
+
+import static org.junit.jupiter.api.Assertions.assertEquals;
+
+import etchloom.artwork.Artwork;
+import etchloom.spec.Templates;
+import java.util.List;
+import org.junit.jupiter.api.Test;
+import org.junit.jupiter.params.ParameterizedTest;
+import org.junit.jupiter.params.provider.MethodSource;
+
+/** What is written as designed passes without a word. */
+class CleanSetTest {
+  static List<String> templates() {
+    return Templates.names();
+  }
+
+  @ParameterizedTest
+  @MethodSource("templates")
+  void templateIsProved(String name) {
+    Artwork art = WrittenSets.template(name);
+    ProofReport r = Prover.prove(WrittenSets.write(art), ProofExpectation.of(art));
+    assertEquals(List.of(), r.findings().stream().map(ProofFinding::text).toList());
+    assertEquals(0, r.circuits());
+    assertEquals(art.layers(), r.islands().size());
+    for (int l = 1; l <= art.layers(); l++) {
+      assertEquals(0, r.loops().get(l));
+    }
+    // an open winding is three pieces, a star one: the spec page on nets
+    assertEquals(name.equals("wind-logger") ? 3 : 1, r.nets());
+  }
+
+  @Test
+  void deltaIsOneCircuit() {
+    Artwork art = WrittenSets.delta();
+    ProofReport r = Prover.prove(WrittenSets.write(art), ProofExpectation.of(art));
+    assertEquals(List.of(), r.findings().stream().map(ProofFinding::text).toList());
+    assertEquals(1, r.circuits());
+    assertEquals(1, r.nets());
+  }
+}

@@ -1,0 +1,112 @@
+package etchloom.testing;
+
+import java.util.List;
+import java.util.Locale;
+import java.util.Random;
+
+/**
+ * Random specs as YAML text, the same for the same seed. Every value keeps the rules of the
+ * standard class, so that a drawn board has no reason to break one; whether there is room for what
+ * is asked is left to chance.
+ */
+public final class RandomSpecs {
+  /** Counts of coils and poles, most of them feasible for three phases, some not. */
+  private static final List<int[]> COUNTS =
+      List.of(
+          new int[] {3, 2},
+          new int[] {3, 4},
+          new int[] {6, 4},
+          new int[] {6, 8},
+          new int[] {9, 6},
+          new int[] {9, 8},
+          new int[] {9, 10},
+          new int[] {9, 12},
+          new int[] {12, 8},
+          new int[] {12, 10},
+          new int[] {12, 14},
+          new int[] {12, 16},
+          new int[] {15, 14},
+          new int[] {15, 20},
+          new int[] {18, 16},
+          new int[] {18, 24},
+          new int[] {21, 22},
+          new int[] {24, 20},
+          new int[] {12, 12},
+          new int[] {10, 8});
+
+  private final Random random;
+  private final StringBuilder out = new StringBuilder();
+
+  private RandomSpecs(long seed) {
+    random = new Random(seed);
+  }
+
+  public static String yaml(long seed) {
+    RandomSpecs r = new RandomSpecs(seed);
+    r.build();
+    return r.out.toString();
+  }
+
+  private void build() {
+    int[] counts = pick(COUNTS);
+    int layers = pick(List.of(2, 2, 4, 4, 6));
+    boolean heavy = random.nextInt(4) == 0;
+    double least = heavy ? 0.18 : 0.127;
+    double track = between(least, 0.4);
+    double space = between(least, 0.3);
+    double hole = between(0.3, 0.45);
+    double pad = hole + between(0.27, 0.4);
+    double inner = between(5, 25);
+    double outer = inner + between(6, 22);
+    double board = 2 * (outer + between(6, 18));
+    line("etchloom: 1");
+    line("title: Random board");
+    line("rotor: {poles: " + counts[1] + "}");
+    String connection = pick(List.of("star", "delta", "open"));
+    line("winding: {phases: 3, coils: " + counts[0] + ", connection: " + connection + "}");
+    line("coil:");
+    line("  outline: wedge");
+    line("  inner-radius: " + mm(inner));
+    line("  outer-radius: " + mm(outer));
+    line("  turns: " + (random.nextInt(3) == 0 ? 1 + random.nextInt(12) : "fill"));
+    line("  track: " + mm(track));
+    line("  space: " + mm(space));
+    if (random.nextInt(4) == 0) {
+      line("  corner: " + mm(between(0.5, 2.5) * (track + space)));
+    }
+    line("rim: {track: " + mm(track * between(1, 2.5)) + "}");
+    line("via: {hole: " + mm(hole) + ", pad: " + mm(pad) + "}");
+    line("board:");
+    line("  layers: " + layers);
+    line("  thickness: " + pick(List.of("1.0 mm", "1.2 mm", "1.6 mm")));
+    line("  copper: " + (heavy ? "2 oz" : "1 oz"));
+    line("  diameter: " + mm(board));
+    line("  bore: " + (random.nextInt(4) == 0 ? "0 mm" : mm(inner * between(0.8, 1.6))));
+    line(
+        "  terminals: {kind: hole, start: "
+            + random.nextInt(360)
+            + " deg, pitch: "
+            + pick(List.of("2.54", "3.5", "5"))
+            + " mm, hole: 0.9 mm, pad: 1.8 mm}");
+    if (connection.equals("star")) {
+      line("  star-point: " + pick(List.of("inside", "inside", "terminal")));
+    }
+    line("fab: standard");
+  }
+
+  private void line(String text) {
+    out.append(text).append('\n');
+  }
+
+  private <T> T pick(List<T> some) {
+    return some.get(random.nextInt(some.size()));
+  }
+
+  private double between(double low, double high) {
+    return low + (high - low) * random.nextDouble();
+  }
+
+  private static String mm(double value) {
+    return String.format(Locale.ROOT, "%.3f mm", value);
+  }
+}
