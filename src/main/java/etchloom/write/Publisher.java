@@ -66,6 +66,7 @@ public final class Publisher {
     new Publisher(folder, watch).run(files);
   }
 
+  @SuppressWarnings("try") // the lock is only held
   private void run(SortedMap<String, byte[]> files) throws PublishFailure {
     try {
       resolve();

@@ -17,7 +17,7 @@ import org.locationtech.jts.operation.buffer.BufferParameters;
 import org.locationtech.jts.operation.union.UnaryUnionOp;
 
 /** Areas of outlines in closed form, and of the same copper by JTS. */
-final class Areas {
+public final class Areas {
   private static final GeometryFactory FACTORY = new GeometryFactory();
 
   /** Greatest distance of a chord from its arc, mm. */
@@ -30,7 +30,7 @@ final class Areas {
   /**
    * Signed: the polygon through the corners, and for each arc the sliver between it and its chord.
    */
-  static double signedMm2(Path path) {
+  public static double signedMm2(Path path) {
     double a = 0;
     for (Segment s : path.segments()) {
       a += s.start().cross(s.end()) / 2;
@@ -42,7 +42,7 @@ final class Areas {
     return a;
   }
 
-  static Geometry jts(Artwork art, int layer) {
+  public static Geometry jts(Artwork art, int layer) {
     BufferParameters round = new BufferParameters(QUARTER);
     // JTS thins out its input by a hundredth of the distance; along a bent track that adds 0.2 %.
     round.setSimplifyFactor(1e-5);
