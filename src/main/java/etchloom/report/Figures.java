@@ -32,6 +32,7 @@ final class Figures {
     f.heat();
     f.drive();
     f.generator();
+    f.spread();
     f.rotor();
     return List.copyOf(f.all);
   }
@@ -159,6 +160,21 @@ final class Figures {
     add(g, b, "generator.loadVoltRms", "a phase, on its load", Form.VOLT, n, GENERATOR);
     add(g, b, "generator.powerWatt", "power into the load", Form.WATT, n, GENERATOR);
     add(g, b, "generator.efficiency", "efficiency", Form.RATIO, n, GENERATOR);
+  }
+
+  private void spread() {
+    share("terminalOhmPercent", "resistance", List.of());
+    share("torquePercent", "torque", FIELD);
+    share("imbalancePercent", "imbalance", List.of());
+  }
+
+  private void share(String key, String label, List<Need> needs) {
+    String path = "spread." + key + ".";
+    Group g = Group.SPREAD;
+    Form p = Form.PERCENT;
+    add(g, Basis.SPREAD, path + "worst", label + ", worst case", p, needs);
+    add(g, Basis.SPREAD, path + "rss", label + ", root of squares", p, needs);
+    add(g, Basis.SPREAD, path + "monteCarlo95", label + ", 95 of 100 boards", p, needs);
   }
 
   private void rotor() {

@@ -5,6 +5,7 @@ import etchloom.artwork.MountingHole;
 import etchloom.artwork.Opening;
 import etchloom.artwork.Stroke;
 import etchloom.geometry.Line;
+import etchloom.geometry.Nearest;
 import etchloom.geometry.Point;
 import etchloom.geometry.Segment;
 import etchloom.geometry.ShapeTree;
@@ -69,7 +70,7 @@ final class LegendRule implements Rule {
       for (int i = 0; i < fatMm.length; i++) {
         fatMm[i] = owner.get(i).widthMm() / 2;
       }
-      nearby = new Nearby(new ShapeTree(shapes, fatMm), shapes, fatMm);
+      nearby = new Nearby(new ShapeTree(shapes, fatMm), shapes, fatMm, Double.POSITIVE_INFINITY);
     }
 
     void check() {
@@ -82,7 +83,13 @@ final class LegendRule implements Rule {
         round(h.at(), h.diameterMm() / 2, "mounting hole " + ++number);
       }
       for (Outline.Edge e : board.outline().edges()) {
-        look(e.shape(), 0, e.what());
+        look(
+            e.shape(),
+            0,
+            (i, gap, n) -> {
+              boolean beyond = board.outline().beyond(e, n.onSecond());
+              return add(i, n, 0, beyond ? -n.distanceMm() - fatMm[i] : gap, e.what());
+            });
       }
       for (int i = 0; i < shapes.size(); i++) {
         stray(i);
@@ -90,20 +97,16 @@ final class LegendRule implements Rule {
     }
 
     private void round(Point at, double radiusMm, String what) {
-      look(new Line(at, at), radiusMm, what);
+      look(new Line(at, at), radiusMm, (i, gap, n) -> add(i, n, radiusMm, gap, what));
     }
 
-    private void look(Segment thing, double thingFatMm, String what) {
-      nearby.look(
-          thing,
-          thingFatMm,
-          board.fab().legend().gapMm(),
-          (i, gap, n) -> {
-            boolean beyond = thingFatMm == 0 && !board.outline().inside(n.onSecond());
-            double clear = beyond ? -n.distanceMm() - fatMm[i] : gap;
-            add(i, Board.middle(n, thingFatMm, fatMm[i]), clear, what);
-            return clear;
-          });
+    private void look(Segment thing, double thingFatMm, Nearby.Hit hit) {
+      nearby.look(thing, thingFatMm, board.fab().legend().gapMm(), hit);
+    }
+
+    private double add(int i, Nearest n, double thingFatMm, double gapMm, String what) {
+      add(i, Board.middle(n, thingFatMm, fatMm[i]), gapMm, what);
+      return gapMm;
     }
 
     /** A stroke that lies beyond the edge as a whole. */

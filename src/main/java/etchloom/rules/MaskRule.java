@@ -58,7 +58,7 @@ final class MaskRule implements LayerRule {
     Gaps gaps = new Gaps(layer.copper().walk(), required);
     layer
         .copper()
-        .nearby()
+        .nearby(layer.board().spec().coil().spaceMm())
         .look(
             new Line(o.at(), o.at()),
             radius,

@@ -5,8 +5,8 @@ import etchloom.geometry.Point;
 import etchloom.rules.Verdicts.Measured;
 import etchloom.spec.FabRules;
 import etchloom.spec.Spec;
+import etchloom.units.Numbers;
 import java.util.List;
-import java.util.Locale;
 import java.util.Optional;
 
 /**
@@ -47,8 +47,7 @@ final class OrderRules implements Rule {
   private static void thickness(
       int layer, Stackup.Copper c, FabRules.CopperRow row, Verdicts verdicts) {
     double off = Math.abs(c.thicknessMm() / row.thicknessMm() - 1);
-    String what =
-        String.format(Locale.ROOT, "finished copper; the fab's row of %.3g oz", row.ounces());
+    String what = "finished copper; the fab's row of " + Numbers.trimmed(row.ounces(), 3) + " oz";
     verdicts.add(
         new Measured(
             RuleName.COPPER_WEIGHT,
@@ -156,12 +155,12 @@ final class OrderRules implements Rule {
                         && (b.stackupMm().isEmpty() || b.stackupMm().equals(s.dielectricsMm())));
     if (!own) {
       verdicts.note(
-          String.format(
-              Locale.ROOT,
-              "layers: %d layers in %.3g mm with these dielectrics are none of the fab's standard"
-                  + " builds; ask whether it can be had",
-              b.layers(),
-              b.thicknessMm()));
+          "layers: "
+              + b.layers()
+              + " layers in "
+              + Numbers.trimmed(b.thicknessMm(), 3)
+              + " mm with these dielectrics are none of the fab's standard builds; ask whether it"
+              + " can be had");
     }
   }
 }

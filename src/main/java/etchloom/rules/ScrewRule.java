@@ -44,7 +44,7 @@ final class ScrewRule implements LayerRule {
       double reach = Math.max(edgeMm + layer.board().fab().hole().copperGapMm(), metalMm + spacing);
       layer
           .copper()
-          .nearby()
+          .nearby(Double.POSITIVE_INFINITY)
           .look(
               new Line(hole.at(), hole.at()),
               0,

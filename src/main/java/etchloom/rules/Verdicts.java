@@ -5,7 +5,6 @@ import java.util.ArrayList;
 import java.util.EnumMap;
 import java.util.HashMap;
 import java.util.List;
-import java.util.Locale;
 import java.util.Map;
 import java.util.function.Supplier;
 
@@ -145,12 +144,12 @@ final class Verdicts {
           .forEach(findings::add);
       if (all.size() > LISTED) {
         told.add(
-            String.format(
-                Locale.ROOT,
-                "%s: broken at %d places; the %d tightest are listed",
-                e.getKey().word(),
-                all.size(),
-                LISTED));
+            e.getKey().word()
+                + ": broken at "
+                + all.size()
+                + " places; the "
+                + LISTED
+                + " tightest are listed");
       }
     }
     return new RuleReport(minima, findings, told);
