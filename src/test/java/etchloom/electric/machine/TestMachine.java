@@ -46,7 +46,6 @@ public record TestMachine(
   }
 
   public MachineFigures figures(InductanceValues inductance) {
-    return Machine.of(
-        assembly.artwork(), spec, fab, assembly.winding(), resistance, inductance);
+    return Machine.of(assembly.artwork(), spec, fab, assembly.winding(), resistance, inductance);
   }
 }

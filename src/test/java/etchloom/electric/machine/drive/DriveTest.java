@@ -28,8 +28,12 @@ class DriveTest {
     CurrentLoop g = CurrentLoop.of(STAR, 1000);
     close(0.188495559, g.proportionalGain());
     close(1570.79633, g.integralGain());
-    close(0.000159154943, g.proportionalGain() / g.integralGain() / (30e-6 / 0.25)
-        / (2 * Math.PI * g.bandwidthHertz()));
+    close(
+        0.000159154943,
+        g.proportionalGain()
+            / g.integralGain()
+            / (30e-6 / 0.25)
+            / (2 * Math.PI * g.bandwidthHertz()));
   }
 
   @Test
@@ -58,8 +62,7 @@ class DriveTest {
     Circuit open = circuit(Connection.OPEN);
     assertEquals(2.5, Ripple.amperePeakToPeak(open, 24, 40e3).getAsDouble(), 1e-6);
     assertTrue(
-        Ripple.amperePeakToPeak(
-                new Circuit(5, Connection.STAR, 10, 0.25, 30e-6, 25e-6), 24, 40e3)
+        Ripple.amperePeakToPeak(new Circuit(5, Connection.STAR, 10, 0.25, 30e-6, 25e-6), 24, 40e3)
             .isEmpty());
   }
 

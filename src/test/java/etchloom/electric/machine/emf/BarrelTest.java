@@ -91,8 +91,7 @@ class BarrelTest {
             joint(2, Joint.Kind.TERMINAL, inner, 2, "U2"));
     List<Conductor> tracks =
         List.of(track(0, 1, inner, outer, 0, 1), track(1, 2, outer, inner, 1, 2));
-    Phase phase =
-        new Phase("U", 0, 2, List.of(new Phase.Step(0, true), new Phase.Step(1, true)));
+    Phase phase = new Phase("U", 0, 2, List.of(new Phase.Step(0, true), new Phase.Step(1, true)));
     Artwork art =
         new Artwork(
             "T",
@@ -116,8 +115,7 @@ class BarrelTest {
     double z2 = stackup.heightMm(2);
     assertEquals(0, s.slope(0.1), 1e-15, "the board's middle is the field's: nothing");
     assertEquals(0, z1 + z2, 1e-15);
-    Stackup lopsided =
-        new Stackup(List.of(new Stackup.Copper(0.535, 1, 0), c), List.of(1.0), 0.02);
+    Stackup lopsided = new Stackup(List.of(new Stackup.Copper(0.535, 1, 0), c), List.of(1.0), 0.02);
     Artwork other =
         new Artwork(
             "T",

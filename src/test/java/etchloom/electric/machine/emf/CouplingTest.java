@@ -112,7 +112,9 @@ class CouplingTest {
     assertEquals(rms, speed * s.amplitude(0) / Math.sqrt(2), 1e-9 * rms);
   }
 
-  /** Flux through the drawn spirals, row by row with solid angles: no harmonics, no line integral. */
+  /**
+   * Flux through the drawn spirals, row by row with solid angles: no harmonics, no line integral.
+   */
   @Test
   void linkageOfADrawnCoilIsTheFieldThroughItsTurns() {
     for (int layer : new int[] {1, 4}) {
@@ -134,7 +136,9 @@ class CouplingTest {
     return new Path(segments);
   }
 
-  /** Torque on the copper by Lorentz's force, summed over short pieces in the solid angles' field. */
+  /**
+   * Torque on the copper by Lorentz's force, summed over short pieces in the solid angles' field.
+   */
   @Test
   void slopeIsTheTorqueOfAnAmpere() {
     double theta = 0.2;
@@ -225,8 +229,16 @@ class CouplingTest {
         new String[][] {
           {"turns: fill ", "turns: 2 "},
           {"turns: fill ", "turns: 2 ", "coils: 9 ", "coils: 12 ", "poles: 12 ", "poles: 10 "},
-          {"turns: fill ", "turns: 2 ", "coils: 9 ", "coils: 12 ", "poles: 12 ", "poles: 14 ",
-            "diameter: 10 mm\n", "diameter: 9 mm\n"}
+          {
+            "turns: fill ",
+            "turns: 2 ",
+            "coils: 9 ",
+            "coils: 12 ",
+            "poles: 12 ",
+            "poles: 14 ",
+            "diameter: 10 mm\n",
+            "diameter: 9 mm\n"
+          }
         }) {
       TestMachine m = TestMachine.of("filter-wheel", change);
       Coupling c = Coupling.of(m.assembly().artwork(), field(m, magnets(m)));

@@ -9,8 +9,8 @@ import java.util.ArrayList;
 import java.util.List;
 
 /**
- * Flux through a closed flat path that may run round many times: rows across it, each point of a row
- * counted as often as the path goes round it.
+ * Flux through a closed flat path that may run round many times: rows across it, each point of a
+ * row counted as often as the path goes round it.
  */
 final class SurfaceFlux {
   private static final double STEP_MM = 0.02;

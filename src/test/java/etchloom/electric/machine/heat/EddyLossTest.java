@@ -59,8 +59,7 @@ class EddyLossTest {
     Stackup.Copper c = new Stackup.Copper(0.035, 1, 0);
     Point a = new Point(1000, -500);
     Point b = new Point(1000, 500);
-    List<Joint> joints =
-        List.of(joint(0, a, padMm, "U1"), joint(1, b, padMm, "U2"));
+    List<Joint> joints = List.of(joint(0, a, padMm, "U1"), joint(1, b, padMm, "U2"));
     Feature what = new Feature(Feature.Kind.SPIRAL, "U", 1, List.of());
     Conductor t = new Conductor(0, 1, 0.3, Path.of(new Line(a, b)), 0, 1, "", what);
     return new Artwork(

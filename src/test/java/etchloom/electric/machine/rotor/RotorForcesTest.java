@@ -14,7 +14,19 @@ class RotorForcesTest {
 
   private static Spec.Magnet disc(double diameter, double pitch, double thickness) {
     return new Spec.Magnet(
-        Spec.MagnetOutline.DISC, diameter, 0, 0, 0, 0, 0, pitch, thickness, 1.3, -0.0012, 20, 7500,
+        Spec.MagnetOutline.DISC,
+        diameter,
+        0,
+        0,
+        0,
+        0,
+        0,
+        pitch,
+        thickness,
+        1.3,
+        -0.0012,
+        20,
+        7500,
         80);
   }
 
@@ -110,8 +122,20 @@ class RotorForcesTest {
   void wideMagnetsByTheMagneticCircuit() {
     Spec.Magnet m =
         new Spec.Magnet(
-            Spec.MagnetOutline.SECTOR, 0, 100, 600, Math.PI * 0.999, 0, 0, 0, 5, 1.3, -0.0012, 20,
-            7500, 80);
+            Spec.MagnetOutline.SECTOR,
+            0,
+            100,
+            600,
+            Math.PI * 0.999,
+            0,
+            0,
+            0,
+            5,
+            1.3,
+            -0.0012,
+            20,
+            7500,
+            80);
     Spec.Rotor r = rotor(2, m, false, 1, true, OptionalDouble.of(0.4));
     double b = 1.3 * 5 / 8;
     double area = Math.PI * (0.6 * 0.6 - 0.1 * 0.1);
