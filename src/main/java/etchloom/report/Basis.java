@@ -1,5 +1,7 @@
 package etchloom.report;
 
+import java.util.Locale;
+
 /** Where a figure comes from and how far it can be trusted. */
 enum Basis {
   RESISTANCE(
@@ -94,6 +96,11 @@ enum Basis {
     this.method = method;
     this.source = source;
     this.limits = limits;
+  }
+
+  /** Where the page tells it. */
+  String anchor() {
+    return "basis-" + name().toLowerCase(Locale.ROOT);
   }
 
   String title() {

@@ -162,7 +162,7 @@ final class HtmlFigures {
     for (Shown s : rows) {
       h.open("tr").element("th", Words.capital(s.label()), "scope=\"row\"");
       h.element("td", Words.symbols(s.value()), "class=\"n\"").open("td");
-      h.element("a", s.basis().title(), "href=\"#b-" + s.basis().ordinal() + "\"");
+      h.element("a", s.basis().title(), "href=\"#" + s.basis().anchor() + "\"");
       h.close("td").close("tr");
     }
     h.close("tbody").close("table").close("div");
