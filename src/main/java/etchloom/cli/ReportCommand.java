@@ -1,6 +1,5 @@
 package etchloom.cli;
 
-import etchloom.report.FindingText;
 import etchloom.report.ReportJson;
 import etchloom.report.ReportText;
 import java.util.concurrent.Callable;
@@ -29,14 +28,13 @@ final class ReportCommand implements Callable<Integer> {
 
   @Override
   public Integer call() {
-    Pipeline.Drawn drawn = Pipeline.run(InputFiles.read(spec, options.fab()), false);
-    console.warn(drawn.warnings());
-    drawn.rules().findings().forEach(f -> console.err().println(FindingText.line(f)));
+    Attempt attempt = Attempt.of(InputFiles.read(spec, options.fab()), false);
+    attempt.tell(console);
     if (options.json()) {
-      console.print(ReportJson.write(drawn.results()));
+      console.print(ReportJson.write(attempt.results()));
     } else if (!options.quiet()) {
-      console.out().print(ReportText.text(drawn.results(), console.colour()));
+      console.out().print(ReportText.text(attempt.results(), console.colour()));
     }
-    return drawn.rules().passed() ? ExitCode.DONE : ExitCode.REFUSED;
+    return attempt.passed() ? ExitCode.DONE : ExitCode.REFUSED;
   }
 }

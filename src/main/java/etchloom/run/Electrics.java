@@ -1,4 +1,4 @@
-package etchloom.cli;
+package etchloom.run;
 
 import etchloom.board.Assembly;
 import etchloom.electric.field.IronPlanes;
@@ -16,7 +16,7 @@ import etchloom.spec.Spec;
 import java.util.OptionalDouble;
 
 /** What the drawn copper does. */
-record Electrics(
+public record Electrics(
     ResistanceFigures resistance, InductanceFigures inductance, MachineFigures machine) {
 
   static Electrics of(Assembly assembly, Spec spec, FabRules fab) {
