@@ -97,7 +97,8 @@ public final class App implements Runnable {
   }
 
   private static String headline(Throwable e) {
-    String message = e.getMessage() == null ? "" : ": " + e.getMessage().lines().findFirst().orElse("");
+    String message =
+        e.getMessage() == null ? "" : ": " + e.getMessage().lines().findFirst().orElse("");
     return e.getClass().getSimpleName() + message;
   }
 
