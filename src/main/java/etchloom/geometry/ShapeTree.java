@@ -43,6 +43,7 @@ public final class ShapeTree {
   private final int[] lo;
   private final int[] hi;
   private final int[] left;
+  private final int[] right;
   private final int[] middle;
   private final double[] reachMm;
   private final double[] box;
@@ -64,6 +65,7 @@ public final class ShapeTree {
     lo = new int[most];
     hi = new int[most];
     left = new int[most];
+    right = new int[most];
     middle = new int[most];
     reachMm = new double[most];
     box = new double[4 * most];
@@ -103,29 +105,36 @@ public final class ShapeTree {
     int at = 4 * node;
     box[at] = box[at + 1] = Double.POSITIVE_INFINITY;
     box[at + 2] = box[at + 3] = Double.NEGATIVE_INFINITY;
-    for (int k = from; k < to; k++) {
-      int i = 4 * order[k];
-      box[at] = Math.min(box[at], shapes.box[i]);
-      box[at + 1] = Math.min(box[at + 1], shapes.box[i + 1]);
-      box[at + 2] = Math.max(box[at + 2], shapes.box[i + 2]);
-      box[at + 3] = Math.max(box[at + 3], shapes.box[i + 3]);
-    }
     if (to - from > LEAF) {
       double[] key = feature[widest(from, to, feature)];
       int mid = (from + to) >>> 1;
       Selection.split(order, key, from, to, mid);
       middle[node] = order[mid];
       left[node] = build(from, mid, feature);
-      int right = build(mid, to, feature);
+      right[node] = build(mid, to, feature);
+      join(at, box, 4 * left[node]);
+      join(at, box, 4 * right[node]);
       reachMm[node] =
           to - from <= MEASURED
               ? reach(from, to, middle[node])
-              : Math.max(viaHalf(left[node], middle[node]), viaHalf(right, middle[node]));
+              : Math.max(viaHalf(left[node], middle[node]), viaHalf(right[node], middle[node]));
     } else {
       middle[node] = order[(from + to) >>> 1];
       reachMm[node] = reach(from, to, middle[node]);
+      for (int k = from; k < to; k++) {
+        join(at, shapes.box, 4 * order[k]);
+      }
     }
     return node;
+  }
+
+  private void join(int at, double[] other, int from) {
+    for (int side = 0; side < 4; side++) {
+      double v = other[from + side];
+      if (side < 2 ? v < box[at + side] : v > box[at + side]) {
+        box[at + side] = v;
+      }
+    }
   }
 
   private int widest(int from, int to, double[][] feature) {
@@ -136,8 +145,8 @@ public final class ShapeTree {
       double max = Double.NEGATIVE_INFINITY;
       for (int k = from; k < to; k++) {
         double v = feature[f][order[k]];
-        min = Math.min(min, v);
-        max = Math.max(max, v);
+        min = v < min ? v : min;
+        max = v > max ? v : max;
       }
       if (max - min > most) {
         most = max - min;
@@ -162,17 +171,6 @@ public final class ShapeTree {
     return reachMm[half] + (m == c ? 0 : shapes.reach(m, c));
   }
 
-  private int right(int node) {
-    // Nodes are numbered in the order of building: the right half follows the whole left one.
-    int l = left[node];
-    return l + size(hi[l] - lo[l]);
-  }
-
-  /** Nodes of a subtree over {@code n} shapes. */
-  private static int size(int n) {
-    return n <= LEAF ? 1 : 1 + size(n >>> 1) + size(n - (n >>> 1));
-  }
-
   /**
    * Visits every pair i &lt; j whose fat shapes may be as near as the limit, each once, in a fixed
    * order that follows the tree and not the indices.
@@ -189,8 +187,8 @@ public final class ShapeTree {
     double now = limit;
     if (left[u] >= 0) {
       now = inside(left[u], now, visitor);
-      now = inside(right(u), now, visitor);
-      return between(left[u], right(u), now, visitor);
+      now = inside(right[u], now, visitor);
+      return between(left[u], right[u], now, visitor);
     }
     for (int a = lo[u]; a < hi[u]; a++) {
       for (int b = a + 1; b < hi[u]; b++) {
@@ -224,10 +222,10 @@ public final class ShapeTree {
     boolean cutFirst = left[v] < 0 || (left[u] >= 0 && reachMm[u] >= reachMm[v]);
     if (cutFirst) {
       now = between(left[u], v, now, visitor);
-      return between(right(u), v, now, visitor);
+      return between(right[u], v, now, visitor);
     }
     now = between(u, left[v], now, visitor);
-    return between(u, right(v), now, visitor);
+    return between(u, right[v], now, visitor);
   }
 
   private boolean apart(int u, int v, double limit) {
@@ -254,7 +252,7 @@ public final class ShapeTree {
     double now = limit;
     if (left[u] >= 0) {
       now = near(left[u], own, ownFat, now, visitor);
-      return near(right(u), own, ownFat, now, visitor);
+      return near(right[u], own, ownFat, now, visitor);
     }
     for (int k = lo[u]; k < hi[u]; k++) {
       int i = order[k];
@@ -267,8 +265,9 @@ public final class ShapeTree {
   }
 
   private static boolean boxesApart(double[] a, int i, double[] b, int j, double limit) {
-    double dx = Math.max(0, Math.max(a[i] - b[j + 2], b[j] - a[i + 2]));
-    double dy = Math.max(0, Math.max(a[i + 1] - b[j + 3], b[j + 1] - a[i + 3]));
-    return dx * dx + dy * dy > limit * limit;
+    return a[i] - b[j + 2] > limit
+        || b[j] - a[i + 2] > limit
+        || a[i + 1] - b[j + 3] > limit
+        || b[j + 1] - a[i + 3] > limit;
   }
 }

@@ -55,7 +55,8 @@ final class Gaps {
   Gap gap(Piece p, Piece q, double limitMm, double bendMm) {
     double fat = p.fatMm() + q.fatMm();
     double near = walk.neighbourMm(p, q, spaceMm) + WALK_SLACK_MM;
-    if (Run.leastMm(p, q, near) > limitMm + fat) {
+    double least = Run.leastMm(p, q, near);
+    if (least > limitMm + fat || (least >= bendMm + fat && least > facingMm(p, q))) {
       return null;
     }
     Nearest n = Distance.between(p.shape(), q.shape());
@@ -69,6 +70,16 @@ final class Gaps {
     }
     Nearest outside = outside(whole, ways, near, bendMm + fat);
     return outside == null ? null : new Gap(outside, true);
+  }
+
+  /**
+   * Between the ends where a track leaves the one piece and enters the other. If these are nearer
+   * than all points that are no neighbours, the nearest points are neighbours.
+   */
+  private static double facingMm(Piece p, Piece q) {
+    return p.fromMm() <= q.fromMm()
+        ? p.shape().end().distanceTo(q.shape().start())
+        : q.shape().end().distanceTo(p.shape().start());
   }
 
   private record Pair(Piece p, Piece q, Nearest nearest) {}

@@ -3,7 +3,7 @@ package etchloom.rules;
 import etchloom.geometry.Point;
 import etchloom.rules.Verdicts.Measured;
 import etchloom.spec.Spec;
-import java.util.Locale;
+import etchloom.units.Numbers;
 import java.util.Optional;
 
 /**
@@ -32,12 +32,11 @@ final class LaminateRule implements Rule {
     double tg = board.spec().board().laminateTgC();
     double required = limit + MARGIN_KELVIN;
     String what =
-        String.format(
-            Locale.ROOT,
-            "glass transition of the laminate; duty.copper-limit is %.4g C, and %.4g K more are"
-                + " needed",
-            limit,
-            MARGIN_KELVIN);
+        "glass transition of the laminate; duty.copper-limit is "
+            + Numbers.trimmed(limit, 1)
+            + " C, and "
+            + Numbers.trimmed(MARGIN_KELVIN, 1)
+            + " K more are needed";
     verdicts.add(
         new Measured(
             RuleName.LAMINATE,
@@ -50,16 +49,14 @@ final class LaminateRule implements Rule {
             tg - required,
             0,
             0,
-            () -> what));
+            Words.of(what)));
     if (limit > USUAL_RATING_C) {
       verdicts.note(
-          String.format(
-              Locale.ROOT,
-              "laminate: common epoxy-glass laminates are rated for %.4g C in lasting use, whatever"
-                  + " their glass transition; for a duty.copper-limit of %.4g C ask for one that"
-                  + " is rated for it",
-              USUAL_RATING_C,
-              limit));
+          "laminate: common epoxy-glass laminates are rated for "
+              + Numbers.trimmed(USUAL_RATING_C, 1)
+              + " C in lasting use, whatever their glass transition; for a duty.copper-limit of "
+              + Numbers.trimmed(limit, 1)
+              + " C ask for one that is rated for it");
     }
   }
 }

@@ -5,7 +5,6 @@ import etchloom.artwork.Conductor;
 import etchloom.artwork.Joint;
 import etchloom.geometry.Arc;
 import etchloom.geometry.Line;
-import etchloom.geometry.Point;
 import etchloom.geometry.Segment;
 import etchloom.geometry.ShapeTree;
 import java.util.ArrayList;
@@ -69,8 +68,8 @@ final class LayerCopper {
   }
 
   /** A search for what lies near other shapes, with no memory of earlier ones. */
-  Nearby nearby() {
-    return new Nearby(tree, shapes, fatMm);
+  Nearby nearby(double startMm) {
+    return new Nearby(tree, shapes, fatMm, startMm);
   }
 
   private static void add(List<Piece> out, Artwork artwork, Conductor c) {
@@ -78,28 +77,17 @@ final class LayerCopper {
     Joint first = artwork.joints().get(c.fromJoint());
     Joint last = artwork.joints().get(c.toJoint());
     double at = 0;
-    double turn = 0;
     for (int k = 0; k < path.size(); k++) {
       Segment s = path.get(k);
       double length = s.lengthMm();
-      turn += k == 0 ? 0 : corner(path.get(k - 1), s);
-      double turned = turn + (s instanceof Arc a ? Math.abs(a.sweepRad()) : 0);
       double from = k == 0 ? hidden(s, first, c) : 0;
       double to = length - (k == path.size() - 1 ? hidden(s.reversed(), last, c) : 0);
       if (to - from > SLIVER_MM) {
-        Piece whole = new Piece(s, c.widthMm() / 2, c.id(), k, at, at + length, turn, turned, -1);
+        Piece whole = new Piece(s, c.widthMm() / 2, c.id(), k, at, at + length, -1);
         cut(out, whole, at + from, at + to);
       }
       at += length;
-      turn = turned;
     }
-  }
-
-  /** The angle, never negative, between the end of one piece and the start of the next. */
-  private static double corner(Segment before, Segment after) {
-    Point a = before.tangent(1);
-    Point b = after.tangent(0);
-    return Math.abs(Math.atan2(a.cross(b), a.dot(b)));
   }
 
   /** How much of the piece's beginning lies wholly under its joint's pad, mm. */
@@ -119,8 +107,8 @@ final class LayerCopper {
 
   private static void cut(List<Piece> out, Piece whole, double fromMm, double toMm) {
     int n = 1;
-    if (whole.shape() instanceof Arc) {
-      double sweep = (whole.turnToRad() - whole.turnFromRad()) * (toMm - fromMm) / whole.lengthMm();
+    if (whole.shape() instanceof Arc a) {
+      double sweep = Math.abs(a.sweepRad()) * (toMm - fromMm) / whole.lengthMm();
       n = ArcPieces.count(sweep);
     }
     if (n == 1 && fromMm == whole.fromMm() && toMm == whole.toMm()) {

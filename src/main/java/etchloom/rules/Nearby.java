@@ -22,9 +22,13 @@ final class Nearby {
   private final ShapeTree tree;
   private final List<? extends Segment> shapes;
   private final double[] fatMm;
-  private double bestMm = Double.POSITIVE_INFINITY;
+  private double bestMm;
 
-  Nearby(ShapeTree tree, List<? extends Segment> shapes, double[] fatMm) {
+  /**
+   * @param startMm gaps above this are of no interest, unless required
+   */
+  Nearby(ShapeTree tree, List<? extends Segment> shapes, double[] fatMm, double startMm) {
+    bestMm = startMm;
     this.tree = tree;
     this.shapes = shapes;
     this.fatMm = fatMm;

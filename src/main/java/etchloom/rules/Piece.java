@@ -25,12 +25,10 @@ record Piece(
     int segment,
     double fromMm,
     double toMm,
-    double turnFromRad,
-    double turnToRad,
     int joint) {
 
   static Piece pad(Point at, double radiusMm, int joint) {
-    return new Piece(new Line(at, at), radiusMm, -1, -1, 0, 0, 0, 0, joint);
+    return new Piece(new Line(at, at), radiusMm, -1, -1, 0, 0, joint);
   }
 
   boolean isPad() {
@@ -45,17 +43,7 @@ record Piece(
   Piece part(double startMm, double endMm) {
     double from = Math.max(0, (startMm - fromMm) / lengthMm());
     double to = Math.min(1, (endMm - fromMm) / lengthMm());
-    double turn = turnToRad - turnFromRad;
-    return new Piece(
-        shape.part(from, to),
-        fatMm,
-        conductor,
-        segment,
-        startMm,
-        endMm,
-        turnFromRad + from * turn,
-        turnFromRad + to * turn,
-        joint);
+    return new Piece(shape.part(from, to), fatMm, conductor, segment, startMm, endMm, joint);
   }
 
   /** Length of the conductor's path up to a point of the shape. */

@@ -1,6 +1,6 @@
 package etchloom.rules;
 
-import java.util.Locale;
+import etchloom.units.Numbers;
 import java.util.OptionalDouble;
 
 /** What the reader must know about the rule {@code voltage}: which columns apply, and why. */
@@ -26,12 +26,11 @@ final class VoltageNotes implements Rule {
             + " safety insulation between the winding and people");
     if (volt > HARMLESS_VOLT) {
       verdicts.note(
-          String.format(
-              Locale.ROOT,
-              "voltage: %.4g V is above 60 V d.c., where touching may harm: insulation must follow"
-                  + " the standards for the product, such as IEC 60664-1 and IEC 62368-1, which ask"
-                  + " for more than this check",
-              volt));
+          "voltage: "
+              + volt(volt)
+              + " is above 60 V d.c., where touching may harm: insulation must follow the standards"
+              + " for the product, such as IEC 60664-1 and IEC 62368-1, which ask for more than"
+              + " this check");
     }
   }
 
@@ -45,23 +44,22 @@ final class VoltageNotes implements Rule {
       why = "the peak line back-EMF at speed with 10 % in hand; there is no duty.bus";
     } else if (bus.getAsDouble() >= emf.getAsDouble()) {
       why =
-          String.format(
-              Locale.ROOT,
-              "duty.bus; the peak line back-EMF with 10 %% in hand is less, %.4g V",
-              emf.getAsDouble());
+          "duty.bus; the peak line back-EMF with 10 % in hand is less, " + volt(emf.getAsDouble());
     } else {
       why =
-          String.format(
-              Locale.ROOT,
-              "the peak line back-EMF at speed with 10 %% in hand, more than duty.bus, %.4g V",
-              bus.getAsDouble());
+          "the peak line back-EMF at speed with 10 % in hand, more than duty.bus, "
+              + volt(bus.getAsDouble());
     }
-    return String.format(
-        Locale.ROOT,
-        "voltage: %.4g V between phases and to terminals, rim and screws (%s); within a phase that"
-            + " voltage times the share of the phase's length between the two points",
-        volt,
-        why);
+    return "voltage: "
+        + volt(volt)
+        + " between phases and to terminals, rim and screws ("
+        + why
+        + "); within a phase that voltage times the share of the phase's length between the two"
+        + " points";
+  }
+
+  private static String volt(double volt) {
+    return Numbers.trimmed(volt, 2) + " V";
   }
 
   private static String columns(Board board, double volt) {
@@ -75,7 +73,11 @@ final class VoltageNotes implements Rule {
   }
 
   private static String part(Spacing2221 column, String where, double volt) {
-    return String.format(
-        Locale.ROOT, "%.4g mm in column %s (%s)", column.requiredMm(volt), column, where);
+    return Numbers.trimmed(column.requiredMm(volt), 3)
+        + " mm in column "
+        + column
+        + " ("
+        + where
+        + ")";
   }
 }

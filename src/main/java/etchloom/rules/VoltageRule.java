@@ -1,8 +1,9 @@
 package etchloom.rules;
 
 import etchloom.rules.Verdicts.Measured;
+import etchloom.units.Numbers;
+import java.util.ArrayList;
 import java.util.List;
-import java.util.Locale;
 
 /**
  * {@code voltage}: the gap between two pieces of copper against the voltage between them, by
@@ -11,9 +12,55 @@ import java.util.Locale;
 final class VoltageRule implements LayerRule {
   @Override
   public List<PairWatch> watches(Layer layer, Verdicts verdicts) {
-    return layer.board().potentials().fullVolt().isEmpty()
-        ? List.of()
-        : List.of(new Watch(layer, verdicts));
+    return on(layer) ? List.of(new Watch(layer, verdicts)) : List.of();
+  }
+
+  /** Bare pads between themselves: few, and the column asks for much more than under the mask. */
+  @Override
+  public void check(Layer layer, Verdicts verdicts) {
+    List<Piece> pieces = layer.copper().pieces();
+    Gaps gaps = new Gaps(layer.copper().walk(), layer.board().spaceMm(layer.number()));
+    List<Integer> bare = on(layer) ? bare(layer, pieces) : List.of();
+    for (int a = 0; a < bare.size(); a++) {
+      for (int b = a + 1; b < bare.size(); b++) {
+        Piece p = pieces.get(bare.get(a));
+        Piece q = pieces.get(bare.get(b));
+        Gaps.Gap g = gaps.gap(p, q, Double.POSITIVE_INFINITY, 0);
+        if (g != null && !g.bend()) {
+          double gap = g.centres().distanceMm() - p.fatMm() - q.fatMm();
+          Close c = new Close(bare.get(a), bare.get(b), p, q, gap, g.centres(), false);
+          add(layer, verdicts, c, layer.board().potentials().volt(p, q), Spacing2221.A6);
+        }
+      }
+    }
+  }
+
+  private static List<Integer> bare(Layer layer, List<Piece> pieces) {
+    List<Integer> out = new ArrayList<>();
+    for (int i = 0; i < pieces.size(); i++) {
+      if (layer.board().exposure().bare(layer.number(), pieces.get(i))) {
+        out.add(i);
+      }
+    }
+    return out;
+  }
+
+  private static boolean on(Layer layer) {
+    return layer.board().potentials().fullVolt().isPresent();
+  }
+
+  private static void add(
+      Layer layer, Verdicts verdicts, Close c, double volt, Spacing2221 column) {
+    verdicts.add(
+        Measured.atLeast(
+                RuleName.VOLTAGE,
+                layer.number(),
+                c.at(),
+                c.gapMm(),
+                column.requiredMm(volt),
+                words(layer.words(c.p(), c.q()), volt, column))
+            .byMargin()
+            .ids(c.first(), c.second()));
   }
 
   /** The column for two things on a layer. */
@@ -24,8 +71,8 @@ final class VoltageRule implements LayerRule {
     return bothBare ? Spacing2221.A6 : Spacing2221.B4;
   }
 
-  static String words(String things, double volt, Spacing2221 column) {
-    return String.format(Locale.ROOT, "%s: %.3g V, column %s", things, volt, column);
+  static Words words(Words things, double volt, Spacing2221 column) {
+    return Words.of(things, ": ", Numbers.significant(volt, 3), " V, column ", column);
   }
 
   private static final class Watch implements PairWatch {
@@ -38,10 +85,7 @@ final class VoltageRule implements LayerRule {
       this.layer = layer;
       this.verdicts = verdicts;
       double full = layer.board().potentials().fullVolt().orElse(0);
-      mostMm =
-          Math.max(
-              column(layer, false).requiredMm(full),
-              layer.outer() ? Spacing2221.A6.requiredMm(full) : 0);
+      mostMm = column(layer, false).requiredMm(full);
     }
 
     @Override
@@ -60,24 +104,13 @@ final class VoltageRule implements LayerRule {
       if (c.bend()) {
         return;
       }
-      Exposure bare = layer.board().exposure();
-      boolean bothBare = bare.bare(layer.number(), c.p()) && bare.bare(layer.number(), c.q());
-      Spacing2221 column = column(layer, bothBare);
+      Spacing2221 column = column(layer, false);
       double volt = layer.board().potentials().volt(c.p(), c.q());
       double required = column.requiredMm(volt);
       double margin = c.gapMm() - required;
       if (margin < -Board.SLACK_MM || margin < leastMarginMm) {
         leastMarginMm = Math.min(leastMarginMm, margin);
-        verdicts.add(
-            Measured.atLeast(
-                    RuleName.VOLTAGE,
-                    layer.number(),
-                    c.at(),
-                    c.gapMm(),
-                    required,
-                    () -> words(layer.words(c.p(), c.q()), volt, column))
-                .byMargin()
-                .ids(c.first(), c.second()));
+        add(layer, verdicts, c, volt, column);
       }
     }
   }

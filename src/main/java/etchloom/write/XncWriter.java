@@ -8,7 +8,8 @@ import java.util.SortedMap;
  * Drill files in XNC form, one for plated and one for non-plated holes, finished diameters.
  *
  * <p>Source: XNC Format Specification 2021.11. Every number carries a decimal point: without it
- * readers guess a zero suppression and {@code X10} becomes 0.010 mm.
+ * readers guess a zero suppression and {@code X10} becomes 0.010 mm. Coordinates carry their sign:
+ * one reader (gerber-parser 4.2) otherwise takes the 0 of {@code X30.5} for a suppressed one's.
  */
 final class XncWriter {
   /** Longer tool numbers are read as tool and compensation. */
@@ -52,9 +53,15 @@ final class XncWriter {
     for (Holes.Tool t : tools) {
       s.append('T').append(Numbers.padded(++number, 2)).append('\n');
       for (Holes.Hit h : t.hits()) {
-        s.append('X').append(Numbers.mm(h.x())).append('Y').append(Numbers.mm(h.y())).append('\n');
+        signed(s.append('X'), h.x());
+        signed(s.append('Y'), h.y());
+        s.append('\n');
       }
     }
     return Ascii.bytes(s.append("M30\n"));
+  }
+
+  private static void signed(StringBuilder s, long nm) {
+    Numbers.mm(nm < 0 ? s : s.append('+'), nm);
   }
 }

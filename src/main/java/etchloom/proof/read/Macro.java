@@ -10,9 +10,17 @@ import java.util.Map;
 /** An aperture macro: its statements as written, evaluated for each aperture that uses it. */
 final class Macro {
   /** Bytes of macro text that weigh as much as one drawn piece when evaluated. */
-  private static final int BYTES_A_PIECE = 16;
+  private static final int BYTES_A_PIECE = 4;
 
-  private record Statement(byte[] text, int line) {}
+  private static final class Statement {
+    final byte[] text;
+    final int line;
+
+    Statement(byte[] text, int line) {
+      this.text = text;
+      this.line = line;
+    }
+  }
 
   private final String name;
   private final Reading reading;

@@ -24,6 +24,7 @@ class ReaderFuzzTest {
                     Path.of(System.getProperty("java.home"), "bin", "java").toString(),
                     "-Xmx512m",
                     "-XX:+UseSerialGC",
+                    "-XX:TieredStopAtLevel=1",
                     "-cp",
                     System.getProperty("java.class.path"),
                     ReaderFuzz.class.getName(),

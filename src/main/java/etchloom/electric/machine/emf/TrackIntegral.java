@@ -1,0 +1,22 @@
+package etchloom.electric.machine.emf;
+
+/**
+ * The rotor's field integrated along one conductor, entry i of each for the odd order ν = 2i + 1.
+ *
+ * @param re of {@code G = ∫ r b e^(iνPφ) dr}, Wb; the conductor's part of dλ/dθ is {@code Re Σ G
+ *     e^(−iνPθ)}
+ * @param squares {@code ∫ b² dl}, T²·mm
+ */
+record TrackIntegral(double[] re, double[] im, double[] squares) {
+  /** The same conductor turned counter-clockwise about the shaft. */
+  TrackIntegral rotated(int polePairs, double rad) {
+    double[] c = new double[re.length];
+    double[] s = new double[re.length];
+    for (int i = 0; i < re.length; i++) {
+      double a = (2 * i + 1) * polePairs * rad;
+      c[i] = re[i] * Math.cos(a) - im[i] * Math.sin(a);
+      s[i] = re[i] * Math.sin(a) + im[i] * Math.cos(a);
+    }
+    return new TrackIntegral(c, s, squares);
+  }
+}
