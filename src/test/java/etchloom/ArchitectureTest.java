@@ -44,6 +44,20 @@ class ArchitectureTest {
           Map.entry("write", List.of("artwork", "geometry", "units")),
           Map.entry("proof", List.of("artwork", "geometry", "units", "diagnostic")),
           Map.entry(
+              "run",
+              List.of(
+                  "board",
+                  "artwork",
+                  "winding",
+                  "spec",
+                  "rules",
+                  "electric",
+                  "proof",
+                  "report",
+                  "units",
+                  "geometry",
+                  "diagnostic")),
+          Map.entry(
               "report",
               List.of(
                   "artwork",

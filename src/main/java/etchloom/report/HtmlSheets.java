@@ -66,7 +66,7 @@ final class HtmlSheets {
   void basis() {
     h.open("dl", "class=\"basis\"");
     for (Basis b : Basis.values()) {
-      h.open("div", "id=\"b-" + b.ordinal() + "\"").element("dt", b.title());
+      h.open("div", "id=\"" + b.anchor() + "\"").element("dt", b.title());
       line("Method", b.method());
       line("Source", b.source());
       line("Limits", b.limits());
