@@ -4,16 +4,14 @@ import etchloom.board.Assembler;
 import etchloom.board.Assembly;
 import etchloom.diagnostic.Diagnostic;
 import etchloom.diagnostic.Staged;
-import etchloom.electric.resistance.Resistance;
-import etchloom.electric.resistance.ResistanceFigures;
 import etchloom.report.Results;
 import etchloom.rules.RuleCheck;
-import etchloom.rules.RuleContext;
 import etchloom.rules.RuleReport;
+import etchloom.spec.Spec;
 import java.util.ArrayList;
 import java.util.List;
 
-/** The one way through: from checked inputs to the board, its rule check and its figures. */
+/** The one way through: from checked inputs to the board, its figures and its rule check. */
 final class Pipeline {
   private Pipeline() {}
 
@@ -21,8 +19,8 @@ final class Pipeline {
   record Drawn(
       InputFiles.Inputs inputs,
       Assembly assembly,
+      Electrics electrics,
       RuleReport rules,
-      ResistanceFigures resistance,
       List<Diagnostic> warnings) {
     Drawn {
       warnings = List.copyOf(warnings);
@@ -30,13 +28,14 @@ final class Pipeline {
 
     Results results() {
       return Results.of(
-          Version.TEXT,
-          inputs.file().spec(),
-          inputs.fab(),
-          assembly.artwork(),
-          assembly.winding(),
-          rules,
-          resistance);
+              Version.TEXT,
+              inputs.file().spec(),
+              inputs.fab(),
+              assembly.artwork(),
+              assembly.winding(),
+              rules,
+              electrics.resistance())
+          .withElectrics(electrics.inductance(), electrics.machine());
     }
   }
 
@@ -45,14 +44,14 @@ final class Pipeline {
    * @throws BadInput where the spec cannot be drawn
    */
   static Drawn run(InputFiles.Inputs in, boolean draft) {
-    Staged<Assembly> staged =
-        Assembler.assemble(in.file().spec(), in.fab(), in.file().positions(), draft);
+    Spec spec = in.file().spec();
+    Staged<Assembly> staged = Assembler.assemble(spec, in.fab(), in.file().positions(), draft);
     Assembly assembly = staged.value().orElseThrow(() -> new BadInput(staged.diagnostics()));
-    ResistanceFigures resistance = Resistance.of(assembly.artwork(), in.fab().tolerance());
+    Electrics electrics = Electrics.of(assembly, spec, in.fab());
     RuleReport rules =
-        RuleCheck.check(assembly.artwork(), in.file().spec(), in.fab(), RuleContext.NONE);
+        RuleCheck.check(assembly.artwork(), spec, in.fab(), electrics.rules(spec));
     List<Diagnostic> warnings = new ArrayList<>(in.warnings());
     warnings.addAll(staged.diagnostics());
-    return new Drawn(in, assembly, rules, resistance, warnings);
+    return new Drawn(in, assembly, electrics, rules, warnings);
   }
 }

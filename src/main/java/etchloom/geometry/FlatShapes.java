@@ -15,6 +15,9 @@ final class FlatShapes {
   /** Bounds are kept this far from what they bound, against rounding. */
   private static final double ROUNDING_MM = 1e-9;
 
+  /** Upper bound on an arc's length over its chord, up to a quarter turn: (π/4)·√2. */
+  private static final double QUARTER_OVER_CHORD = 1.111;
+
   final double[] x0;
   final double[] y0;
   final double[] x1;
@@ -127,19 +130,37 @@ final class FlatShapes {
    *
    * <p>From a line or arc to a line: the distance from a convex set is greatest at the ends of a
    * line; an arc leaves its chord by no more than its height. Between concentric arcs: the
-   * difference of the radii, or an end that stands beyond the other arc's.
+   * difference of the radii, and what stands beyond the other arc's ends.
    */
   double reach(int i, int c) {
     if (r[i] > 0
         && r[c] > 0
         && Math.abs(cx[i] - cx[c]) <= SAME_CENTRE_MM
         && Math.abs(cy[i] - cy[c]) <= SAME_CENTRE_MM) {
-      double beyond = Math.max(beyond(x0[i], y0[i], c), beyond(x1[i], y1[i], c));
-      return Math.abs(r[i] - r[c]) + beyond + slack[i] + slack[c] + 2 * SAME_CENTRE_MM;
+      double off = Math.abs(r[i] - r[c]) + slack[i] + slack[c] + 2 * SAME_CENTRE_MM;
+      return off + beyond(i, c);
     }
     double a = toChord(x0[i], y0[i], c);
     double b = toChord(x1[i], y1[i], c);
     return height[i] + height[c] + Math.max(a, b) + ROUNDING_MM;
+  }
+
+  /**
+   * How far the directions of arc {@code i} lead beyond the ends of the concentric arc {@code c}.
+   */
+  private double beyond(int i, int c) {
+    double a = beyond(x0[i], y0[i], c);
+    double b = beyond(x1[i], y1[i], c);
+    double most = Math.max(a, b);
+    if (a == 0 || b == 0 || beyond(x0[c], y0[c], i) == 0) {
+      // They have directions in common: what stands beyond is farthest at an end.
+      return most;
+    }
+    // No part is farther than half-way round from the one end to the other.
+    double dx = x1[i] - x0[i];
+    double dy = y1[i] - y0[i];
+    double round = QUARTER_OVER_CHORD * Math.sqrt(dx * dx + dy * dy) * r[c] / r[i];
+    return Math.max(most, (a + b + round) / 2);
   }
 
   /**

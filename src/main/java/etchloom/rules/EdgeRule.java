@@ -20,8 +20,8 @@ final class EdgeRule implements LayerRule {
           layer.board().fab().edge().copperMm(),
           (i, gap, n) -> {
             Piece p = layer.copper().pieces().get(i);
-            boolean in = outline.inside(n.onSecond());
-            double depth = in ? gap : -n.distanceMm() - p.fatMm();
+            boolean beyond = outline.beyond(e, n.onSecond());
+            double depth = beyond ? -n.distanceMm() - p.fatMm() : gap;
             add(layer, verdicts, i, Board.middle(n, 0, p.fatMm()), depth, e.what());
             return depth;
           });
@@ -58,7 +58,7 @@ final class EdgeRule implements LayerRule {
                 at,
                 depthMm,
                 layer.board().fab().edge().copperMm(),
-                () -> layer.words(layer.copper().pieces().get(i)) + " and " + edge)
+                Words.of(layer.words(layer.copper().pieces().get(i)), " and ", edge))
             .byMargin()
             .ids(i, 0));
   }

@@ -73,7 +73,7 @@ final class HoleCopperRule implements LayerRule {
                     c.at(),
                     gap,
                     requiredMm,
-                    () -> "hole of " + layer.words(hole, other))
+                    Words.of("hole of ", layer.words(hole, other)))
                 .ids(c.first(), c.second()));
       }
     }

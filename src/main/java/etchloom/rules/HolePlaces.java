@@ -70,7 +70,7 @@ final class HolePlaces implements Rule {
                           Board.middle(n, radii[i], radii[j]),
                           gap,
                           required,
-                          () -> a.what() + " and " + b.what())
+                          Words.of(a.what(), " and ", b.what()))
                       .ids(i, j));
               return Math.max(required, Math.min(limit, gap));
             });
@@ -85,7 +85,7 @@ final class HolePlaces implements Rule {
                 hole.at(),
                 d.depthMm() - hole.radiusMm(),
                 board.fab().edge().holeMm(),
-                () -> "hole of " + hole.what() + " and " + d.what())
+                Words.of("hole of ", hole.what(), " and ", d.what()))
             .byMargin()
             .ids(i, 0));
   }

@@ -38,7 +38,7 @@ final class KeepOutRule implements Rule {
                 n.middle(),
                 n.distanceMm() - (a.keepOutMm() + b.keepOutMm()) / 2,
                 0,
-                () -> "screw heads of mounting holes " + (i + 1) + " and " + (j + 1))
+                Words.of("screw heads of mounting holes ", i + 1, " and ", j + 1))
             .ids(i, j));
   }
 
@@ -46,12 +46,12 @@ final class KeepOutRule implements Rule {
     Artwork a = board.artwork();
     int number = 0;
     for (MountingHole h : a.mountingHoles()) {
-      String what = "mounting hole " + ++number + "'s screw head";
+      Words what = Words.of("mounting hole ", ++number, "'s screw head");
       clear(board, h.at(), h.keepOutMm() / 2, discMm, what, number, verdicts);
     }
     for (Joint j : a.joints()) {
       if (j.terminal()) {
-        String what = LayerCopper.jointWords(j);
+        Words what = Words.of(LayerCopper.jointWords(j));
         clear(board, j.at(), j.padMm() / 2, discMm, what, j.id(), verdicts);
       }
     }
@@ -62,7 +62,7 @@ final class KeepOutRule implements Rule {
       Point at,
       double radiusMm,
       double discMm,
-      String what,
+      Words what,
       int id,
       Verdicts verdicts) {
     double gap = at.norm() - radiusMm - discMm;
@@ -71,7 +71,7 @@ final class KeepOutRule implements Rule {
     for (int layer : new int[] {1, last}) {
       verdicts.add(
           Measured.atLeast(
-                  RuleName.KEEP_OUT, layer, at, gap, 0, () -> what + " and the rotor's disc")
+                  RuleName.KEEP_OUT, layer, at, gap, 0, Words.of(what, " and the rotor's disc"))
               .ids(id, 0));
     }
   }

@@ -49,7 +49,7 @@ final class LaminateRule implements Rule {
             tg - required,
             0,
             0,
-            () -> what));
+            Words.of(what)));
     if (limit > USUAL_RATING_C) {
       verdicts.note(
           "laminate: common epoxy-glass laminates are rated for "

@@ -19,8 +19,8 @@ record Layer(Board board, LayerCopper copper, Optional<FabRules.CopperRow> row) 
   }
 
   /** What two pieces are, in the user's words. */
-  String words(Piece p, Piece q) {
-    return words(p) + " and " + words(q);
+  Words words(Piece p, Piece q) {
+    return Words.of(words(p), " and ", words(q));
   }
 
   String words(Piece p) {

@@ -5,6 +5,7 @@ import etchloom.artwork.MountingHole;
 import etchloom.artwork.Opening;
 import etchloom.artwork.Stroke;
 import etchloom.geometry.Line;
+import etchloom.geometry.Nearest;
 import etchloom.geometry.Point;
 import etchloom.geometry.Segment;
 import etchloom.geometry.ShapeTree;
@@ -31,17 +32,17 @@ final class LegendRule implements Rule {
 
   private static void size(Board board, Stroke s, int i, Verdicts verdicts) {
     double line = board.fab().legend().lineMm();
-    String what = "legend '" + s.what() + "'";
+    Words what = Words.of("legend '", s.what(), "'");
     Point at = s.path().start();
     verdicts.add(
-        Measured.atLeast(RuleName.LEGEND, 1, at, s.widthMm(), line, () -> what + ": line width")
+        Measured.atLeast(RuleName.LEGEND, 1, at, s.widthMm(), line, Words.of(what, ": line width"))
             .byMargin()
             .ids(i, 0));
     if (s.letterMm().isPresent()) {
       double least = board.fab().legend().heightMm();
       double high = s.letterMm().getAsDouble();
       verdicts.add(
-          Measured.atLeast(RuleName.LEGEND, 1, at, high, least, () -> what + ": letter height")
+          Measured.atLeast(RuleName.LEGEND, 1, at, high, least, Words.of(what, ": letter height"))
               .byMargin()
               .ids(i, 1));
     }
@@ -75,35 +76,37 @@ final class LegendRule implements Rule {
     void check() {
       Artwork a = board.artwork();
       for (Opening o : a.maskTop()) {
-        round(o.at(), o.diameterMm() / 2, "the opening of " + o.what());
+        round(o.at(), o.diameterMm() / 2, Words.of("the opening of ", o.what()));
       }
       int number = 0;
       for (MountingHole h : a.mountingHoles()) {
-        round(h.at(), h.diameterMm() / 2, "mounting hole " + ++number);
+        round(h.at(), h.diameterMm() / 2, Words.of("mounting hole ", ++number));
       }
       for (Outline.Edge e : board.outline().edges()) {
-        look(e.shape(), 0, e.what());
+        look(
+            e.shape(),
+            0,
+            (i, gap, n) -> {
+              boolean beyond = board.outline().beyond(e, n.onSecond());
+              return add(i, n, 0, beyond ? -n.distanceMm() - fatMm[i] : gap, e.what());
+            });
       }
       for (int i = 0; i < shapes.size(); i++) {
         stray(i);
       }
     }
 
-    private void round(Point at, double radiusMm, String what) {
-      look(new Line(at, at), radiusMm, what);
+    private void round(Point at, double radiusMm, Words what) {
+      look(new Line(at, at), radiusMm, (i, gap, n) -> add(i, n, radiusMm, gap, what));
     }
 
-    private void look(Segment thing, double thingFatMm, String what) {
-      nearby.look(
-          thing,
-          thingFatMm,
-          board.fab().legend().gapMm(),
-          (i, gap, n) -> {
-            boolean beyond = thingFatMm == 0 && !board.outline().inside(n.onSecond());
-            double clear = beyond ? -n.distanceMm() - fatMm[i] : gap;
-            add(i, Board.middle(n, thingFatMm, fatMm[i]), clear, what);
-            return clear;
-          });
+    private void look(Segment thing, double thingFatMm, Nearby.Hit hit) {
+      nearby.look(thing, thingFatMm, board.fab().legend().gapMm(), hit);
+    }
+
+    private double add(int i, Nearest n, double thingFatMm, double gapMm, Object what) {
+      add(i, Board.middle(n, thingFatMm, fatMm[i]), gapMm, what);
+      return gapMm;
     }
 
     /** A stroke that lies beyond the edge as a whole. */
@@ -115,7 +118,7 @@ final class LegendRule implements Rule {
       }
     }
 
-    private void add(int i, Point at, double gapMm, String what) {
+    private void add(int i, Point at, double gapMm, Object what) {
       verdicts.add(
           Measured.atLeast(
                   RuleName.LEGEND,
@@ -123,7 +126,7 @@ final class LegendRule implements Rule {
                   at,
                   gapMm,
                   board.fab().legend().gapMm(),
-                  () -> "legend '" + owner.get(i).what() + "' and " + what)
+                  Words.of("legend '", owner.get(i).what(), "' and ", what))
               .byMargin()
               .ids(i, 2));
     }

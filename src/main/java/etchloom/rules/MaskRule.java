@@ -45,7 +45,7 @@ final class MaskRule implements LayerRule {
                 Board.middle(n, a.diameterMm() / 2, b.diameterMm() / 2),
                 n.distanceMm() - (a.diameterMm() + b.diameterMm()) / 2,
                 layer.board().fab().mask().webMm(),
-                () -> "openings of " + a.what() + " and " + b.what())
+                Words.of("openings of ", a.what(), " and ", b.what()))
             .byMargin()
             .ids(i, j));
   }
@@ -77,7 +77,7 @@ final class MaskRule implements LayerRule {
                           Board.middle(g.centres(), radius, p.fatMm()),
                           clear,
                           required,
-                          () -> "opening of " + o.what() + " and " + layer.words(p))
+                          Words.of("opening of ", o.what(), " and ", layer.words(p)))
                       .byMargin()
                       .ids(number, openingCount(layer) + (long) i));
               return clear;

@@ -32,12 +32,14 @@ final class OrderRules implements Rule {
       } else {
         boolean outer = board.outer(layer);
         double nearest = nearestWeight(board.fab(), outer, c.ounces());
-        String what =
+        String side = outer ? "outer" : "inner";
+        Words what =
             Double.isNaN(nearest)
-                ? "the fab offers no copper on " + (outer ? "outer" : "inner") + " layers"
-                : "the fab does not offer this copper on "
-                    + (outer ? "outer" : "inner")
-                    + " layers; the nearest is given";
+                ? Words.of("the fab offers no copper on ", side, " layers")
+                : Words.of(
+                    "the fab does not offer this copper on ",
+                    side,
+                    " layers; the nearest is given");
         verdicts.add(broken(RuleName.COPPER_WEIGHT, layer, c.ounces(), nearest, "oz", what));
       }
     }
@@ -47,7 +49,8 @@ final class OrderRules implements Rule {
   private static void thickness(
       int layer, Stackup.Copper c, FabRules.CopperRow row, Verdicts verdicts) {
     double off = Math.abs(c.thicknessMm() / row.thicknessMm() - 1);
-    String what = "finished copper; the fab's row of " + Numbers.trimmed(row.ounces(), 3) + " oz";
+    Words what =
+        Words.of("finished copper; the fab's row of ", Numbers.trimmed(row.ounces(), 3), " oz");
     verdicts.add(
         new Measured(
             RuleName.COPPER_WEIGHT,
@@ -60,7 +63,7 @@ final class OrderRules implements Rule {
             -off,
             layer,
             0,
-            () -> what));
+            what));
   }
 
   private static double nearestWeight(FabRules fab, boolean outer, double ounces) {
@@ -95,21 +98,33 @@ final class OrderRules implements Rule {
             -off,
             0,
             0,
-            () -> "copper layers; the fab builds " + board.fab().layers()));
+            Words.of("copper layers; the fab builds ", board.fab().layers())));
   }
 
   private static void size(Board board, Verdicts verdicts) {
     double[] sides = board.outline().sizeMm();
     FabRules fab = board.fab();
-    add(verdicts, Math.max(sides[0], sides[1]), fab.sizeMm(), true, "the board's greatest side", 0);
+    add(
+        verdicts,
+        Math.max(sides[0], sides[1]),
+        fab.sizeMm(),
+        true,
+        Words.of("the board's greatest side"),
+        0);
     double thick = board.artwork().stackup().thicknessMm();
-    add(verdicts, thick, fab.thicknessMaxMm(), true, "the board's thickness, at most", 1);
-    add(verdicts, thick, fab.thicknessMinMm(), false, "the board's thickness, at least", 2);
+    add(verdicts, thick, fab.thicknessMaxMm(), true, Words.of("the board's thickness, at most"), 1);
+    add(
+        verdicts,
+        thick,
+        fab.thicknessMinMm(),
+        false,
+        Words.of("the board's thickness, at least"),
+        2);
   }
 
   /** Lengths of different kinds: ranked by what is left as a share of the limit. */
   private static void add(
-      Verdicts verdicts, double mm, double limitMm, boolean most, String what, int id) {
+      Verdicts verdicts, double mm, double limitMm, boolean most, Words what, int id) {
     double left = most ? limitMm - mm : mm - limitMm;
     verdicts.add(
         new Measured(
@@ -123,11 +138,11 @@ final class OrderRules implements Rule {
             limitMm > 0 ? left / limitMm : left,
             id,
             0,
-            () -> what));
+            what));
   }
 
   private static Measured broken(
-      RuleName rule, int layer, double value, double required, String unit, String what) {
+      RuleName rule, int layer, double value, double required, String unit, Words what) {
     double shown = Double.isNaN(required) ? 0 : required;
     return new Measured(
         rule,
@@ -140,7 +155,7 @@ final class OrderRules implements Rule {
         Double.NEGATIVE_INFINITY,
         layer,
         0,
-        () -> what);
+        what);
   }
 
   /** Not a rule that can be broken, but a fab asks back about every build that is not its own. */

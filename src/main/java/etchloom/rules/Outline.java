@@ -18,9 +18,10 @@ final class Outline {
   /**
    * A piece of the outline.
    *
+   * @param path the outer edge: 0; the cut-outs: from 1
    * @param what the edge it belongs to, in the user's words
    */
-  record Edge(Segment shape, String what) {}
+  record Edge(Segment shape, int path, String what) {}
 
   private final List<Path> profile;
   private final List<Edge> edges = new ArrayList<>();
@@ -36,7 +37,8 @@ final class Outline {
         double sweep = s instanceof Arc a ? Math.abs(a.sweepRad()) : 0;
         int n = (int) Math.max(1, Math.ceil(sweep / PIECE_RAD - 1e-9));
         for (int k = 0; k < n; k++) {
-          edges.add(new Edge(n == 1 ? s : s.part(k / (double) n, (k + 1) / (double) n), what));
+          Segment part = n == 1 ? s : s.part(k / (double) n, (k + 1) / (double) n);
+          edges.add(new Edge(part, i, what));
         }
       }
     }
@@ -59,11 +61,20 @@ final class Outline {
   /** Whether a point lies on the board; where there is no outline all do. */
   boolean inside(Point p) {
     for (int i = 0; i < profile.size(); i++) {
-      if (contains(profile.get(i), p) != (i == 0)) {
+      if (beyond(i, p)) {
         return false;
       }
     }
     return true;
+  }
+
+  /** Whether a point lies beyond an edge: outside the outer one, or in a cut-out. */
+  boolean beyond(Edge e, Point p) {
+    return beyond(e.path(), p);
+  }
+
+  private boolean beyond(int path, Point p) {
+    return contains(profile.get(path), p) != (path == 0);
   }
 
   /** By the turns that the edge makes round the point. */

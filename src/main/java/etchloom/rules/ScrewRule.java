@@ -77,7 +77,7 @@ final class ScrewRule implements LayerRule {
                     at,
                     fromMiddleMm - metalMm,
                     column.requiredMm(volt),
-                    () -> VoltageRule.words(words("'s screw", p), volt, column))
+                    VoltageRule.words(words("'s screw", p), volt, column))
                 .byMargin()
                 .ids(i, i));
       }
@@ -86,12 +86,11 @@ final class ScrewRule implements LayerRule {
     private void add(
         RuleName rule, int i, Piece p, Point at, double gapMm, double requiredMm, String part) {
       verdicts.add(
-          Measured.atLeast(rule, layer.number(), at, gapMm, requiredMm, () -> words(part, p))
-              .ids(i, i));
+          Measured.atLeast(rule, layer.number(), at, gapMm, requiredMm, words(part, p)).ids(i, i));
     }
 
-    private String words(String part, Piece p) {
-      return what + part + " and " + layer.words(p);
+    private Words words(String part, Piece p) {
+      return Words.of(what, part, " and ", layer.words(p));
     }
   }
 }

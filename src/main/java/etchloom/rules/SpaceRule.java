@@ -44,7 +44,7 @@ final class SpaceRule implements LayerRule {
                     c.at(),
                     c.gapMm(),
                     requiredMm,
-                    () -> layer.words(c.p(), c.q()))
+                    layer.words(c.p(), c.q()))
                 .ids(c.first(), c.second()));
       }
     }

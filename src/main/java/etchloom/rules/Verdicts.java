@@ -6,7 +6,6 @@ import java.util.EnumMap;
 import java.util.HashMap;
 import java.util.List;
 import java.util.Map;
-import java.util.function.Supplier;
 
 /**
  * Collects what the rules measure: the tightest place of each, and those that break it.
@@ -40,20 +39,20 @@ final class Verdicts {
       double tightness,
       long first,
       long second,
-      Supplier<String> what) {
+      Words what) {
 
     /** A length that must reach what is required, 1 nm of slack given. */
     static Measured atLeast(
-        RuleName rule, int layer, Point at, double mm, double required, Supplier<String> what) {
+        RuleName rule, int layer, Point at, double mm, double required, Words what) {
       return new Measured(
           rule, layer, at, mm, required, "mm", mm >= required - STEP_MM, mm, 0, 0, what);
     }
 
     /** A value that must not pass what is required. */
     static Measured atMost(
-        RuleName rule, Point at, double value, double required, String unit, String what) {
+        RuleName rule, Point at, double value, double required, String unit, Words what) {
       boolean kept = value <= required + 1e-9 * Math.max(1, Math.abs(required));
-      return new Measured(rule, 0, at, value, required, unit, kept, -value, 0, 0, () -> what);
+      return new Measured(rule, 0, at, value, required, unit, kept, -value, 0, 0, what);
     }
 
     Measured ids(long a, long b) {
@@ -72,7 +71,7 @@ final class Verdicts {
 
     Finding finding() {
       return new Finding(
-          rule.word(), layer == 0 ? "" : "L" + layer, at, value, required, unit, what.get());
+          rule.word(), layer == 0 ? "" : "L" + layer, at, value, required, unit, what.toString());
     }
   }
 
@@ -112,7 +111,7 @@ final class Verdicts {
     }
     if (!m.kept()) {
       Map<Things, Measured> all = broken.computeIfAbsent(m.rule(), k -> new HashMap<>());
-      Things things = new Things(m.layer(), m.what().get());
+      Things things = new Things(m.layer(), m.what().toString());
       Measured known = all.get(things);
       if (known == null || byTightness(m, known) < 0) {
         all.put(things, m);

@@ -58,7 +58,7 @@ final class VoltageRule implements LayerRule {
                 c.at(),
                 c.gapMm(),
                 column.requiredMm(volt),
-                () -> words(layer.words(c.p(), c.q()), volt, column))
+                words(layer.words(c.p(), c.q()), volt, column))
             .byMargin()
             .ids(c.first(), c.second()));
   }
@@ -71,8 +71,8 @@ final class VoltageRule implements LayerRule {
     return bothBare ? Spacing2221.A6 : Spacing2221.B4;
   }
 
-  static String words(String things, double volt, Spacing2221 column) {
-    return things + ": " + Numbers.significant(volt, 3) + " V, column " + column;
+  static Words words(Words things, double volt, Spacing2221 column) {
+    return Words.of(things, ": ", Numbers.significant(volt, 3), " V, column ", column);
   }
 
   private static final class Watch implements PairWatch {

@@ -110,8 +110,14 @@ class RandomSpecsTest {
   }
 
   private static void everyNumberIsFinite(Pipeline.Drawn d, String name) {
-    assertTrue(Double.isFinite(d.resistance().coilOhm()) && d.resistance().coilOhm() > 0, name);
-    d.resistance().terminals().forEach(t -> assertTrue(t.ohm() > 0 && t.ohm() < 1e6, name));
-    assertTrue(d.resistance().imbalancePercent() >= 0, name);
+    assertTrue(
+        Double.isFinite(d.electrics().resistance().coilOhm())
+            && d.electrics().resistance().coilOhm() > 0,
+        name);
+    d.electrics()
+        .resistance()
+        .terminals()
+        .forEach(t -> assertTrue(t.ohm() > 0 && t.ohm() < 1e6, name));
+    assertTrue(d.electrics().resistance().imbalancePercent() >= 0, name);
   }
 }

@@ -17,6 +17,12 @@ final class SheetHarmonics {
 
   private static final int LEAST_DEPTH = 2;
 
+  /**
+   * A point nearer to the sheet than this share of its radius is taken to be this far off: closer
+   * by, the kernel's cost grows without bound, and no built air gap comes near it.
+   */
+  private static final double NEAREST = 1e-3;
+
   /** A stretch of the outline this small beside the whole needs no parting for its own sake. */
   private static final double SHORT = 0.1;
 
@@ -68,7 +74,7 @@ final class SheetHarmonics {
       return;
     }
     r = radiusMm;
-    d = heightMm;
+    d = Math.copySign(Math.max(Math.abs(heightMm), NEAREST * radiusMm), heightMm);
     out = amplitudes;
     scale = chargeTesla / (4 * Math.PI) * 4 / Math.PI;
     double whole = breaks[breaks.length - 1] - breaks[0];

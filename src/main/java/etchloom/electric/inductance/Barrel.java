@@ -19,9 +19,13 @@ record Barrel(Point at, double topMm, double bottomMm, double meanDistanceMm, do
     for (Barrel a : some) {
       for (Barrel b : others) {
         double apart = a.at.distanceTo(b.at);
-        double distance = Math.max(apart, Math.max(a.meanDistanceMm, b.meanDistanceMm));
+        double own = Math.max(a.meanDistanceMm, b.meanDistanceMm);
+        double square = apart * apart < own * own ? own * own : apart * apart;
+        // A thin tube's points lie about its mean distance from its axis.
+        double spread = a.meanDistanceMm * a.meanDistanceMm + b.meanDistanceMm * b.meanDistanceMm;
+        double mean = apart * apart + spread;
         double along = (b.topMm + b.bottomMm - a.topMm - a.bottomMm) / 2;
-        double integral = PairSum.parallel(along, a.lengthMm(), b.lengthMm(), distance);
+        double integral = PairSum.parallel(along, a.lengthMm(), b.lengthMm(), square, mean);
         sum += a.ampere * b.ampere * integral;
       }
     }

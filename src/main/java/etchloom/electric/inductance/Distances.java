@@ -17,6 +17,7 @@ final class Distances {
   private final int count;
   private final double[] height;
   private final double[] moment;
+  private final double[] spread;
   private final double[] perMm;
   private final double[][] table;
 
@@ -24,6 +25,7 @@ final class Distances {
     count = sections.size();
     height = new double[count * count];
     moment = new double[count * count];
+    spread = new double[count * count];
     perMm = new double[count * count];
     table = new double[count * count][];
     for (int a = 0; a < count; a++) {
@@ -37,8 +39,10 @@ final class Distances {
     double dz = mirror.heightMm(b.heightMm()) - a.heightMm();
     double size = size(a, b);
     height[at] = dz;
-    moment[at] = (square(a.widthMm()) - square(a.thicknessMm())) / 12;
-    moment[at] += (square(b.widthMm()) - square(b.thicknessMm())) / 12;
+    double across = (square(a.widthMm()) + square(b.widthMm())) / 12;
+    double up = (square(a.thicknessMm()) + square(b.thicknessMm())) / 12;
+    moment[at] = across - up;
+    spread[at] = across + up;
     if (Math.abs(dz) >= REACH * size) {
       return;
     }
@@ -75,8 +79,14 @@ final class Distances {
     return height[a * count + b];
   }
 
+  /** Mean of the square of the distance, mm², at a sideways distance of the centre lines. */
+  double meanSquareMm2(int a, int b, double x) {
+    int at = a * count + b;
+    return x * x + height[at] * height[at] + spread[at];
+  }
+
   /**
-   * Square of the mean distance, mm².
+   * Square of the geometric mean distance, mm².
    *
    * @param x sideways distance of the centre lines, mm
    */

@@ -9,10 +9,10 @@ import etchloom.geometry.Segment;
 /**
  * Cuts centre lines into straight filaments.
  *
- * <p>A chord is as long as one between two of the arc's points, so that it is the arc's own current
- * vector, but stands further out, so that it encloses the arc's own area about the centre: what a
- * coil sees from afar is then exact, and what is left is an order smaller than with chords between
- * points. A chord's ends stand up to the chord error apart from its neighbours'.
+ * <p>An arc becomes a run of chords from its start to its end, whose corners in between stand a
+ * little outside it, so that the run encloses the arc's own area about the centre. Current, way and
+ * area are then those of the arc, and what is left of the error is an order smaller than with all
+ * corners on the arc.
  *
  * @param chordErrorMm largest distance between an arc and a chord between two of its points
  * @param longestMm no filament is longer, so that clusters can be small
@@ -61,20 +61,29 @@ record Flattening(double chordErrorMm, double longestMm) {
     }
     double widest = 2 * Math.acos(1 - Math.min(1, chordErrorMm / r));
     widest = Math.min(widest, Math.min(WIDEST_RAD, longestMm / r));
-    int n = (int) Math.max(1, Math.ceil(Math.abs(sweep) / widest));
-    double half = sweep / n / 2;
-    // The chord stands for the arc's own current vector and for its moment about the centre.
-    double halfChord = r * Math.sin(half);
-    double middle = r * half / Math.sin(half);
+    int n = (int) Math.max(2, Math.ceil(Math.abs(sweep) / widest));
+    double corner = cornerRadius(r, Math.abs(sweep) / n, n);
+    double x = arc.start().x();
+    double y = arc.start().y();
     double start = arc.startRad();
-    Point c = arc.centre();
-    for (int i = 0; i < n; i++) {
-      double a = start + (2 * i + 1) * half;
-      double x = c.x() + Math.cos(a) * middle;
-      double y = c.y() + Math.sin(a) * middle;
-      double dx = -Math.sin(a) * halfChord;
-      double dy = Math.cos(a) * halfChord;
-      out.add(x - dx, y - dy, x + dx, y + dy, section, ampere);
+    for (int i = 1; i <= n; i++) {
+      double a = start + sweep * i / n;
+      double nextX = i == n ? arc.end().x() : arc.centre().x() + corner * Math.cos(a);
+      double nextY = i == n ? arc.end().y() : arc.centre().y() + corner * Math.sin(a);
+      out.add(x, y, nextX, nextY, section, ampere);
+      x = nextX;
+      y = nextY;
     }
+  }
+
+  /**
+   * Where the corners between chords stand: two triangles at the ends with one corner each, all
+   * others with two, together as large as the arc's sector.
+   *
+   * @param step angle of one chord
+   */
+  private static double cornerRadius(double r, double step, int n) {
+    double area = n * step / Math.sin(step);
+    return n == 2 ? r * area / 2 : r * (Math.sqrt(1 + (n - 2) * area) - 1) / (n - 2);
   }
 }

@@ -7,11 +7,15 @@ import etchloom.electric.field.GaussRule;
  * currents. The magnetic constant over 4π makes it an inductance.
  *
  * <p>Pairs two times the longer bar's size apart: the integral's expansion to second order in the
- * bars' lengths, widths and thicknesses; worst error of a pair 1e-3, where it is in line, and next
- * to nothing in a sum over directions. Nearer ones: bars whose sideways distance hardly changes
- * along them in closed form, others with the closed form of the longer bar's potential and Gauss's
- * rule along the shorter; both at the geometric mean distance of the two sections, which is also
- * what keeps a bar apart from itself and from the next one of the same run.
+ * bars' lengths, widths and thicknesses; worst error of a pair 3e-3, where both are in line, and
+ * next to nothing in a sum over directions. Nearer ones: bars whose sideways distance hardly
+ * changes along them in closed form, others with the closed form of the longer bar's potential and
+ * Gauss's rule along the shorter.
+ *
+ * <p>Near bars couple as the mean of two pairs of filaments, at the distances whose geometric mean
+ * and mean square are those of the two sections. The first is exact for long bars (and keeps a bar
+ * apart from itself and from the next one of the same run), the second makes the far pairs'
+ * expansion go on from there without a step, and gives short bars their ends.
  *
  * <p>Sources: F. E. Neumann 1845; closed forms of parallel filaments as in E. B. Rosa, "The self
  * and mutual inductances of linear conductors", Bulletin of the Bureau of Standards 4 (1908).
@@ -132,13 +136,13 @@ final class PairSum {
       int sb) {
     double along = dx * ux + dy * uy;
     double aside = ux * dy - uy * dx;
+    double sideways = Math.abs(sin) * shorter / 2;
+    double ratio = shorter / apart(along, aside, cos * shorter / 2, sideways, longer / 2, sa, sb);
     double square = distances.squaredMm2(sa, sb, aside);
-    double beyond = Math.max(0, Math.abs(along) - longer / 2);
-    double ratio = shorter / Math.sqrt(square + beyond * beyond);
-    double sideways = sin * shorter;
+    double mean = distances.meanSquareMm2(sa, sb, aside);
     boolean even = sideways * sideways < PARALLEL * PARALLEL * square;
     if (even && ratio > CLOSED_FORM_FROM) {
-      return cos * parallel(along, longer, shorter, Math.sqrt(square));
+      return cos * parallel(along, longer, shorter, square, mean);
     }
     int r = 0;
     while (r < RULE_UP_TO.length && ratio > RULE_UP_TO[r]) {
@@ -148,14 +152,29 @@ final class PairSum {
     double sum = 0;
     for (int g = 0; g < rule.size(); g++) {
       double t = shorter / 2 * rule.node(g);
-      double m2 = even ? square : distances.squaredMm2(sa, sb, aside + t * sin);
-      sum += rule.weight(g) * potential(along + t * cos, longer / 2, m2);
+      if (!even) {
+        square = distances.squaredMm2(sa, sb, aside + t * sin);
+        mean = distances.meanSquareMm2(sa, sb, aside + t * sin);
+      }
+      sum += rule.weight(g) * potential(along + t * cos, longer / 2, square, mean);
     }
     return cos * shorter / 2 * sum;
   }
 
-  /** Integral of 1/r along a line from −half to half, seen from a point. */
-  private static double potential(double along, double half, double square) {
+  /** About how near the shorter bar comes to the longer, mm. */
+  private double apart(
+      double along, double aside, double reach, double sideways, double half, int sa, int sb) {
+    double beyond = Math.max(0, Math.abs(along) - Math.abs(reach) - half);
+    double off = Math.max(0, Math.abs(aside) - sideways);
+    return Math.sqrt(beyond * beyond + distances.meanSquareMm2(sa, sb, off));
+  }
+
+  /**
+   * Integral of 1/r along a line from −half to half, seen from a point, as the mean of two lines at
+   * the distances that have the given geometric mean and mean square.
+   */
+  private static double potential(double along, double half, double square, double mean) {
+    double root = Math.sqrt(Math.max(0, mean * mean - square * square));
     double from = -half - along;
     double to = half - along;
     if (to < 0) {
@@ -163,24 +182,39 @@ final class PairSum {
       to = -from;
       from = swap;
     }
-    double far = to + Math.sqrt(to * to + square);
-    double near = Math.sqrt(from * from + square);
-    return from < 0 ? Math.log(far * (near - from) / square) : Math.log(far / (near + from));
+    double f2 = from * from + mean;
+    double t2 = to * to + mean;
+    double far = (to + Math.sqrt(t2 + root)) * (to + Math.sqrt(t2 - root));
+    double near = Math.sqrt(f2 + root);
+    double other = Math.sqrt(f2 - root);
+    return from < 0
+        ? Math.log(far * (near - from) * (other - from) / (square * square)) / 2
+        : Math.log(far / ((near + from) * (other + from))) / 2;
   }
 
-  /** Two parallel filaments, the second's middle {@code along} further on than the first's. */
-  static double parallel(double along, double length1, double length2, double distance) {
+  /**
+   * Two parallel bars.
+   *
+   * @param along how much further on the second's middle lies than the first's
+   * @param square of the geometric mean distance
+   * @param mean of the square of the distance
+   */
+  static double parallel(double along, double length1, double length2, double square, double mean) {
+    double root = Math.sqrt(Math.max(0, mean * mean - square * square));
     double sum = (length1 + length2) / 2;
     double difference = (length1 - length2) / 2;
-    return twice(along + sum, distance)
-        - twice(along + difference, distance)
-        - twice(along - difference, distance)
-        + twice(along - sum, distance);
+    return twice(along + sum, square, mean, root)
+        - twice(along + difference, square, mean, root)
+        - twice(along - difference, square, mean, root)
+        + twice(along - sum, square, mean, root);
   }
 
-  private static double twice(double t, double distance) {
+  /** The integral's own integral over both lengths, the mean of two lines. */
+  private static double twice(double t, double square, double mean, double root) {
     double u = Math.abs(t);
-    double r = Math.sqrt(u * u + distance * distance);
-    return u * Math.log((u + r) / distance) - r;
+    double u2 = u * u + mean;
+    double r = Math.sqrt(u2 + root);
+    double s = Math.sqrt(u2 - root);
+    return (u * Math.log((u + r) * (u + s) / square) - r - s) / 2;
   }
 }

@@ -160,6 +160,30 @@ class FieldHarmonicsTest {
     }
   }
 
+  /** Tables by distance lose no image, with plates close by and magnets wide beside the gap. */
+  @Test
+  void tableBetweenPlatesAgreesWithTheHarmonics() {
+    MagnetArray[] arrays = {
+      new MagnetArray(new SectorShape(20, 60, 0.9 * Math.PI), 1, BR, oneSided(1), planes(6, -1)),
+      new MagnetArray(new DiscShape(21, 5), 6, BR, twoSided(1.4), planes(6.4, -6.4))
+    };
+    for (MagnetArray a : arrays) {
+      double[] height = {0.3, -0.3};
+      RotorField f = new RotorField(a, height, 12, 34, 5);
+      FieldHarmonics h = new FieldHarmonics(a, 5);
+      double[] got = new double[5];
+      for (int layer = 1; layer <= 2; layer++) {
+        for (double r = 12.03; r < 34; r += 1.37) {
+          double[] want = h.at(r, height[layer - 1]);
+          f.amplitudes(layer, r, got);
+          for (int i = 0; i < 5; i++) {
+            assertEquals(want[i], got[i], 2e-4, "L" + layer + " r " + r + " order " + i);
+          }
+        }
+      }
+    }
+  }
+
   /** A north face looking down on L1 sends its field down. */
   @Test
   void northFaceOverTheBoardMakesADownwardField() {
