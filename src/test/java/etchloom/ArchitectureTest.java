@@ -44,6 +44,20 @@ class ArchitectureTest {
           Map.entry("write", List.of("artwork", "geometry", "units")),
           Map.entry("proof", List.of("artwork", "geometry", "units", "diagnostic")),
           Map.entry(
+              "run",
+              List.of(
+                  "board",
+                  "artwork",
+                  "winding",
+                  "spec",
+                  "rules",
+                  "electric",
+                  "proof",
+                  "report",
+                  "units",
+                  "geometry",
+                  "diagnostic")),
+          Map.entry(
               "report",
               List.of(
                   "artwork",
@@ -85,6 +99,20 @@ class ArchitectureTest {
                                             || c.getPackageName().startsWith(a + "."))))
             .allowEmptyShould(true);
     rule.check(CLASSES);
+  }
+
+  /** A mistake that both would share could not show in what is read back. */
+  @Test
+  void readersAndWritersDoNotSeeEachOther() {
+    for (List<String> pair : List.of(List.of("proof", "write"), List.of("write", "proof"))) {
+      ArchRuleDefinition.noClasses()
+          .that()
+          .resideInAPackage("etchloom." + pair.get(0) + "..")
+          .should()
+          .dependOnClassesThat()
+          .resideInAPackage("etchloom." + pair.get(1) + "..")
+          .check(CLASSES);
+    }
   }
 
   @Test

@@ -1,6 +1,5 @@
 package etchloom.cli;
 
-import etchloom.report.FindingText;
 import etchloom.report.ReportJson;
 import etchloom.report.Summary;
 import java.util.Optional;
@@ -30,15 +29,13 @@ final class CheckCommand implements Callable<Integer> {
 
   @Override
   public Integer call() {
-    InputFiles.Inputs in = InputFiles.read(spec, options.fab());
-    Pipeline.Drawn drawn = Pipeline.run(in, false);
-    console.warn(drawn.warnings());
-    drawn.rules().findings().forEach(f -> console.err().println(FindingText.line(f)));
+    Attempt attempt = Attempt.of(InputFiles.read(spec, options.fab()), false);
+    attempt.tell(console);
     if (options.json()) {
-      console.print(ReportJson.writeCheck(drawn.results()));
+      console.print(ReportJson.writeCheck(attempt.results()));
     } else if (!options.quiet()) {
-      console.out().print(Summary.text(drawn.results(), Optional.empty(), console.colour()));
+      console.out().print(Summary.text(attempt.results(), Optional.empty(), console.colour()));
     }
-    return drawn.rules().passed() ? ExitCode.DONE : ExitCode.REFUSED;
+    return attempt.passed() ? ExitCode.DONE : ExitCode.REFUSED;
   }
 }

@@ -1,6 +1,5 @@
 package etchloom.cli;
 
-import etchloom.report.FindingText;
 import etchloom.report.Summary;
 import etchloom.write.PublishFailure;
 import etchloom.write.Publisher;
@@ -45,19 +44,18 @@ final class DrawCommand implements Callable<Integer> {
   @Override
   public Integer call() {
     InputFiles.Inputs in = InputFiles.read(spec, options.fab());
-    Pipeline.Drawn drawn = Pipeline.run(in, false);
-    console.warn(drawn.warnings());
-    drawn.rules().findings().forEach(f -> console.err().println(FindingText.line(f)));
-    boolean passed = drawn.rules().passed();
+    Attempt attempt = Attempt.of(in, false);
+    attempt.tell(console);
+    boolean passed = attempt.passed();
     if (!passed && !force) {
       console.err().println("nothing was written; --force writes a set marked DRAFT");
       return ExitCode.REFUSED;
     }
     if (!passed) {
-      drawn = Pipeline.run(in, true);
+      attempt = Attempt.of(in, true);
     }
     Path target = target(in);
-    SetFiles set = SetFiles.of(drawn, OrderSheet.created(console));
+    SetFiles set = SetFiles.of(attempt, OrderSheet.created(console));
     publish(target, set);
     if (options.json()) {
       console.print(set.files().get("report.json"));

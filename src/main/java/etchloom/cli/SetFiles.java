@@ -26,9 +26,9 @@ record SetFiles(SortedMap<String, byte[]> files, Results results) {
    *
    * @throws FailedProof where the bytes are not the winding that was asked for
    */
-  static SetFiles of(Pipeline.Drawn drawn, Optional<Instant> created) {
-    Artwork art = drawn.assembly().artwork().onGrid();
-    Results before = drawn.results();
+  static SetFiles of(Attempt attempt, Optional<Instant> created) {
+    Artwork art = attempt.drawn().assembly().artwork().onGrid();
+    Results before = attempt.results();
     SortedMap<String, byte[]> files = LayerSet.write(art, OrderSheet.of(before, created));
     ProofReport proof = Prover.prove(files, ProofExpectation.of(art));
     if (!proof.passed()) {
@@ -38,8 +38,8 @@ record SetFiles(SortedMap<String, byte[]> files, Results results) {
     String picture = new String(files.get(art.slug() + ".svg"), StandardCharsets.UTF_8);
     files.put("report.json", ReportJson.write(results));
     files.put("report.html", HtmlReport.write(results, Optional.of(picture)));
-    files.put("spec.yaml", InputsAsUsed.spec(drawn.inputs()));
-    files.put("fab.yaml", InputsAsUsed.fab(drawn.inputs()));
+    files.put("spec.yaml", InputsAsUsed.spec(attempt.inputs()));
+    files.put("fab.yaml", InputsAsUsed.fab(attempt.inputs()));
     files.put(Manifest.NAME, Manifest.of(Version.TEXT, files));
     return new SetFiles(files, results);
   }

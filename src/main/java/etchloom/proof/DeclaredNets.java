@@ -57,6 +57,12 @@ final class DeclaredNets {
     return piecesOf.size();
   }
 
+  /** A piece of copper by the names it carries: {@code net U}, or {@code copper}. */
+  String words(int piece) {
+    TreeMap<String, Declared> names = namesOf.get(piece);
+    return names == null ? "copper" : "net " + String.join(", ", names.keySet());
+  }
+
   private void drawn(int layer, LayerImage image) {
     for (DrawnObject o : image.objects()) {
       if (o.dark() && o.attributes().nets().size() == 1) {

@@ -29,6 +29,7 @@ final class DrilledHoles {
                 h.plating() == Plating.PLATED,
                 from,
                 to,
+                h.function(),
                 h.nets(),
                 f.fileName(),
                 h.line()));
@@ -42,6 +43,7 @@ final class DrilledHoles {
                 s.plating() == Plating.PLATED,
                 from,
                 to,
+                s.function(),
                 s.nets(),
                 f.fileName(),
                 s.line()));

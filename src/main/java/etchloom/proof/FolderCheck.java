@@ -5,6 +5,7 @@ import etchloom.proof.copper.Connectivity;
 import etchloom.proof.copper.CopperBuilder;
 import etchloom.proof.copper.Hole;
 import etchloom.proof.image.DrawnObject;
+import etchloom.proof.image.JobFile;
 import etchloom.proof.image.LayerImage;
 import etchloom.proof.image.LayerSet;
 import etchloom.proof.image.ReadWarning;
@@ -13,6 +14,11 @@ import etchloom.proof.plane.OutOfRange;
 import etchloom.proof.read.SetFolder;
 import etchloom.proof.read.SetReader;
 import etchloom.proof.read.UnreadableFile;
+import etchloom.proof.rules.BoardSheets;
+import etchloom.proof.rules.CopperLimits;
+import etchloom.proof.rules.CopperRuleReport;
+import etchloom.proof.rules.CopperRules;
+import java.util.ArrayList;
 import java.util.Comparator;
 import java.util.List;
 import java.util.Locale;
@@ -53,17 +59,32 @@ public final class FolderCheck {
    * @throws UnreadableFile when a file cannot be read, an option is wrong, or the copper layers are
    *     not complete
    */
-  public static ProofReport check(SetFolder folder, List<String> layerOptions, OptionalInt circuits)
+  public static FolderReport check(
+      SetFolder folder, List<String> layerOptions, OptionalInt circuits, Fab fab)
       throws UnreadableFile {
     LayerSet set = SetReader.read(folder, layerOptions);
     try {
-      return new FolderCheck(set, circuits).check();
+      return new FolderCheck(set, circuits).check(fab);
     } catch (OutOfRange r) {
       throw new UnreadableFile(folder.name(), 0, "copper", r.getMessage());
     }
   }
 
-  private ProofReport check() {
+  /** Whose rules are asked for, once the files have told the layers. */
+  @FunctionalInterface
+  public interface Fab {
+    /**
+     * @param copperMm finished copper of each layer from L1 down, where the job file tells
+     */
+    CopperLimits limits(int layers, List<OptionalDouble> copperMm);
+  }
+
+  /**
+   * @param rules what the copper alone keeps of the fab's rules
+   */
+  public record FolderReport(ProofReport proof, CopperRuleReport rules) {}
+
+  private FolderReport check(Fab fab) {
     for (ReadWarning w : set.allWarnings()) {
       out.note(w.file() + (w.line() > 0 ? ":" + w.line() : "") + ": " + w.message());
     }
@@ -72,9 +93,34 @@ public final class FolderCheck {
       out.note("there is no drill file: layers count as not joined");
     }
     Connectivity net = new Connectivity(figures(copper), holes);
-    nets(net, holes);
+    DeclaredNets names = nets(net, holes);
     circuits(net);
-    return report(net);
+    CopperRuleReport rules =
+        CopperRules.check(
+            net,
+            holes,
+            BoardSheets.of(set.profile(), set.maskTop(), set.maskBottom()),
+            fab.limits(copper.size(), copperMm()),
+            set.job()
+                .map(JobFile::boardThicknessMm)
+                .filter(OptionalDouble::isPresent)
+                .map(OptionalDouble::getAsDouble),
+            (layer, island) -> names.words(net.piece(layer, island)));
+    return new FolderReport(report(net), rules);
+  }
+
+  private List<OptionalDouble> copperMm() {
+    List<OptionalDouble> out = new ArrayList<>();
+    set.job()
+        .ifPresent(
+            j ->
+                j.stackup().stream()
+                    .filter(l -> l.type().equals("Copper"))
+                    .forEach(l -> out.add(l.thicknessMm())));
+    while (out.size() < copper.size()) {
+      out.add(OptionalDouble.empty());
+    }
+    return out.subList(0, copper.size());
   }
 
   private static List<Figure> figures(SortedMap<Integer, LayerImage> copper) {
@@ -83,7 +129,7 @@ public final class FolderCheck {
   }
 
   /** Parts etched from copper join nets by intent, so names are judged without them. */
-  private void nets(Connectivity whole, List<Hole> holes) {
+  private DeclaredNets nets(Connectivity board, List<Hole> holes) {
     TreeMap<Integer, LayerImage> wired = new TreeMap<>();
     boolean parts = false;
     for (Map.Entry<Integer, LayerImage> e : copper.entrySet()) {
@@ -95,12 +141,18 @@ public final class FolderCheck {
       parts |= some.size() < i.objects().size();
       wired.put(e.getKey(), new LayerImage(i.fileName(), i.fileAttributes(), some, List.of()));
     }
-    Connectivity net = parts ? new Connectivity(figures(wired), holes) : whole;
+    Connectivity net = parts ? new Connectivity(figures(wired), holes) : board;
     DeclaredNets names = new DeclaredNets(net, wired, out);
     names.check(set.netlist());
     if (names.names() == 0) {
       out.note("no file names any net: opens and shorts between nets cannot be judged");
     }
+    if (!parts) {
+      return names;
+    }
+    DeclaredNets whole = new DeclaredNets(board, copper, new Findings());
+    whole.check(set.netlist());
+    return whole;
   }
 
   private void circuits(Connectivity net) {

@@ -52,7 +52,7 @@ public final class ProofNames {
 
   public static final String HOLE_SIZE = "hole-size";
 
-  /** Two files of one thing disagree: netlist, job file, profile, mask, pictures. */
+  /** Two files of one thing disagree: netlist, job file, profile, mask, drawings, archive. */
   public static final String NETLIST = "netlist";
 
   public static final String JOB_FILE = "job-file";
@@ -61,6 +61,8 @@ public final class ProofNames {
   public static final String DXF = "dxf";
   public static final String OUTLINES = "outlines";
   public static final String SVG = "svg";
+
+  public static final String ARCHIVE = "archive";
 
   private ProofNames() {}
 }

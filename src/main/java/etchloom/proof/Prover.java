@@ -16,7 +16,6 @@ import java.util.Map;
 import java.util.Optional;
 import java.util.OptionalDouble;
 import java.util.OptionalInt;
-import java.util.Set;
 import java.util.SortedMap;
 import java.util.TreeMap;
 import java.util.TreeSet;
@@ -28,14 +27,19 @@ import java.util.TreeSet;
  * by net names, for a whole winding may be one net. All else in the set is held against it.
  */
 public final class Prover {
+  /** Of each there is one; what else must be there is told by what is in the files. */
+  private static final List<String> KINDS =
+      List.of(".gbrjob", ".ipc", ".dxf", "-outlines.dxf", ".svg", "-fab.zip");
+
   private final ProofExpectation expected;
   private final Findings out = new Findings();
   private final SetFiles set;
-  private final Set<String> names;
+  private final SortedMap<String, byte[]> files;
+  private OptionalDouble areaDifferenceMm2 = OptionalDouble.empty();
 
   private Prover(SortedMap<String, byte[]> files, ProofExpectation expected) {
     this.expected = expected;
-    this.names = files.keySet();
+    this.files = files;
     this.set = new SetFiles(files, out);
   }
 
@@ -59,9 +63,19 @@ public final class Prover {
         out.add(ProofNames.MISSING_FILE, e.getValue().fileName(), message);
       }
     }
+    for (String kind : KINDS) {
+      if (files.keySet().stream().noneMatch(n -> n.endsWith(kind))) {
+        out.add(ProofNames.MISSING_FILE, "", "no file's name ends in " + kind);
+      }
+    }
     List<Hole> holes = holes();
     new SheetProof(set, out).check(expected);
-    set.job().ifPresent(j -> new JobProof(j, set, out).check(names, expected.layers()));
+    set.job().ifPresent(j -> new JobProof(j, set, out).check(files.keySet(), expected.layers()));
+    for (String name : files.keySet()) {
+      if (name.endsWith(".zip")) {
+        new ZipProof(name, out).check(files.get(name), files);
+      }
+    }
     set.netlist().ifPresent(n -> new NetlistProof(n, out).check(expected));
     boolean all = true;
     for (int l = 1; l <= expected.layers(); l++) {
@@ -103,6 +117,10 @@ public final class Prover {
     }
     whole.circuits();
     whole.terminals(set.copper().values());
+    PictureProof pictures = new PictureProof(set, holes, out);
+    set.drawing().ifPresent(pictures::drawing);
+    set.picture().ifPresent(pictures::picture);
+    set.outlines().ifPresent(d -> areaDifferenceMm2 = pictures.outlines(d, net));
     return report(Optional.of(net));
   }
 
@@ -184,7 +202,7 @@ public final class Prover {
         net.map(Connectivity::pieces).orElse(0),
         out.count(ProofNames.OPEN),
         out.count(ProofNames.SHORT),
-        OptionalDouble.empty(),
+        areaDifferenceMm2,
         out.sorted(),
         out.notes());
   }

@@ -30,7 +30,7 @@ record Absent(List<String> keys, List<String> figures) {
       sizes.merge(f.group(), 1, Integer::sum);
       if (f.missing(figures)) {
         List<String> keys =
-            f.needs().stream().filter(n -> !n.given(r.spec())).map(Need::key).toList();
+            f.needs().stream().filter(n -> !n.given(r.spec())).map(SpecKey::words).toList();
         lacking
             .computeIfAbsent(keys, k -> new LinkedHashMap<>())
             .computeIfAbsent(f.group(), g -> new ArrayList<>())

@@ -18,7 +18,7 @@ record Figure(
     String label,
     Form form,
     Basis basis,
-    List<Need> needs,
+    List<SpecKey> needs,
     Predicate<Results> applies) {
   Figure {
     needs = List.copyOf(needs);

@@ -11,18 +11,31 @@ import java.util.function.Predicate;
 
 /** Every single figure of the report: its key, how it is shown, what it rests on and needs. */
 final class Figures {
-  private static final Predicate<Results> ALWAYS = r -> true;
-  private static final Predicate<Results> DELTA =
-      r -> r.spec().winding().connection() == Spec.Connection.DELTA;
-  private static final Predicate<Results> GENERATOR =
-      r -> r.spec().duty().map(Spec.Duty::generator).orElse(false);
-  private static final Predicate<Results> MOTOR = GENERATOR.negate();
-
-  private static final List<Need> FIELD = List.of(Need.MAGNET, Need.AIR_GAP);
+  private static final List<SpecKey> FIELD = List.of(SpecKey.MAGNET, SpecKey.AIR_GAP);
 
   private final List<Figure> all = new ArrayList<>();
 
   private Figures() {}
+
+  private static boolean always(Results r) {
+    return true;
+  }
+
+  private static boolean delta(Results r) {
+    return r.spec().winding().connection() == Spec.Connection.DELTA;
+  }
+
+  private static boolean generates(Results r) {
+    return r.spec().duty().map(Spec.Duty::generator).orElse(false);
+  }
+
+  private static boolean drives(Results r) {
+    return !generates(r);
+  }
+
+  private static boolean pulled(Results r) {
+    return r.spec().rotor().twoSided() || r.spec().rotor().counterPlateGapMm().isPresent();
+  }
 
   static List<Figure> all() {
     Figures f = new Figures();
@@ -32,18 +45,19 @@ final class Figures {
     f.heat();
     f.drive();
     f.generator();
+    f.spread();
     f.rotor();
     return List.copyOf(f.all);
   }
 
-  private static List<Need> field(Need... more) {
-    List<Need> out = new ArrayList<>(FIELD);
+  private static List<SpecKey> field(SpecKey... more) {
+    List<SpecKey> out = new ArrayList<>(FIELD);
     out.addAll(List.of(more));
     return out;
   }
 
-  private void add(Group g, Basis b, String path, String label, Form form, List<Need> needs) {
-    add(g, b, path, label, form, needs, ALWAYS);
+  private void add(Group g, Basis b, String path, String label, Form form, List<SpecKey> needs) {
+    add(g, b, path, label, form, needs, Figures::always);
   }
 
   private void add(
@@ -52,15 +66,15 @@ final class Figures {
       String path,
       String label,
       Form form,
-      List<Need> needs,
+      List<SpecKey> needs,
       Predicate<Results> applies) {
     all.add(new Figure(g, path, label, form, b, needs, applies));
   }
 
   private void resistance() {
     Group g = Group.RESISTANCE;
-    List<Need> none = List.of();
-    List<Need> duty = List.of(Need.DUTY);
+    List<SpecKey> none = List.of();
+    List<SpecKey> duty = List.of(SpecKey.DUTY);
     add(g, Basis.RESISTANCE, "resistance.coilOhm", "one coil", Form.OHM, none);
     add(g, Basis.RESISTANCE, "resistance.phaseOhm.*", "phase *", Form.OHM, none);
     add(g, Basis.RESISTANCE, "resistance.terminalOhm.*", "between *", Form.OHM, none);
@@ -82,7 +96,7 @@ final class Figures {
   private void inductance() {
     Group g = Group.INDUCTANCE;
     Basis b = Basis.INDUCTANCE;
-    List<Need> none = List.of();
+    List<SpecKey> none = List.of();
     add(g, b, "inductance.coilHenry", "one coil", Form.HENRY, none);
     add(g, b, "inductance.phaseSelfHenry", "one phase, self", Form.HENRY, none);
     add(g, b, "inductance.phaseMutualHenry", "two phases, mutual", Form.HENRY, none);
@@ -104,8 +118,8 @@ final class Figures {
         "emf.deltaCirculatingAmpere",
         "current round the delta, rms",
         Form.AMPERE,
-        field(Need.SPEED),
-        DELTA);
+        field(SpecKey.SPEED),
+        Figures::delta);
     b = Basis.TORQUE;
     Form k = Form.TORQUE_PER_AMPERE;
     add(t, b, "torque.newtonMetrePerAmperePeak", "for each ampere peak", k, FIELD);
@@ -116,15 +130,22 @@ final class Figures {
   private void heat() {
     Group g = Group.LOSS;
     Basis b = Basis.LOSS;
-    List<Need> current = List.of(Need.CURRENT);
-    List<Need> eddy = field(Need.SPEED);
+    List<SpecKey> current = List.of(SpecKey.CURRENT);
+    List<SpecKey> eddy = field(SpecKey.SPEED);
     add(g, b, "loss.copperWatt", "copper", Form.WATT, current);
     add(g, b, "loss.eddyWatt", "eddy currents", Form.WATT, eddy);
-    add(g, b, "loss.rippleWatt", "ripple", Form.WATT, List.of(Need.BUS, Need.SWITCHING), MOTOR);
-    add(g, b, "loss.circulatingWatt", "round the delta", Form.WATT, eddy, DELTA);
+    add(
+        g,
+        b,
+        "loss.rippleWatt",
+        "ripple",
+        Form.WATT,
+        List.of(SpecKey.BUS, SpecKey.SWITCHING),
+        Figures::drives);
+    add(g, b, "loss.circulatingWatt", "round the delta", Form.WATT, eddy, Figures::delta);
     g = Group.THERMAL;
     b = Basis.THERMAL;
-    List<Need> duty = List.of(Need.DUTY);
+    List<SpecKey> duty = List.of(SpecKey.DUTY);
     add(g, b, "thermal.copperC", "copper", Form.CELSIUS, current);
     add(g, b, "thermal.stable", "settles", Form.YES_NO, current);
     add(g, b, "thermal.maxContinuousAmpereRms", "most current, rms", Form.AMPERE, duty);
@@ -134,42 +155,69 @@ final class Figures {
   private void drive() {
     Group g = Group.DRIVE;
     Basis b = Basis.DRIVE;
-    List<Need> none = List.of();
-    List<Need> loop = List.of(Need.BANDWIDTH);
-    List<Need> pwm = List.of(Need.BUS, Need.SWITCHING);
-    List<Need> series = List.of(Need.BUS, Need.SWITCHING, Need.CURRENT);
+    List<SpecKey> none = List.of();
+    List<SpecKey> loop = List.of(SpecKey.BANDWIDTH);
+    List<SpecKey> pwm = List.of(SpecKey.BUS, SpecKey.SWITCHING);
+    List<SpecKey> series = List.of(SpecKey.BUS, SpecKey.SWITCHING, SpecKey.CURRENT);
     String choke = "drive.seriesInductanceForRippleHenry";
     add(g, b, "drive.polePairs", "pole pairs", Form.COUNT, none);
-    add(g, b, "drive.electricalHz", "electrical frequency", Form.HERTZ, List.of(Need.SPEED));
+    add(g, b, "drive.electricalHz", "electrical frequency", Form.HERTZ, List.of(SpecKey.SPEED));
     add(g, b, "drive.timeConstantSecond", "time constant L/R", Form.SECOND, none);
-    add(g, b, "drive.rippleAmperePeakToPeak", "PWM ripple, peak to peak", Form.AMPERE, pwm, MOTOR);
-    add(g, b, choke, "to add in series, each line", Form.HENRY, series, MOTOR);
-    add(g, b, "drive.bandwidthHertz", "current loop bandwidth", Form.HERTZ, loop, MOTOR);
-    add(g, b, "drive.proportionalGain", "proportional gain", Form.GAIN, loop, MOTOR);
-    add(g, b, "drive.integralGain", "integral gain", Form.INTEGRAL_GAIN, loop, MOTOR);
-    add(g, b, "drive.speedLimitRpm", "no-load speed at the bus", Form.RPM, field(Need.BUS));
-    add(g, b, "drive.senseSpeedRpm", "speed for sensing EMF", Form.RPM, field(Need.BUS), MOTOR);
+    add(
+        g,
+        b,
+        "drive.rippleAmperePeakToPeak",
+        "PWM ripple, peak to peak",
+        Form.AMPERE,
+        pwm,
+        Figures::drives);
+    add(g, b, choke, "to add in series, each line", Form.HENRY, series, Figures::drives);
+    add(g, b, "drive.bandwidthHertz", "current loop bandwidth", Form.HERTZ, loop, Figures::drives);
+    add(g, b, "drive.proportionalGain", "proportional gain", Form.GAIN, loop, Figures::drives);
+    add(g, b, "drive.integralGain", "integral gain", Form.INTEGRAL_GAIN, loop, Figures::drives);
+    add(g, b, "drive.speedLimitRpm", "no-load speed at the bus", Form.RPM, field(SpecKey.BUS));
+    add(
+        g,
+        b,
+        "drive.senseSpeedRpm",
+        "speed for sensing EMF",
+        Form.RPM,
+        field(SpecKey.BUS),
+        Figures::drives);
   }
 
   private void generator() {
     Group g = Group.GENERATOR;
     Basis b = Basis.GENERATOR;
-    List<Need> n = field(Need.SPEED, Need.LOAD);
-    add(g, b, "generator.phaseVoltRms", "a phase, open", Form.VOLT, n, GENERATOR);
-    add(g, b, "generator.loadVoltRms", "a phase, on its load", Form.VOLT, n, GENERATOR);
-    add(g, b, "generator.powerWatt", "power into the load", Form.WATT, n, GENERATOR);
-    add(g, b, "generator.efficiency", "efficiency", Form.RATIO, n, GENERATOR);
+    List<SpecKey> n = field(SpecKey.SPEED, SpecKey.LOAD);
+    add(g, b, "generator.phaseVoltRms", "a phase, open", Form.VOLT, n, Figures::generates);
+    add(g, b, "generator.loadVoltRms", "a phase, on its load", Form.VOLT, n, Figures::generates);
+    add(g, b, "generator.powerWatt", "power into the load", Form.WATT, n, Figures::generates);
+    add(g, b, "generator.efficiency", "efficiency", Form.RATIO, n, Figures::generates);
+  }
+
+  private void spread() {
+    share("terminalOhmPercent", "resistance", List.of());
+    share("torquePercent", "torque", FIELD);
+    share("imbalancePercent", "imbalance", List.of());
+  }
+
+  private void share(String key, String label, List<SpecKey> needs) {
+    String path = "spread." + key + ".";
+    Group g = Group.SPREAD;
+    Form p = Form.PERCENT;
+    add(g, Basis.SPREAD, path + "worst", label + ", worst case", p, needs);
+    add(g, Basis.SPREAD, path + "rss", label + ", root of squares", p, needs);
+    add(g, Basis.SPREAD, path + "monteCarlo95", label + ", 95 of 100 boards", p, needs);
   }
 
   private void rotor() {
     Group g = Group.ROTOR;
     Basis b = Basis.ROTOR;
-    List<Need> pull = List.of(Need.MAGNET, Need.SPEED);
-    Predicate<Results> iron =
-        r -> r.spec().rotor().twoSided() || r.spec().rotor().counterPlateGapMm().isPresent();
+    List<SpecKey> pull = List.of(SpecKey.MAGNET, SpecKey.SPEED);
     add(g, b, "rotor.magnetPullNewton", "pull on a magnet at speed", Form.NEWTON, pull);
     add(g, b, "rotor.bondStressPascal", "shear in its bond", Form.PASCAL, pull);
-    add(g, b, "rotor.axialPullNewton", "axial pull", Form.NEWTON, FIELD, iron);
+    add(g, b, "rotor.axialPullNewton", "axial pull", Form.NEWTON, FIELD, Figures::pulled);
   }
 
   /** What is there, by group, in the report's order; groups without a figure are left out. */

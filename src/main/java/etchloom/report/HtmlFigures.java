@@ -27,18 +27,20 @@ final class HtmlFigures {
   private final Results r;
   private final Map<String, Object> figures;
   private final Map<Group, List<Shown>> shown;
+  private final HtmlMachine machine;
 
   HtmlFigures(Html h, Results r, Map<String, Object> figures) {
     this.h = h;
     this.r = r;
     this.figures = figures;
     shown = Figures.shown(figures);
+    machine = new HtmlMachine(h, r);
   }
 
   void deciding() {
     List<List<String>> rows = new ArrayList<>();
     for (Finding f : r.rules().minima()) {
-      boolean broken = r.rules().findings().stream().anyMatch(x -> x.rule().equals(f.rule()));
+      boolean broken = FindingText.broken(r.rules(), f.rule());
       rows.add(
           List.of(
               f.rule(),
@@ -46,12 +48,12 @@ final class HtmlFigures {
               (FindingText.upperBound(f, broken) ? "at most " : "at least ")
                   + FindingText.value(f.required(), f, broken),
               broken ? "BROKEN" : "kept",
-              FindingText.place(f),
+              FindingText.shortPlace(f),
               f.what()));
     }
     h.table(
         "The tightest place of every rule",
-        List.of("Rule", "Measured", "Must be", "", "Place", "What"),
+        List.of("Rule", "Measured", "Must be", "Verdict", "Place", "What"),
         rows,
         2);
     notes();
@@ -93,8 +95,9 @@ final class HtmlFigures {
 
   void electrical() {
     layers();
-    groups(Group.RESISTANCE, Group.INDUCTANCE, Group.EMF, Group.TORQUE);
-    groups(Group.GENERATOR, Group.SPREAD);
+    groups(Group.RESISTANCE, Group.INDUCTANCE, Group.EMF);
+    machine.emf();
+    groups(Group.TORQUE, Group.GENERATOR, Group.SPREAD);
   }
 
   private void layers() {
@@ -124,6 +127,8 @@ final class HtmlFigures {
 
   void drive() {
     groups(Group.DRIVE);
+    machine.axes();
+    machine.torqueSpeed();
     none(Group.DRIVE);
   }
 
@@ -157,7 +162,7 @@ final class HtmlFigures {
     for (Shown s : rows) {
       h.open("tr").element("th", Words.capital(s.label()), "scope=\"row\"");
       h.element("td", Words.symbols(s.value()), "class=\"n\"").open("td");
-      h.element("a", s.basis().title(), "href=\"#b-" + s.basis().ordinal() + "\"");
+      h.element("a", s.basis().title(), "href=\"#" + s.basis().anchor() + "\"");
       h.close("td").close("tr");
     }
     h.close("tbody").close("table").close("div");

@@ -64,12 +64,19 @@ final class HtmlVerdict {
   }
 
   private static void duty(Html h, Results r) {
-    box(
-        h,
-        "open",
-        "DUTY NOT JUDGED",
-        r.spec().duty().isEmpty()
-            ? "the spec has no duty; with one the report says whether the machine does it"
-            : "this report does not judge the duty");
+    DutyAnswer a = DutyAnswer.of(r);
+    box(h, a.met().map(m -> m ? "yes" : "no").orElse("open"), a.word(), a.text());
+    if (a.rows().isEmpty()) {
+      return;
+    }
+    List<List<String>> rows =
+        a.rows().stream()
+            .map(x -> List.of(x.what(), x.needed(), x.got(), x.answer(), x.limitedBy()))
+            .toList();
+    h.table(
+        "The duty, demand by demand",
+        List.of("Demand", "Needed", "Got", "Met", "Limited by"),
+        rows,
+        2);
   }
 }

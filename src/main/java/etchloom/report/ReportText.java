@@ -4,10 +4,11 @@ import etchloom.report.Figure.Group;
 import etchloom.report.Figure.Shown;
 import java.util.List;
 import java.util.Map;
+import java.util.Optional;
 
 /**
  * The whole electrical report for the terminal, within 80 columns: every figure with its basis, and
- * what is lacking with the key that brings it.
+ * what is lacking with the key that brings it. It ends as {@link Summary} does.
  */
 public final class ReportText {
   private static final int LABEL = 32;
@@ -21,10 +22,11 @@ public final class ReportText {
   public static String text(Results r, boolean colour) {
     Map<String, Object> figures = ReportJson.figures(r);
     Page page = new Page(colour);
-    page.heading(r.artwork().title() + ", revision " + r.artwork().revision());
+    Summary.board(page, r);
     Figures.shown(figures).forEach((group, rows) -> group(page, group, rows));
     lacking(page, Absent.of(r, figures));
-    Verdicts.add(page, r, figures);
+    Summary.rules(page, r);
+    Summary.end(page, r, figures, Optional.empty());
     return page.text();
   }
 

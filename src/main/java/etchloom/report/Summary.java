@@ -6,6 +6,8 @@ import etchloom.electric.resistance.ResistanceFigures.TerminalOhm;
 import etchloom.rules.Finding;
 import etchloom.spec.Spec;
 import etchloom.units.Numbers;
+import java.util.List;
+import java.util.Map;
 import java.util.Optional;
 
 /**
@@ -13,13 +15,7 @@ import java.util.Optional;
  * top of that.
  */
 public final class Summary {
-  private final Results r;
-  private final Page page;
-
-  private Summary(Results r, boolean colour) {
-    this.r = r;
-    page = new Page(colour);
-  }
+  private Summary() {}
 
   /**
    * @param where the folder that was written, as the user may type it
@@ -27,26 +23,26 @@ public final class Summary {
    * @return lines, each with its end
    */
   public static String text(Results r, Optional<String> where, boolean colour) {
-    Summary s = new Summary(r, colour);
-    s.geometry();
-    s.rules();
-    s.resistance();
-    s.end(where);
-    return s.page.text();
+    Page page = new Page(colour);
+    board(page, r);
+    rules(page, r);
+    resistance(page, r);
+    end(page, r, ReportJson.figures(r), where);
+    return page.text();
   }
 
-  private void geometry() {
+  static void board(Page page, Results r) {
     Spec spec = r.spec();
     page.heading(r.artwork().title() + ", revision " + r.artwork().revision());
     Spec.Board b = spec.board();
     page.item(
         "board",
-        mm(b.diameterMm())
-            + (b.boreMm() > 0 ? ", bore " + mm(b.boreMm()) : ", no bore")
+        OrderLines.mm(b.diameterMm())
+            + (b.boreMm() > 0 ? ", bore " + OrderLines.mm(b.boreMm()) : ", no bore")
             + ", "
             + b.layers()
             + " layers, "
-            + mm(b.thicknessMm()));
+            + OrderLines.mm(b.thicknessMm()));
     page.item(
         "winding",
         Words.count(r.winding().phases(), "phase")
@@ -62,46 +58,51 @@ public final class Summary {
         "coil",
         Words.count(r.artwork().turnsPerLayer(), "turn")
             + " a layer, track "
-            + mm(spec.coil().trackMm())
+            + OrderLines.mm(spec.coil().trackMm())
             + ", space "
-            + mm(spec.coil().spaceMm())
+            + OrderLines.mm(spec.coil().spaceMm())
             + ", "
             + Words.count(r.vias(), "via"));
   }
 
-  private void rules() {
+  static void rules(Page page, Results r) {
     page.blank();
     page.row("rule", "measured", "required", "tightest at");
     for (Finding f : r.rules().minima()) {
-      boolean broken = r.rules().findings().stream().anyMatch(x -> x.rule().equals(f.rule()));
-      String at = (f.layer().isEmpty() ? "" : f.layer() + " ") + FindingText.point(f) + " mm";
+      boolean broken = FindingText.broken(r.rules(), f.rule());
       page.row(
           f.rule(),
           FindingText.value(f.measured(), f, broken),
           (FindingText.upperBound(f, broken) ? "<= " : ">= ")
               + FindingText.value(f.required(), f, broken),
-          at + (broken ? "  BROKEN" : ""));
+          FindingText.shortPlace(f) + (broken ? "  BROKEN" : ""));
     }
     r.rules().notes().forEach(n -> page.item("note", n));
   }
 
-  private void resistance() {
+  private static void resistance(Page page, Results r) {
     ResistanceFigures f = r.resistance();
     page.blank();
     page.row("resistance at 20 C", "", "", "");
     page.cells("phase", f.phases(), Summary::phase);
     page.cells("terminals", f.terminals(), Summary::terminals);
+    List<PairLimits> limits = PairLimits.lines(r);
     page.item(
         "limits",
-        f.worst()
-            .map(
-                l ->
-                    OrderLines.ohm(l.minTerminalOhm())
-                        + " to "
-                        + OrderLines.ohm(l.maxTerminalOhm())
-                        + " between terminals, worst case of the fab")
-            .orElse("none: within the fab's tolerance a track could be etched away"));
+        limits.isEmpty()
+            ? "none: within the fab's tolerance a track could be etched away"
+            : PairLimits.span(limits)
+                + ", "
+                + pairs(limits, f.terminals().size())
+                + ", worst case of the fab");
     page.item("imbalance", Numbers.fixed(f.imbalancePercent(), 2) + " %");
+  }
+
+  private static String pairs(List<PairLimits> limits, int all) {
+    if (limits.size() == 1) {
+      return limits.get(0).pair();
+    }
+    return limits.size() == all ? "any pair" : "any pair without a star point";
   }
 
   private static String phase(PhaseOhm p) {
@@ -112,12 +113,8 @@ public final class Summary {
     return t.key() + " " + OrderLines.ohm(t.ohm());
   }
 
-  private void end(Optional<String> where) {
-    Verdicts.add(page, r, ReportJson.figures(r));
+  static void end(Page page, Results r, Map<String, Object> figures, Optional<String> where) {
+    Verdicts.add(page, r, figures);
     where.ifPresent(w -> page.item("files", (r.artwork().draft() ? "DRAFT, " : "") + w));
-  }
-
-  private static String mm(double v) {
-    return Numbers.trimmed(v, 3) + " mm";
   }
 }

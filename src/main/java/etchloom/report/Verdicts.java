@@ -15,9 +15,24 @@ final class Verdicts {
   static void add(Page page, Results r, Map<String, Object> figures) {
     page.blank();
     made(page, r);
+    duty(page, DutyAnswer.of(r));
     ripple(r, figures).ifPresent(w -> page.bad(w.get(0), w.get(1)));
     r.proof().ifPresent(p -> page.item(p.passed() ? "proof" : "NOT PROVEN", proof(p)));
-    page.item("cautions", Cautions.line(r));
+    Cautions.own(r).forEach(c -> page.item("caution", c.text()));
+    page.item("cautions", Cautions.line());
+  }
+
+  private static void duty(Page page, DutyAnswer duty) {
+    if (duty.met().isEmpty()) {
+      page.item("duty", "not judged: " + duty.text());
+    } else if (duty.met().get()) {
+      page.good(duty.word(), duty.text());
+    } else {
+      page.bad(duty.word(), duty.text());
+    }
+    for (DutyAnswer.Row x : duty.rows()) {
+      page.item("  " + x.answer(), x.what() + " " + x.got() + ", needed " + x.needed());
+    }
   }
 
   /** Above this share of the phase current's peak, ripple counts as a fault of the drive. */

@@ -12,7 +12,8 @@ final class Words {
 
   /** Units as they are set in print, where a terminal has plain letters. */
   static String symbols(String value) {
-    return value
+    String shown = value.endsWith(" C") ? value.replace(" C", " \u00b0C") : value;
+    return shown
         .replace(" ohm", " \u03a9")
         .replace(" mohm", " m\u03a9")
         .replace(" uohm", " \u00b5\u03a9")
@@ -20,6 +21,8 @@ final class Words {
         .replace(" um", " \u00b5m")
         .replace(" uH", " \u00b5H")
         .replace(" uA", " \u00b5A")
+        .replace(" uN", " \u00b5N")
+        .replace(" uV", " \u00b5V")
         .replace(" uW", " \u00b5W")
         .replace(" us", " \u00b5s")
         .replace("sqrt(W)", "\u221aW");

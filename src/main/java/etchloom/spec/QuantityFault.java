@@ -95,7 +95,8 @@ final class QuantityFault {
   private static String plain(String unit) {
     String s = unit.toLowerCase(Locale.ROOT).replace("\u03c9", "ohm");
     StringBuilder out = new StringBuilder();
-    for (char c : s.toCharArray()) {
+    for (int i = 0; i < s.length(); i++) {
+      char c = s.charAt(i);
       if (c != ' ' && c != '\u00b0' && c != '.' && c != '*' && c != '\u00b7') {
         out.append(c);
       }

@@ -33,7 +33,7 @@ public final class QuantityText {
     requireFinite(base);
     Unit unit = unit(dimension, symbol);
     return exact(base, dimension, unit)
-        .or(() -> exact(base, dimension, plainUnit(dimension)))
+        .or(() -> exact(base, dimension, plainUnit(dimension, unit)))
         .orElseThrow(() -> new IllegalStateException(base + " cannot be written in " + symbol));
   }
 
@@ -81,14 +81,17 @@ public final class QuantityText {
         .orElseThrow(() -> new IllegalArgumentException(symbol + " is no unit of " + dimension));
   }
 
-  private static Unit plainUnit(Dimension dimension) {
+  private static Unit plainUnit(Dimension dimension, Unit wanted) {
     if (dimension.bareAllowed()) {
       return Unit.exact("", "1");
+    }
+    if (dimension == Dimension.COPPER) { // an ounce is no millimetre
+      return wanted;
     }
     return dimension.units().stream()
         .filter(u -> u.scale() == 1 && u.factor().compareTo(BigDecimal.ONE) == 0)
         .findFirst()
-        .orElseThrow(() -> new IllegalStateException(dimension + " has no plain unit"));
+        .orElse(wanted);
   }
 
   private static void requireFinite(double value) {

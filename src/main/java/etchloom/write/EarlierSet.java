@@ -22,9 +22,18 @@ final class EarlierSet {
   private static final int BUFFER = 1 << 16;
 
   private final Path folder;
+  private final Path named;
 
   EarlierSet(Path folder) {
+    this(folder, folder);
+  }
+
+  /**
+   * @param named the folder as the user knows it, for messages
+   */
+  EarlierSet(Path folder, Path named) {
     this.folder = folder;
+    this.named = named;
   }
 
   /** What stands at a path, without following links; empty where there is nothing. */
@@ -177,6 +186,6 @@ final class EarlierSet {
   }
 
   private PublishFailure left(Reason reason, String what) {
-    return new PublishFailure(reason, folder + " " + what + "; it is left as it is");
+    return new PublishFailure(reason, named + " " + what + "; it is left as it is");
   }
 }

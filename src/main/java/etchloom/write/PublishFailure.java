@@ -2,6 +2,7 @@ package etchloom.write;
 
 import java.io.IOException;
 import java.nio.file.AccessDeniedException;
+import java.nio.file.FileAlreadyExistsException;
 import java.nio.file.FileSystemException;
 import java.nio.file.NoSuchFileException;
 import java.nio.file.Path;
@@ -46,12 +47,24 @@ public final class PublishFailure extends IOException {
     return new PublishFailure(Reason.DISK, place + ": cannot be written: " + words(e), e);
   }
 
+  /** Of trouble that came when the new set was in its place already. */
+  static PublishFailure after(IOException e, Path place) {
+    PublishFailure f = of(e, place);
+    return new PublishFailure(
+        f.reason,
+        place + ": the new set is there, but the earlier one could not be removed: " + words(e),
+        e);
+  }
+
   private static String words(IOException e) {
     if (e instanceof AccessDeniedException a) {
       return "no permission for " + a.getFile();
     }
     if (e instanceof NoSuchFileException n) {
       return n.getFile() + " has gone";
+    }
+    if (e instanceof FileAlreadyExistsException x) {
+      return x.getFile() + " is in the way";
     }
     if (e instanceof FileSystemException f && f.getReason() != null) {
       return f.getReason() + " (" + f.getFile() + ")";

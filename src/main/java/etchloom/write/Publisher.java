@@ -66,13 +66,14 @@ public final class Publisher {
     new Publisher(folder, watch).run(files);
   }
 
+  @SuppressWarnings("try") // the lock is only held
   private void run(SortedMap<String, byte[]> files) throws PublishFailure {
     try {
       resolve();
       watch.before("lock");
       try (FolderLock lock = FolderLock.acquire(sibling(".", "lock"), given)) {
         recover();
-        boolean replace = new EarlierSet(place).isThere();
+        boolean replace = new EarlierSet(place, given).isThere();
         write(files);
         exchange(replace);
       }
@@ -136,7 +137,7 @@ public final class Publisher {
       new EarlierSet(gone).delete();
     }
     if (EarlierSet.at(old).isPresent()) {
-      if (EarlierSet.at(place).isPresent()) {
+      if (new EarlierSet(place, given).isThere()) {
         retire();
       } else {
         watch.before("put back");
@@ -182,7 +183,11 @@ public final class Publisher {
       throw e;
     }
     if (replace) {
-      retire();
+      try {
+        retire();
+      } catch (IOException e) {
+        throw PublishFailure.after(e, given);
+      }
     }
   }
 

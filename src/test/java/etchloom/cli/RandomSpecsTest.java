@@ -9,6 +9,7 @@ import etchloom.artwork.Coil;
 import etchloom.artwork.Conductor;
 import etchloom.artwork.Phase;
 import etchloom.diagnostic.Diagnostic;
+import etchloom.run.Drawn;
 import etchloom.spec.Spec;
 import etchloom.testing.RandomSpecs;
 import java.io.IOException;
@@ -38,7 +39,7 @@ class RandomSpecsTest {
       Path spec = Files.writeString(folder.resolve("s" + seed + ".yaml"), yaml);
       try {
         InputFiles.Inputs in = InputFiles.read(spec.toString(), java.util.Optional.empty());
-        Pipeline.Drawn d = Pipeline.run(in, false);
+        Drawn d = Attempt.of(in, false).drawn();
         assertEquals(List.of(), d.rules().findings(), name);
         everyPhaseIsOneChain(d, name);
         everyNumberIsFinite(d, name);
@@ -57,7 +58,7 @@ class RandomSpecsTest {
   }
 
   /** Each phase passes each spiral of each of its coils once, end to end, in the coil's sense. */
-  private static void everyPhaseIsOneChain(Pipeline.Drawn d, String name) {
+  private static void everyPhaseIsOneChain(Drawn d, String name) {
     Artwork art = d.assembly().artwork();
     int[] passes = new int[art.conductors().size()];
     for (Phase p : art.phases()) {
@@ -75,7 +76,7 @@ class RandomSpecsTest {
         assertEquals(c.sign(), passes[id], name + "coil " + c.number());
       }
     }
-    Spec.Connection connection = d.inputs().file().spec().winding().connection();
+    Spec.Connection connection = d.spec().winding().connection();
     int pieces = pieces(art);
     int nodes = art.joints().size();
     int loops = art.conductors().size() - nodes + pieces;
@@ -109,9 +110,15 @@ class RandomSpecsTest {
     return pieces;
   }
 
-  private static void everyNumberIsFinite(Pipeline.Drawn d, String name) {
-    assertTrue(Double.isFinite(d.resistance().coilOhm()) && d.resistance().coilOhm() > 0, name);
-    d.resistance().terminals().forEach(t -> assertTrue(t.ohm() > 0 && t.ohm() < 1e6, name));
-    assertTrue(d.resistance().imbalancePercent() >= 0, name);
+  private static void everyNumberIsFinite(Drawn d, String name) {
+    assertTrue(
+        Double.isFinite(d.electrics().resistance().coilOhm())
+            && d.electrics().resistance().coilOhm() > 0,
+        name);
+    d.electrics()
+        .resistance()
+        .terminals()
+        .forEach(t -> assertTrue(t.ohm() > 0 && t.ohm() < 1e6, name));
+    assertTrue(d.electrics().resistance().imbalancePercent() >= 0, name);
   }
 }

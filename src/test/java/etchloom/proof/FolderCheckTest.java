@@ -13,6 +13,9 @@ import etchloom.geometry.Point;
 import etchloom.geometry.Segment;
 import etchloom.proof.read.SetFolder;
 import etchloom.proof.read.UnreadableFile;
+import etchloom.proof.rules.CopperLimits;
+import etchloom.proof.rules.CopperRuleReport;
+import java.util.Collections;
 import java.util.List;
 import java.util.OptionalInt;
 import java.util.SortedMap;
@@ -36,10 +39,54 @@ class FolderCheckTest {
     SortedMap<String, byte[]> readable = new TreeMap<>(files);
     readable.keySet().removeIf(n -> n.endsWith(".txt") || n.endsWith(".zip"));
     try {
-      return FolderCheck.check(new SetFolder("set", readable), List.of(layers), circuits);
+      return whole(readable, circuits, layers).proof();
     } catch (UnreadableFile u) {
       throw new AssertionError(u.getMessage(), u);
     }
+  }
+
+  private static FolderCheck.FolderReport whole(
+      SortedMap<String, byte[]> files, OptionalInt circuits, String... layers)
+      throws UnreadableFile {
+    FolderCheck.Fab fab =
+        (n, copperMm) ->
+            new CopperLimits(
+                Collections.nCopies(n, new CopperLimits.Layer(0.18, 0.18)),
+                0.13,
+                0.2,
+                0.3,
+                8,
+                0.25,
+                0.2,
+                0.3,
+                0.5,
+                0.1,
+                400,
+                List.of(2, 4, 6));
+    return FolderCheck.check(new SetFolder("set", files), List.of(layers), circuits, fab);
+  }
+
+  /** The wind logger is drawn for the standard class in 2 oz, whose numbers these are. */
+  @Test
+  void cleanSet_keepsTheRules_andMeasuresWhatTheSpecSays() throws UnreadableFile {
+    SortedMap<String, byte[]> files = new TreeMap<>(windSet);
+    files.keySet().removeIf(n -> n.endsWith(".txt") || n.endsWith(".zip"));
+    CopperRuleReport r = whole(files, OptionalInt.empty()).rules();
+    assertEquals(List.of(), r.findings());
+    assertEquals(0.25, least(r, "track"), 3e-6); // coil.track
+    assertEquals(0.2, least(r, "space"), 3e-6); // coil.space
+    assertEquals(0.2, least(r, "ring"), 3e-6); // (via.pad - via.hole) / 2
+    assertEquals(0.35, least(r, "hole"), 1e-9); // via.hole
+    assertEquals(1.6 / 0.35, least(r, "aspect"), 1e-6); // board.thickness over via.hole
+    assertEquals(132, least(r, "size"), 1e-6); // board.diameter
+  }
+
+  private static double least(CopperRuleReport r, String rule) {
+    return r.minima().stream()
+        .filter(f -> f.rule().equals(rule))
+        .findFirst()
+        .orElseThrow()
+        .measured();
   }
 
   private static List<String> names(ProofReport r) {

@@ -21,7 +21,17 @@ final class WrittenSets {
 
   /** The board of a template, on the grid. */
   static Artwork template(String name) {
-    SpecFile f = SpecReader.read(name, Templates.bytes(name)).value().orElseThrow();
+    return drawn(name, Templates.bytes(name));
+  }
+
+  /** The filter wheel with five turns a layer: all its constructs, a third of its copper. */
+  static Artwork smallWheel() {
+    String spec = text(Templates.bytes("filter-wheel"));
+    return drawn("filter-wheel", spec.replace("turns: fill", "turns: 5").getBytes(ASCII));
+  }
+
+  private static Artwork drawn(String name, byte[] spec) {
+    SpecFile f = SpecReader.read(name, spec).value().orElseThrow();
     return Assembler.assemble(
             f.spec(), FabReader.builtIn(f.spec().fab()), f.positions(), /* draft= */ false)
         .value()
@@ -44,7 +54,10 @@ final class WrittenSets {
     return LayerSet.write(art, ToyOrders.plain(art.stackup().thicknessMm()));
   }
 
-  /** The same without checksums, so that a fault must be found by what it does. */
+  /**
+   * The same without checksums, so that a fault must be found by what it does; the archive is then
+   * not the set's any more, which is found too.
+   */
   static SortedMap<String, byte[]> withoutSums(SortedMap<String, byte[]> set) {
     SortedMap<String, byte[]> out = new TreeMap<>(set);
     out.replaceAll(

@@ -57,6 +57,8 @@ class HtmlReportTest {
         SMALL,
         Samples.with(SMALL, Samples.broken()),
         SMALL.withProof(Samples.proof()),
+        Samples.Electric.STAR,
+        Samples.Electric.BARE,
         Samples.titled(SMALL, "<script>alert(1)</script> & \"more\" '\u0007'"));
   }
 
@@ -117,6 +119,13 @@ class HtmlReportTest {
             "Cautions",
             "Basis of every figure"),
         names);
+  }
+
+  @Test
+  void ripple_standsInTheVerdict() {
+    String page = page(Samples.Electric.STAR);
+    String verdict = page.substring(page.indexOf("id=\"s1\""), page.indexOf("id=\"s2\""));
+    assertTrue(verdict.contains("PWM RIPPLE TOO GREAT"), verdict);
   }
 
   @Test

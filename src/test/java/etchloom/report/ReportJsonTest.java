@@ -69,7 +69,9 @@ class ReportJsonTest {
           "check.passed",
           "check.minimum.track",
           "check.minimum.space",
-          "check.minimum.ring");
+          "check.minimum.ring",
+          "check.minimum.holeGap",
+          "check.minimum.edge");
 
   private static Map<String, Object> read(byte[] json) throws IOException {
     return JSON.std.mapFrom(json);

@@ -24,13 +24,13 @@ class ReportTextTest {
 
   @Test
   void everyFigureShown_isFollowedByItsBasis() {
-    String text = ReportText.text(SMALL, false).replaceAll("\\s+", " ");
+    String text = ReportText.text(SMALL, false);
     Set<Basis> used = new HashSet<>();
     Figures.shown(ReportJson.figures(SMALL))
         .values()
         .forEach(l -> l.forEach(s -> used.add(s.basis())));
     assertTrue(used.contains(Basis.RESISTANCE));
-    used.forEach(b -> assertTrue(text.contains("basis: " + b.line()), b.name()));
+    used.forEach(b -> assertTrue(text.contains("\n  basis: " + b.line() + "\n"), b.name()));
   }
 
   @Test

@@ -3,6 +3,13 @@ package etchloom.report;
 import etchloom.artwork.Artwork;
 import etchloom.board.Assembler;
 import etchloom.board.Assembly;
+import etchloom.electric.field.IronPlanes;
+import etchloom.electric.field.MagnetArray;
+import etchloom.electric.inductance.Inductance;
+import etchloom.electric.inductance.InductanceFigures;
+import etchloom.electric.machine.InductanceValues;
+import etchloom.electric.machine.Machine;
+import etchloom.electric.machine.MachineFigures;
 import etchloom.electric.resistance.Resistance;
 import etchloom.geometry.Point;
 import etchloom.proof.ProofReport;
@@ -18,6 +25,7 @@ import etchloom.spec.Templates;
 import etchloom.testing.Specs;
 import java.util.List;
 import java.util.Map;
+import java.util.Optional;
 import java.util.OptionalDouble;
 import java.util.OptionalInt;
 import java.util.TreeMap;
@@ -114,5 +122,66 @@ final class Samples {
         OptionalDouble.of(2.5e-7),
         List.of(),
         List.of());
+  }
+
+  /** The same with inductances and machine worked out; a second or so. */
+  static Results electric(Results r) {
+    Spec spec = r.spec();
+    boolean field = spec.rotor().magnet().isPresent() && spec.rotor().airGapMm().isPresent();
+    IronPlanes iron =
+        field
+            ? MagnetArray.of(spec.rotor(), r.artwork().stackup().thicknessMm()).iron()
+            : IronPlanes.NONE;
+    InductanceFigures l = Inductance.of(r.artwork(), spec.winding().connection(), iron);
+    InductanceValues values =
+        new InductanceValues(
+            l.phaseSelfHenry(),
+            l.phaseMutualHenry().orElse(0),
+            l.synchronousHenry(),
+            l.terminalHenry());
+    MachineFigures m = Machine.of(r.artwork(), spec, r.fab(), r.winding(), r.resistance(), values);
+    return r.withElectrics(l, m);
+  }
+
+  /** The smallest template, another connection, as generator or motor. */
+  static Results small(Spec.Connection connection, boolean generator) {
+    SpecFile file = SpecReader.read(SMALL, Templates.bytes(SMALL)).value().orElseThrow();
+    Spec s = file.spec();
+    Spec.Winding w = s.winding();
+    Spec.Duty d = s.duty().orElseThrow();
+    Spec changed =
+        new Spec(
+            s.title(),
+            s.slug(),
+            s.revision(),
+            s.rotor(),
+            new Spec.Winding(w.phases(), w.coils(), connection, w.parallelPaths()),
+            s.coil(),
+            s.rim(),
+            s.via(),
+            s.board(),
+            s.fab(),
+            Optional.of(
+                new Spec.Duty(
+                    generator,
+                    generator ? OptionalDouble.empty() : d.torqueNm(),
+                    generator ? OptionalDouble.of(22) : OptionalDouble.empty(),
+                    d.busVolt(),
+                    d.speedRadPerSecond(),
+                    d.currentAmpereRms(),
+                    d.switchingHertz(),
+                    d.bandwidthHertz(),
+                    d.ambientC(),
+                    d.copperLimitC(),
+                    d.coolingWattPerSquareMetreKelvin())));
+    return of(changed, etchloom.spec.FabReader.builtIn(s.fab()));
+  }
+
+  /** Computed once for all tests. */
+  static final class Electric {
+    static final Results STAR = electric(template(SMALL));
+    static final Results BARE = electric(bare(etchloom.testing.Specs.wheel(2)));
+
+    private Electric() {}
   }
 }

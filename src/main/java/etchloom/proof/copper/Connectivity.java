@@ -77,6 +77,11 @@ public final class Connectivity {
     contacts.add(touched.stream().mapToInt(i -> i).toArray());
   }
 
+  /** The islands of a layer that a hole's finished circle touches. */
+  public int[] islandsTouched(Hole hole, int layer) {
+    return islandsTouched(hole, layers.get(layer - 1));
+  }
+
   private static int[] islandsTouched(Hole hole, Figure f) {
     double r = hole.diameterMm() / 2 * RingPen.NM;
     return hole.samples().stream()

@@ -13,6 +13,7 @@ import java.util.Optional;
  * @param diameterMm finished
  * @param fromLayer first copper layer it passes, from 1
  * @param toLayer last copper layer it passes
+ * @param function such as {@code ViaDrill}; empty when the file does not say
  * @param nets the nets that the file declares for it
  * @param file where it was read
  * @param line of that file, from 1
@@ -24,6 +25,7 @@ public record Hole(
     boolean plated,
     int fromLayer,
     int toLayer,
+    String function,
     List<String> nets,
     String file,
     int line) {

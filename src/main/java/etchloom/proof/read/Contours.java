@@ -4,6 +4,7 @@ import etchloom.geometry.Arc;
 import etchloom.geometry.Path;
 import etchloom.geometry.Point;
 import etchloom.geometry.Segment;
+import java.util.List;
 
 /** Area and inside of closed paths, arcs exact. */
 final class Contours {
@@ -25,10 +26,14 @@ final class Contours {
     return twice / 2;
   }
 
-  /** How often the path runs round a point, by even and odd; points on the path go either way. */
-  static boolean inside(Path path, Point p) {
+  /**
+   * Whether a point lies inside a closed path, by even and odd; points on the path go either way.
+   *
+   * @param pieces all of the path, or those that a ray from the point to the right may meet
+   */
+  static boolean inside(List<Segment> pieces, Point p) {
     boolean in = false;
-    for (Segment s : path.segments()) {
+    for (Segment s : pieces) {
       in ^= s instanceof Arc a ? crosses(a, p) : crosses(s.start(), s.end(), p);
     }
     return in;
@@ -45,10 +50,14 @@ final class Contours {
 
   /** Cut at its top and bottom, between which y only rises or falls. */
   private static boolean crosses(Arc a, Point p) {
+    double r = a.radiusMm();
+    double reach = r + 2 * Arc.RADIUS_SLACK_MM;
+    if (Math.abs(p.y() - a.centre().y()) > reach || p.x() > a.centre().x() + reach) {
+      return false;
+    }
     boolean in = false;
     double from = a.startRad();
     double sweep = a.sweepRad();
-    double r = a.radiusMm();
     double at = from;
     double lastY = a.start().y();
     double end = from + sweep;

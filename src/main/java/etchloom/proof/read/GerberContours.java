@@ -46,7 +46,7 @@ final class GerberContours {
     if (!start.equals(end)) {
       reading.warn(
           line, "open-contour", "the contour ends " + Shown.mm(gap) + " mm from its start");
-      current.add(new Line(end, start));
+      current.add(new Line(/* start= */ end, /* end= */ start));
     }
     contours.add(new Path(current));
     pieces += current.size() + 1;

@@ -29,7 +29,7 @@ final class GerberPen {
   void ready(ApertureShape nextPen, Attributes nextAttributes, boolean nextDark, int nextLine)
       throws UnreadableFile {
     if (!chain.isEmpty()) {
-      if (nextPen == pen && nextAttributes == attributes && nextDark == dark) {
+      if (nextPen.equals(pen) && nextAttributes.equals(attributes) && nextDark == dark) {
         return;
       }
       lift();

@@ -12,7 +12,15 @@ final class Macro {
   /** Bytes of macro text that weigh as much as one drawn piece when evaluated. */
   private static final int BYTES_A_PIECE = 4;
 
-  private record Statement(byte[] text, int line) {}
+  private static final class Statement {
+    final byte[] text;
+    final int line;
+
+    Statement(byte[] text, int line) {
+      this.text = text;
+      this.line = line;
+    }
+  }
 
   private final String name;
   private final Reading reading;

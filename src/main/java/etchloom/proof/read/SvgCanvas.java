@@ -97,7 +97,7 @@ final class SvgCanvas {
       return p;
     }
     List<Segment> all = new ArrayList<>(p.segments());
-    all.add(new Line(p.end(), p.start()));
+    all.add(new Line(/* start= */ p.end(), /* end= */ p.start()));
     return new Path(all);
   }
 }

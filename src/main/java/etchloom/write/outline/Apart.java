@@ -10,6 +10,7 @@ import etchloom.geometry.Path;
 import etchloom.geometry.Point;
 import etchloom.geometry.Segment;
 import java.util.ArrayList;
+import java.util.BitSet;
 import java.util.List;
 
 /** A layer's copper piece by piece, each piece with an outline of its own; they overlap. */
@@ -49,7 +50,7 @@ final class Apart {
     Point from = right(s.start(), s.tangent(0), half);
     Point to = right(s.end(), s.tangent(1), half);
     List<Edge> shifted = new ArrayList<>(1);
-    new Sides(half, shifted).add(List.of(s), new int[] {0});
+    new Sides(half, shifted, new BitSet()).add(List.of(s), new int[] {0});
     boolean arc = !shifted.isEmpty() && shifted.get(0).isArc();
     out.add(
         arc

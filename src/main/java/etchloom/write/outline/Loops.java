@@ -8,6 +8,7 @@ import etchloom.geometry.Point;
 import etchloom.geometry.Segment;
 import java.util.ArrayList;
 import java.util.Arrays;
+import java.util.BitSet;
 import java.util.HashMap;
 import java.util.List;
 import java.util.Map;
@@ -15,6 +16,9 @@ import java.util.Optional;
 
 /** Joins edges end to end into closed paths, in the order in which they came. */
 final class Loops {
+  /** Longest stretch that a tangent leaves in doubt, mm: a few sqrt(8 r · 20 nm). */
+  private static final double FLAT_MM = 0.03;
+
   private record Cell(long x, long y) {}
 
   private final Map<Cell, List<Integer>> cells = new HashMap<>();
@@ -22,6 +26,7 @@ final class Loops {
   private final List<List<Integer>> leaving = new ArrayList<>();
   private final List<Edge> edges = new ArrayList<>();
   private final List<Integer> ends = new ArrayList<>();
+  private final BitSet dropped = new BitSet();
   private Point lastEnd = new Point(Double.NaN, Double.NaN);
 
   void add(Edge e) {
@@ -46,33 +51,52 @@ final class Loops {
     return false;
   }
 
-  private boolean balanced() {
-    int[] balance = new int[corners.size()];
-    for (int i = 0; i < corners.size(); i++) {
-      balance[i] = leaving.get(i).size();
+  /**
+   * Where two shapes touch in a tangent, a short stretch lies so flat inside the other that it was
+   * taken for boundary, though the boundary goes on along the other. It runs from a corner with one
+   * edge too many leaving to one with one too many arriving: such edges are dropped.
+   *
+   * @return whether every corner then has as many edges leaving as arriving
+   */
+  private boolean balance() {
+    int[] surplus = new int[corners.size()];
+    for (int i = 0; i < surplus.length; i++) {
+      surplus[i] = leaving.get(i).size();
     }
     for (int to : ends) {
-      balance[to]--;
+      surplus[to]--;
     }
-    return Arrays.stream(balance).allMatch(b -> b == 0);
+    for (int from = 0; from < surplus.length; from++) {
+      for (int k = leaving.get(from).size() - 1; k >= 0 && surplus[from] > 0; k--) {
+        int e = leaving.get(from).get(k);
+        int to = ends.get(e);
+        if (surplus[to] < 0 && Edge.apart(corners.get(from), corners.get(to)) <= FLAT_MM) {
+          leaving.get(from).remove(k);
+          dropped.set(e);
+          surplus[from]--;
+          surplus[to]++;
+        }
+      }
+    }
+    return Arrays.stream(surplus).allMatch(b -> b == 0);
   }
 
   /** The closed paths; empty where edges are left over. */
   Optional<List<Path>> close() {
-    if (!balanced()) {
+    if (!balance()) {
       return Optional.empty();
     }
-    boolean[] used = new boolean[edges.size()];
+    BitSet used = dropped;
     int[] next = new int[corners.size()];
     List<Path> out = new ArrayList<>();
     for (int first = 0; first < edges.size(); first++) {
-      if (!used[first]) {
+      if (!used.get(first)) {
         List<Segment> loop = new ArrayList<>();
         int start = corner(edges.get(first).start);
         int at = start;
         int e = first;
         do {
-          used[e] = true;
+          used.set(e);
           int to = ends.get(e);
           segment(edges.get(e), corners.get(at), corners.get(to), loop);
           at = to;
@@ -86,9 +110,9 @@ final class Loops {
     return Optional.of(out);
   }
 
-  private int leave(int corner, boolean[] used, int[] next) {
+  private int leave(int corner, BitSet used, int[] next) {
     List<Integer> list = leaving.get(corner);
-    while (next[corner] < list.size() && used[list.get(next[corner])]) {
+    while (next[corner] < list.size() && used.get(list.get(next[corner]))) {
       next[corner]++;
     }
     return list.get(next[corner]);

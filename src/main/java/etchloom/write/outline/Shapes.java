@@ -25,8 +25,11 @@ final class Shapes {
   private final List<Double> halves = new ArrayList<>();
   private final List<Edge> edges = new ArrayList<>();
 
-  /** Shapes whose sides are joined to those of the shape before. */
-  private final BitSet joined = new BitSet();
+  /** Pieces of a track but its first. */
+  private final BitSet following = new BitSet();
+
+  /** Of these, those whose sides may cross the sides of the piece before. */
+  private final BitSet loose = new BitSet();
 
   /** For each shape, the numbers of those that touch it. */
   private final List<List<Integer>> touching = new ArrayList<>();
@@ -63,7 +66,8 @@ final class Shapes {
 
   /** Whether the sides of two shapes may cross: not where one cleanly follows the other. */
   boolean mayCross(int i, int j) {
-    return Math.abs(i - j) != 1 || !joined.get(Math.max(i, j));
+    int later = Math.max(i, j);
+    return Math.abs(i - j) != 1 || !following.get(later) || loose.get(later);
   }
 
   int count() {
@@ -113,14 +117,10 @@ final class Shapes {
       reversed.add(path.get(n - 1 - i).reversed());
       back[i] = forward[n - 1 - i];
     }
-    Sides sides = new Sides(half, edges);
+    following.set(forward[0] + 1, forward[0] + n);
+    Sides sides = new Sides(half, edges, loose);
     sides.add(path, forward);
     sides.add(reversed, back);
-    if (sides.clean()) {
-      for (int i = 1; i < n; i++) {
-        joined.set(forward[i]);
-      }
-    }
   }
 
   /** The search tree takes arcs of a quarter turn at most. */

@@ -4,6 +4,7 @@ import etchloom.geometry.Arc;
 import etchloom.geometry.Line;
 import etchloom.geometry.Point;
 import etchloom.geometry.Segment;
+import java.util.BitSet;
 import java.util.List;
 
 /**
@@ -16,16 +17,16 @@ final class Sides {
 
   private final double half;
   private final List<Edge> out;
-  private boolean clean = true;
+  private final BitSet loose;
 
-  Sides(double half, List<Edge> out) {
+  /**
+   * @param loose is told of pieces whose sides may cross those of the piece before: where they meet
+   *     at a corner with an arc, or the joint could not be made
+   */
+  Sides(double half, List<Edge> out, BitSet loose) {
     this.half = half;
     this.out = out;
-  }
-
-  /** Whether all joints could be made so far; if not, sides of neighbours may cross. */
-  boolean clean() {
-    return clean;
+    this.loose = loose;
   }
 
   /**
@@ -35,9 +36,10 @@ final class Sides {
     Edge before = null;
     for (int i = 0; i < path.size(); i++) {
       Edge e = shifted(path.get(i), shapes[i]);
-      clean &= e != null;
       if (before != null && e != null) {
         join(before, e, path.get(i).start());
+      } else if (i > 0) {
+        loose.set(Math.max(shapes[i - 1], shapes[i]));
       }
       if (e != null) {
         out.add(e);
@@ -81,6 +83,8 @@ final class Sides {
       b.start = middle;
       return;
     }
+    int later = Math.max(a.shape, b.shape);
+    loose.set(later, loose.get(later) || a.isArc() || b.isArc());
     boolean leftTurn = a.end.minus(corner).cross(b.start.minus(corner)) > 0;
     if (leftTurn) {
       out.add(Edge.arc(a.shape, a.end, b.start, corner, true));
@@ -94,7 +98,7 @@ final class Sides {
       }
     }
     if (best == null) {
-      clean = false;
+      loose.set(later);
       return;
     }
     a.end = best;

@@ -115,8 +115,17 @@ class DrillReaderTest {
   void rout_lineAndArcs() throws UnreadableFile {
     DrillFile f =
         mm(
-            "T02\nG00X0.0Y0.0\nM15\nG01X3.0Y0.0\nG03X3.0Y4.0A2.0\nX1.0Y4.0A1.0\nM16\nG05\n"
-                + "X9.0Y9.0\n");
+            """
+            T02
+            G00X0.0Y0.0
+            M15
+            G01X3.0Y0.0
+            G03X3.0Y4.0A2.0
+            X1.0Y4.0A1.0
+            M16
+            G05
+            X9.0Y9.0
+            """);
     assertEquals(1, f.slots().size());
     Slot s = f.slots().get(0);
     assertEquals(1.0, s.widthMm());
@@ -140,8 +149,19 @@ class DrillReaderTest {
   void inch_andFullTurnByCentre() throws UnreadableFile {
     DrillFile f =
         read(
-            "M48\nINCH\nT1C0.1\n%\nT1\nX1.0Y-0.5\nG00X1.0Y0.0\nM15\nG03X1.0Y0.0I-1.0J0.0\nM16\n"
-                + "M30\n");
+            """
+            M48
+            INCH
+            T1C0.1
+            %
+            T1
+            X1.0Y-0.5
+            G00X1.0Y0.0
+            M15
+            G03X1.0Y0.0I-1.0J0.0
+            M16
+            M30
+            """);
     at(25.4, -12.7, f.holes().get(0).at());
     assertEquals(2.54, f.holes().get(0).diameterMm(), 1e-12);
     assertEquals(2 * Math.PI * 25.4, f.slots().get(0).path().lengthMm(), 1e-9);
@@ -168,9 +188,29 @@ class DrillReaderTest {
   void olderDialect_repeatsModalAndTools() throws UnreadableFile {
     DrillFile f =
         read(
-            "%\n; made by hand\nM48\n;FILE_FORMAT=3:3\nFMAT,2\nMETRIC,TZ\n;TYPE=NON_PLATED\n"
-                + "T1F085S010C0.300\n;TYPE=PLATED\nT2C0.5\n%\nG90\nG81\nT1\nX1.0Y2.0\nX3.0\n"
-                + "R3X1.0Y-1.0\nT2\nX7Y7\nT0\nM30\n");
+            """
+            %
+            ; made by hand
+            M48
+            ;FILE_FORMAT=3:3
+            FMAT,2
+            METRIC,TZ
+            ;TYPE=NON_PLATED
+            T1F085S010C0.300
+            ;TYPE=PLATED
+            T2C0.5
+            %
+            G90
+            G81
+            T1
+            X1.0Y2.0
+            X3.0
+            R3X1.0Y-1.0
+            T2
+            X7Y7
+            T0
+            M30
+            """);
     assertEquals(6, f.holes().size());
     at(3, 2, f.holes().get(1).at());
     at(6, -1, f.holes().get(4).at());

@@ -1,12 +1,14 @@
 package etchloom.proof.read;
 
-import java.nio.charset.StandardCharsets;
 import java.util.ArrayList;
 import java.util.List;
 
 /** Small files that stand for something huge, and files built to make a reader work. */
 final class FuzzBombs {
-  record Bomb(String name, ReaderFuzz.Reader reader, byte[] bytes) {}
+  /**
+   * @param text the file
+   */
+  record Bomb(String name, ReaderFuzz.Reader reader, String text) {}
 
   private FuzzBombs() {}
 
@@ -76,7 +78,7 @@ final class FuzzBombs {
   }
 
   private static void add(List<Bomb> out, String name, ReaderFuzz.Reader r, String text) {
-    out.add(new Bomb(name, r, text.getBytes(StandardCharsets.UTF_8)));
+    out.add(new Bomb(name, r, text));
   }
 
   private static void gerber(List<Bomb> out, String name, String body) {

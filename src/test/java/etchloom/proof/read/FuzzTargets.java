@@ -113,18 +113,44 @@ final class FuzzTargets {
   }
 
   private static final String DRILL =
-      "M48\nMETRIC,TZ\nT1C0.3\nT02C1.0\n%\nG90\nT1\nX1.0Y1.0\nX2\nR3X1.0Y-1.0\nT02\nG00X0.0Y0.0\n"
-          + "M15\nG01X3.0Y0.0\nG03X3.0Y4.0A2.0\nG02X1.0Y4.0I-1.0J0.0\nM16\nG05\n"
-          + "X0.0Y0.0G85X9.0Y9.0\nM30\n";
+      """
+      M48
+      METRIC,TZ
+      T1C0.3
+      T02C1.0
+      %
+      G90
+      T1
+      X1.0Y1.0
+      X2
+      R3X1.0Y-1.0
+      T02
+      G00X0.0Y0.0
+      M15
+      G01X3.0Y0.0
+      G03X3.0Y4.0A2.0
+      G02X1.0Y4.0I-1.0J0.0
+      M16
+      G05
+      X0.0Y0.0G85X9.0Y9.0
+      M30
+      """;
 
   private static final String NETLIST =
-      "C  x\nP  JOB   X\nP  UNITS CUST 1\nP  NNAME1     PHASE_A\n"
-          + "317NNAME1           VIA   -     D0400PA00X+011000Y+000000X0800     R000 S3\n"
-          + "327NNAME1           TP1   -1   M      A02X+005000Y-007500X1500Y1000R045 S1\n"
-          + "307NNAME1           VIA   -     D0200P   X-001000Y 002000               S0L01L03\n"
-          + "017                                   A04X+001000Y+002000X0500          S2\n"
-          + "378A              L03 X300Y200 X+001000Y+002000 X+003000*X0Y0 Y+001000\n"
-          + "078 X+001000\n389BOARD_EDGE         X0100 X+020000Y+000000 X+000000Y+020000\n999\n";
+      """
+      C  x
+      P  JOB   X
+      P  UNITS CUST 1
+      P  NNAME1     PHASE_A
+      317NNAME1           VIA   -     D0400PA00X+011000Y+000000X0800     R000 S3
+      327NNAME1           TP1   -1   M      A02X+005000Y-007500X1500Y1000R045 S1
+      307NNAME1           VIA   -     D0200P   X-001000Y 002000               S0L01L03
+      017                                   A04X+001000Y+002000X0500          S2
+      378A              L03 X300Y200 X+001000Y+002000 X+003000*X0Y0 Y+001000
+      078 X+001000
+      389BOARD_EDGE         X0100 X+020000Y+000000 X+000000Y+020000
+      999
+      """;
 
   private static final String DXF =
       ("0 SECTION 2 HEADER 9 $ACADVER 1 AC1015 9 $INSUNITS 70 4 0 ENDSEC 0 SECTION 2 TABLES 0 TABLE"

@@ -177,12 +177,25 @@ class GerberLanguageTest {
   void attributesHoldFromTheMomentOfMaking() throws UnreadableFile {
     LayerImage image =
         Samples.mm(
-            "%TF.FileFunction,Copper,L1,Top*%\n%TA.AperFunction,ViaPad*%\n%ADD10C,1*%\n"
-                + "%TD.AperFunction*%\n%TA.AperFunction,Conductor*%\n%ADD11C,0.2*%\n"
-                + "%TO.N,U\\u002CV*%\nD10*X0Y0D03*\n%TO.P,X1,U1*%X1000000D03*\n%TD.P*%\n"
-                + "D11*G01*X0Y0D02*X1000000D01*\n%TO.N,W*%X2000000D01*X3000000D01*\n%TD*%\n"
-                + "D10*X0Y5000000D03*\nG36*X0Y0D02*X9D01*Y9D01*X0Y0D01*G37*\n"
-                + "G04 #@! TO.C,R1*\nX0Y6000000D03*\n");
+            """
+            %TF.FileFunction,Copper,L1,Top*%
+            %TA.AperFunction,ViaPad*%
+            %ADD10C,1*%
+            %TD.AperFunction*%
+            %TA.AperFunction,Conductor*%
+            %ADD11C,0.2*%
+            %TO.N,U\\u002CV*%
+            D10*X0Y0D03*
+            %TO.P,X1,U1*%X1000000D03*
+            %TD.P*%
+            D11*G01*X0Y0D02*X1000000D01*
+            %TO.N,W*%X2000000D01*X3000000D01*
+            %TD*%
+            D10*X0Y5000000D03*
+            G36*X0Y0D02*X9D01*Y9D01*X0Y0D01*G37*
+            G04 #@! TO.C,R1*
+            X0Y6000000D03*
+            """);
     assertEquals(List.of("Copper", "L1", "Top"), image.fileAttribute(".FileFunction"));
     List<DrawnObject> o = image.objects();
     assertEquals(7, o.size());

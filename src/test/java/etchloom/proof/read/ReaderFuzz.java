@@ -43,7 +43,7 @@ final class ReaderFuzz {
     }
     List<FuzzBombs.Bomb> bombs = FuzzBombs.all();
     for (FuzzBombs.Bomb b : bombs) {
-      fuzz.one(b.name(), b.reader(), b.bytes());
+      fuzz.one(b.name(), b.reader(), b.text().getBytes(StandardCharsets.UTF_8));
     }
     System.out.println(
         (fuzz.read + fuzz.refused)
