@@ -30,6 +30,7 @@ public record Finding(
   /** Direction of the place seen from the shaft's axis, degrees in [0, 360). */
   public double angleDegrees() {
     double degrees = Math.toDegrees(at.angleRad());
-    return degrees < 0 ? degrees + 360 : degrees + 0.0;
+    double whole = degrees < 0 ? degrees + 360 : degrees + 0.0;
+    return whole < 360 ? whole : 0;
   }
 }
