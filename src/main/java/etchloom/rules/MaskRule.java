@@ -85,7 +85,8 @@ final class MaskRule implements LayerRule {
   }
 
   private static long openingCount(Layer layer) {
-    return layer.board().artwork().maskTop().size() + layer.board().artwork().maskBottom().size();
+    return (long) layer.board().artwork().maskTop().size()
+        + layer.board().artwork().maskBottom().size();
   }
 
   /** The gap that counts; null for the opening's own pad and the tracks that lead from it. */

@@ -19,6 +19,8 @@ enum Spacing2221 {
   private static final double[] UP_TO_VOLT = {15, 30, 50, 100, 150, 170, 250, 300, 500};
 
   private final double slopeMmPerVolt;
+
+  @SuppressWarnings("ImmutableEnumChecker") // nobody writes to it
   private final double[] spacingMm;
 
   Spacing2221(double slopeMmPerVolt, double... spacingMm) {
