@@ -59,14 +59,15 @@ public final class RimBuilder {
   public static Result plan(
       Winding winding, Spec.Connection connection, boolean starPointOut, RimSize size) {
     double nodePitch = 2 * Math.PI * size.nodeRadiusMm() / (size.coils() * size.nodes());
-    if (nodePitch < size.wideMm() + size.spaceMm() - 1e-9) {
+    if (nodePitch < size.besideMm() - 1e-9) {
       return refuse(
           "via.pad",
-          "the coils' connection points stand %.3f mm apart at the rim, a via pad and its space"
-              + " need %.3f mm; a smaller via.pad or coil.space, fewer board.layers or fewer"
+          "the coils' connection points stand %.3f mm apart at the rim, a joint and its space need"
+              + " %.3f mm; %sa smaller via.pad or coil.space, fewer board.layers or fewer"
               + " winding.coils would do",
           nodePitch,
-          size.wideMm() + size.spaceMm());
+          size.besideMm(),
+          size.viaCount() > 1 ? "a smaller via.count, " : "");
     }
     List<String> marks = Connections.marks(winding, connection, starPointOut);
     Spec.Terminals t = size.terminals();
