@@ -11,7 +11,15 @@ public final class Templates {
   private Templates() {}
 
   private static final List<String> NAMES =
-      List.of("filter-wheel", "dosing-pump", "reaction-wheel", "wind-logger");
+      List.of(
+          "filter-wheel",
+          "dosing-pump",
+          "reaction-wheel",
+          "wind-logger",
+          "sample-shaker",
+          "blind-drive",
+          "tide-meter",
+          "test-bench");
   private static final List<String> FAB_NAMES = List.of("economy", "standard", "fine");
 
   /** The starting specs, in the order in which they are listed. */
