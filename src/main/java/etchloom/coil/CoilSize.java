@@ -77,9 +77,19 @@ public record CoilSize(
     return 2 * Math.asin(rowMm() / (2 * nodeRadiusMm()));
   }
 
-  /** Angle of a rim node from the coil's axis; all nodes of the board are evenly spaced. */
+  /**
+   * Half the angle over which the nodes spread: no wider than the coil, which the leads must meet.
+   */
+  private double nodeSpanRad() {
+    double half = widthMm.orElse(outerRadiusMm - innerRadiusMm) / 2;
+    return outline == Spec.CoilOutline.WEDGE
+        ? halfSpanRad()
+        : Math.min(halfSpanRad(), Math.atan(half / outerRadiusMm));
+  }
+
+  /** Angle of a rim node from the coil's axis; a coil's nodes are evenly spaced. */
   public double nodeAngleRad(int node) {
-    double a = halfSpanRad();
+    double a = nodeSpanRad();
     return -a + a * (2 * node + 1) / nodes();
   }
 

@@ -67,7 +67,8 @@ final class Racetrack implements OvalTurns {
   private double outerSide(double corner) {
     double edge = corner + size.trackMm() / 2;
     double reach = size.outerRadiusMm() - edge;
-    double off = size.widthMm().orElseThrow() / 2 - edge;
+    // A lead may come on to the outer side up to a pitch before the corner of the next turn.
+    double off = size.widthMm().orElseThrow() / 2 - edge + size.pitchMm();
     return Math.sqrt(reach * reach - off * off) + corner;
   }
 

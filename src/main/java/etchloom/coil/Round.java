@@ -17,7 +17,7 @@ final class Round implements OvalTurns {
   private Round(CoilSize size, int count) {
     this.size = size;
     this.count = count;
-    centre = new Point((size.innerRadiusMm() + size.outerRadiusMm()) / 2, 0);
+    centre = new Point(size.outerRadiusMm() - size.trackMm() / 2 - radius(0), 0);
     innerCentre = centre.plus(new Point(0, size.pitchMm() / 2));
   }
 
@@ -30,14 +30,17 @@ final class Round implements OvalTurns {
 
   /** How much the coil is too wide for its sector. */
   static double overhangMm(CoilSize size) {
-    double half = (size.outerRadiusMm() - size.innerRadiusMm()) / 2 + size.spaceMm() / 2;
-    double middle = (size.innerRadiusMm() + size.outerRadiusMm()) / 2;
-    return 2 * (half - middle * Math.sin(size.halfSpanRad()));
+    Round r = new Round(size, 1);
+    double half = r.radius(0) + size.pitchMm() / 2;
+    return 2 * (half - r.centre.x() * Math.sin(size.halfSpanRad()));
   }
 
+  /**
+   * The inner half-turns are smaller by half a pitch; together they reach from radius to radius.
+   */
   private double radius(int turn) {
     double over = (size.outerRadiusMm() - size.innerRadiusMm() - size.trackMm()) / 2;
-    return over - turn * size.pitchMm();
+    return over + size.pitchMm() / 4 - turn * size.pitchMm();
   }
 
   private Bend outer(int turn) {

@@ -58,7 +58,7 @@ public final class RimBuilder {
   /** Plans both ways round and keeps the one with fewer rings, counter-clockwise on a tie. */
   public static Result plan(
       Winding winding, Spec.Connection connection, boolean starPointOut, RimSize size) {
-    double nodePitch = 2 * Math.PI * size.nodeRadiusMm() / (size.coils() * size.nodes());
+    double nodePitch = size.nodeRadiusMm() * 2 * Math.abs(size.firstNodeRad()) / (size.nodes() - 1);
     if (nodePitch < size.besideMm() - 1e-9) {
       return refuse(
           "via.pad",

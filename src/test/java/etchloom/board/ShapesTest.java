@@ -151,9 +151,10 @@ class ShapesTest {
       }
     }
     assertTrue(most <= shape.outerMm() + 1e-9, "reaches " + most);
-    assertEquals(shape.outerMm(), most, 0.05);
+    // A racetrack's corner reaches it only where a lead comes on to it.
+    assertEquals(shape.outerMm(), most, shape.widthMm().isPresent() ? 0.2 : 1e-3);
     assertTrue(least >= shape.innerMm() - 1e-9, "reaches " + least);
-    assertEquals(shape.innerMm(), least, 0.05);
+    assertEquals(shape.innerMm(), least, 0.02);
   }
 
   /** With current from start to finish, every layer's turns go round the axis the same way. */
