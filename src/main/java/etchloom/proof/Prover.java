@@ -8,6 +8,8 @@ import etchloom.proof.copper.PieceMatch;
 import etchloom.proof.image.DrillFile;
 import etchloom.proof.image.LayerImage;
 import etchloom.proof.image.Plating;
+import etchloom.proof.ohm.CopperBuild;
+import etchloom.proof.ohm.FileResistance;
 import etchloom.proof.plane.Figure;
 import etchloom.proof.plane.OutOfRange;
 import java.util.ArrayList;
@@ -48,6 +50,35 @@ public final class Prover {
    */
   public static ProofReport prove(SortedMap<String, byte[]> files, ProofExpectation expected) {
     return new Prover(files, expected).prove();
+  }
+
+  /**
+   * The resistances between the terminals, from the copper and drill files of a set alone.
+   *
+   * @throws IllegalArgumentException when a copper file is missing or cannot be read
+   */
+  public static FileResistance.Ohms ohms(
+      SortedMap<String, byte[]> files, ProofExpectation expected, CopperBuild build) {
+    Prover p = new Prover(files, expected);
+    if (p.set.copper().size() < expected.layers()) {
+      throw new IllegalArgumentException("not all copper could be read: " + p.out.sorted());
+    }
+    List<DrillFile> drills =
+        p.set.gerberDrills().isEmpty() ? p.set.ncDrills() : p.set.gerberDrills();
+    CopperBuilder builder = new CopperBuilder();
+    List<LayerImage> copper = List.copyOf(p.set.copper().values());
+    Connectivity net =
+        new Connectivity(
+            copper.stream().map(i -> builder.build(i.objects())).toList(),
+            DrilledHoles.of(drills, expected.layers()));
+    return FileResistance.between(
+        copper,
+        net,
+        build,
+        expected.pads().stream()
+            .filter(ProofExpectation.Pad::terminal)
+            .map(t -> new FileResistance.Terminal(t.mark(), t.fromLayer(), t.at()))
+            .toList());
   }
 
   private ProofReport prove() {
