@@ -101,6 +101,20 @@ class ArchitectureTest {
     rule.check(CLASSES);
   }
 
+  /** A mistake that both would share could not show in what is read back. */
+  @Test
+  void readersAndWritersDoNotSeeEachOther() {
+    for (List<String> pair : List.of(List.of("proof", "write"), List.of("write", "proof"))) {
+      ArchRuleDefinition.noClasses()
+          .that()
+          .resideInAPackage("etchloom." + pair.get(0) + "..")
+          .should()
+          .dependOnClassesThat()
+          .resideInAPackage("etchloom." + pair.get(1) + "..")
+          .check(CLASSES);
+    }
+  }
+
   @Test
   void packagesHaveNoCycles() {
     slices().matching("etchloom.(*)..").should().beFreeOfCycles().check(CLASSES);

@@ -31,6 +31,8 @@ final class FlatShapes {
   private final double[] stripLo;
   private final double[] stripHi;
   private final double[] height;
+  private final double[] bulgeX;
+  private final double[] bulgeY;
   private final double[] slack;
   private final boolean[] low;
 
@@ -51,6 +53,8 @@ final class FlatShapes {
     stripLo = new double[n];
     stripHi = new double[n];
     height = new double[n];
+    bulgeX = new double[n];
+    bulgeY = new double[n];
     slack = new double[n];
     low = new boolean[n];
     box = new double[4 * n];
@@ -93,7 +97,10 @@ final class FlatShapes {
       double ey = b.y() - arc.centre().y();
       slack[i] = Math.abs(Math.sqrt(ex * ex + ey * ey) - r[i]) + ROUNDING_MM;
       // Up to half a turn no point of the arc stands beyond its chord's ends.
-      height[i] = stripHi[i] - stripLo[i] + slack[i];
+      height[i] = stripHi[i] - stripLo[i];
+      bulgeX[i] = (low[i] ? -height[i] : height[i]) * nx[i];
+      bulgeY[i] = (low[i] ? -height[i] : height[i]) * ny[i];
+      height[i] += slack[i];
       stripLo[i] -= slack[i];
       stripHi[i] += slack[i];
     }
@@ -105,24 +112,46 @@ final class FlatShapes {
     if (outside(a, i, b, j, limit) || outside(b, j, a, i, limit)) {
       return true;
     }
-    double ri = a.r[i];
-    double rj = b.r[j];
-    return ri > 0
-        && rj > 0
-        && Math.abs(ri - rj) - a.slack[i] - b.slack[j] > limit
-        && Math.abs(a.cx[i] - b.cx[j]) <= SAME_CENTRE_MM
-        && Math.abs(a.cy[i] - b.cy[j]) <= SAME_CENTRE_MM;
+    return (a.r[i] > 0 && offCircle(a, i, b, j, limit))
+        || (b.r[j] > 0 && offCircle(b, j, a, i, limit));
   }
 
-  /** Whether the second shape stays beside the first one's strip. */
+  /** Whether the second shape stays well inside or well outside the circle of the first, an arc. */
+  private static boolean offCircle(FlatShapes a, int i, FlatShapes b, int j, double limit) {
+    double x = a.cx[i];
+    double y = a.cy[i];
+    double gap = limit + a.slack[i];
+    if (b.r[j] > 0 && Math.abs(x - b.cx[j]) <= SAME_CENTRE_MM) {
+      if (Math.abs(y - b.cy[j]) <= SAME_CENTRE_MM) {
+        return Math.abs(a.r[i] - b.r[j]) - b.slack[j] - 2 * SAME_CENTRE_MM > gap;
+      }
+    }
+    gap += b.height[j];
+    double inside = a.r[i] - gap;
+    double ux = b.x0[j] - x;
+    double uy = b.y0[j] - y;
+    double vx = b.x1[j] - x;
+    double vy = b.y1[j] - y;
+    if (inside > 0 && ux * ux + uy * uy < inside * inside && vx * vx + vy * vy < inside * inside) {
+      return true;
+    }
+    return b.toChord(x, y, j) - gap > a.r[i];
+  }
+
+  /**
+   * Whether the second shape stays beside the first one's strip. An arc of up to half a turn lies
+   * in the rectangle between its chord and the chord moved by its height towards its bulge.
+   */
   private static boolean outside(FlatShapes a, int i, FlatShapes b, int j, double limit) {
     double u = a.nx[i];
     double v = a.ny[i];
     double p = u * b.x0[j] + v * b.y0[j];
     double q = u * b.x1[j] + v * b.y1[j];
-    double h = b.height[j] + limit;
-    return p - h > a.stripHi[i] && q - h > a.stripHi[i]
-        || p + h < a.stripLo[i] && q + h < a.stripLo[i];
+    double bulge = u * b.bulgeX[j] + v * b.bulgeY[j];
+    double gap = limit + b.slack[j];
+    double lo = (p < q ? p : q) + (bulge < 0 ? bulge : 0);
+    double hi = (p < q ? q : p) + (bulge > 0 ? bulge : 0);
+    return lo - gap > a.stripHi[i] || hi + gap < a.stripLo[i];
   }
 
   /**

@@ -1,9 +1,9 @@
 package etchloom.report;
 
-import etchloom.electric.resistance.ResistanceFigures;
 import etchloom.electric.resistance.ResistanceFigures.TerminalOhm;
 import java.util.ArrayList;
 import java.util.List;
+import java.util.Optional;
 
 /** The sheets one prints: for the fab, for the bench, and what every figure rests on. */
 final class HtmlSheets {
@@ -41,7 +41,11 @@ final class HtmlSheets {
       h.element("th", head.get(i), "scope=\"col\"", i > 0 && i < 4 ? "class=\"n\"" : "class=\"t\"");
     }
     h.close("tr").close("thead").open("tbody");
-    ResistanceFigures.lineToLine(r.resistance().terminals()).forEach(this::pair);
+    List<PairLimits> limits = PairLimits.of(r);
+    for (int i = 0; i < r.resistance().terminals().size(); i++) {
+      TerminalOhm t = r.resistance().terminals().get(i);
+      pair(t, limits.isEmpty() ? Optional.empty() : Optional.of(limits.get(i)));
+    }
     h.close("tbody").close("table").close("div");
     h.open("p");
     h.text("The pairs of one board must also agree with each other: by design they differ by ");
@@ -50,9 +54,9 @@ final class HtmlSheets {
     h.close("p");
   }
 
-  private void pair(TerminalOhm t) {
-    String least = r.resistance().worst().map(w -> OrderLines.ohm(w.minTerminalOhm())).orElse("-");
-    String most = r.resistance().worst().map(w -> OrderLines.ohm(w.maxTerminalOhm())).orElse("-");
+  private void pair(TerminalOhm t, Optional<PairLimits> limits) {
+    String least = limits.map(l -> OrderLines.ohm(l.least())).orElse("-");
+    String most = limits.map(l -> OrderLines.ohm(l.greatest())).orElse("-");
     h.open("tr").element("th", t.key(), "scope=\"row\"");
     h.element("td", Words.symbols(OrderLines.ohm(t.ohm())), "class=\"n\"");
     h.element("td", Words.symbols(least), "class=\"n\"")

@@ -2,12 +2,10 @@ package etchloom.report;
 
 import etchloom.artwork.Artwork;
 import etchloom.artwork.Stackup;
-import etchloom.electric.resistance.ResistanceFigures;
 import etchloom.spec.Spec;
 import etchloom.units.Numbers;
 import java.util.ArrayList;
 import java.util.List;
-import java.util.Optional;
 
 /** What the fab must be told, and what to measure when the boards come. */
 public final class OrderLines {
@@ -81,25 +79,17 @@ public final class OrderLines {
 
   /** The acceptance limits, one a line; empty where the tolerances could etch a track away. */
   public static List<String> resistance(Results r) {
-    Optional<ResistanceFigures.Limits> worst = r.resistance().worst();
-    if (worst.isEmpty()) {
+    List<PairLimits> pairs = PairLimits.lines(r);
+    if (pairs.isEmpty()) {
       return List.of();
     }
-    String pairs =
-        String.join(
-            ", ",
-            ResistanceFigures.lineToLine(r.resistance().terminals()).stream()
-                .map(ResistanceFigures.TerminalOhm::key)
-                .toList());
     return List.of(
         "resistance "
-            + pairs
+            + String.join(", ", pairs.stream().map(PairLimits::pair).toList())
             + " at 20 C: "
             + ohm(r.resistance().meanTerminalOhm())
             + ", limits "
-            + ohm(worst.get().minTerminalOhm())
-            + " to "
-            + ohm(worst.get().maxTerminalOhm()));
+            + PairLimits.span(pairs));
   }
 
   static String ohm(double v) {

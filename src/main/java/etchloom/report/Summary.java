@@ -4,8 +4,10 @@ import etchloom.electric.resistance.ResistanceFigures;
 import etchloom.electric.resistance.ResistanceFigures.PhaseOhm;
 import etchloom.electric.resistance.ResistanceFigures.TerminalOhm;
 import etchloom.rules.Finding;
+import etchloom.rules.RuleReport;
 import etchloom.spec.Spec;
 import etchloom.units.Numbers;
+import java.util.List;
 import java.util.Map;
 import java.util.Optional;
 
@@ -24,8 +26,8 @@ public final class Summary {
   public static String text(Results r, Optional<String> where, boolean colour) {
     Page page = new Page(colour);
     board(page, r);
-    rules(page, r);
-    resistance(page, r.resistance());
+    rules(page, r.rules());
+    resistance(page, r);
     end(page, r, ReportJson.figures(r), where);
     return page.text();
   }
@@ -64,11 +66,11 @@ public final class Summary {
             + Words.count(r.vias(), "via"));
   }
 
-  static void rules(Page page, Results r) {
+  static void rules(Page page, RuleReport rules) {
     page.blank();
     page.row("rule", "measured", "required", "tightest at");
-    for (Finding f : r.rules().minima()) {
-      boolean broken = FindingText.broken(r.rules(), f.rule());
+    for (Finding f : rules.minima()) {
+      boolean broken = FindingText.broken(rules, f.rule());
       page.row(
           f.rule(),
           FindingText.value(f.measured(), f, broken),
@@ -76,25 +78,32 @@ public final class Summary {
               + FindingText.value(f.required(), f, broken),
           FindingText.shortPlace(f) + (broken ? "  BROKEN" : ""));
     }
-    r.rules().notes().forEach(n -> page.item("note", n));
+    rules.notes().forEach(n -> page.item("note", n));
   }
 
-  private static void resistance(Page page, ResistanceFigures f) {
+  private static void resistance(Page page, Results r) {
+    ResistanceFigures f = r.resistance();
     page.blank();
     page.row("resistance at 20 C", "", "", "");
     page.cells("phase", f.phases(), Summary::phase);
     page.cells("terminals", f.terminals(), Summary::terminals);
+    List<PairLimits> limits = PairLimits.lines(r);
     page.item(
         "limits",
-        f.worst()
-            .map(
-                l ->
-                    OrderLines.ohm(l.minTerminalOhm())
-                        + " to "
-                        + OrderLines.ohm(l.maxTerminalOhm())
-                        + " between terminals, worst case of the fab")
-            .orElse("none: within the fab's tolerance a track could be etched away"));
+        limits.isEmpty()
+            ? "none: within the fab's tolerance a track could be etched away"
+            : PairLimits.span(limits)
+                + ", "
+                + pairs(limits, f.terminals().size())
+                + ", worst case of the fab");
     page.item("imbalance", Numbers.fixed(f.imbalancePercent(), 2) + " %");
+  }
+
+  private static String pairs(List<PairLimits> limits, int all) {
+    if (limits.size() == 1) {
+      return limits.get(0).pair();
+    }
+    return limits.size() == all ? "any pair" : "any pair without a star point";
   }
 
   private static String phase(PhaseOhm p) {

@@ -6,7 +6,6 @@ import etchloom.geometry.Grid;
 /** What surrounds the board in its picture: page, datum, scale bar, key of colours, title. */
 final class SvgFrame {
   private static final String INK = "#26323d";
-  private static final String LIGHT = "#ffffff";
 
   /** Sizes as shares of the board's width. */
   private static final double MARGIN = 0.07;
@@ -59,7 +58,7 @@ final class SvgFrame {
     double gap = 0.01 * size;
     double edge = board.maxX();
     out.append("<g id=\"datum\">\n<title>Shaft axis and angle 0</title>\n");
-    out.append("<path fill=\"none\" stroke=\"").append(bored() ? INK : LIGHT);
+    out.append("<path fill=\"none\" stroke=\"").append(INK);
     out.append("\" stroke-width=\"");
     mm(0.003 * size);
     out.append("\" d=\"M");
@@ -74,11 +73,6 @@ final class SvgFrame {
     out.append(' ');
     mm(-0.9 * gap);
     out.append("Z\"/>\n</g>\n");
-  }
-
-  /** Whether the axis lies in a hole, where the page shows. */
-  private boolean bored() {
-    return art.profile().size() > 1;
   }
 
   void footer() {

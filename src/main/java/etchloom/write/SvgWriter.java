@@ -16,18 +16,17 @@ import java.util.Locale;
  *
  * <p>SVG 1.1, millimetres, drawn y up in one flipped group; shapes and attributes only, no styles,
  * so that any viewer shows the same. Places are rounded to the micrometre: a picture, not a tool's
- * input. Copper runs from blue (bottom) over grey to amber (L1), a range that all kinds of colour
- * vision tell apart.
+ * input. Copper tones lighten with depth, a scale that all kinds of colour vision tell apart.
  */
 final class SvgWriter {
-  private static final String BOARD = "#26323d";
+  private static final String BOARD = "#eceee8";
   private static final String PAGE = "#ffffff";
-  private static final String BARE = "#fff0c2";
-  private static final String TENTED_HOLE = "#10161c";
-  private static final String LEGEND = "#ffffff";
+  private static final String BARE = "#c9b27a";
+  private static final String TENTED_HOLE = "#3a2417";
+  private static final String LEGEND = "#22303a";
 
   /** Red, green and blue of the lowest layer, the middle and L1. */
-  private static final int[][] COPPER = {{62, 124, 200}, {150, 158, 160}, {242, 178, 56}};
+  private static final int[][] COPPER = {{232, 205, 176}, {196, 128, 84}, {120, 52, 22}};
 
   private final Artwork art;
   private final StringBuilder out;
@@ -56,7 +55,10 @@ final class SvgWriter {
     holes("drill-plated", "Plated holes", Holes.plated(art));
     holes("drill-nonplated", "Non-plated holes", Holes.nonPlated(art));
     frame.datum();
+    SvgPhases phases = new SvgPhases(art, out);
+    phases.bands();
     out.append("</g>\n");
+    phases.names();
     frame.footer();
     out.append("</svg>\n");
     return Ascii.bytes(out);

@@ -61,6 +61,18 @@ final class XncWriter {
     return Ascii.bytes(s.append("M30\n"));
   }
 
+  /**
+   * Always with its sign: from {@code X20.5} one reader guesses a zero suppression, decimal point
+   * or not, for the 0 after digits; {@code X+20.5} leaves it nothing to guess.
+   */
+  private static void place(StringBuilder s, char axis, long nm) {
+    s.append(axis);
+    if (nm >= 0) {
+      s.append('+');
+    }
+    Numbers.mm(s, nm);
+  }
+
   private static void signed(StringBuilder s, long nm) {
     Numbers.mm(nm < 0 ? s : s.append('+'), nm);
   }

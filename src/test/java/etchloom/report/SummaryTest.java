@@ -21,6 +21,7 @@ class SummaryTest {
         SMALL,
         Samples.with(SMALL, Samples.broken()),
         SMALL.withProof(Samples.proof()),
+        Samples.Electric.STAR,
         Samples.titled(SMALL, longTitle),
         Samples.bare(Specs.wheel(4).connected(Spec.Connection.DELTA)),
         Samples.bare(Specs.wheel(2).connected(Spec.Connection.OPEN)));

@@ -96,7 +96,7 @@ final class SheetHarmonics {
     double s1 = radius(t1);
     double off = Math.max(0, Math.max(s0 - r, r - s1));
     boolean fine = s1 - s0 <= PANEL * Math.hypot(d, off);
-    if (depth < LEAST_DEPTH || !fine && depth < MOST_DEPTH) {
+    if (depth < LEAST_DEPTH || (!fine && depth < MOST_DEPTH)) {
       double mid = (t0 + t1) / 2;
       panel(t0, mid, depth + 1);
       panel(mid, t1, depth + 1);

@@ -5,6 +5,7 @@ import static org.junit.jupiter.api.Assertions.assertFalse;
 import static org.junit.jupiter.api.Assertions.assertTrue;
 
 import etchloom.electric.machine.drive.TorqueSpeed;
+import etchloom.spec.Spec;
 import java.lang.reflect.RecordComponent;
 import java.util.List;
 import java.util.Optional;
@@ -233,18 +234,52 @@ class MachineTest {
     finite(f, "figures");
   }
 
+  /** The reader refuses such a drift; whoever makes a spec in code is told too. */
   @Test
   void demagnetised_saidByName() {
-    TestMachine m =
-        TestMachine.of(
-            "filter-wheel",
-            plus(
-                FEW,
-                "remanence-drift: -0.12 %",
-                "remanence-drift: -2 %",
-                "temperature: 30 C",
-                "temperature: 78 C"));
-    MachineFigures f = m.figures();
+    Spec s = star.spec();
+    Spec.Magnet m = s.rotor().magnet().orElseThrow();
+    Spec.Magnet gone =
+        new Spec.Magnet(
+            m.outline(),
+            m.diameterMm(),
+            m.innerRadiusMm(),
+            m.outerRadiusMm(),
+            m.spanRad(),
+            m.lengthMm(),
+            m.widthMm(),
+            m.pitchRadiusMm(),
+            m.thicknessMm(),
+            m.remanenceTesla(),
+            -0.02,
+            78,
+            m.density(),
+            m.limitC());
+    Spec.Rotor r = s.rotor();
+    Spec.Rotor rotor =
+        new Spec.Rotor(
+            r.poles(),
+            r.twoSided(),
+            r.airGapMm(),
+            Optional.of(gone),
+            r.outerDiameterMm(),
+            r.ironBehindMagnets(),
+            r.counterPlateGapMm());
+    Spec spec =
+        new Spec(
+            s.title(),
+            s.slug(),
+            s.revision(),
+            rotor,
+            s.winding(),
+            s.coil(),
+            s.rim(),
+            s.via(),
+            s.board(),
+            s.fab(),
+            s.duty());
+    MachineFigures f =
+        new TestMachine(spec, star.fab(), star.assembly(), star.resistance()).figures();
     assertTrue(f.emf().isEmpty());
     assertTrue(codes(f).contains("demagnetised"));
     assertTrue(f.absent().contains(new Absent("emf", "rotor.magnet.remanence-drift")));
@@ -253,9 +288,7 @@ class MachineTest {
 
   @Test
   void withoutDuty_whatNeedsNone() {
-    String text =
-        new String(
-            etchloom.spec.Templates.bytes("filter-wheel"), java.nio.charset.StandardCharsets.UTF_8);
+    String text = TestMachine.text("filter-wheel");
     String duty = text.substring(text.indexOf("\nduty:"));
     MachineFigures f = TestMachine.of("filter-wheel", plus(FEW, duty, "\n")).figures();
     assertTrue(f.emf().isPresent() && f.torque().isPresent());
@@ -292,7 +325,7 @@ class MachineTest {
   @ParameterizedTest
   @ValueSource(strings = {"filter-wheel", "dosing-pump", "reaction-wheel", "wind-logger"})
   void templates_sameAgainAndFinite(String template) {
-    TestMachine m = TestMachine.of(template, FEW);
+    TestMachine m = TestMachine.template(template);
     MachineFigures f = m.figures();
     assertEquals(f, m.figures());
     finite(f, template);

@@ -58,7 +58,7 @@ public final class Coupling {
       for (int i = 0; i < coil.conductors().size(); i++) {
         Conductor c = artwork.conductors().get(coil.conductors().get(i));
         Conductor model = artwork.conductors().get(first.conductors().get(i));
-        boolean again = coil != first && repeats(model, c, turn);
+        boolean again = c.id() != model.id() && repeats(model, c, turn);
         tracks[c.id()] =
             again
                 ? tracks[model.id()].rotated(field.polePairs(), turn)
@@ -103,8 +103,8 @@ public final class Coupling {
       }
       TrackIntegral t = edge.barrel() ? barrel(edge, barrels) : tracks[edge.conductor().getAsInt()];
       for (int i = 0; i < re.length; i++) {
-        re[i] += share * t.re()[i];
-        im[i] += share * t.im()[i];
+        re[i] += share * t.re(i);
+        im[i] += share * t.im(i);
       }
     }
     return new FluxSeries(field.polePairs(), re, im);
@@ -140,12 +140,12 @@ public final class Coupling {
 
   /** One conductor's own part of dλ/dθ for a current along its path. */
   public FluxSeries track(int conductor) {
-    return new FluxSeries(field.polePairs(), tracks[conductor].re(), tracks[conductor].im());
+    return tracks[conductor].series(field.polePairs());
   }
 
   /** {@code ∫ b² dl} along a conductor for the order 2i + 1, T²·m. */
   public double squareTeslaMetre(int conductor, int i) {
-    return tracks[conductor].squares()[i] * 1e-3;
+    return tracks[conductor].square(i) * 1e-3;
   }
 
   /** Amplitudes at a place, as {@link AxialField#amplitudes}. */

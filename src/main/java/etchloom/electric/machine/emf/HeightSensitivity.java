@@ -83,7 +83,7 @@ public final class HeightSensitivity {
       Conductor c = artwork.conductors().get(id);
       TrackIntegral t = integrator.along(c.layer(), c.path());
       FluxSeries was = now.track(id);
-      double along = (t.re()[0] - was.re(0)) * re + (t.im()[0] - was.im(0)) * im;
+      double along = (t.re(0) - was.re(0)) * re + (t.im(0) - was.im(0)) * im;
       out[c.layer() - 1] += along / (re * re + im * im) / STEP_MM;
     }
     return out;

@@ -1,13 +1,38 @@
 package etchloom.electric.machine.emf;
 
 /**
- * The rotor's field integrated along one conductor, entry i of each for the odd order ν = 2i + 1.
- *
- * @param re of {@code G = ∫ r b e^(iνPφ) dr}, Wb; the conductor's part of dλ/dθ is {@code Re Σ G
- *     e^(−iνPθ)}
- * @param squares {@code ∫ b² dl}, T²·mm
+ * The rotor's field integrated along one conductor, entry i of each for the odd order ν = 2i + 1:
+ * {@code G = ∫ r b e^(iνPφ) dr}, Wb, whose part of dλ/dθ is {@code Re Σ G e^(−iνPθ)}, and {@code ∫
+ * b² dl}, T²·mm.
  */
-record TrackIntegral(double[] re, double[] im, double[] squares) {
+final class TrackIntegral {
+  private final double[] re;
+  private final double[] im;
+  private final double[] squares;
+
+  /** The arrays are taken over, not copied. */
+  TrackIntegral(double[] re, double[] im, double[] squares) {
+    this.re = re;
+    this.im = im;
+    this.squares = squares;
+  }
+
+  double re(int i) {
+    return re[i];
+  }
+
+  double im(int i) {
+    return im[i];
+  }
+
+  double square(int i) {
+    return squares[i];
+  }
+
+  FluxSeries series(int polePairs) {
+    return new FluxSeries(polePairs, re, im);
+  }
+
   /** The same conductor turned counter-clockwise about the shaft. */
   TrackIntegral rotated(int polePairs, double rad) {
     double[] c = new double[re.length];
