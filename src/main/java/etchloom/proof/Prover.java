@@ -19,6 +19,7 @@ import java.util.Optional;
 import java.util.OptionalDouble;
 import java.util.OptionalInt;
 import java.util.SortedMap;
+import java.util.SortedSet;
 import java.util.TreeMap;
 import java.util.TreeSet;
 
@@ -133,8 +134,8 @@ public final class Prover {
     for (int l = 1; l <= expected.layers(); l++) {
       groups.add(new LayerGroups(expected, l));
     }
-    TreeSet<Integer> same = asDesigned(groups);
-    TreeSet<Integer> swapped = swapped(groups, same);
+    SortedSet<Integer> same = asDesigned(groups);
+    SortedSet<Integer> swapped = swapped(groups, same);
     for (LayerGroups g : groups) {
       if (!swapped.contains(g.layer)) {
         LayerProof proof = new LayerProof(g, set.copper().get(g.layer), net, out);
@@ -156,7 +157,7 @@ public final class Prover {
   }
 
   /** Layers whose file draws the design to the last piece. */
-  private TreeSet<Integer> asDesigned(List<LayerGroups> groups) {
+  private SortedSet<Integer> asDesigned(List<LayerGroups> groups) {
     TreeSet<Integer> found = new TreeSet<>();
     for (LayerGroups g : groups) {
       if (draws(g.layer, g)) {
@@ -167,7 +168,7 @@ public final class Prover {
   }
 
   /** Layers whose file draws another layer of the design to the last piece. */
-  private TreeSet<Integer> swapped(List<LayerGroups> groups, TreeSet<Integer> same) {
+  private SortedSet<Integer> swapped(List<LayerGroups> groups, SortedSet<Integer> same) {
     TreeSet<Integer> found = new TreeSet<>();
     for (LayerGroups g : groups) {
       for (LayerGroups other : groups) {
