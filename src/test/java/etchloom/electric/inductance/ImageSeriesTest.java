@@ -54,6 +54,21 @@ class ImageSeriesTest {
     assertEquals(with, alone + images(f, sections, planes(height, Double.NaN)), 1e-9 * with);
   }
 
+  /** Half a width from the iron: the tape's section against strips of the same tape. */
+  @Test
+  void nearIron_strips() {
+    int strips = 8;
+    List<CrossSection> whole = List.of(new CrossSection(1, 0.035, 0));
+    List<CrossSection> narrow = List.of(new CrossSection(1.0 / strips, 0.035, 0));
+    Filaments f = new Filaments();
+    for (int i = 0; i < strips; i++) {
+      f.addTurned(Bodies.circle(20 + (i + 0.5) / strips - 0.5, 0.01, 0), 0, 1.0 / strips);
+    }
+    IronPlanes iron = planes(0.5, Double.NaN);
+    double expected = images(f, narrow, iron);
+    assertEquals(expected, images(Bodies.circle(20, 0.05, 0), whole, iron), 1e-3 * expected);
+  }
+
   /** Towards the iron a coil of no height comes to twice its inductance. */
   @Test
   void onIron_twice() {
