@@ -78,6 +78,22 @@ final class InputFiles {
         staged.diagnostics());
   }
 
+  /**
+   * Rules named on the command line.
+   *
+   * @param name a class, or a path
+   */
+  static FabRules fab(String name) {
+    if (!isPath(name)) {
+      if (!Templates.fabNames().contains(name)) {
+        throw unknownClass(name, Optional.empty());
+      }
+      return FabReader.builtIn(name);
+    }
+    Staged<FabRules> rules = FabReader.read(name, bytes(path(name), name, "rules file"));
+    return rules.value().orElseThrow(() -> new BadInput(rules.diagnostics()));
+  }
+
   /** As read: the readers take nothing but UTF-8, so this loses nothing. */
   private static String text(byte[] bytes) {
     return new String(bytes, StandardCharsets.UTF_8);

@@ -2,6 +2,7 @@ package etchloom.report;
 
 import etchloom.electric.machine.MachineFigures;
 import etchloom.electric.machine.Need;
+import etchloom.proof.ProofReport;
 import etchloom.rules.RuleReport;
 import java.util.List;
 import java.util.Map;
@@ -26,10 +27,11 @@ public final class ReportJson {
   }
 
   /** The check of a folder of files, which have neither title nor revision. */
-  public static byte[] writeCheck(String toolVersion, RuleReport rules) {
+  public static byte[] writeCheck(String toolVersion, RuleReport rules, ProofReport proof) {
     return new JsonTree()
         .put("tool", new JsonTree().put("version", toolVersion))
         .put("check", CheckTree.of(rules))
+        .put("proof", ProofTree.withFindings(proof))
         .bytes();
   }
 

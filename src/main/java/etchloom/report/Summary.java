@@ -4,6 +4,7 @@ import etchloom.electric.resistance.ResistanceFigures;
 import etchloom.electric.resistance.ResistanceFigures.PhaseOhm;
 import etchloom.electric.resistance.ResistanceFigures.TerminalOhm;
 import etchloom.rules.Finding;
+import etchloom.rules.RuleReport;
 import etchloom.spec.Spec;
 import etchloom.units.Numbers;
 import java.util.List;
@@ -25,7 +26,7 @@ public final class Summary {
   public static String text(Results r, Optional<String> where, boolean colour) {
     Page page = new Page(colour);
     board(page, r);
-    rules(page, r);
+    rules(page, r.rules());
     resistance(page, r);
     end(page, r, ReportJson.figures(r), where);
     return page.text();
@@ -65,11 +66,11 @@ public final class Summary {
             + Words.count(r.vias(), "via"));
   }
 
-  static void rules(Page page, Results r) {
+  static void rules(Page page, RuleReport rules) {
     page.blank();
     page.row("rule", "measured", "required", "tightest at");
-    for (Finding f : r.rules().minima()) {
-      boolean broken = FindingText.broken(r.rules(), f.rule());
+    for (Finding f : rules.minima()) {
+      boolean broken = FindingText.broken(rules, f.rule());
       page.row(
           f.rule(),
           FindingText.value(f.measured(), f, broken),
@@ -77,7 +78,7 @@ public final class Summary {
               + FindingText.value(f.required(), f, broken),
           FindingText.shortPlace(f) + (broken ? "  BROKEN" : ""));
     }
-    r.rules().notes().forEach(n -> page.item("note", n));
+    rules.notes().forEach(n -> page.item("note", n));
   }
 
   private static void resistance(Page page, Results r) {

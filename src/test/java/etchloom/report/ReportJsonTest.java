@@ -166,7 +166,8 @@ class ReportJsonTest {
     assertEquals(read(ReportJson.write(broken)).get("check"), alone.get("check"));
     RuleReport rules = Samples.broken();
     assertEquals(
-        alone.get("check"), read(ReportJson.writeCheck(Samples.VERSION, rules)).get("check"));
+        alone.get("check"),
+        read(ReportJson.writeCheck(Samples.VERSION, rules, Samples.proof())).get("check"));
   }
 
   @Test
