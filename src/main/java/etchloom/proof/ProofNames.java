@@ -44,6 +44,9 @@ public final class ProofNames {
   /** A terminal's pad does not carry its mark, or another pad does. */
   public static final String TERMINAL = "terminal";
 
+  /** A track, pad or hole is said to be for something that it is not for. */
+  public static final String FUNCTION = "function";
+
   public static final String MISSING_HOLE = "missing-hole";
   public static final String EXTRA_HOLE = "extra-hole";
 

@@ -141,6 +141,7 @@ public final class Prover {
         LayerProof proof = new LayerProof(g, set.copper().get(g.layer), net, out);
         proof.check(same.contains(g.layer));
         proof.nets();
+        proof.functions();
       }
     }
     NetProof whole = new NetProof(expected, net, out);
