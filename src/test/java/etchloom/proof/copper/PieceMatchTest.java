@@ -21,7 +21,7 @@ class PieceMatchTest {
     return new DrawnPiece(s, width, 0);
   }
 
-  /** Cut up, turned round, put in another order, drawn twice: still the same. */
+  /** Cut up, turned round, put in another order: still the same. */
   @ParameterizedTest(name = "seed {0}")
   @ValueSource(longs = {1, 2, 3, 4, 5})
   void sameDrawing_inAnotherOrder(long seed) {
@@ -46,7 +46,6 @@ class PieceMatchTest {
         second.add(piece(random.nextBoolean() ? part.reversed() : part, width));
       }
     }
-    second.add(second.get(7));
     Collections.shuffle(second, random);
     PieceMatch m = PieceMatch.match(first, second);
     assertTrue(m.same(), m::toString);
@@ -78,9 +77,9 @@ class PieceMatchTest {
   }
 
   @Test
-  void discThatIsMissing_isTold() {
+  void discThatIsMissing_isTold_andOneDrawnTwiceIsNot() {
     DrawnPiece disc = DrawnPiece.disc(new Point(1, 1), 0.6, 3);
     assertEquals(List.of(disc), PieceMatch.match(List.of(disc), List.of()).onlyFirst());
-    assertTrue(PieceMatch.match(List.of(disc), List.of(disc)).same());
+    assertTrue(PieceMatch.match(List.of(disc), List.of(disc, disc)).same());
   }
 }
