@@ -65,6 +65,9 @@ public final class ProofNames {
   public static final String OUTLINES = "outlines";
   public static final String SVG = "svg";
 
+  /** The copper of the files resists otherwise than the report says. */
+  public static final String RESISTANCE = "resistance";
+
   public static final String ARCHIVE = "archive";
 
   private ProofNames() {}
