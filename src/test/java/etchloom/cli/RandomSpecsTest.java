@@ -9,6 +9,7 @@ import etchloom.artwork.Coil;
 import etchloom.artwork.Conductor;
 import etchloom.artwork.Phase;
 import etchloom.diagnostic.Diagnostic;
+import etchloom.rules.Finding;
 import etchloom.run.Drawn;
 import etchloom.spec.Spec;
 import etchloom.testing.RandomSpecs;
@@ -19,6 +20,7 @@ import java.util.ArrayList;
 import java.util.HashMap;
 import java.util.List;
 import java.util.Map;
+import java.util.Optional;
 import java.util.TreeMap;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.api.io.TempDir;
@@ -38,11 +40,15 @@ class RandomSpecsTest {
       String name = "seed " + seed + "\n" + yaml;
       Path spec = Files.writeString(folder.resolve("s" + seed + ".yaml"), yaml);
       try {
-        InputFiles.Inputs in = InputFiles.read(spec.toString(), java.util.Optional.empty());
-        Drawn d = Attempt.of(in, false).drawn();
+        InputFiles.Inputs in = InputFiles.read(spec.toString(), Optional.empty());
+        Attempt attempt = Attempt.of(in, false);
+        Drawn d = attempt.drawn();
         assertEquals(List.of(), d.rules().findings(), name);
         everyPhaseIsOneChain(d, name);
         everyNumberIsFinite(d, name);
+        theSpaceIsWhatWasAskedFor(d, name);
+        assertTrue(
+            SetFiles.of(attempt, Optional.empty()).results().proof().orElseThrow().passed(), name);
         drawn++;
       } catch (BadInput e) {
         for (Diagnostic x : e.diagnostics()) {
@@ -82,6 +88,17 @@ class RandomSpecsTest {
     int loops = art.conductors().size() - nodes + pieces;
     assertEquals(connection == Spec.Connection.OPEN ? 3 : 1, pieces, name);
     assertEquals(connection == Spec.Connection.DELTA ? 1 : 0, loops, name);
+  }
+
+  /** The tightest gap is the one asked for, to the nanometre. */
+  private static void theSpaceIsWhatWasAskedFor(Drawn d, String name) {
+    double least =
+        d.rules().minima().stream()
+            .filter(f -> f.rule().equals("space"))
+            .mapToDouble(Finding::measured)
+            .min()
+            .orElseThrow();
+    assertTrue(least >= d.spec().coil().spaceMm() - 1e-6, () -> name + " space " + least);
   }
 
   /** Connected pieces of the whole copper as a graph. */
