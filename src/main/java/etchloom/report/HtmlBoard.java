@@ -84,6 +84,9 @@ final class HtmlBoard {
             + WindingTree.word(r.spec().winding().connection())
             + ", "
             + Words.count(r.winding().coils(), "coil")
+            + (r.spec().winding().parallelPaths() > 1
+                ? " in " + r.spec().winding().parallelPaths() + " parallel paths a phase"
+                : "")
             + ", "
             + r.winding().poles()
             + " poles, winding factor "

@@ -72,6 +72,10 @@ public final class OrderLines {
   }
 
   private static String test(Spec.Winding w) {
+    if (w.connection() != Spec.Connection.OPEN && w.phases() == 6) {
+      return "each set of three phases is one net by design: test its continuity, and isolation"
+          + " between the two sets";
+    }
     return w.connection() == Spec.Connection.OPEN
         ? "each phase is one net by design: test its continuity, and isolation between phases"
         : "the winding is one net by design: test continuity, no isolation test between terminals";

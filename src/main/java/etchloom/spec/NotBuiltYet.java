@@ -22,12 +22,6 @@ final class NotBuiltYet {
     if (coil.taper()) {
       refuse(coil.section(), "taper", "only `taper: off`");
     }
-    if (winding.paths() > 1) {
-      refuse(winding.section(), "parallel-paths", "only `parallel-paths: 1`");
-    }
-    if (winding.phases() != CountField.FAULTY && winding.phases() != 3) {
-      refuse(winding.section(), "phases", "only `phases: 3`");
-    }
     if (via.count() > 1) {
       refuse(via.section(), "count", "only `count: 1`");
     }

@@ -80,6 +80,21 @@ public record Circuit(
   }
 
   /**
+   * The greatest voltage between any two terminals that a star point joins over that of a winding:
+   * with five phases not neighbours but phases 144° apart, {@code 2 cos π/10}.
+   */
+  public static double greatestShare(int phases, Connection connection) {
+    if (connection != Connection.STAR) {
+      return 1;
+    }
+    return switch (phases) {
+      case 2 -> Math.sqrt(2);
+      case 5 -> 2 * Math.cos(Math.PI / 10);
+      default -> Math.sqrt(3);
+    };
+  }
+
+  /**
    * Largest peak of a phase's voltage that a drive makes from a bus with centred modulation, of the
    * line's star: bus/√3 for three phases (textbook: space-vector modulation), bus / (2 cos π/2m)
    * for m odd, all of the bus where each winding has a full bridge.
