@@ -4,9 +4,10 @@ import java.util.ArrayList;
 import java.util.List;
 
 /**
- * One phase from its entry to its exit: coils and the links between them. A phase of one path leaves
- * out its leads and the copper that it shares with others; one of parallel paths takes in the copper
- * that joins them, from the place where its lead leaves to the place where its exit's does.
+ * One phase from its entry to its exit: coils and the links between them. A phase of one path
+ * leaves out its leads and the copper that it shares with others; one of parallel paths takes in
+ * the copper that joins them, from the place where its lead leaves to the place where its exit's
+ * does.
  *
  * @param steps the conductors in the order in which the phase current passes them, path by path
  * @param starts where in the steps each path begins; every path runs from the entry to the exit

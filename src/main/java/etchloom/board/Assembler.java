@@ -68,10 +68,7 @@ public final class Assembler {
     }
     RimBuilder.Result rim =
         RimBuilder.plan(
-            winding.get(),
-            spec.winding(),
-            spec.board().starPointOut(),
-            rimSize(coil.get()));
+            winding.get(), spec.winding(), spec.board().starPointOut(), rimSize(coil.get()));
     rim.refusal().ifPresent(r -> problems.add("rim", r.key(), r.message()));
     if (rim.planned().isEmpty()) {
       return Optional.empty();

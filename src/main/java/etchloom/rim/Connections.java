@@ -131,7 +131,9 @@ record Connections(List<List<Chain>> phases, List<Link> links) {
     int each = phases.size() / points.size();
     for (int i = 0; i < points.size(); i++) {
       List<Pin> ends =
-          phases.subList(i * each, (i + 1) * each).stream().flatMap(p -> lasts(p).stream()).toList();
+          phases.subList(i * each, (i + 1) * each).stream()
+              .flatMap(p -> lasts(p).stream())
+              .toList();
       String n = points.get(i);
       String what = points.size() > 1 ? "star point " + n : "star point";
       links.add(new Link("", ends, starPointOut ? Optional.of(n) : Optional.empty(), what));

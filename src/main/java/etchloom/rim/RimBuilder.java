@@ -99,11 +99,7 @@ public final class RimBuilder {
     for (boolean ccw : new boolean[] {true, false}) {
       Connections c =
           Connections.make(
-              winding,
-              scheme,
-              size::pinAngleRad,
-              m -> row.spot(m).at().angleRad(),
-              ccw);
+              winding, scheme, size::pinAngleRad, m -> row.spot(m).at().angleRad(), ccw);
       Optional<RimPlan> plan = RimPlan.make(size, row, c);
       if (plan.isPresent() && (best.isEmpty() || rings(plan) < rings(best))) {
         best = plan;
