@@ -195,7 +195,8 @@ public final class Assembler {
         spec.board().diameterMm() / 2,
         fab.edge().copperMm(),
         fab.edge().holeMm(),
-        spec.board().terminals());
+        spec.board().terminals(),
+        spec.board().tab());
   }
 
   private Assembly draw(
@@ -206,7 +207,8 @@ public final class Assembler {
     placer.place();
     Rim rim = planned.draw(copper, placer::joint, nets::of);
     List<MountingHole> holes = mountingHoles();
-    List<Path> profile = profile();
+    List<Path> profile = BoardEdge.of(spec.board());
+    new TerminalPlaces(spec, fab, problems).check(copper.joints(), holes);
     Mask mask = Mask.over(copper.joints(), holes, fab.mask().expansionMm());
     PlacedLegend legend =
         new LegendBuilder(spec, fab, copper.joints(), holes, mask.top()).build(draft);
@@ -242,15 +244,6 @@ public final class Assembler {
     Spec.Winding w = spec.winding();
     int delta = w.connection() == Spec.Connection.DELTA ? 1 : 0;
     return delta + w.phases() * (w.parallelPaths() - 1);
-  }
-
-  private List<Path> profile() {
-    List<Path> out = new ArrayList<>();
-    out.add(Path.circle(Point.ORIGIN, spec.board().diameterMm() / 2));
-    if (spec.board().boreMm() > 0) {
-      out.add(Path.circle(Point.ORIGIN, spec.board().boreMm() / 2));
-    }
-    return out;
   }
 
   private List<MountingHole> mountingHoles() {

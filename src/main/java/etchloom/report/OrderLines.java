@@ -68,7 +68,11 @@ public final class OrderLines {
 
   private static String outline(Spec.Board b) {
     String bore = b.boreMm() > 0 ? ", bore " + mm(b.boreMm()) : ", no bore";
-    return "round, " + mm(b.diameterMm()) + bore;
+    String tab =
+        b.tab()
+            .map(t -> ", tab of " + mm(t.widthMm()) + " standing out by " + mm(t.lengthMm()))
+            .orElse("");
+    return "round, " + mm(b.diameterMm()) + bore + tab;
   }
 
   private static String test(Spec.Winding w) {

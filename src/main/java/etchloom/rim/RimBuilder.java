@@ -80,17 +80,45 @@ public final class RimBuilder {
           size.spaceMm(),
           t.padMm());
     }
-    Optional<TerminalRow> row =
-        TerminalRow.place(marks, t.startRad(), t.pitchMm(), size.terminalReachMm());
+    Optional<Result> tooWide = tabWidth(size, marks);
+    if (tooWide.isPresent()) {
+      return tooWide.get();
+    }
+    Optional<TerminalRow> row = row(size, marks);
     if (row.isEmpty()) {
       return refuse(
           "board.terminals.pitch",
-          "a row of %d terminals %.3f mm apart is longer than the board is wide; a smaller pitch or"
-              + " a larger board.diameter would do",
+          "a row of %d terminals %.3f mm apart is longer than the board is wide; a smaller pitch, a"
+              + " larger board.diameter or a board.tab would do",
           marks.size(),
           t.pitchMm());
     }
     return plan(winding, scheme, size, row.get());
+  }
+
+  private static Optional<Result> tabWidth(RimSize size, List<String> marks) {
+    double width = size.tab().map(Spec.Tab::widthMm).orElse(Double.POSITIVE_INFINITY);
+    double pitch = size.terminals().pitchMm();
+    double needed = 2 * (TerminalRow.halfMm(marks, pitch) + size.terminalMarginMm());
+    return needed <= width + 1e-9
+        ? Optional.empty()
+        : Optional.of(
+            refuse(
+                "board.tab.width",
+                "a row of %d terminals %.3f mm apart needs a tab of %.3f mm; a wider board.tab.width"
+                    + " or a smaller board.terminals.pitch would do",
+                marks.size(),
+                pitch,
+                needed));
+  }
+
+  private static Optional<TerminalRow> row(RimSize size, List<String> marks) {
+    Spec.Terminals t = size.terminals();
+    double reach = size.boardRadiusMm() - size.terminalMarginMm();
+    return size.tab().isPresent()
+        ? Optional.of(
+            TerminalRow.at(marks, t.startRad(), t.pitchMm(), reach + size.tab().get().lengthMm()))
+        : TerminalRow.place(marks, t.startRad(), t.pitchMm(), reach);
   }
 
   private static Result plan(
@@ -139,6 +167,15 @@ public final class RimBuilder {
                   Locale.ROOT, "the terminals' pads begin at %.3f mm", least + size.spaceMm())
               : String.format(Locale.ROOT, "copper must end at %.3f mm", edge),
           2 * over + 0.01);
+    }
+    double leads = plan.leadsShortMm();
+    if (leads > 1e-9) {
+      return refuse(
+          "board.terminals.pitch",
+          "the terminals' leads converge towards the shaft and come %.3f mm too near to each other"
+              + " or to a pad; a larger board.terminals.pitch, a smaller rim.track or"
+              + " board.terminals.pad, or a shorter board.tab would do",
+          leads);
     }
     return new Result(Optional.of(new Planned(size, plan)), Optional.empty());
   }

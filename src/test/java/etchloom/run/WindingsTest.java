@@ -7,6 +7,8 @@ import etchloom.artwork.Artwork;
 import etchloom.artwork.Conductor;
 import etchloom.artwork.Joint;
 import etchloom.artwork.Phase;
+import etchloom.diagnostic.Diagnostic;
+import etchloom.diagnostic.Staged;
 import etchloom.proof.ProofExpectation;
 import etchloom.proof.ProofFinding;
 import etchloom.proof.ProofReport;
@@ -23,6 +25,7 @@ import org.junit.jupiter.params.provider.MethodSource;
 
 /** Every count of phases, every connection, paths in parallel: drawn, checked, read back. */
 class WindingsTest {
+  private static final String PADS = "{kind: pad, pitch: 4 mm, pad: 2.5 mm}";
   private static final String OUT = "star-point: terminal";
 
   /** A winding, its terminals in order, its pieces of copper, its closed circuits. */
@@ -48,6 +51,19 @@ class WindingsTest {
         Arguments.of(WindingSpecs.of(3, 18, 24, "delta").paths(3), "U1 V1 W1", 1, 7),
         Arguments.of(WindingSpecs.of(3, 12, 14, "open").paths(2), "U1 V1 W1 U2 V2 W2", 3, 3),
         Arguments.of(WindingSpecs.of(5, 20, 16, "star").paths(4), "U1 V1 W1 S1 T1", 1, 15),
+        Arguments.of(
+            WindingSpecs.of(3, 9, 12, "star")
+                .terminals(PADS)
+                .board("tab: {angle: 200 deg, width: 14 mm, length: 9 mm}"),
+            "U1 V1 W1",
+            1,
+            0),
+        Arguments.of(
+            WindingSpecs.of(5, 20, 18, "open").board("tab: {width: 36 mm, length: 5 mm}"),
+            "U1 V1 W1 S1 T1 U2 V2 W2 S2 T2",
+            5,
+            0),
+        Arguments.of(WindingSpecs.of(2, 8, 6, "open").terminals(PADS), "U1 V1 U2 V2", 2, 0),
         Arguments.of(WindingSpecs.of(6, 24, 20, "star").paths(2), "1U1 1V1 1W1 2U1 2V1 2W1", 2, 6));
   }
 
@@ -69,6 +85,38 @@ class WindingsTest {
     assertEquals(nets, r.nets());
     assertEquals(circuits, r.circuits());
     assertEquals(nets, art.joints().stream().map(Joint::net).distinct().count());
+  }
+
+  /** What clashes is refused, with all keys that would help. */
+  @ParameterizedTest
+  @MethodSource("clashes")
+  void clashIsRefusedByKey(WindingSpecs w, String key, String words) {
+    Staged<Drawn> staged = w.run();
+    assertTrue(staged.value().isEmpty());
+    Diagnostic d = staged.diagnostics().get(0);
+    assertEquals(key, d.key());
+    assertTrue(d.message().contains(words), d::message);
+  }
+
+  static Stream<Arguments> clashes() {
+    WindingSpecs star = WindingSpecs.of(3, 9, 12, "star");
+    String screws =
+        "holes: {count: 4, diameter: 3.2 mm, circle: 106 mm, start: %s, keep-out: 6.4 mm}";
+    return Stream.of(
+        Arguments.of(
+            star.board(screws.formatted("90 deg")), "board.terminals.start", "board.holes.start"),
+        Arguments.of(
+            star.board("tab: {width: 8 mm, length: 6 mm}"),
+            "board.tab.width",
+            "needs a tab of 8.400 mm"),
+        Arguments.of(
+            star.board("tab: {width: 9 mm, length: 300 mm}"), "board.terminals.pitch", "converge"),
+        Arguments.of(star.paths(3).rotor("outer-diameter: 112 mm"), "rotor.outer-diameter", "V1"),
+        Arguments.of(
+            WindingSpecs.of(3, 9, 8, "star").paths(3), "winding.parallel-paths", "paths are: 1"),
+        Arguments.of(
+            WindingSpecs.of(3, 12, 10, "star").paths(4), "winding.parallel-paths", "are: 1, 2"),
+        Arguments.of(WindingSpecs.of(5, 15, 10, "star"), "winding.coils", "5-phase"));
   }
 
   /** Each path passes each spiral of each of its coils once, end to end, in the coil's sense. */
