@@ -16,6 +16,7 @@ import java.util.ArrayList;
 import java.util.List;
 import java.util.Locale;
 import java.util.Optional;
+import java.util.SortedSet;
 import java.util.TreeMap;
 import java.util.TreeSet;
 
@@ -60,7 +61,7 @@ final class LayerProof {
   }
 
   private void patch(Patch p) {
-    TreeSet<Integer> touched = changes.orElseThrow().touched(p);
+    SortedSet<Integer> touched = changes.orElseThrow().touched(p);
     String where = touched.isEmpty() ? "" : " at " + words(touched);
     String size = String.format(Locale.ROOT, "%.4f mm2", p.areaMm2());
     if (p.extra()) {
@@ -99,14 +100,14 @@ final class LayerProof {
     TreeSet<Integer> told = new TreeSet<>();
     if (changes.isPresent()) {
       for (Patch p : changes.get().patches()) {
-        TreeSet<Integer> touched = p.extra() ? changes.get().touched(p) : new TreeSet<>();
+        SortedSet<Integer> touched = p.extra() ? changes.get().touched(p) : new TreeSet<>();
         if (touched.size() > 1) {
           add(ProofNames.SHORT, p.at(), "this joins " + words(touched));
           told.addAll(touched);
         }
       }
     }
-    for (TreeSet<Integer> on : groupsOn.values()) {
+    for (SortedSet<Integer> on : groupsOn.values()) {
       if (on.size() > 1 && !told.containsAll(on)) {
         add(ProofNames.SHORT, closest(on), "one piece of copper joins " + words(on));
       }
@@ -114,7 +115,7 @@ final class LayerProof {
   }
 
   /** Where the design's copper of two groups comes nearest. */
-  private Point closest(TreeSet<Integer> some) {
+  private Point closest(SortedSet<Integer> some) {
     List<DrawnPiece> mine = groups.pieces().stream().filter(p -> some.contains(p.tag())).toList();
     Nearest best = null;
     double least = Double.POSITIVE_INFINITY;
@@ -197,7 +198,7 @@ final class LayerProof {
                 .flatMap(c -> c.closing(copper, loop.ring(), loop.at()))
                 .map(Patch::at)
                 .orElse(loop.at());
-        TreeSet<Integer> on = groupsOn.getOrDefault(loop.island(), new TreeSet<>());
+        SortedSet<Integer> on = groupsOn.getOrDefault(loop.island(), new TreeSet<>());
         String size = String.format(Locale.ROOT, "%.3f mm2", loop.areaMm2());
         add(ProofNames.LOOP, at, "copper encloses a gap of " + size + ": " + words(on));
       }
@@ -227,7 +228,7 @@ final class LayerProof {
     }
   }
 
-  private String words(TreeSet<Integer> some) {
+  private String words(SortedSet<Integer> some) {
     List<String> list = some.stream().limit(3).map(g -> groups.group(g).what()).toList();
     String more = some.size() > 3 ? " and " + (some.size() - 3) + " more" : "";
     return String.join(" | ", list) + more;

@@ -8,6 +8,8 @@ import etchloom.proof.copper.PieceMatch;
 import etchloom.proof.image.DrillFile;
 import etchloom.proof.image.LayerImage;
 import etchloom.proof.image.Plating;
+import etchloom.proof.ohm.CopperBuild;
+import etchloom.proof.ohm.FileResistance;
 import etchloom.proof.plane.Figure;
 import etchloom.proof.plane.OutOfRange;
 import java.util.ArrayList;
@@ -17,6 +19,7 @@ import java.util.Optional;
 import java.util.OptionalDouble;
 import java.util.OptionalInt;
 import java.util.SortedMap;
+import java.util.SortedSet;
 import java.util.TreeMap;
 import java.util.TreeSet;
 
@@ -48,6 +51,35 @@ public final class Prover {
    */
   public static ProofReport prove(SortedMap<String, byte[]> files, ProofExpectation expected) {
     return new Prover(files, expected).prove();
+  }
+
+  /**
+   * The resistances between the terminals, from the copper and drill files of a set alone.
+   *
+   * @throws IllegalArgumentException when a copper file is missing or cannot be read
+   */
+  public static FileResistance.Ohms ohms(
+      SortedMap<String, byte[]> files, ProofExpectation expected, CopperBuild build) {
+    Prover p = new Prover(files, expected);
+    if (p.set.copper().size() < expected.layers()) {
+      throw new IllegalArgumentException("not all copper could be read: " + p.out.sorted());
+    }
+    List<DrillFile> drills =
+        p.set.gerberDrills().isEmpty() ? p.set.ncDrills() : p.set.gerberDrills();
+    CopperBuilder builder = new CopperBuilder();
+    List<LayerImage> copper = List.copyOf(p.set.copper().values());
+    Connectivity net =
+        new Connectivity(
+            copper.stream().map(i -> builder.build(i.objects())).toList(),
+            DrilledHoles.of(drills, expected.layers()));
+    return FileResistance.between(
+        copper,
+        net,
+        build,
+        expected.pads().stream()
+            .filter(ProofExpectation.Pad::terminal)
+            .map(t -> new FileResistance.Terminal(t.mark(), t.fromLayer(), t.at()))
+            .toList());
   }
 
   private ProofReport prove() {
@@ -102,8 +134,8 @@ public final class Prover {
     for (int l = 1; l <= expected.layers(); l++) {
       groups.add(new LayerGroups(expected, l));
     }
-    TreeSet<Integer> same = asDesigned(groups);
-    TreeSet<Integer> swapped = swapped(groups, same);
+    SortedSet<Integer> same = asDesigned(groups);
+    SortedSet<Integer> swapped = swapped(groups, same);
     for (LayerGroups g : groups) {
       if (!swapped.contains(g.layer)) {
         LayerProof proof = new LayerProof(g, set.copper().get(g.layer), net, out);
@@ -125,7 +157,7 @@ public final class Prover {
   }
 
   /** Layers whose file draws the design to the last piece. */
-  private TreeSet<Integer> asDesigned(List<LayerGroups> groups) {
+  private SortedSet<Integer> asDesigned(List<LayerGroups> groups) {
     TreeSet<Integer> found = new TreeSet<>();
     for (LayerGroups g : groups) {
       if (draws(g.layer, g)) {
@@ -136,7 +168,7 @@ public final class Prover {
   }
 
   /** Layers whose file draws another layer of the design to the last piece. */
-  private TreeSet<Integer> swapped(List<LayerGroups> groups, TreeSet<Integer> same) {
+  private SortedSet<Integer> swapped(List<LayerGroups> groups, SortedSet<Integer> same) {
     TreeSet<Integer> found = new TreeSet<>();
     for (LayerGroups g : groups) {
       for (LayerGroups other : groups) {

@@ -62,7 +62,8 @@ final class FolderLock implements AutoCloseable {
   }
 
   private static boolean named(Path file, FileChannel channel) throws IOException {
-    long own = 1 + Math.floorMod(ProcessHandle.current().pid() * 7919 + System.nanoTime(), LENGTHS);
+    long own =
+        1L + Math.floorMod(ProcessHandle.current().pid() * 7919 + System.nanoTime(), LENGTHS);
     channel.truncate(0);
     channel.write(ByteBuffer.allocate(1), own - 1);
     try {

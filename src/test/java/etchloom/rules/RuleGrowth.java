@@ -1,8 +1,10 @@
 package etchloom.rules;
 
+import com.sun.management.OperatingSystemMXBean;
 import etchloom.artwork.Artwork;
 import etchloom.spec.FabRules;
 import etchloom.spec.Spec;
+import java.lang.management.ManagementFactory;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Locale;
@@ -11,11 +13,13 @@ import java.util.OptionalDouble;
 
 /**
  * Prints the time of the rule check against the number of segments, at 1, 2, 4 and 8 times the
- * turns, and the exponent fitted to all of them; run its main method. The best of many runs is
- * taken, so that a busy machine and the compiler's warming up do not count.
+ * turns, and the exponent fitted to all of them; run its main method. It is the time of all
+ * processors together, and the best of several batches, so that a busy machine and the compiler's
+ * warming up hardly count.
  */
 final class RuleGrowth {
-  private static final int RUNS = 15;
+  private static final int BATCHES = 6;
+  private static final int BATCH = 5;
 
   private RuleGrowth() {}
 
@@ -41,10 +45,12 @@ final class RuleGrowth {
       FabRules fab =
           Boards.fab(List.of(Boards.row(1, true, pitch / 2), Boards.row(1, false, pitch / 2)));
       double best = Double.POSITIVE_INFINITY;
-      for (int i = 0; i < RUNS; i++) {
-        long start = System.nanoTime();
-        RuleCheck.check(a, spec, fab, RuleContext.NONE);
-        best = Math.min(best, (System.nanoTime() - start) / 1e6);
+      for (int i = 0; i < BATCHES; i++) {
+        long start = cpuNanos();
+        for (int run = 0; run < BATCH; run++) {
+          RuleCheck.check(a, spec, fab, RuleContext.NONE);
+        }
+        best = Math.min(best, (cpuNanos() - start) / 1e6 / BATCH);
       }
       int segments = a.conductors().stream().mapToInt(c -> c.path().segments().size()).sum();
       out.add(new Point(8 * k, segments, best));
@@ -52,10 +58,18 @@ final class RuleGrowth {
     return out;
   }
 
+  private static long cpuNanos() {
+    return ManagementFactory.getPlatformMXBean(OperatingSystemMXBean.class).getProcessCpuTime();
+  }
+
   private static void print(List<Point> points) {
     for (Point p : points) {
       System.out.printf(
-          Locale.ROOT, "%6d turns %8d segments %8.1f ms%n", p.turns(), p.segments(), p.ms());
+          Locale.ROOT,
+          "%6d turns %8d segments %8.1f ms of processor%n",
+          p.turns(),
+          p.segments(),
+          p.ms());
     }
     System.out.printf(Locale.ROOT, "time grows as N^%.2f%n", exponent(points));
   }

@@ -30,11 +30,11 @@ final class SmallDisk implements AutoCloseable {
     return path;
   }
 
-  void readOnly() throws Exception {
+  void readOnly() {
     assumeTrue(run("mount", "-o", "remount,ro", path.toString()), "cannot make it read-only");
   }
 
-  private static boolean run(String... command) throws InterruptedException {
+  private static boolean run(String... command) {
     try {
       Process p =
           new ProcessBuilder(List.of(command))
@@ -42,13 +42,16 @@ final class SmallDisk implements AutoCloseable {
               .redirectOutput(ProcessBuilder.Redirect.DISCARD)
               .start();
       return p.waitFor(10, TimeUnit.SECONDS) && p.exitValue() == 0;
+    } catch (InterruptedException e) {
+      Thread.currentThread().interrupt();
+      return false;
     } catch (IOException e) {
       return false; // there is no such program
     }
   }
 
   @Override
-  public void close() throws Exception {
+  public void close() {
     run("umount", path.toString());
   }
 }

@@ -25,7 +25,7 @@ final class PairSum {
   private static final double APART = 2 * 2;
 
   /** Sideways change over mean distance up to which bars count as parallel. */
-  private static final double PARALLEL = 0.2;
+  private static final double PARALLEL = 0.01;
 
   /** Length of the shorter bar over the distance from which the closed form is the cheaper way. */
   private static final double CLOSED_FORM_FROM = 1.2;

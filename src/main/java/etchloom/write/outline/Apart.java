@@ -41,7 +41,8 @@ final class Apart {
     Point first = side(s, half, out);
     Point second = side(s.reversed(), half, out);
     out.add(1, new Arc(out.get(0).end(), second, s.end(), true));
-    out.add(new Arc(out.get(2).end(), first, s.start(), true));
+    out.add(
+        new Arc(/* start= */ out.get(2).end(), /* end= */ first, /* centre= */ s.start(), true));
     return new Path(out);
   }
 

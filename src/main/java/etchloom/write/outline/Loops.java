@@ -30,7 +30,7 @@ final class Loops {
   private Point lastEnd = new Point(Double.NaN, Double.NaN);
 
   void add(Edge e) {
-    int from = e.start == lastEnd ? ends.get(ends.size() - 1) : corner(e.start);
+    int from = e.start.equals(lastEnd) ? ends.get(ends.size() - 1) : corner(e.start);
     int to = corner(e.end);
     if (from == to || known(from, to, e)) {
       return;

@@ -87,7 +87,7 @@ final class Sides {
     loose.set(later, loose.get(later) || a.isArc() || b.isArc());
     boolean leftTurn = a.end.minus(corner).cross(b.start.minus(corner)) > 0;
     if (leftTurn) {
-      out.add(Edge.arc(a.shape, a.end, b.start, corner, true));
+      out.add(Edge.arc(a.shape, /* start= */ a.end, /* end= */ b.start, corner, true));
       return;
     }
     // Inside a corner the sides run into each other: both end where they cross.

@@ -288,9 +288,7 @@ class MachineTest {
 
   @Test
   void withoutDuty_whatNeedsNone() {
-    String text =
-        new String(
-            etchloom.spec.Templates.bytes("filter-wheel"), java.nio.charset.StandardCharsets.UTF_8);
+    String text = TestMachine.text("filter-wheel");
     String duty = text.substring(text.indexOf("\nduty:"));
     MachineFigures f = TestMachine.of("filter-wheel", plus(FEW, duty, "\n")).figures();
     assertTrue(f.emf().isPresent() && f.torque().isPresent());
@@ -327,7 +325,7 @@ class MachineTest {
   @ParameterizedTest
   @ValueSource(strings = {"filter-wheel", "dosing-pump", "reaction-wheel", "wind-logger"})
   void templates_sameAgainAndFinite(String template) {
-    TestMachine m = TestMachine.of(template, FEW);
+    TestMachine m = TestMachine.template(template);
     MachineFigures f = m.figures();
     assertEquals(f, m.figures());
     finite(f, template);
