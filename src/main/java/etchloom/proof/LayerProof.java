@@ -10,9 +10,11 @@ import etchloom.proof.ProofExpectation.Track;
 import etchloom.proof.copper.Connectivity;
 import etchloom.proof.copper.CopperDifference.Patch;
 import etchloom.proof.copper.DrawnPiece;
+import etchloom.proof.image.DrawnObject;
 import etchloom.proof.image.LayerImage;
 import etchloom.proof.plane.Figure;
 import java.util.ArrayList;
+import java.util.Comparator;
 import java.util.List;
 import java.util.Locale;
 import java.util.Optional;
@@ -205,11 +207,40 @@ final class LayerProof {
     }
   }
 
+  /** Whether tracks are called tracks, and pads what they are for. */
+  void functions() {
+    TreeSet<Point> terminals = new TreeSet<>(BY_PLACE);
+    for (Group g : groups.groups()) {
+      g.pads().stream().map(groups::pad).filter(Pad::terminal).forEach(p -> terminals.add(p.at()));
+    }
+    for (DrawnObject o : image.objects()) {
+      List<String> wanted =
+          !(o instanceof DrawnObject.Flash f)
+              ? List.of("Conductor")
+              : terminals.contains(f.at())
+                  ? List.of("ComponentPad", "SMDPad")
+                  : List.of("ViaPad", "Conductor");
+      if (!wanted.contains(o.attributes().function())) {
+        String is = o.attributes().function().isEmpty() ? "nothing" : o.attributes().function();
+        out.add(
+            ProofNames.FUNCTION,
+            image.fileName(),
+            o.line(),
+            groups.layer,
+            SheetProof.place(o),
+            "this is called " + is + ", it is " + String.join(" or ", wanted));
+      }
+    }
+  }
+
+  private static final Comparator<Point> BY_PLACE =
+      Comparator.comparingDouble(Point::x).thenComparingDouble(Point::y);
+
   /** Whether a piece of the copper carries another net's name than the design's. */
   void nets() {
-    for (var o : image.objects()) {
+    for (DrawnObject o : image.objects()) {
       List<String> names = o.attributes().nets();
-      Point at = o.match(s -> s.path().start(), f -> f.at(), r -> r.contours().get(0).start());
+      Point at = SheetProof.place(o);
       TreeSet<String> wanted = new TreeSet<>();
       for (int i : copper.islandsWithin(Nm.of(at.x()), Nm.of(at.y()), 2)) {
         groupsOn.getOrDefault(i, new TreeSet<>()).forEach(g -> wanted.add(groups.group(g).net()));

@@ -9,7 +9,6 @@ import etchloom.proof.image.DrillFile;
 import etchloom.proof.image.LayerImage;
 import etchloom.proof.image.Plating;
 import etchloom.proof.ohm.CopperBuild;
-import etchloom.proof.ohm.FileResistance;
 import etchloom.proof.plane.Figure;
 import etchloom.proof.plane.OutOfRange;
 import java.util.ArrayList;
@@ -38,6 +37,7 @@ public final class Prover {
   private final Findings out = new Findings();
   private final SetFiles set;
   private final SortedMap<String, byte[]> files;
+  private Optional<ResistanceProof> reported = Optional.empty();
   private OptionalDouble areaDifferenceMm2 = OptionalDouble.empty();
 
   private Prover(SortedMap<String, byte[]> files, ProofExpectation expected) {
@@ -54,32 +54,19 @@ public final class Prover {
   }
 
   /**
-   * The resistances between the terminals, from the copper and drill files of a set alone.
+   * The same, and the resistances between the terminals from the copper of the files against those
+   * reported: a finding where they differ by more than 1 %.
    *
-   * @throws IllegalArgumentException when a copper file is missing or cannot be read
+   * @param terminalOhm by pairs of marks, {@code U1-V1}, at 20 °C
    */
-  public static FileResistance.Ohms ohms(
-      SortedMap<String, byte[]> files, ProofExpectation expected, CopperBuild build) {
+  public static ProofReport prove(
+      SortedMap<String, byte[]> files,
+      ProofExpectation expected,
+      CopperBuild build,
+      SortedMap<String, Double> terminalOhm) {
     Prover p = new Prover(files, expected);
-    if (p.set.copper().size() < expected.layers()) {
-      throw new IllegalArgumentException("not all copper could be read: " + p.out.sorted());
-    }
-    List<DrillFile> drills =
-        p.set.gerberDrills().isEmpty() ? p.set.ncDrills() : p.set.gerberDrills();
-    CopperBuilder builder = new CopperBuilder();
-    List<LayerImage> copper = List.copyOf(p.set.copper().values());
-    Connectivity net =
-        new Connectivity(
-            copper.stream().map(i -> builder.build(i.objects())).toList(),
-            DrilledHoles.of(drills, expected.layers()));
-    return FileResistance.between(
-        copper,
-        net,
-        build,
-        expected.pads().stream()
-            .filter(ProofExpectation.Pad::terminal)
-            .map(t -> new FileResistance.Terminal(t.mark(), t.fromLayer(), t.at()))
-            .toList());
+    p.reported = Optional.of(new ResistanceProof(build, terminalOhm, p.out));
+    return p.prove();
   }
 
   private ProofReport prove() {
@@ -141,6 +128,7 @@ public final class Prover {
         LayerProof proof = new LayerProof(g, set.copper().get(g.layer), net, out);
         proof.check(same.contains(g.layer));
         proof.nets();
+        proof.functions();
       }
     }
     NetProof whole = new NetProof(expected, net, out);
@@ -149,6 +137,7 @@ public final class Prover {
     }
     whole.circuits();
     whole.terminals(set.copper().values());
+    reported.ifPresent(r -> r.check(List.copyOf(set.copper().values()), net, expected));
     PictureProof pictures = new PictureProof(set, holes, out);
     set.drawing().ifPresent(pictures::drawing);
     set.picture().ifPresent(pictures::picture);
