@@ -12,6 +12,8 @@ import etchloom.spec.Spec.Connection;
  *
  * @param windingOhm20 one winding with its leads, at 20 °C
  * @param windingHenry synchronous: self less mutual
+ * @param rippleHenry what the pulses of a drive meet in one winding, see {@link
+ *     etchloom.electric.machine.drive.Ripple}
  * @param zeroHenry what a current equal in all windings meets: self plus all mutuals
  */
 public record Circuit(
@@ -20,7 +22,21 @@ public record Circuit(
     int polePairs,
     double windingOhm20,
     double windingHenry,
+    double rippleHenry,
     double zeroHenry) {
+
+  /** A machine whose pulses meet the synchronous inductance, as with three phases in star. */
+  public Circuit(
+      int phases,
+      Connection connection,
+      int polePairs,
+      double windingOhm20,
+      double windingHenry,
+      double zeroHenry) {
+    this(
+        phases, connection, polePairs, windingOhm20, windingHenry, windingHenry, zeroHenry);
+  }
+
   public Circuit {
     if (!(windingOhm20 > 0 && windingOhm20 < Double.POSITIVE_INFINITY)) {
       throw new IllegalArgumentException("a winding of " + windingOhm20 + " ohm");
@@ -52,6 +68,10 @@ public record Circuit(
 
   public double lineHenry() {
     return delta() ? windingHenry / 3 : windingHenry;
+  }
+
+  public double lineRippleHenry() {
+    return delta() ? rippleHenry / 3 : rippleHenry;
   }
 
   /** Current in a terminal for a current in a winding. */
