@@ -19,15 +19,15 @@ final class CoilPlacer {
   private final CoilPlan plan;
   private final Winding winding;
   private final CopperBuilder copper;
-  private final boolean netPerPhase;
+  private final NetNames nets;
   private final List<Coil> coils = new ArrayList<>();
 
-  CoilPlacer(Spec spec, CoilPlan plan, Winding winding, CopperBuilder copper, boolean netPerPhase) {
+  CoilPlacer(Spec spec, CoilPlan plan, Winding winding, CopperBuilder copper, NetNames nets) {
     this.spec = spec;
     this.plan = plan;
     this.winding = winding;
     this.copper = copper;
-    this.netPerPhase = netPerPhase;
+    this.nets = nets;
   }
 
   void place() {
@@ -46,7 +46,7 @@ final class CoilPlacer {
   private void place(PhaseCoil c) {
     double axis = 2 * Math.PI * (c.coil() - 1) / winding.coils();
     String phase = winding.marks().get(c.phase());
-    String net = netPerPhase ? phase : "WINDING";
+    String net = nets.of(c.coil());
     List<Integer> nodes = new ArrayList<>();
     for (int j = 0; j < plan.nodeAnglesRad().size(); j++) {
       nodes.add(node(c.coil(), j, axis, net));

@@ -47,15 +47,20 @@ final class Potentials {
     }
   }
 
+  /** Path by path: where paths are in parallel, the voltage lies along each of them. */
   private void follow(Artwork artwork, int k) {
+    artwork.phases().get(k).paths().forEach(path -> follow(artwork, k, path));
+  }
+
+  private void follow(Artwork artwork, int k, List<Phase.Step> path) {
     List<Conductor> all = artwork.conductors();
     double whole = 0;
-    for (Phase.Step s : artwork.phases().get(k).steps()) {
+    for (Phase.Step s : path) {
       lengthMm[s.conductor()] = all.get(s.conductor()).path().lengthMm();
       whole += lengthMm[s.conductor()];
     }
     double at = 0;
-    for (Phase.Step s : artwork.phases().get(k).steps()) {
+    for (Phase.Step s : path) {
       Conductor c = all.get(s.conductor());
       double next = at + lengthMm[c.id()];
       if (c.what().kind() == Feature.Kind.SPIRAL) {

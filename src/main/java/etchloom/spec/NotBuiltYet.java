@@ -1,7 +1,6 @@
 package etchloom.spec;
 
 import etchloom.spec.Spec.CoilOutline;
-import etchloom.spec.Spec.TerminalKind;
 import java.util.Optional;
 
 /**
@@ -11,7 +10,7 @@ import java.util.Optional;
 final class NotBuiltYet {
   private NotBuiltYet() {}
 
-  static void check(WindingDraft winding, CoilDraft coil, ViaDraft via, BoardDraft board) {
+  static void check(CoilDraft coil, ViaDraft via) {
     Optional<CoilOutline> outline = coil.outline();
     if (outline.isPresent() && outline.get() != CoilOutline.WEDGE) {
       refuse(coil.section(), "outline", "only `outline: wedge`");
@@ -22,21 +21,8 @@ final class NotBuiltYet {
     if (coil.taper()) {
       refuse(coil.section(), "taper", "only `taper: off`");
     }
-    if (winding.paths() > 1) {
-      refuse(winding.section(), "parallel-paths", "only `parallel-paths: 1`");
-    }
-    if (winding.phases() != CountField.FAULTY && winding.phases() != 3) {
-      refuse(winding.section(), "phases", "only `phases: 3`");
-    }
     if (via.count() > 1) {
       refuse(via.section(), "count", "only `count: 1`");
-    }
-    if (board.tab().isPresent()) {
-      refuse(board.section(), "tab", "a round board without a tab");
-    }
-    TerminalsDraft terminals = board.terminals();
-    if (terminals.kind() == TerminalKind.PAD) {
-      refuse(terminals.section().orElseThrow(), "kind", "only `kind: hole`");
     }
   }
 

@@ -9,10 +9,16 @@ import etchloom.artwork.Coil;
 import etchloom.artwork.Conductor;
 import etchloom.artwork.Phase;
 import etchloom.diagnostic.Diagnostic;
+import etchloom.proof.ProofExpectation;
+import etchloom.proof.ProofFinding;
+import etchloom.proof.ProofReport;
+import etchloom.proof.Prover;
 import etchloom.rules.Finding;
 import etchloom.run.Drawn;
 import etchloom.spec.Spec;
 import etchloom.testing.RandomSpecs;
+import etchloom.testing.ToyOrders;
+import etchloom.write.LayerSet;
 import java.io.IOException;
 import java.nio.file.Files;
 import java.nio.file.Path;
@@ -61,6 +67,45 @@ class RandomSpecsTest {
     int atLeast = SEEDS / 4;
     assertTrue(drawn >= atLeast, drawn + " of " + SEEDS + " drawn; refused: " + refusals);
     System.out.println(drawn + " of " + SEEDS + " drawn; refused: " + refusals);
+  }
+
+  /**
+   * Every phase count and parallel paths, tabs, pads and screws: clean and proved, or refused by
+   * key. Only screws that meet rings or leads are left to the rule check.
+   */
+  @Test
+  void everyWindingIsDrawnCleanAndProvedOrRefusedByKey() throws IOException {
+    int seeds = SEEDS / 3;
+    int drawn = 0;
+    Map<String, Integer> refusals = new TreeMap<>();
+    for (long seed = 0; seed < seeds; seed++) {
+      String yaml = RandomSpecs.wide(seed);
+      String name = "wide seed " + seed + "\n" + yaml;
+      Path spec = Files.writeString(folder.resolve("w" + seed + ".yaml"), yaml);
+      try {
+        InputFiles.Inputs in = InputFiles.read(spec.toString(), Optional.empty());
+        Drawn d = Attempt.of(in, false).drawn();
+        List<Finding> others =
+            d.rules().findings().stream()
+                .filter(f -> !yaml.contains("holes:") || !f.toString().contains("mounting hole"))
+                .toList();
+        assertEquals(List.of(), others, name);
+        everyNumberIsFinite(d, name);
+        Artwork art = d.assembly().artwork().onGrid();
+        ProofReport r =
+            Prover.prove(LayerSet.write(art, ToyOrders.plain(1.2)), ProofExpectation.of(art));
+        assertEquals(List.of(), r.findings().stream().map(ProofFinding::text).toList(), name);
+        drawn++;
+      } catch (BadInput e) {
+        for (Diagnostic x : e.diagnostics()) {
+          assertFalse(x.key().isEmpty(), () -> name + x);
+          refusals.merge(x.key(), 1, Integer::sum);
+        }
+      }
+    }
+    String all = drawn + " of " + seeds + " windings drawn; refused: " + refusals;
+    assertTrue(drawn >= seeds / 3, all);
+    System.out.println(all);
   }
 
   /** Each phase passes each spiral of each of its coils once, end to end, in the coil's sense. */
