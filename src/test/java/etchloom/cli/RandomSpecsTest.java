@@ -35,6 +35,9 @@ import org.junit.jupiter.api.io.TempDir;
 class RandomSpecsTest {
   private static final int SEEDS = Integer.getInteger("etchloom.seeds", 300);
 
+  /** Each so many seeds the files are written and read back too. */
+  private static final int PROVED = 3;
+
   @TempDir Path folder;
 
   @Test
@@ -53,8 +56,11 @@ class RandomSpecsTest {
         everyPhaseIsOneChain(d, name);
         everyNumberIsFinite(d, name);
         theSpaceIsWhatWasAskedFor(d, name);
-        assertTrue(
-            SetFiles.of(attempt, Optional.empty()).results().proof().orElseThrow().passed(), name);
+        if (seed % PROVED == 0) {
+          assertTrue(
+              SetFiles.of(attempt, Optional.empty()).results().proof().orElseThrow().passed(),
+              name);
+        }
         drawn++;
       } catch (BadInput e) {
         for (Diagnostic x : e.diagnostics()) {
