@@ -18,6 +18,7 @@ import etchloom.rim.RimSize;
 import etchloom.spec.FabRules;
 import etchloom.spec.Positions;
 import etchloom.spec.Spec;
+import etchloom.winding.ParallelPaths;
 import etchloom.winding.StarOfSlots;
 import etchloom.winding.Winding;
 import java.util.ArrayList;
@@ -66,8 +67,7 @@ public final class Assembler {
       return Optional.empty();
     }
     RimBuilder.Result rim =
-        RimBuilder.plan(
-            winding.get(), spec.winding().connection(), spec.board().starPointOut(), rimSize());
+        RimBuilder.plan(winding.get(), spec.winding(), spec.board().starPointOut(), rimSize());
     rim.refusal().ifPresent(r -> problems.add("rim", r.key(), r.message()));
     if (rim.planned().isEmpty()) {
       return Optional.empty();
@@ -103,7 +103,26 @@ public final class Assembler {
               + "-phase winding; nearest: "
               + near);
     }
+    w.ifPresent(this::paths);
     return w;
+  }
+
+  private void paths(Winding w) {
+    int paths = spec.winding().parallelPaths();
+    if (!ParallelPaths.equal(w, paths)) {
+      List<Integer> possible = ParallelPaths.possible(w);
+      problems.add(
+          "paths",
+          "winding.parallel-paths",
+          paths
+              + " paths would not carry the same EMF and drive currents through each other; with "
+              + w.coils()
+              + " coils and "
+              + w.poles()
+              + " poles equal paths are: "
+              + String.join(", ", possible.stream().map(String::valueOf).toList()),
+          "`parallel-paths: " + possible.get(possible.size() - 1) + "`");
+    }
   }
 
   private CoilSize coilSize() {
@@ -202,18 +221,20 @@ public final class Assembler {
         spec.board().diameterMm() / 2,
         fab.edge().copperMm(),
         fab.edge().holeMm(),
-        spec.board().terminals());
+        spec.board().terminals(),
+        spec.board().tab());
   }
 
   private Assembly draw(
       Stackup stackup, Winding winding, CoilPlan coil, RimBuilder.Planned planned) {
-    boolean open = spec.winding().connection() == Spec.Connection.OPEN;
+    NetNames nets = new NetNames(winding, spec.winding().connection());
     CopperBuilder copper = new CopperBuilder();
-    CoilPlacer placer = new CoilPlacer(spec, coil, winding, copper, open);
+    CoilPlacer placer = new CoilPlacer(spec, coil, winding, copper, nets);
     placer.place();
-    Rim rim = planned.draw(copper, placer::joint, phase -> open ? phase : "WINDING");
+    Rim rim = planned.draw(copper, placer::joint, nets::of);
     List<MountingHole> holes = mountingHoles();
-    List<Path> profile = profile();
+    List<Path> profile = BoardEdge.of(spec.board());
+    new TerminalPlaces(spec, fab, problems).check(copper.joints(), holes);
     Mask mask = Mask.over(copper.joints(), holes, fab.mask().expansionMm());
     PlacedLegend legend =
         new LegendBuilder(spec, fab, copper.joints(), holes, mask.top()).build(draft);
@@ -244,18 +265,14 @@ public final class Assembler {
     return new Assembly(art, winding, rim);
   }
 
-  /** A delta closes one circuit; rows of vias and layers side by side close theirs. */
+  /**
+   * A delta closes one circuit; each path beside the first closes one more in its phase; rows of
+   * vias and layers side by side close theirs.
+   */
   private int circuits(CopperBuilder copper) {
-    return copper.circuits() + (spec.winding().connection() == Spec.Connection.DELTA ? 1 : 0);
-  }
-
-  private List<Path> profile() {
-    List<Path> out = new ArrayList<>();
-    out.add(Path.circle(Point.ORIGIN, spec.board().diameterMm() / 2));
-    if (spec.board().boreMm() > 0) {
-      out.add(Path.circle(Point.ORIGIN, spec.board().boreMm() / 2));
-    }
-    return out;
+    Spec.Winding w = spec.winding();
+    int delta = w.connection() == Spec.Connection.DELTA ? 1 : 0;
+    return copper.circuits() + delta + w.phases() * (w.parallelPaths() - 1);
   }
 
   private List<MountingHole> mountingHoles() {

@@ -24,15 +24,15 @@ final class CoilPlacer {
   private final CoilPlan plan;
   private final Winding winding;
   private final CopperBuilder copper;
-  private final boolean netPerPhase;
+  private final NetNames nets;
   private final List<Coil> coils = new ArrayList<>();
 
-  CoilPlacer(Spec spec, CoilPlan plan, Winding winding, CopperBuilder copper, boolean netPerPhase) {
+  CoilPlacer(Spec spec, CoilPlan plan, Winding winding, CopperBuilder copper, NetNames nets) {
     this.spec = spec;
     this.plan = plan;
     this.winding = winding;
     this.copper = copper;
-    this.netPerPhase = netPerPhase;
+    this.nets = nets;
   }
 
   void place() {
@@ -51,7 +51,7 @@ final class CoilPlacer {
   private void place(PhaseCoil c) {
     double axis = 2 * Math.PI * (c.coil() - 1) / winding.coils();
     String phase = winding.marks().get(c.phase());
-    String net = netPerPhase ? phase : "WINDING";
+    String net = nets.of(c.coil());
     Placed placed = new Placed(c.coil(), axis, phase, net);
     for (int j = 0; j < plan.nodes().size(); j++) {
       boolean bare = j == 0 && !plan.parallel();

@@ -10,8 +10,10 @@ import java.util.ArrayDeque;
 import java.util.ArrayList;
 import java.util.Deque;
 import java.util.HashMap;
+import java.util.LinkedHashSet;
 import java.util.List;
 import java.util.Map;
+import java.util.Set;
 
 /** Follows each phase from its entry to its exit, through its coils and the links between them. */
 final class PhaseTracer {
@@ -39,21 +41,64 @@ final class PhaseTracer {
   }
 
   private Phase trace(Rim.PhaseChain chain) {
-    List<Phase.Step> steps = new ArrayList<>();
-    int entry = -1;
-    int exit = -1;
-    for (int number : chain.coils()) {
-      Coil c = coils.get(number - 1);
-      int in = c.sign() > 0 ? c.startJoint() : c.finishJoint();
-      if (exit < 0) {
-        entry = in;
-      } else {
-        link(exit, in, steps);
-      }
-      through(c, steps);
-      exit = c.sign() > 0 ? c.finishJoint() : c.startJoint();
+    List<List<Integer>> paths = chain.paths();
+    int entry = entry(paths.get(0).get(0));
+    int exit = exit(last(paths.get(0)));
+    if (paths.size() > 1) {
+      entry = gathering(entry);
+      exit = gathering(exit);
     }
-    return new Phase(chain.phase(), entry, exit, steps);
+    List<Phase.Step> steps = new ArrayList<>();
+    List<Integer> starts = new ArrayList<>();
+    for (List<Integer> path : paths) {
+      starts.add(steps.size());
+      int at = entry;
+      for (int number : path) {
+        link(at, entry(number), steps);
+        through(coils.get(number - 1), steps);
+        at = exit(number);
+      }
+      link(at, exit, steps);
+    }
+    return new Phase(chain.phase(), entry, exit, steps, starts);
+  }
+
+  private static int last(List<Integer> path) {
+    return path.get(path.size() - 1);
+  }
+
+  private int entry(int number) {
+    Coil c = coils.get(number - 1);
+    return c.sign() > 0 ? c.startJoint() : c.finishJoint();
+  }
+
+  private int exit(int number) {
+    Coil c = coils.get(number - 1);
+    return c.sign() > 0 ? c.finishJoint() : c.startJoint();
+  }
+
+  /**
+   * Where the ends of parallel paths count as joined: where the lead to their terminal leaves, else
+   * the drop beside one of them.
+   */
+  private int gathering(int end) {
+    Set<Integer> seen = new LinkedHashSet<>(List.of(end));
+    Deque<Integer> open = new ArrayDeque<>(seen);
+    int drop = end;
+    while (!open.isEmpty()) {
+      int at = open.remove();
+      for (Conductor c : rimAt.getOrDefault(at, List.of())) {
+        if (c.what().kind() == Feature.Kind.TERMINAL_TRACK) {
+          return c.fromJoint();
+        }
+        int next = c.fromJoint() == at ? c.toJoint() : c.fromJoint();
+        if (seen.add(next)) {
+          open.add(next);
+          drop = drop == end ? next : drop;
+        }
+      }
+    }
+    return drop;
   }
 
   private static void through(Coil c, List<Phase.Step> steps) {
@@ -69,6 +114,9 @@ final class PhaseTracer {
 
   /** The shortest way over rim copper, in pieces. */
   private void link(int from, int to, List<Phase.Step> steps) {
+    if (from == to) {
+      return;
+    }
     Map<Integer, Phase.Step> into = new HashMap<>();
     Deque<Integer> open = new ArrayDeque<>(List.of(from));
     while (!open.isEmpty() && !into.containsKey(to)) {

@@ -117,4 +117,23 @@ record RimPlan(
     int most = lanes.values().stream().mapToInt(Integer::intValue).max().orElse(-1);
     return most < 0 ? ringsEdgeMm() : laneRadiusMm(most) + size.trackMm() / 2;
   }
+
+  /**
+   * By how much neighbouring leads are too near: they run radially, so they are nearest to each
+   * other at the first lane, and to a pad beside the neighbour's.
+   */
+  double leadsShortMm() {
+    double most = 0;
+    List<TerminalRow.Spot> spots = row.spots();
+    for (int i = 1; i < spots.size(); i++) {
+      double a = spots.get(i - 1).at().norm();
+      double b = spots.get(i).at().norm();
+      double sin = Math.abs(spots.get(i - 1).at().cross(spots.get(i).at())) / (a * b);
+      double leads = size.trackMm() + size.spaceMm() - laneRadiusMm(0) * sin;
+      double pads =
+          (size.terminals().padMm() + size.trackMm()) / 2 + size.spaceMm() - Math.min(a, b) * sin;
+      most = Math.max(most, Math.max(leads, pads));
+    }
+    return most;
+  }
 }

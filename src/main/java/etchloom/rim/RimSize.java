@@ -1,6 +1,7 @@
 package etchloom.rim;
 
 import etchloom.spec.Spec;
+import java.util.Optional;
 
 /**
  * What the rim is made from. Lengths in mm.
@@ -29,7 +30,8 @@ public record RimSize(
     double boardRadiusMm,
     double edgeCopperMm,
     double edgeHoleMm,
-    Spec.Terminals terminals) {
+    Spec.Terminals terminals,
+    Optional<Spec.Tab> tab) {
 
   /** The wider of pad and track. */
   double wideMm() {
@@ -84,11 +86,11 @@ public record RimSize(
     return Math.asin(Math.min(1, besideMm() / firstRingMm()));
   }
 
-  /** How far from the shaft a terminal's centre may stand. */
-  double terminalReachMm() {
+  /** Least distance of a terminal's centre from the board's edge. */
+  double terminalMarginMm() {
     double copper = terminals.padMm() / 2 + edgeCopperMm;
     double hole =
         terminals.kind() == Spec.TerminalKind.HOLE ? terminals.holeMm() / 2 + edgeHoleMm : 0;
-    return boardRadiusMm - Math.max(copper, hole);
+    return Math.max(copper, hole);
   }
 }

@@ -47,11 +47,16 @@ final class Potentials {
     }
   }
 
+  /** Path by path: where paths are in parallel, the voltage lies along each of them. */
   private void follow(Artwork artwork, int k) {
+    artwork.phases().get(k).paths().forEach(path -> follow(artwork, k, path));
+  }
+
+  private void follow(Artwork artwork, int k, List<Phase.Step> path) {
     List<Conductor> all = artwork.conductors();
     double whole = 0;
     Phase.Step before = null;
-    for (Phase.Step s : artwork.phases().get(k).steps()) {
+    for (Phase.Step s : path) {
       lengthMm[s.conductor()] = all.get(s.conductor()).path().lengthMm();
       whole += sideBySide(all, before, s) ? 0 : lengthMm[s.conductor()];
       before = s;
@@ -59,7 +64,7 @@ final class Potentials {
     double at = 0;
     double next = 0;
     before = null;
-    for (Phase.Step s : artwork.phases().get(k).steps()) {
+    for (Phase.Step s : path) {
       Conductor c = all.get(s.conductor());
       if (!sideBySide(all, before, s)) {
         at = next;

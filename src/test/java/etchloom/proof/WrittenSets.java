@@ -1,7 +1,9 @@
 package etchloom.proof;
 
 import etchloom.artwork.Artwork;
+import etchloom.artwork.Stackup;
 import etchloom.board.Assembler;
+import etchloom.proof.ohm.CopperBuild;
 import etchloom.spec.FabReader;
 import etchloom.spec.Positions;
 import etchloom.spec.Spec;
@@ -66,6 +68,15 @@ final class WrittenSets {
                 ? text(bytes).replaceAll("%TF\\.MD5,[0-9a-f]*\\*%\n", "").getBytes(ASCII)
                 : bytes);
     return out;
+  }
+
+  static CopperBuild build(Stackup s) {
+    return new CopperBuild(
+        s.copper().stream()
+            .map(c -> new CopperBuild.Layer(c.thicknessMm(), c.undercutMm()))
+            .toList(),
+        s.dielectricMm(),
+        s.platingMm());
   }
 
   static final java.nio.charset.Charset ASCII = StandardCharsets.US_ASCII;
