@@ -71,11 +71,7 @@ final class DriveStage {
   private OptionalDouble series() {
     Spec.Duty d = s.duty();
     return s.ledger()
-            .has(
-                "drive.seriesInductanceForRippleHenry",
-                s.bus(),
-                s.switching(),
-                s.current())
+            .has("drive.seriesInductanceForRippleHenry", s.bus(), s.switching(), s.current())
         ? OptionalDouble.of(
             Ripple.seriesHenry(
                 s.circuit(),

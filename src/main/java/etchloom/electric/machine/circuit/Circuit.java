@@ -33,8 +33,7 @@ public record Circuit(
       double windingOhm20,
       double windingHenry,
       double zeroHenry) {
-    this(
-        phases, connection, polePairs, windingOhm20, windingHenry, windingHenry, zeroHenry);
+    this(phases, connection, polePairs, windingOhm20, windingHenry, windingHenry, zeroHenry);
   }
 
   public Circuit {

@@ -65,8 +65,8 @@ class DriveTest {
   }
 
   /**
-   * Stars pulse by pulse: every leg's centred pulse, the star point at the legs' mean or on a leg of
-   * its own, currents by the voltage over an inductance of 1; the worst over depth and angle.
+   * Stars pulse by pulse: every leg's centred pulse, the star point at the legs' mean or on a leg
+   * of its own, currents by the voltage over an inductance of 1; the worst over depth and angle.
    */
   @Test
   void rippleOfStarsReplayed() {
