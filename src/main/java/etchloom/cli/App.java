@@ -44,6 +44,8 @@ public final class App implements Runnable {
     line.addSubcommand("draw", new DrawCommand(console));
     line.addSubcommand("check", new CheckCommand(console));
     line.addSubcommand("report", new ReportCommand(console));
+    line.addSubcommand("survey", new SurveyCommand(console));
+    line.addSubcommand("receive", new ReceiveCommand(console));
     PrintWriter out = new PrintWriter(console.out(), true, StandardCharsets.UTF_8);
     PrintWriter err = new PrintWriter(console.err(), true, StandardCharsets.UTF_8);
     line.setOut(out).setErr(err);

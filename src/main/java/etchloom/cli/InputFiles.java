@@ -129,11 +129,16 @@ final class InputFiles {
 
   /** The whole file; one byte more than is allowed is enough to refuse it. */
   static byte[] bytes(Path path, String name, String what) {
+    return bytes(path, name, what, SpecReader.MAX_BYTES);
+  }
+
+  /** As above, with a bound of its own. */
+  static byte[] bytes(Path path, String name, String what, int most) {
     if (Files.isDirectory(path)) {
-      throw BadInput.of(name, "directory", "this is a folder; a " + what + " is one YAML file");
+      throw BadInput.of(name, "directory", "this is a folder; a " + what + " is one file");
     }
     try (InputStream in = Files.newInputStream(path)) {
-      return in.readNBytes(SpecReader.MAX_BYTES + 1);
+      return in.readNBytes(most + 1);
     } catch (NoSuchFileException e) {
       throw new DiskTrouble(name + ": there is no such file");
     } catch (IOException e) {

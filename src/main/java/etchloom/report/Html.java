@@ -4,7 +4,7 @@ import java.util.List;
 import java.util.Set;
 
 /** HTML under construction. All text is escaped; only {@link #raw} takes markup. */
-final class Html {
+public final class Html {
   private static final Set<String> INLINE = Set.of("a", "em", "strong", "span");
 
   private final StringBuilder out = new StringBuilder();
@@ -12,7 +12,7 @@ final class Html {
   /**
    * @param attributes as they stand in the tag, {@code class="n"}; never from the user
    */
-  Html open(String tag, String... attributes) {
+  public Html open(String tag, String... attributes) {
     out.append('<').append(tag);
     for (String a : attributes) {
       out.append(' ').append(a);
@@ -22,27 +22,27 @@ final class Html {
   }
 
   /** A line end follows, but not inside a line of text. */
-  Html close(String tag) {
+  public Html close(String tag) {
     out.append("</").append(tag).append(INLINE.contains(tag) ? ">" : ">\n");
     return this;
   }
 
-  Html element(String tag, String text, String... attributes) {
+  public Html element(String tag, String text, String... attributes) {
     return open(tag, attributes).text(text).close(tag);
   }
 
-  Html text(String text) {
+  public Html text(String text) {
     out.append(escaped(text));
     return this;
   }
 
-  Html raw(String markup) {
+  public Html raw(String markup) {
     out.append(markup);
     return this;
   }
 
   /** A table whose first column heads its rows; columns from the second on hold numbers. */
-  Html table(String caption, List<String> head, List<List<String>> rows, int numbers) {
+  public Html table(String caption, List<String> head, List<List<String>> rows, int numbers) {
     open("div", "class=\"scroll\"").open("table").element("caption", caption);
     open("thead").open("tr");
     for (int c = 0; c < head.size(); c++) {
@@ -70,7 +70,7 @@ final class Html {
   }
 
   /** Safe as content and inside quotes; characters that XML forbids become {@code ?}. */
-  static String escaped(String s) {
+  public static String escaped(String s) {
     StringBuilder b = new StringBuilder(s.length() + 16);
     for (int c : Text.safe(s).codePoints().toArray()) {
       switch (c) {

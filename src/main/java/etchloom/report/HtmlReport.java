@@ -1,8 +1,5 @@
 package etchloom.report;
 
-import java.io.IOException;
-import java.io.InputStream;
-import java.io.UncheckedIOException;
 import java.nio.charset.StandardCharsets;
 import java.util.List;
 import java.util.Map;
@@ -50,13 +47,7 @@ public final class HtmlReport {
 
   private void page(Optional<String> picture) {
     String title = r.artwork().title() + ", revision " + r.artwork().revision();
-    h.raw("<!DOCTYPE html>\n").open("html", "lang=\"en\"").open("head");
-    h.raw("<meta charset=\"utf-8\"/>\n");
-    h.raw("<meta name=\"viewport\" content=\"width=device-width, initial-scale=1\"/>\n");
-    h.raw(
-        "<meta http-equiv=\"Content-Security-Policy\" content=\"default-src 'none'; style-src"
-            + " 'unsafe-inline'\"/>\n");
-    h.element("title", title).open("style").raw(style()).close("style").close("head");
+    HtmlHead.write(h, title, false);
     h.open("body");
     h.element("a", "Skip to the verdict", "class=\"skip\"", "href=\"#s1\"");
     head();
@@ -123,16 +114,5 @@ public final class HtmlReport {
     }
     h.close("ul");
     electrical.rotor();
-  }
-
-  private static String style() {
-    try (InputStream in = HtmlReport.class.getResourceAsStream("report.css")) {
-      if (in == null) {
-        throw new IllegalStateException("report.css is missing from the program");
-      }
-      return new String(in.readAllBytes(), StandardCharsets.UTF_8);
-    } catch (IOException e) {
-      throw new UncheckedIOException(e);
-    }
   }
 }

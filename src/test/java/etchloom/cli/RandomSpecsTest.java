@@ -35,6 +35,9 @@ import org.junit.jupiter.api.io.TempDir;
 class RandomSpecsTest {
   private static final int SEEDS = Integer.getInteger("etchloom.seeds", 300);
 
+  /** Each so many seeds the files are written and read back too. */
+  private static final int PROVED = 3;
+
   @TempDir Path folder;
 
   @Test
@@ -47,10 +50,17 @@ class RandomSpecsTest {
       Path spec = Files.writeString(folder.resolve("s" + seed + ".yaml"), yaml);
       try {
         InputFiles.Inputs in = InputFiles.read(spec.toString(), Optional.empty());
-        Drawn d = Attempt.of(in, false).drawn();
+        Attempt attempt = Attempt.of(in, false);
+        Drawn d = attempt.drawn();
         assertEquals(List.of(), d.rules().findings(), name);
         everyPhaseIsOneChain(d, name);
         everyNumberIsFinite(d, name);
+        theSpaceIsWhatWasAskedFor(d, name);
+        if (seed % PROVED == 0) {
+          assertTrue(
+              SetFiles.of(attempt, Optional.empty()).results().proof().orElseThrow().passed(),
+              name);
+        }
         drawn++;
       } catch (BadInput e) {
         for (Diagnostic x : e.diagnostics()) {
@@ -129,6 +139,17 @@ class RandomSpecsTest {
     int loops = art.conductors().size() - nodes + pieces;
     assertEquals(connection == Spec.Connection.OPEN ? 3 : 1, pieces, name);
     assertEquals(connection == Spec.Connection.DELTA ? 1 : 0, loops, name);
+  }
+
+  /** The tightest gap is the one asked for, to the nanometre. */
+  private static void theSpaceIsWhatWasAskedFor(Drawn d, String name) {
+    double least =
+        d.rules().minima().stream()
+            .filter(f -> f.rule().equals("space"))
+            .mapToDouble(Finding::measured)
+            .min()
+            .orElseThrow();
+    assertTrue(least >= d.spec().coil().spaceMm() - 1e-6, () -> name + " space " + least);
   }
 
   /** Connected pieces of the whole copper as a graph. */

@@ -9,9 +9,9 @@ import etchloom.spec.FabRules;
  * these local differences unbalance the phases. The split is our own assumption; no standard states
  * one.
  */
-record Tolerances(double track, double copper, double plating) {
+public record Tolerances(double track, double copper, double plating) {
   /** Share of a tolerance that is left between places on one layer of one board. */
-  static final double LOCAL = 0.25;
+  public static final double LOCAL = 0.25;
 
   /** Standard deviation of what a whole layer has in common, over the tolerance. */
   static final double LAYER_SIGMA = Math.sqrt(1 - LOCAL * LOCAL) / 3;
