@@ -9,7 +9,8 @@ import java.util.List;
  * the copper that joins them, from the place where its lead leaves to the place where its exit's
  * does.
  *
- * @param steps the conductors in the order in which the phase current passes them, path by path
+ * @param steps the conductors in the order in which the phase current passes them, path by path;
+ *     conductors that run side by side from one joint to the next follow each other
  * @param starts where in the steps each path begins; every path runs from the entry to the exit
  */
 public record Phase(

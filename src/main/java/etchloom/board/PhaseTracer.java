@@ -25,7 +25,10 @@ final class PhaseTracer {
     this.copper = copper;
     this.coils = coils;
     for (Conductor c : copper.conductors()) {
-      if (c.what().kind() != Feature.Kind.SPIRAL) {
+      boolean coil =
+          c.what().kind() == Feature.Kind.SPIRAL
+              || (c.what().kind() == Feature.Kind.LINK && c.what().coil() > 0);
+      if (!coil) {
         rimAt.computeIfAbsent(c.fromJoint(), k -> new ArrayList<>()).add(c);
         rimAt.computeIfAbsent(c.toJoint(), k -> new ArrayList<>()).add(c);
       }
@@ -99,10 +102,13 @@ final class PhaseTracer {
   }
 
   private static void through(Coil c, List<Phase.Step> steps) {
-    int n = c.conductors().size();
-    for (int i = 0; i < n; i++) {
-      boolean forward = c.sign() > 0;
-      steps.add(new Phase.Step(c.conductors().get(forward ? i : n - 1 - i), forward));
+    if (c.sign() > 0) {
+      steps.addAll(c.way());
+      return;
+    }
+    for (int i = c.way().size() - 1; i >= 0; i--) {
+      Phase.Step s = c.way().get(i);
+      steps.add(new Phase.Step(s.conductor(), !s.forward()));
     }
   }
 
@@ -129,10 +135,22 @@ final class PhaseTracer {
       if (s == null) {
         throw new IllegalStateException("no link from joint " + from + " to joint " + to);
       }
-      way.add(0, s);
       Conductor c = copper.conductors().get(s.conductor());
-      at = s.forward() ? c.fromJoint() : c.toJoint();
+      int before = s.forward() ? c.fromJoint() : c.toJoint();
+      way.addAll(0, sideBySide(before, at));
+      at = before;
     }
     steps.addAll(way);
+  }
+
+  /** All rim copper from one joint to the next: the vias of one joint are joined on two layers. */
+  private List<Phase.Step> sideBySide(int from, int to) {
+    List<Phase.Step> out = new ArrayList<>();
+    for (Conductor c : rimAt.get(from)) {
+      if (c.fromJoint() == to || c.toJoint() == to) {
+        out.add(new Phase.Step(c.id(), c.fromJoint() == from));
+      }
+    }
+    return out;
   }
 }

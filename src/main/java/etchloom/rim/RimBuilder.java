@@ -60,15 +60,16 @@ public final class RimBuilder {
       Winding winding, Spec.Winding wired, boolean starPointOut, RimSize size) {
     Connections.Scheme scheme =
         new Connections.Scheme(wired.connection(), starPointOut, wired.parallelPaths());
-    double nodePitch = 2 * Math.PI * size.nodeRadiusMm() / (size.coils() * size.nodes());
-    if (nodePitch < size.wideMm() + size.spaceMm() - 1e-9) {
+    double nodePitch = size.nodeRadiusMm() * 2 * Math.abs(size.firstNodeRad()) / (size.nodes() - 1);
+    if (nodePitch < size.besideMm() - 1e-9) {
       return refuse(
           "via.pad",
-          "the coils' connection points stand %.3f mm apart at the rim, a via pad and its space"
-              + " need %.3f mm; a smaller via.pad or coil.space, fewer board.layers or fewer"
+          "the coils' connection points stand %.3f mm apart at the rim, a joint and its space need"
+              + " %.3f mm; %sa smaller via.pad or coil.space, fewer board.layers or fewer"
               + " winding.coils would do",
           nodePitch,
-          size.wideMm() + size.spaceMm());
+          size.besideMm(),
+          size.viaCount() > 1 ? "a smaller via.count, " : "");
     }
     List<String> marks = Connections.marks(winding, scheme);
     Spec.Terminals t = size.terminals();

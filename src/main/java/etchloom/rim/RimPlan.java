@@ -83,7 +83,7 @@ record RimPlan(
   double ringRadiusMm(RingArc arc) {
     for (int i = 0; i < rings.rings().size(); i++) {
       if (rings.rings().get(i).contains(arc)) {
-        return size.firstRingMm() + i * size.ringPitchMm();
+        return size.ringMm(i);
       }
     }
     throw new IllegalArgumentException("the arc of " + arc.link().what() + " is on no ring");
@@ -94,7 +94,7 @@ record RimPlan(
     int n = rings.rings().size();
     return n == 0
         ? size.nodeRadiusMm() + size.wideMm() / 2
-        : size.firstRingMm() + (n - 1) * size.ringPitchMm() + size.wideMm() / 2;
+        : size.ringMm(n - 1) + size.wideMm() / 2;
   }
 
   Optional<Double> laneRadiusMm(String mark) {
@@ -103,8 +103,11 @@ record RimPlan(
   }
 
   private double laneRadiusMm(int lane) {
+    // A lead that bends over its own drop's row of vias narrows the gap short of the lane.
+    double notch = size.viaCount() > 1 ? size.spaceMm() / 2 : 0;
     return ringsEdgeMm()
         + size.spaceMm()
+        + notch
         + size.trackMm() / 2
         + lane * (size.trackMm() + size.spaceMm());
   }

@@ -18,7 +18,11 @@ public final class Templates {
           "wind-logger",
           "sample-stirrer",
           "focuser",
-          "rover-wheel");
+          "rover-wheel",
+          "sample-shaker",
+          "blind-drive",
+          "tide-meter",
+          "test-bench");
   private static final List<String> FAB_NAMES = List.of("economy", "standard", "fine");
 
   /** The starting specs, in the order in which they are listed. */

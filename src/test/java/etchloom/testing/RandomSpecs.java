@@ -187,6 +187,74 @@ public final class RandomSpecs {
     line("fab: standard");
   }
 
+  /**
+   * Specs over all outlines, layers side by side, several vias at a joint, and up to 12 layers of
+   * unequal copper.
+   */
+  public static String shapes(long seed) {
+    RandomSpecs r = new RandomSpecs(seed);
+    r.buildShapes();
+    return r.out.toString();
+  }
+
+  private void buildShapes() {
+    int[] counts = pick(COUNTS);
+    String outline = pick(List.of("wedge", "round", "racetrack"));
+    int layers = pick(List.of(2, 2, 4, 4, 6, 8, 12));
+    int vias = pick(List.of(1, 1, 2, 2, 3, 4));
+    double track = between(0.18, 0.4);
+    double space = between(0.18, 0.3);
+    double hole = between(0.3, 0.4);
+    double pad = hole + between(0.27, 0.35);
+    double half = Math.sin(Math.PI / counts[0]);
+    double middle = between(12, 40);
+    double most = 2 * (middle * half - space / 2);
+    double length = Math.min(between(0.5, 1) * most, 1.6 * middle);
+    String width = "";
+    double inner = middle - length / 2;
+    double outer = middle + length / 2;
+    if (outline.equals("wedge")) {
+      inner = middle * between(0.4, 0.7);
+      outer = middle * between(1.1, 1.4);
+    } else if (outline.equals("racetrack")) {
+      inner = middle * between(0.6, 0.9);
+      outer = middle * between(1.05, 1.3);
+      width = mm(2 * inner * half * between(0.5, 1));
+    }
+    line("etchloom: 1");
+    line("title: Random board");
+    line("rotor: {poles: " + counts[1] + "}");
+    String connection = pick(List.of("star", "delta", "open"));
+    line("winding: {phases: 3, coils: " + counts[0] + ", connection: " + connection + "}");
+    line("coil:");
+    line("  outline: " + outline);
+    line("  inner-radius: " + mm(inner));
+    line("  outer-radius: " + mm(outer));
+    if (!width.isEmpty()) {
+      line("  width: " + width);
+    }
+    line("  turns: " + (random.nextInt(3) == 0 ? 1 + random.nextInt(6) : "fill"));
+    line("  track: " + mm(track));
+    line("  space: " + mm(space));
+    line("  layers: " + pick(List.of("series", "parallel")));
+    if (!outline.equals("round") && random.nextInt(4) == 0) {
+      line("  corner: " + mm(between(0.5, 2.5) * (track + space)));
+    }
+    line("rim: {track: " + mm(track * between(1, 2)) + "}");
+    line("via: {hole: " + mm(hole) + ", pad: " + mm(pad) + ", count: " + vias + "}");
+    line("board:");
+    line("  layers: " + layers);
+    line("  thickness: " + (layers > 8 ? "2.4 mm" : "1.6 mm"));
+    line("  copper: " + pick(List.of("1 oz", "{outer: 2 oz, inner: 1 oz}")));
+    line("  diameter: " + mm(2 * (outer + between(8, 18))));
+    line("  bore: " + (random.nextInt(4) == 0 ? "0 mm" : mm(inner * between(0.5, 0.9) * 2)));
+    line(
+        "  terminals: {kind: hole, start: "
+            + random.nextInt(360)
+            + " deg, pitch: 3.5 mm, hole: 0.9 mm, pad: 1.8 mm}");
+    line("fab: " + (layers > 6 ? "fine" : "standard"));
+  }
+
   private void line(String text) {
     out.append(text).append('\n');
   }
