@@ -31,7 +31,7 @@ class FolderCheckTest {
 
   @BeforeAll
   static void write() {
-    wind = WrittenSets.template("wind-logger");
+    wind = WrittenSets.fewTurns("wind-logger");
     windSet = WrittenSets.withoutSums(WrittenSets.write(wind));
   }
 

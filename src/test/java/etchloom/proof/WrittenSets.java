@@ -28,8 +28,13 @@ final class WrittenSets {
 
   /** The filter wheel with five turns a layer: all its constructs, a third of its copper. */
   static Artwork smallWheel() {
-    String spec = text(Templates.bytes("filter-wheel"));
-    return drawn("filter-wheel", spec.replace("turns: fill", "turns: 5").getBytes(ASCII));
+    return fewTurns("filter-wheel");
+  }
+
+  /** A template's board with five turns a layer. */
+  static Artwork fewTurns(String name) {
+    String spec = text(Templates.bytes(name));
+    return drawn(name, spec.replace("turns: fill", "turns: 5").getBytes(ASCII));
   }
 
   private static Artwork drawn(String name, byte[] spec) {

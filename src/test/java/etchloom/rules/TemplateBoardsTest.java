@@ -50,8 +50,13 @@ class TemplateBoardsTest {
       expected.remove("voltage");
     }
     assertEquals(expected, r.minima().stream().map(Finding::rule).toList());
-    double tab = d.spec().board().tab().map(Spec.Tab::lengthMm).orElse(0.0);
-    double edge = d.spec().board().diameterMm() / 2 + tab;
+    double round = d.spec().board().diameterMm() / 2;
+    double edge =
+        d.spec()
+            .board()
+            .tab()
+            .map(t -> Math.hypot(round + t.lengthMm(), t.widthMm() / 2))
+            .orElse(round);
     for (Finding f : r.minima()) {
       assertTrue(f.at().norm() <= edge, f::toString);
       assertTrue(Double.isFinite(f.measured()) && Double.isFinite(f.required()), f::toString);

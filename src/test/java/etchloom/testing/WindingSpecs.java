@@ -70,7 +70,7 @@ public record WindingSpecs(
         %sfab: standard
         duty: {bus: 24 V, speed: 600 rpm, current: 0.5 A, switching: 50 kHz}
         """
-        .formatted(poles, rotor, phases, coils, connection, paths, terminals, extra, rotor);
+        .formatted(poles, rotor, phases, coils, connection, paths, terminals, extra);
   }
 
   public SpecFile read() {

@@ -8,9 +8,8 @@ import etchloom.spec.Spec.Connection;
  * over the modulation, with centred pulses, {@code V / (k L f)}.
  *
  * <p>k is 6 for a star of three, for each of two such stars, and for a delta by its star of L/3; 8
- * for open windings on full bridges with unipolar pulses, and for two phases on three legs, whose
- * star point then carries up to twice as much (textbook); 5(√5 − 1) for a star of five. The tests
- * replay the stars pulse by pulse.
+ * for open windings on full bridges with unipolar pulses (textbook); 4 for two phases whose star
+ * point is on a third leg; 5(√5 − 1) for a star of five. The tests replay the stars pulse by pulse.
  *
  * <p>L is what the pulses meet, {@link Circuit#rippleHenry()}: the synchronous inductance in a star
  * or delta of three, of two stars each by itself; elsewhere the pulses of the phases are not in
@@ -27,7 +26,7 @@ public final class Ripple {
       return 8;
     }
     return switch (c.phases()) {
-      case 2 -> 8;
+      case 2 -> 4;
       case 5 -> 5 * (Math.sqrt(5) - 1);
       default -> 6;
     };
