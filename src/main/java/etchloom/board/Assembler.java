@@ -266,8 +266,8 @@ public final class Assembler {
   }
 
   /**
-   * A delta closes one circuit, each path beside the first one more in its phase; rows of vias and
-   * layers side by side close theirs.
+   * A delta closes one circuit; each path beside the first closes one more in its phase; rows of
+   * vias and layers side by side close theirs.
    */
   private int circuits(CopperBuilder copper) {
     Spec.Winding w = spec.winding();

@@ -48,7 +48,6 @@ record LeadBend(double trackMm, double laneMm, Point start, Point end, double tu
   private double room(double straightMm) {
     double run = laneMm * Math.abs(turnRad);
     double r = Math.min(trackMm, Math.min(straightMm / 2, run / 4));
-    // A bend tighter than the track itself adds nothing but cusps.
-    return r > trackMm / 2 ? r : 0;
+    return r >= trackMm / 2 ? r : 0;
   }
 }

@@ -49,7 +49,7 @@ class RandomSpecsTest {
   /** All outlines, layers side by side, rows of vias; the written files proven for some. */
   @Test
   void everyShapeIsDrawnCleanOrRefusedByKey() throws IOException {
-    drawOrRefuse(RandomSpecs::shapes, SEEDS / 2, SEEDS / 6, 16);
+    drawOrRefuse(RandomSpecs::shapes, SEEDS / 2, SEEDS / 6, 5 * PROVED);
   }
 
   /**
@@ -71,8 +71,10 @@ class RandomSpecsTest {
         everyPhaseIsOneChain(d, name);
         everyNumberIsFinite(d, name);
         theSpaceIsWhatWasAskedFor(d, name);
-        if (seed % proveEvery == proveEvery - 1) {
-          theFilesSayTheSame(d, name);
+        if (seed % proveEvery == 0) {
+          assertTrue(
+              SetFiles.of(attempt, Optional.empty()).results().proof().orElseThrow().passed(),
+              name);
         }
         drawn++;
       } catch (BadInput e) {
@@ -199,12 +201,6 @@ class RandomSpecsTest {
       }
     }
     return pieces;
-  }
-
-  private static void theFilesSayTheSame(Drawn d, String name) {
-    Artwork art = d.assembly().artwork().onGrid();
-    var set = LayerSet.write(art, ToyOrders.plain(art.stackup().thicknessMm()));
-    assertEquals(List.of(), Prover.prove(set, ProofExpectation.of(art)).findings(), name);
   }
 
   private static void everyNumberIsFinite(Drawn d, String name) {

@@ -282,7 +282,7 @@ class RoundTripTest {
           c.turns(),
           of(c.trackMm()),
           of(c.spaceMm()),
-          OptionalDouble.of(of(c.trackMm())),
+          c.outline() == Spec.CoilOutline.ROUND ? c.cornerMm() : OptionalDouble.of(of(c.trackMm())),
           c.parallelLayers());
     }
 
