@@ -66,7 +66,8 @@ class RandomSpecsTest {
       Path spec = Files.writeString(folder.resolve("s" + seed + ".yaml"), yaml);
       try {
         InputFiles.Inputs in = InputFiles.read(spec.toString(), Optional.empty());
-        Drawn d = Attempt.of(in, false).drawn();
+        Attempt attempt = Attempt.of(in, false);
+        Drawn d = attempt.drawn();
         assertEquals(List.of(), d.rules().findings(), name);
         everyPhaseIsOneChain(d, name);
         everyNumberIsFinite(d, name);
