@@ -132,7 +132,7 @@ final class OvalSpiral {
     if (x <= out.centre().x()) {
       Point foot = new Point(x, in.right().y());
       path.lineTo(foot);
-      return fillet(foot.plus(new Point(0, f)), f);
+      return fillet(foot.plus(new Point(0, f)));
     }
     if (!(out.centre().x() >= in.centre().x() - ROUNDING_MM)) {
       return false;
@@ -149,10 +149,10 @@ final class OvalSpiral {
     }
     Point unit = new Point(cos, -Math.sqrt(1 - cos * cos));
     bend.to(bend.centre().plus(unit.times(bend.radiusMm())), path);
-    return fillet(bend.centre().plus(unit.times(inside)), f);
+    return fillet(bend.centre().plus(unit.times(inside)));
   }
 
-  private boolean fillet(Point centre, double f) {
+  private boolean fillet(Point centre) {
     exitFrom = path.size();
     path.arcTo(new Point(end.x(), centre.y()), centre, true);
     path.lineTo(end);
