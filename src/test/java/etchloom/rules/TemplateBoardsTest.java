@@ -49,6 +49,9 @@ class TemplateBoardsTest {
     if (d.spec().duty().orElseThrow().busVolt().isEmpty()) {
       expected.remove("voltage");
     }
+    if (d.spec().board().holes().isEmpty() && d.spec().rotor().outerDiameterMm().isEmpty()) {
+      expected.remove("keep-out");
+    }
     assertEquals(expected, r.minima().stream().map(Finding::rule).toList());
     double round = d.spec().board().diameterMm() / 2;
     double edge =
