@@ -6,9 +6,9 @@ import etchloom.electric.field.GaussRule;
  * Neumann's integral over pairs of straight bars, {@code ∬ dl·dl' / r}, mm, each weighted with both
  * currents. The magnetic constant over 4π makes it an inductance.
  *
- * <p>Pairs twice the longer bar's size apart: the integral's expansion to second order in the bars'
- * lengths, widths and thicknesses. Down to one and a tenth of it: to fourth order in the lengths. A
- * single pair is then off by half a per cent at worst, where both are in line, and sums over
+ * <p>Pairs 2.2 times the longer bar's size apart: the integral's expansion to second order in the
+ * bars' lengths, widths and thicknesses. Down to 1.25 times: to fourth order in the lengths. A
+ * single pair is then off by one per cent at worst, where both are in line, and sums over
  * directions by much less. Nearer ones: bars whose sideways distance hardly changes along them in
  * closed form, others with the closed form of the longer bar's potential and Gauss's rule along the
  * shorter.
@@ -23,10 +23,10 @@ import etchloom.electric.field.GaussRule;
  */
 final class PairSum {
   /** Square of how many sizes apart the expansion to fourth order holds. */
-  private static final double APART = 1.1 * 1.1;
+  private static final double APART = 1.25 * 1.25;
 
   /** Square of how many sizes apart the expansion to second order holds. */
-  private static final double FAR = 2 * 2;
+  private static final double FAR = 2.2 * 2.2;
 
   /** Sideways change over mean distance up to which bars count as parallel. */
   private static final double PARALLEL = 0.01;
