@@ -21,6 +21,22 @@ class ArchitectureTest {
           .withImportOption(ImportOption.Predefined.DO_NOT_INCLUDE_TESTS)
           .importPackages("etchloom");
 
+  /** What runs many specs, or judges what came of one, sees whatever a run sees. */
+  private static final List<String> WITH_RUN =
+      List.of(
+          "run",
+          "board",
+          "artwork",
+          "winding",
+          "spec",
+          "rules",
+          "electric",
+          "proof",
+          "report",
+          "units",
+          "geometry",
+          "diagnostic");
+
   /** Package to the packages it may use, itself left out. */
   private static final Map<String, List<String>> MAY_USE =
       Map.ofEntries(
@@ -42,7 +58,35 @@ class ArchitectureTest {
               List.of(
                   "geometry", "spec", "winding", "coil", "rim", "artwork", "diagnostic", "units")),
           Map.entry("write", List.of("artwork", "geometry", "units")),
-          Map.entry("proof", List.of("artwork", "geometry", "units", "diagnostic")));
+          Map.entry("proof", List.of("artwork", "geometry", "units", "diagnostic")),
+          Map.entry("survey", WITH_RUN),
+          Map.entry("receive", WITH_RUN),
+          Map.entry(
+              "run",
+              List.of(
+                  "board",
+                  "artwork",
+                  "winding",
+                  "spec",
+                  "rules",
+                  "electric",
+                  "proof",
+                  "report",
+                  "units",
+                  "geometry",
+                  "diagnostic")),
+          Map.entry(
+              "report",
+              List.of(
+                  "artwork",
+                  "winding",
+                  "spec",
+                  "rules",
+                  "electric",
+                  "proof",
+                  "units",
+                  "geometry",
+                  "diagnostic")));
 
   static Stream<String> packages() {
     return MAY_USE.keySet().stream().sorted();
@@ -73,6 +117,20 @@ class ArchitectureTest {
                                             || c.getPackageName().startsWith(a + "."))))
             .allowEmptyShould(true);
     rule.check(CLASSES);
+  }
+
+  /** A mistake that both would share could not show in what is read back. */
+  @Test
+  void readersAndWritersDoNotSeeEachOther() {
+    for (List<String> pair : List.of(List.of("proof", "write"), List.of("write", "proof"))) {
+      ArchRuleDefinition.noClasses()
+          .that()
+          .resideInAPackage("etchloom." + pair.get(0) + "..")
+          .should()
+          .dependOnClassesThat()
+          .resideInAPackage("etchloom." + pair.get(1) + "..")
+          .check(CLASSES);
+    }
   }
 
   @Test

@@ -107,7 +107,7 @@ public record Artwork(
         maskTop.stream().map(Artwork::snap).toList(),
         maskBottom.stream().map(Artwork::snap).toList(),
         legend.stream()
-            .map(s -> new Stroke(s.path().mapped(Grid::snap), s.widthMm(), s.what()))
+            .map(s -> new Stroke(s.path().mapped(Grid::snap), s.widthMm(), s.what(), s.letterMm()))
             .toList(),
         coils,
         phases,

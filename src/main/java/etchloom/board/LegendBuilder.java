@@ -11,6 +11,7 @@ import etchloom.spec.Spec;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
+import java.util.OptionalDouble;
 
 /**
  * The legend on L1's side: terminal marks, a datum mark at 0°, title and revision along an arc;
@@ -42,6 +43,7 @@ final class LegendBuilder {
         new LegendRoom(
             spec.board().diameterMm() / 2,
             spec.board().boreMm() / 2,
+            spec.board().tab(),
             holes,
             openings,
             fab.legend().gapMm(),
@@ -51,9 +53,18 @@ final class LegendBuilder {
   Assembler.PlacedLegend build(boolean draft) {
     terminalMarks();
     datum();
-    String text = spec.title() + " " + spec.revision() + (draft ? " DRAFT" : "");
-    if (!alongAnArc(StrokeFont.plain(text), text)) {
-      leftOut.add("title");
+    String draftMark = draft ? " DRAFT" : "";
+    List<String> texts =
+        List.of(
+            spec.title() + " " + spec.revision() + draftMark,
+            spec.title() + draftMark,
+            ("REV " + spec.revision() + draftMark).strip());
+    int done = 0;
+    while (done < texts.size() && !alongAnArc(StrokeFont.plain(texts.get(done)), "title")) {
+      done++;
+    }
+    if (done > 0) {
+      leftOut.add(done == 1 ? "the revision" : "the title");
     }
     return new Assembler.PlacedLegend(strokes, leftOut);
   }
@@ -72,14 +83,14 @@ final class LegendBuilder {
         double off = j.padMm() / 2 + room.gapMm() + lineMm + heightMm / 2;
         for (int step = 0; step < 12 && !done; step++) {
           Point middle = j.at().plus(radial.times(side * (off + step * 0.25)));
-          done = put(text(j.mark(), middle, turn), "mark " + j.mark());
+          done = put(text(j.mark(), middle, turn), "mark " + j.mark(), letters());
         }
         if (done) {
           break;
         }
       }
       if (!done) {
-        leftOut.add("mark " + j.mark());
+        leftOut.add("terminal mark " + j.mark());
       }
     }
   }
@@ -95,11 +106,11 @@ final class LegendBuilder {
               StrokeFont.stroke(foot, tip),
               StrokeFont.stroke(tip, barb),
               StrokeFont.stroke(tip, barb.mirrored()));
-      if (put(mark, "datum")) {
+      if (put(mark, "datum", OptionalDouble.empty())) {
         return;
       }
     }
-    leftOut.add("datum");
+    leftOut.add("the datum mark");
   }
 
   /** Upright text about a middle point. */
@@ -126,7 +137,7 @@ final class LegendBuilder {
       for (int k = 0; k <= 120; k++) {
         double a = away + (k % 2 == 0 ? 1 : -1) * ((k + 1) / 2) * STEP_RAD;
         Optional<List<Path>> arc = curved(text, r, a);
-        if (arc.isPresent() && put(arc.get(), what)) {
+        if (arc.isPresent() && put(arc.get(), what, letters())) {
           return true;
         }
       }
@@ -152,12 +163,16 @@ final class LegendBuilder {
     return out.isEmpty() ? Optional.empty() : Optional.of(out);
   }
 
-  private boolean put(List<Path> paths, String what) {
+  private OptionalDouble letters() {
+    return OptionalDouble.of(heightMm);
+  }
+
+  private boolean put(List<Path> paths, String what, OptionalDouble letterMm) {
     if (!room.free(paths)) {
       return false;
     }
     room.take(paths);
-    paths.forEach(p -> strokes.add(new Stroke(p, lineMm, what)));
+    paths.forEach(p -> strokes.add(new Stroke(p, lineMm, what, letterMm)));
     return true;
   }
 }

@@ -1,6 +1,7 @@
 package etchloom.board;
 
 import etchloom.diagnostic.Diagnostic;
+import etchloom.diagnostic.Severity;
 import etchloom.spec.Positions;
 import java.util.ArrayList;
 import java.util.List;
@@ -18,8 +19,14 @@ final class Problems {
     found.add(Diagnostic.error(code, positions.at(key), key, message, hints));
   }
 
+  /** Something the user should know, though the board can be drawn. */
+  void warn(String code, String key, String message) {
+    found.add(Diagnostic.warning(code, positions.at(key), key, message));
+  }
+
+  /** Whether anything keeps the board from being drawn. */
   boolean any() {
-    return !found.isEmpty();
+    return found.stream().anyMatch(d -> d.severity() == Severity.ERROR);
   }
 
   List<Diagnostic> list() {

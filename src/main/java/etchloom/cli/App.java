@@ -9,14 +9,14 @@ import java.nio.file.Files;
 import java.nio.file.Path;
 import picocli.CommandLine;
 import picocli.CommandLine.Command;
-import picocli.CommandLine.Mixin;
 import picocli.CommandLine.Model.CommandSpec;
-import picocli.CommandLine.Option;
 import picocli.CommandLine.Spec;
 
 /** The program: its commands, and what becomes of what goes wrong in them. */
 @Command(
     name = "etchloom",
+    mixinStandardHelpOptions = true,
+    version = "etchloom " + Version.TEXT,
     description = {
       "Draws printed-circuit stators: reads one YAML spec, writes the copper, drill, mask, legend"
           + " and netlist files a board fab needs, checks them against the fab's rules, and reports"
@@ -43,6 +43,9 @@ public final class App implements Runnable {
     line.addSubcommand("new", new NewCommand(console));
     line.addSubcommand("draw", new DrawCommand(console));
     line.addSubcommand("check", new CheckCommand(console));
+    line.addSubcommand("report", new ReportCommand(console));
+    line.addSubcommand("survey", new SurveyCommand(console));
+    line.addSubcommand("receive", new ReceiveCommand(console));
     PrintWriter out = new PrintWriter(console.out(), true, StandardCharsets.UTF_8);
     PrintWriter err = new PrintWriter(console.err(), true, StandardCharsets.UTF_8);
     line.setOut(out).setErr(err);
@@ -56,18 +59,9 @@ public final class App implements Runnable {
     return code;
   }
 
-  @Mixin private HelpOption help;
-
-  @Option(names = "--version", description = "show the version")
-  private boolean version;
-
   @Override
   public void run() {
-    if (version) {
-      spec.commandLine().getOut().println("etchloom " + Version.TEXT);
-    } else {
-      spec.commandLine().usage(spec.commandLine().getOut());
-    }
+    spec.commandLine().usage(spec.commandLine().getOut());
   }
 
   private static int misused(CommandLine.ParameterException e, String[] args) {
@@ -89,8 +83,7 @@ public final class App implements Runnable {
       console.err().println("error[disk]: " + e.getMessage());
       return ExitCode.DISK;
     }
-    console.err().println("error[fault]: a fault in Etchloom itself: " + trace(e));
-    return ExitCode.FAULT;
+    return crashed(e, console);
   }
 
   /** Where the full trace was put; a user gets one line. */
@@ -100,10 +93,16 @@ public final class App implements Runnable {
     try {
       Path file = Files.createTempFile("etchloom-fault-", ".txt");
       Files.writeString(file, text.toString());
-      return e.getClass().getSimpleName() + "; the full trace is in " + file;
+      return headline(e) + "; the full trace is in " + file;
     } catch (IOException io) {
       return e + "; no trace could be kept";
     }
+  }
+
+  private static String headline(Throwable e) {
+    String message =
+        e.getMessage() == null ? "" : ": " + e.getMessage().lines().findFirst().orElse("");
+    return e.getClass().getSimpleName() + message;
   }
 
   /** A fault outside picocli's reach, such as memory running out. */

@@ -9,6 +9,7 @@ import etchloom.spec.SpecReader;
 import etchloom.spec.Templates;
 import java.io.IOException;
 import java.io.InputStream;
+import java.nio.charset.StandardCharsets;
 import java.nio.file.Files;
 import java.nio.file.InvalidPathException;
 import java.nio.file.NoSuchFileException;
@@ -21,17 +22,17 @@ final class InputFiles {
   private InputFiles() {}
 
   /**
-   * A spec and the rules it is held against, with the bytes as read.
+   * A spec and the rules it is held against, with the texts as read.
    *
    * @param fabName the class, or the path as the user gave it
    */
   record Inputs(
       Path specPath,
       SpecFile file,
-      byte[] specBytes,
+      String specText,
       String fabName,
       FabRules fab,
-      byte[] fabBytes,
+      String fabText,
       List<etchloom.diagnostic.Diagnostic> warnings) {
     Inputs {
       warnings = List.copyOf(warnings);
@@ -51,11 +52,17 @@ final class InputFiles {
     String fab = fabOption.orElse(file.spec().fab());
     if (!isPath(fab)) {
       if (!Templates.fabNames().contains(fab)) {
-        throw unknownClass(fab, fabOption.isPresent() ? Optional.empty() : Optional.of(file), spec);
+        throw unknownClass(fab, fabOption.isPresent() ? Optional.empty() : Optional.of(file));
       }
       byte[] fabBytes = Templates.fabBytes(fab);
       return new Inputs(
-          path, file, bytes, fab, FabReader.builtIn(fab), fabBytes, staged.diagnostics());
+          path,
+          file,
+          text(bytes),
+          fab,
+          FabReader.builtIn(fab),
+          text(fabBytes),
+          staged.diagnostics());
     }
     Path base = Optional.ofNullable(path.toAbsolutePath().getParent()).orElse(path);
     Path fabPath = fabOption.isPresent() ? path(fab) : base.resolve(path(fab));
@@ -64,18 +71,39 @@ final class InputFiles {
     return new Inputs(
         path,
         file,
-        bytes,
+        text(bytes),
         fab,
         rules.value().orElseThrow(() -> new BadInput(rules.diagnostics())),
-        fabBytes,
+        text(fabBytes),
         staged.diagnostics());
+  }
+
+  /**
+   * Rules named on the command line.
+   *
+   * @param name a class, or a path
+   */
+  static FabRules fab(String name) {
+    if (!isPath(name)) {
+      if (!Templates.fabNames().contains(name)) {
+        throw unknownClass(name, Optional.empty());
+      }
+      return FabReader.builtIn(name);
+    }
+    Staged<FabRules> rules = FabReader.read(name, bytes(path(name), name, "rules file"));
+    return rules.value().orElseThrow(() -> new BadInput(rules.diagnostics()));
+  }
+
+  /** As read: the readers take nothing but UTF-8, so this loses nothing. */
+  private static String text(byte[] bytes) {
+    return new String(bytes, StandardCharsets.UTF_8);
   }
 
   static boolean isPath(String fab) {
     return fab.indexOf('.') >= 0 || fab.indexOf('/') >= 0;
   }
 
-  private static BadInput unknownClass(String fab, Optional<SpecFile> file, String specName) {
+  private static BadInput unknownClass(String fab, Optional<SpecFile> file) {
     String message =
         "there is no fab class '"
             + fab
@@ -101,11 +129,16 @@ final class InputFiles {
 
   /** The whole file; one byte more than is allowed is enough to refuse it. */
   static byte[] bytes(Path path, String name, String what) {
+    return bytes(path, name, what, SpecReader.MAX_BYTES);
+  }
+
+  /** As above, with a bound of its own. */
+  static byte[] bytes(Path path, String name, String what, int most) {
     if (Files.isDirectory(path)) {
-      throw BadInput.of(name, "directory", "this is a folder; a " + what + " is one YAML file");
+      throw BadInput.of(name, "directory", "this is a folder; a " + what + " is one file");
     }
     try (InputStream in = Files.newInputStream(path)) {
-      return in.readNBytes(SpecReader.MAX_BYTES + 1);
+      return in.readNBytes(most + 1);
     } catch (NoSuchFileException e) {
       throw new DiskTrouble(name + ": there is no such file");
     } catch (IOException e) {

@@ -11,12 +11,12 @@ import java.util.ArrayList;
 import java.util.List;
 import java.util.concurrent.Callable;
 import picocli.CommandLine.Command;
-import picocli.CommandLine.Mixin;
 import picocli.CommandLine.Parameters;
 
 /** {@code new}: lists the starting specs, or copies one. */
 @Command(
     name = "new",
+    mixinStandardHelpOptions = true,
     description = "Lists the starting specs, or copies one to a file of yours.",
     sortOptions = false,
     synopsisHeading = "Usage: ",
@@ -37,8 +37,6 @@ final class NewCommand implements Callable<Integer> {
       paramLabel = "FILE",
       description = "where to; NAME.yaml if left out. An existing file is never overwritten.")
   private String file;
-
-  @Mixin private HelpOption help;
 
   NewCommand(Console console) {
     this.console = console;

@@ -29,13 +29,17 @@ public record Point(double x, double y) {
     return x * o.y - y * o.x;
   }
 
-  /** Distance from the origin, mm. */
+  /**
+   * Distance from the origin, mm: for lengths of a board, whose squares are far from the limits.
+   */
   public double norm() {
-    return Math.hypot(x, y);
+    return Math.sqrt(x * x + y * y);
   }
 
   public double distanceTo(Point o) {
-    return Math.hypot(x - o.x, y - o.y);
+    double dx = x - o.x;
+    double dy = y - o.y;
+    return Math.sqrt(dx * dx + dy * dy);
   }
 
   /** Direction seen from the origin, rad, in (-π, π]. */

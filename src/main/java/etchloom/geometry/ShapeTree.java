@@ -37,14 +37,13 @@ public final class ShapeTree {
     double visit(int i, double limitMm);
   }
 
-  private final Segment[] shapes;
+  private final FlatShapes shapes;
   private final double[] fatMm;
   private final int[] order;
-  private final double[][] feature;
-  private final double[] itemBox;
   private final int[] lo;
   private final int[] hi;
   private final int[] left;
+  private final int[] right;
   private final int[] middle;
   private final double[] reachMm;
   private final double[] box;
@@ -55,32 +54,32 @@ public final class ShapeTree {
    */
   public ShapeTree(List<? extends Segment> shapes, double[] fatMm) {
     int n = shapes.size();
-    this.shapes = shapes.toArray(new Segment[0]);
-    this.fatMm = fatMm.clone();
     if (fatMm.length != n) {
       throw new IllegalArgumentException(n + " shapes, but " + fatMm.length + " distances");
     }
+    this.shapes = new FlatShapes(shapes, fatMm);
+    this.fatMm = fatMm.clone();
     order = new int[n];
-    feature = new double[6][n];
-    itemBox = new double[4 * n];
+    double[][] feature = new double[6][n];
     int most = Math.max(1, 2 * n);
     lo = new int[most];
     hi = new int[most];
     left = new int[most];
+    right = new int[most];
     middle = new int[most];
     reachMm = new double[most];
     box = new double[4 * most];
     for (int i = 0; i < n; i++) {
       order[i] = i;
-      describe(i);
+      describe(shapes.get(i), i, feature);
     }
     if (n > 0) {
-      build(0, n);
+      build(0, n, feature);
     }
   }
 
-  private void describe(int i) {
-    Segment s = shapes[i];
+  /** Both ends, in an order that does not depend on the walking direction, and the middle. */
+  private static void describe(Segment s, int i, double[][] feature) {
     if (s instanceof Arc a && !(Math.abs(a.sweepRad()) <= MAX_SWEEP_RAD)) {
       throw new IllegalArgumentException(
           "arc bends " + a.sweepRad() + " rad, too far for the tree");
@@ -96,10 +95,9 @@ public final class ShapeTree {
     feature[3][i] = m.y();
     feature[4][i] = to.x();
     feature[5][i] = to.y();
-    ShapeBounds.box(s, fatMm[i], itemBox, 4 * i);
   }
 
-  private int build(int from, int to) {
+  private int build(int from, int to, double[][] feature) {
     int node = nodes++;
     lo[node] = from;
     hi[node] = to;
@@ -107,32 +105,39 @@ public final class ShapeTree {
     int at = 4 * node;
     box[at] = box[at + 1] = Double.POSITIVE_INFINITY;
     box[at + 2] = box[at + 3] = Double.NEGATIVE_INFINITY;
-    for (int k = from; k < to; k++) {
-      int i = 4 * order[k];
-      box[at] = Math.min(box[at], itemBox[i]);
-      box[at + 1] = Math.min(box[at + 1], itemBox[i + 1]);
-      box[at + 2] = Math.max(box[at + 2], itemBox[i + 2]);
-      box[at + 3] = Math.max(box[at + 3], itemBox[i + 3]);
-    }
     if (to - from > LEAF) {
-      double[] key = feature[widest(from, to)];
+      double[] key = feature[widest(from, to, feature)];
       int mid = (from + to) >>> 1;
       Selection.split(order, key, from, to, mid);
       middle[node] = order[mid];
-      left[node] = build(from, mid);
-      int right = build(mid, to);
+      left[node] = build(from, mid, feature);
+      right[node] = build(mid, to, feature);
+      join(at, box, 4 * left[node]);
+      join(at, box, 4 * right[node]);
       reachMm[node] =
           to - from <= MEASURED
               ? reach(from, to, middle[node])
-              : Math.max(viaHalf(left[node], middle[node]), viaHalf(right, middle[node]));
+              : Math.max(viaHalf(left[node], middle[node]), viaHalf(right[node], middle[node]));
     } else {
       middle[node] = order[(from + to) >>> 1];
       reachMm[node] = reach(from, to, middle[node]);
+      for (int k = from; k < to; k++) {
+        join(at, shapes.box, 4 * order[k]);
+      }
     }
     return node;
   }
 
-  private int widest(int from, int to) {
+  private void join(int at, double[] other, int from) {
+    for (int side = 0; side < 4; side++) {
+      double v = other[from + side];
+      if (side < 2 ? v < box[at + side] : v > box[at + side]) {
+        box[at + side] = v;
+      }
+    }
+  }
+
+  private int widest(int from, int to, double[][] feature) {
     int best = 0;
     double most = -1;
     for (int f = 0; f < feature.length; f++) {
@@ -140,8 +145,8 @@ public final class ShapeTree {
       double max = Double.NEGATIVE_INFINITY;
       for (int k = from; k < to; k++) {
         double v = feature[f][order[k]];
-        min = Math.min(min, v);
-        max = Math.max(max, v);
+        min = v < min ? v : min;
+        max = v > max ? v : max;
       }
       if (max - min > most) {
         most = max - min;
@@ -155,7 +160,7 @@ public final class ShapeTree {
     double reach = 0;
     for (int k = from; k < to; k++) {
       int i = order[k];
-      double own = i == c ? 0 : ShapeBounds.reach(shapes[i], shapes[c]);
+      double own = i == c ? 0 : shapes.reach(i, c);
       reach = Math.max(reach, own + fatMm[i]);
     }
     return reach;
@@ -163,18 +168,7 @@ public final class ShapeTree {
 
   private double viaHalf(int half, int c) {
     int m = middle[half];
-    return reachMm[half] + (m == c ? 0 : ShapeBounds.reach(shapes[m], shapes[c]));
-  }
-
-  private int right(int node) {
-    // Nodes are numbered in the order of building: the right half follows the whole left one.
-    int l = left[node];
-    return l + size(hi[l] - lo[l]);
-  }
-
-  /** Nodes of a subtree over {@code n} shapes. */
-  private static int size(int n) {
-    return n <= LEAF ? 1 : 1 + size(n >>> 1) + size(n - (n >>> 1));
+    return reachMm[half] + (m == c ? 0 : shapes.reach(m, c));
   }
 
   /**
@@ -193,8 +187,8 @@ public final class ShapeTree {
     double now = limit;
     if (left[u] >= 0) {
       now = inside(left[u], now, visitor);
-      now = inside(right(u), now, visitor);
-      return between(left[u], right(u), now, visitor);
+      now = inside(right[u], now, visitor);
+      return between(left[u], right[u], now, visitor);
     }
     for (int a = lo[u]; a < hi[u]; a++) {
       for (int b = a + 1; b < hi[u]; b++) {
@@ -205,7 +199,8 @@ public final class ShapeTree {
   }
 
   private double items(int i, int j, double limit, PairVisitor visitor) {
-    if (boxesApart(itemBox, 4 * i, itemBox, 4 * j, limit)) {
+    if (boxesApart(shapes.box, 4 * i, shapes.box, 4 * j, limit)
+        || FlatShapes.apart(shapes, i, shapes, j, fatMm[i] + fatMm[j] + limit)) {
       return limit;
     }
     return Math.max(0, visitor.visit(Math.min(i, j), Math.max(i, j), limit));
@@ -227,10 +222,10 @@ public final class ShapeTree {
     boolean cutFirst = left[v] < 0 || (left[u] >= 0 && reachMm[u] >= reachMm[v]);
     if (cutFirst) {
       now = between(left[u], v, now, visitor);
-      return between(right(u), v, now, visitor);
+      return between(right[u], v, now, visitor);
     }
     now = between(u, left[v], now, visitor);
-    return between(u, right(v), now, visitor);
+    return between(u, right[v], now, visitor);
   }
 
   private boolean apart(int u, int v, double limit) {
@@ -238,40 +233,41 @@ public final class ShapeTree {
       return true;
     }
     double held = reachMm[u] + reachMm[v] + limit;
-    return Distance.exceeds(shapes[middle[u]], shapes[middle[v]], held);
+    return FlatShapes.apart(shapes, middle[u], shapes, middle[v], held);
   }
 
   /** Visits every shape that may be as near to the given one as the limit, in a fixed order. */
   public void near(Segment shape, double shapeFatMm, double limitMm, Visitor visitor) {
     if (nodes > 0) {
-      double[] own = new double[4];
-      ShapeBounds.box(shape, shapeFatMm, own, 0);
-      near(0, shape, shapeFatMm, own, limitMm, visitor);
+      FlatShapes own = new FlatShapes(List.of(shape), new double[] {shapeFatMm});
+      near(0, own, shapeFatMm, limitMm, visitor);
     }
   }
 
-  private double near(
-      int u, Segment shape, double shapeFat, double[] own, double limit, Visitor visitor) {
-    if (boxesApart(own, 0, box, 4 * u, limit)
-        || Distance.exceeds(shape, shapes[middle[u]], shapeFat + reachMm[u] + limit)) {
+  private double near(int u, FlatShapes own, double ownFat, double limit, Visitor visitor) {
+    if (boxesApart(own.box, 0, box, 4 * u, limit)
+        || FlatShapes.apart(own, 0, shapes, middle[u], ownFat + reachMm[u] + limit)) {
       return limit;
     }
     double now = limit;
     if (left[u] >= 0) {
-      now = near(left[u], shape, shapeFat, own, now, visitor);
-      return near(right(u), shape, shapeFat, own, now, visitor);
+      now = near(left[u], own, ownFat, now, visitor);
+      return near(right[u], own, ownFat, now, visitor);
     }
     for (int k = lo[u]; k < hi[u]; k++) {
-      if (!boxesApart(own, 0, itemBox, 4 * order[k], now)) {
-        now = Math.max(0, visitor.visit(order[k], now));
+      int i = order[k];
+      if (!boxesApart(own.box, 0, shapes.box, 4 * i, now)
+          && !FlatShapes.apart(own, 0, shapes, i, ownFat + fatMm[i] + now)) {
+        now = Math.max(0, visitor.visit(i, now));
       }
     }
     return now;
   }
 
   private static boolean boxesApart(double[] a, int i, double[] b, int j, double limit) {
-    double dx = Math.max(0, Math.max(a[i] - b[j + 2], b[j] - a[i + 2]));
-    double dy = Math.max(0, Math.max(a[i + 1] - b[j + 3], b[j + 1] - a[i + 3]));
-    return dx * dx + dy * dy > limit * limit;
+    return a[i] - b[j + 2] > limit
+        || b[j] - a[i + 2] > limit
+        || a[i + 1] - b[j + 3] > limit
+        || b[j + 1] - a[i + 3] > limit;
   }
 }

@@ -46,12 +46,22 @@ public final class Cautions {
 
   private Cautions() {}
 
+  /** Those of this board first, then those of every machine. */
   public static List<Caution> of(Results r) {
-    List<Caution> out = new ArrayList<>(List.of(MAGNETS, ROTOR, HEAT, SUPPLY));
+    List<Caution> out = new ArrayList<>(own(r));
+    out.addAll(List.of(MAGNETS, ROTOR, HEAT, SUPPLY));
     out.add(spacing(r.spec().duty().map(Spec.Duty::busVolt).orElse(OptionalDouble.empty())));
     out.add(LAW);
     out.add(MEASURE);
     return out;
+  }
+
+  /** What the figures of this very machine give cause for. */
+  static List<Caution> own(Results r) {
+    return r.machine().stream()
+        .flatMap(m -> m.cautions().stream())
+        .map(c -> new Caution(c.code().replace('-', ' '), Words.capital(c.message()) + "."))
+        .toList();
   }
 
   private static Caution spacing(OptionalDouble busVolt) {
@@ -67,8 +77,9 @@ public final class Cautions {
             + more);
   }
 
-  /** The topics in one line. */
-  static String line(Results r) {
-    return String.join(", ", of(r).stream().map(Caution::topic).toList());
+  /** The topics that hold for every machine, in one line. */
+  static String line() {
+    return String.join(
+        ", ", List.of(MAGNETS, ROTOR, HEAT, SUPPLY, LAW).stream().map(Caution::topic).toList());
   }
 }

@@ -3,47 +3,37 @@ package etchloom.report;
 import etchloom.artwork.Artwork;
 import etchloom.artwork.Conductor;
 import etchloom.artwork.Joint;
-import etchloom.geometry.Arc;
-import etchloom.geometry.Path;
 import etchloom.geometry.Point;
 import etchloom.geometry.Segment;
 import etchloom.rules.RuleReport;
 import java.util.ArrayList;
+import java.util.HashMap;
 import java.util.List;
-import org.locationtech.jts.geom.Coordinate;
-import org.locationtech.jts.geom.Geometry;
-import org.locationtech.jts.geom.GeometryFactory;
-import org.locationtech.jts.operation.buffer.BufferParameters;
-import org.locationtech.jts.operation.union.UnaryUnionOp;
+import java.util.Map;
 
 /**
  * Area of the copper of each layer, what lies over each other counted once.
  *
- * <p>Away from joints a track covers width times length exactly (lines and arcs, tangent to each
- * other; a corner of another angle is taken into account). Only what lies near joints, where tracks
- * and pads cover each other, is merged as polygons. That holds where copper keeps apart elsewhere;
- * a layer where the check found copper touching is merged whole, which is slow. Discs are polygons
- * of the same area and arcs there are chords: good to 1e-4 of the area.
+ * <p>A track of lines and arcs tangent to each other covers width times length; a corner, what its
+ * outer sector adds and its inner kite takes. At a joint the tracks' ends lie in the pad, and the
+ * part of each that does is counted with the pad alone: exact for tracks that leave the pad
+ * straight and apart from each other, else good to a small share of the pad. Where the rule check
+ * found copper touching, or a track is too short to leave its pads, the layer is merged as polygons
+ * ({@link MergedCopper}), which is slow.
  */
 final class CopperArea {
-  private static final GeometryFactory GEOMETRY = new GeometryFactory();
+  private final Artwork artwork;
+  private final Map<Integer, List<Conductor>> ends = new HashMap<>();
+  private final int layer;
 
-  /** Chords of centre lines; errors of a track's two sides cancel. */
-  private static final double CHORD_ERROR_MM = 5e-4;
-
-  private static final int QUADRANT = 16;
-
-  /** Makes a disc's polygon as large as the disc. */
-  private static final double EQUAL_AREA =
-      Math.sqrt(Math.PI / (2 * QUADRANT) / Math.sin(Math.PI / (2 * QUADRANT)));
-
-  /** How much of a track, in its own widths, counts as near a joint beyond the pad. */
-  private static final double NEAR_WIDTHS = 3;
-
-  private final List<Geometry> merged = new ArrayList<>();
-  private double plainMm2;
-
-  private CopperArea() {}
+  private CopperArea(Artwork artwork, int layer) {
+    this.artwork = artwork;
+    this.layer = layer;
+    for (Conductor c : artwork.conductorsOn(layer)) {
+      ends.computeIfAbsent(c.fromJoint(), k -> new ArrayList<>()).add(c);
+      ends.computeIfAbsent(c.toJoint(), k -> new ArrayList<>()).add(c);
+    }
+  }
 
   /** One entry a layer, L1 first, mm². */
   static List<Double> of(Artwork artwork, RuleReport rules) {
@@ -54,106 +44,80 @@ final class CopperArea {
           rules.findings().stream()
               .anyMatch(
                   f -> f.rule().equals("space") && f.layer().equals(name) && f.measured() <= 0);
-      out.add(area(artwork, layer, touching));
+      CopperArea a = new CopperArea(artwork, layer);
+      out.add(touching || a.crowded() ? MergedCopper.areaMm2(artwork, layer) : a.areaMm2());
     }
     return out;
   }
 
-  static double area(Artwork artwork, int layer, boolean whole) {
-    CopperArea a = new CopperArea();
+  private boolean crowded() {
+    return artwork.conductorsOn(layer).stream()
+        .anyMatch(
+            c ->
+                c.fromJoint() == c.toJoint()
+                    || c.path().lengthMm() < discMm(c.fromJoint()) + discMm(c.toJoint()));
+  }
+
+  private double areaMm2() {
+    double sum = 0;
     for (Conductor c : artwork.conductorsOn(layer)) {
-      if (whole) {
-        a.merge(c.path(), c.widthMm());
-      } else {
-        a.add(c, artwork.joints().get(c.fromJoint()), artwork.joints().get(c.toJoint()));
+      sum += c.widthMm() * c.path().lengthMm();
+      List<Segment> pieces = c.path().segments();
+      for (int i = 1; i < pieces.size(); i++) {
+        sum += corner(c.widthMm(), pieces.get(i - 1).tangent(1), pieces.get(i).tangent(0));
       }
     }
-    for (Joint j : artwork.padsOn(layer)) {
-      a.disc(j.at(), j.padMm() / 2);
-    }
-    return a.plainMm2 + UnaryUnionOp.union(a.merged, GEOMETRY).getArea();
-  }
-
-  private void add(Conductor c, Joint from, Joint to) {
-    double w = c.widthMm();
-    double head = from.padMm() / 2 + NEAR_WIDTHS * w;
-    double tail = to.padMm() / 2 + NEAR_WIDTHS * w;
-    double length = c.path().lengthMm();
-    if (head + tail >= length) {
-      merge(c.path(), w);
-      return;
-    }
-    List<Segment> first = new ArrayList<>();
-    List<Segment> middle = new ArrayList<>();
-    List<Segment> last = new ArrayList<>();
-    double at = 0;
-    for (Segment s : c.path().segments()) {
-      double end = at + s.lengthMm();
-      piece(first, s, at, end, 0, head);
-      piece(middle, s, at, end, head, length - tail);
-      piece(last, s, at, end, length - tail, length);
-      at = end;
-    }
-    mergeFlat(first, w);
-    disc(c.path().start(), w / 2);
-    mergeFlat(last, w);
-    disc(c.path().end(), w / 2);
-    plain(middle, w);
-  }
-
-  /** The part of a segment that lies between two lengths along the path. */
-  private static void piece(
-      List<Segment> out, Segment s, double at, double end, double low, double high) {
-    double from = Math.max(at, low);
-    double to = Math.min(end, high);
-    if (to - from > 1e-9) {
-      out.add(s.part((from - at) / (end - at), (to - at) / (end - at)));
-    }
-  }
-
-  /** Width times length; a corner by θ gains a sector outside and loses a kite inside. */
-  private void plain(List<Segment> pieces, double width) {
-    double square = width * width / 4;
-    for (int i = 0; i < pieces.size(); i++) {
-      plainMm2 += width * pieces.get(i).lengthMm();
-      if (i > 0) {
-        Point a = pieces.get(i - 1).tangent(1);
-        Point b = pieces.get(i).tangent(0);
-        double turn = Math.abs(Math.atan2(a.cross(b), a.dot(b)));
-        plainMm2 += square * (turn / 2 - Math.tan(turn / 2));
+    for (Joint j : artwork.joints()) {
+      if (j.on(layer)) {
+        sum += joint(j.id());
       }
     }
+    return sum;
   }
 
-  private void merge(Path path, double width) {
-    mergeFlat(path.segments(), width);
-    disc(path.start(), width / 2);
-    disc(path.end(), width / 2);
-  }
-
-  private void mergeFlat(List<Segment> pieces, double width) {
-    List<Coordinate> points = new ArrayList<>();
-    for (Segment s : pieces) {
-      int n = s.match(line -> 1, CopperArea::chords);
-      for (int i = points.isEmpty() ? 0 : 1; i <= n; i++) {
-        points.add(coordinate(s.at(i / (double) n)));
-      }
+  /** What a joint adds to the widths times lengths of its tracks, reckoned to its middle. */
+  private double joint(int id) {
+    List<Conductor> tracks = ends.getOrDefault(id, List.of());
+    double r = discMm(id);
+    if (r == 0) {
+      return bare(id, tracks);
     }
-    Geometry line = GEOMETRY.createLineString(points.toArray(new Coordinate[0]));
-    merged.add(line.buffer(width / 2, QUADRANT, BufferParameters.CAP_FLAT));
+    double sum = Math.PI * r * r;
+    for (Conductor c : tracks) {
+      double h = c.widthMm() / 2;
+      sum -= h * Math.sqrt(r * r - h * h) + r * r * Math.asin(h / r);
+    }
+    return sum;
   }
 
-  private static int chords(Arc a) {
-    double ratio = Math.min(1, CHORD_ERROR_MM / a.radiusMm());
-    double step = 2 * Math.acos(1 - ratio);
-    return (int) Math.ceil(a.lengthMm() / a.radiusMm() / step);
+  /** Two tracks that meet without a pad make a corner, like two pieces of one track. */
+  private static double bare(int id, List<Conductor> tracks) {
+    if (tracks.size() != 2) {
+      return 0;
+    }
+    Point in = outward(tracks.get(0), id).times(-1);
+    return corner(tracks.get(0).widthMm(), in, outward(tracks.get(1), id));
   }
 
-  private void disc(Point at, double radiusMm) {
-    merged.add(GEOMETRY.createPoint(coordinate(at)).buffer(EQUAL_AREA * radiusMm, QUADRANT));
+  private static Point outward(Conductor c, int joint) {
+    List<Segment> s = c.path().segments();
+    return c.fromJoint() == joint ? s.get(0).tangent(0) : s.get(s.size() - 1).tangent(1).times(-1);
   }
 
-  private static Coordinate coordinate(Point p) {
-    return new Coordinate(p.x(), p.y());
+  /** Radius of the copper round a joint: its pad, or the round end of its widest track; 0: none. */
+  private double discMm(int id) {
+    List<Conductor> tracks = ends.getOrDefault(id, List.of());
+    double pad = artwork.joints().get(id).padMm();
+    if (pad == 0 && tracks.size() == 2 && tracks.get(0).widthMm() == tracks.get(1).widthMm()) {
+      return 0;
+    }
+    double width = tracks.stream().mapToDouble(Conductor::widthMm).max().orElse(0);
+    return Math.max(pad, width) / 2;
+  }
+
+  /** A corner by θ gains a sector outside and loses a kite inside. */
+  private static double corner(double width, Point in, Point out) {
+    double turn = Math.abs(Math.atan2(in.cross(out), in.dot(out)));
+    return width * width / 4 * (turn / 2 - Math.tan(turn / 2));
   }
 }

@@ -1,5 +1,6 @@
 package etchloom.report;
 
+import etchloom.geometry.Point;
 import etchloom.rules.Finding;
 import etchloom.rules.RuleReport;
 import etchloom.units.Numbers;
@@ -18,8 +19,11 @@ import java.util.List;
 public final class FindingText {
   private FindingText() {}
 
-  /** One line a finding, then the check's notes, without line ends. */
+  /** One line a finding, then, where there are any, the check's notes, without line ends. */
   public static List<String> lines(RuleReport r) {
+    if (r.passed()) {
+      return List.of();
+    }
     return java.util.stream.Stream.concat(
             r.findings().stream().map(FindingText::line),
             r.notes().stream().map(n -> "note: " + Text.safe(n)))
@@ -57,6 +61,9 @@ public final class FindingText {
 
   /** {@code L1 at (18.204, 3.366) mm, radius 18.513 mm, 10.48 deg}. */
   static String place(Finding f) {
+    if (f.at().equals(Point.ORIGIN)) {
+      return f.layer().isEmpty() ? "board" : f.layer();
+    }
     String layer = f.layer().isEmpty() ? "" : f.layer() + " ";
     return layer
         + "at "
@@ -66,6 +73,17 @@ public final class FindingText {
         + " mm, "
         + Numbers.fixed(Math.toDegrees(f.at().angleRad()), 2)
         + " deg";
+  }
+
+  /** {@code L1 (18.204, 3.366) mm}; what is true of the whole board or layer has no point. */
+  static String shortPlace(Finding f) {
+    String point = f.at().equals(Point.ORIGIN) ? "" : point(f) + " mm";
+    return (f.layer() + " " + point).trim();
+  }
+
+  /** Whether a rule is among the broken ones. */
+  static boolean broken(RuleReport r, String rule) {
+    return r.findings().stream().anyMatch(f -> f.rule().equals(rule));
   }
 
   static String point(Finding f) {

@@ -19,50 +19,50 @@ import java.util.OptionalDouble;
  * A JSON object with its keys in the order in which they were put. What is absent leaves no key; an
  * object without keys leaves none either.
  */
-final class JsonTree {
+public final class JsonTree {
   private final Map<String, Object> entries = new LinkedHashMap<>();
 
   /**
    * @throws IllegalArgumentException if the number is not finite
    */
-  JsonTree put(String key, double value) {
+  public JsonTree put(String key, double value) {
     if (!Double.isFinite(value)) {
       throw new IllegalArgumentException(key + " is not finite: " + value);
     }
     return set(key, value);
   }
 
-  JsonTree put(String key, long value) {
+  public JsonTree put(String key, long value) {
     return set(key, value);
   }
 
-  JsonTree put(String key, boolean value) {
+  public JsonTree put(String key, boolean value) {
     return set(key, value);
   }
 
-  JsonTree put(String key, String value) {
+  public JsonTree put(String key, String value) {
     return set(key, value);
   }
 
-  JsonTree put(String key, OptionalDouble value) {
+  public JsonTree put(String key, OptionalDouble value) {
     value.ifPresent(v -> put(key, v));
     return this;
   }
 
-  JsonTree put(String key, Optional<Double> value) {
+  public JsonTree put(String key, Optional<Double> value) {
     value.ifPresent(v -> put(key, v.doubleValue()));
     return this;
   }
 
-  JsonTree put(String key, JsonTree value) {
+  public JsonTree put(String key, JsonTree value) {
     return value.entries.isEmpty() ? this : set(key, value);
   }
 
-  JsonTree putObjects(String key, List<JsonTree> values) {
+  public JsonTree putObjects(String key, List<JsonTree> values) {
     return set(key, List.copyOf(values));
   }
 
-  JsonTree putTexts(String key, List<String> values) {
+  public JsonTree putTexts(String key, List<String> values) {
     return set(key, List.copyOf(values));
   }
 
@@ -92,7 +92,7 @@ final class JsonTree {
   }
 
   /** Indented by two, ASCII only, final line end; numbers never with an exponent. */
-  byte[] bytes() {
+  public byte[] bytes() {
     ByteArrayOutputStream out = new ByteArrayOutputStream();
     JsonFactory factory = JsonFactory.builder().enable(JsonWriteFeature.ESCAPE_NON_ASCII).build();
     DefaultIndenter indent = new DefaultIndenter("  ", "\n");

@@ -2,12 +2,10 @@ package etchloom.report;
 
 import etchloom.artwork.Artwork;
 import etchloom.artwork.Stackup;
-import etchloom.electric.resistance.ResistanceFigures;
 import etchloom.spec.Spec;
 import etchloom.units.Numbers;
 import java.util.ArrayList;
 import java.util.List;
-import java.util.Optional;
 
 /** What the fab must be told, and what to measure when the boards come. */
 public final class OrderLines {
@@ -38,8 +36,8 @@ public final class OrderLines {
       out.add(
           new Line(
               "copper L" + (i + 1),
-              Numbers.trimmed(1000 * c.thicknessMm(), 1)
-                  + " um finished, ordered as "
+              um(c.thicknessMm())
+                  + " finished, ordered as "
                   + Numbers.trimmed(c.ounces(), 2)
                   + " oz"));
       if (i < art.layers() - 1) {
@@ -57,8 +55,8 @@ public final class OrderLines {
         new Line(
             "holes",
             "diameters are finished; plating at least "
-                + Numbers.trimmed(1000 * art.stackup().platingMm(), 1)
-                + " um on the wall"));
+                + um(art.stackup().platingMm())
+                + " on the wall"));
     out.add(new Line("finish", board.finish()));
     out.add(new Line("solder mask", board.mask() + ", both sides, vias tented"));
     out.add(new Line("legend", "top side only"));
@@ -70,10 +68,18 @@ public final class OrderLines {
 
   private static String outline(Spec.Board b) {
     String bore = b.boreMm() > 0 ? ", bore " + mm(b.boreMm()) : ", no bore";
-    return "round, " + mm(b.diameterMm()) + bore;
+    String tab =
+        b.tab()
+            .map(t -> ", tab of " + mm(t.widthMm()) + " standing out by " + mm(t.lengthMm()))
+            .orElse("");
+    return "round, " + mm(b.diameterMm()) + bore + tab;
   }
 
   private static String test(Spec.Winding w) {
+    if (w.connection() != Spec.Connection.OPEN && w.phases() == 6) {
+      return "each set of three phases is one net by design: test its continuity, and isolation"
+          + " between the two sets";
+    }
     return w.connection() == Spec.Connection.OPEN
         ? "each phase is one net by design: test its continuity, and isolation between phases"
         : "the winding is one net by design: test continuity, no isolation test between terminals";
@@ -81,32 +87,28 @@ public final class OrderLines {
 
   /** The acceptance limits, one a line; empty where the tolerances could etch a track away. */
   public static List<String> resistance(Results r) {
-    Optional<ResistanceFigures.Limits> worst = r.resistance().worst();
-    if (worst.isEmpty()) {
+    List<PairLimits> pairs = PairLimits.lines(r);
+    if (pairs.isEmpty()) {
       return List.of();
     }
-    String pairs =
-        String.join(
-            ", ",
-            ResistanceFigures.lineToLine(r.resistance().terminals()).stream()
-                .map(ResistanceFigures.TerminalOhm::key)
-                .toList());
     return List.of(
         "resistance "
-            + pairs
+            + String.join(", ", pairs.stream().map(PairLimits::pair).toList())
             + " at 20 C: "
             + ohm(r.resistance().meanTerminalOhm())
             + ", limits "
-            + ohm(worst.get().minTerminalOhm())
-            + " to "
-            + ohm(worst.get().maxTerminalOhm()));
+            + PairLimits.span(pairs));
   }
 
   static String ohm(double v) {
     return Numbers.engineering(v, "ohm", 4);
   }
 
-  private static String mm(double v) {
+  static String um(double mm) {
+    return Numbers.trimmed(1000 * mm, 1) + " um";
+  }
+
+  static String mm(double v) {
     return Numbers.trimmed(v, 3) + " mm";
   }
 }

@@ -38,6 +38,16 @@ final class Page {
     }
   }
 
+  /** A label and a value, side by side. */
+  void pair(String label, String value, int labelColumns) {
+    line("  " + Text.left(Text.cut(label, labelColumns - 1), labelColumns) + value);
+  }
+
+  /** A paragraph, wrapped and set in. */
+  void indented(String text) {
+    Text.wrap(Text.safe(text), COLUMNS - 2).forEach(l -> line("  " + l));
+  }
+
   /** A label and short texts side by side, in columns of the same width. */
   <T> void cells(String label, List<T> values, Function<T, String> text) {
     List<String> cells = values.stream().map(text).toList();

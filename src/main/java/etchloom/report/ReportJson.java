@@ -1,6 +1,10 @@
 package etchloom.report;
 
+import etchloom.electric.machine.MachineFigures;
+import etchloom.electric.machine.Need;
+import etchloom.proof.ProofReport;
 import etchloom.rules.RuleReport;
+import java.util.List;
 import java.util.Map;
 
 /**
@@ -23,10 +27,11 @@ public final class ReportJson {
   }
 
   /** The check of a folder of files, which have neither title nor revision. */
-  public static byte[] writeCheck(String toolVersion, RuleReport rules) {
+  public static byte[] writeCheck(String toolVersion, RuleReport rules, ProofReport proof) {
     return new JsonTree()
         .put("tool", new JsonTree().put("version", toolVersion))
         .put("check", CheckTree.of(rules))
+        .put("proof", ProofTree.withFindings(proof))
         .bytes();
   }
 
@@ -46,11 +51,36 @@ public final class ReportJson {
   }
 
   private static JsonTree tree(Results r) {
-    return head(r)
-        .put("verdict", new JsonTree().put("made", r.rules().passed()))
-        .put("winding", WindingTree.of(r))
-        .put("geometry", GeometryTree.of(r))
-        .put("resistance", ResistanceTree.of(r))
-        .put("check", CheckTree.of(r.rules()));
+    JsonTree out =
+        head(r)
+            .put("winding", WindingTree.of(r))
+            .put("geometry", GeometryTree.of(r))
+            .put("resistance", ResistanceTree.of(r));
+    r.inductance().ifPresent(l -> out.put("inductance", MachineTree.inductance(l)));
+    r.machine().ifPresent(m -> machine(out, m, r.winding().marks()));
+    out.put("verdict", verdict(r));
+    r.machine().ifPresent(m -> out.put("rotor", MachineTree.rotor(m.rotor())));
+    out.put("check", CheckTree.of(r.rules()));
+    r.proof().ifPresent(p -> out.put("proof", ProofTree.of(p)));
+    return out;
+  }
+
+  private static void machine(JsonTree out, MachineFigures m, List<String> marks) {
+    m.sharing().ifPresent(x -> out.put("sharing", MachineTree.sharing(x)));
+    m.emf().ifPresent(e -> out.put("emf", MachineTree.emf(e, marks)));
+    m.torque().ifPresent(t -> out.put("torque", MachineTree.torque(t)));
+    out.put("loss", MachineTree.loss(m.loss()))
+        .put("thermal", MachineTree.thermal(m.thermal()))
+        .put("drive", MachineTree.drive(m.drive()));
+    m.generator().ifPresent(g -> out.put("generator", MachineTree.generator(g)));
+    out.put("spread", MachineTree.spread(m.spread()));
+  }
+
+  private static JsonTree verdict(Results r) {
+    JsonTree out = new JsonTree().put("made", r.rules().passed());
+    List<Need> duty = r.machine().map(MachineFigures::verdict).orElse(List.of());
+    return duty.isEmpty()
+        ? out
+        : out.putObjects("duty", duty.stream().map(MachineTree::duty).toList());
   }
 }

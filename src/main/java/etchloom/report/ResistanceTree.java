@@ -30,8 +30,13 @@ final class ResistanceTree {
             l ->
                 out.put("rssMinTerminalOhm", l.minTerminalOhm())
                     .put("rssMaxTerminalOhm", l.maxTerminalOhm()));
-    r.spec().duty().map(Spec.Duty::copperLimitC).ifPresent(c -> hot(out, f, c));
+    r.spec().duty().ifPresent(d -> hot(out, f, hotC(r, d)));
     return out;
+  }
+
+  /** Where the copper settles, else its limit. */
+  private static double hotC(Results r, Spec.Duty duty) {
+    return r.machine().map(m -> m.thermal().hotC()).orElse(duty.copperLimitC());
   }
 
   /** The mean of the pairs without a star point, at another temperature. */

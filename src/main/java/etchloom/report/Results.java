@@ -1,11 +1,15 @@
 package etchloom.report;
 
 import etchloom.artwork.Artwork;
+import etchloom.electric.inductance.InductanceFigures;
+import etchloom.electric.machine.MachineFigures;
 import etchloom.electric.resistance.ResistanceFigures;
+import etchloom.proof.ProofReport;
 import etchloom.rules.RuleReport;
 import etchloom.spec.FabRules;
 import etchloom.spec.Spec;
 import etchloom.winding.Winding;
+import java.util.Optional;
 
 /**
  * All that a report is made of. What is not known is empty, and the report says so; nothing is ever
@@ -14,6 +18,9 @@ import etchloom.winding.Winding;
  * @param toolVersion as in {@code 0.1.0}
  * @param fab the rules the board was held against
  * @param artwork before rounding to the grid
+ * @param inductance empty where it was not worked out
+ * @param machine what the machine does; empty where it was not worked out
+ * @param proof what the written files were found to say; empty where none were written
  */
 public record Results(
     String toolVersion,
@@ -22,7 +29,10 @@ public record Results(
     Artwork artwork,
     Winding winding,
     RuleReport rules,
-    ResistanceFigures resistance) {
+    ResistanceFigures resistance,
+    Optional<InductanceFigures> inductance,
+    Optional<MachineFigures> machine,
+    Optional<ProofReport> proof) {
 
   /** What every run has. */
   public static Results of(
@@ -33,7 +43,35 @@ public record Results(
       Winding winding,
       RuleReport rules,
       ResistanceFigures resistance) {
-    return new Results(toolVersion, spec, fab, artwork, winding, rules, resistance);
+    return new Results(
+        toolVersion,
+        spec,
+        fab,
+        artwork,
+        winding,
+        rules,
+        resistance,
+        Optional.empty(),
+        Optional.empty(),
+        Optional.empty());
+  }
+
+  /** The same with the winding's inductances and what the machine does. */
+  public Results withElectrics(InductanceFigures henries, MachineFigures figures) {
+    return with(Optional.of(henries), Optional.of(figures), proof);
+  }
+
+  /** The same with what reading the written files back has shown. */
+  public Results withProof(ProofReport report) {
+    return with(inductance, machine, Optional.of(report));
+  }
+
+  private Results with(
+      Optional<InductanceFigures> henries,
+      Optional<MachineFigures> figures,
+      Optional<ProofReport> report) {
+    return new Results(
+        toolVersion, spec, fab, artwork, winding, rules, resistance, henries, figures, report);
   }
 
   /** Plated holes less terminals. */

@@ -4,8 +4,11 @@ import etchloom.electric.resistance.ResistanceFigures;
 import etchloom.electric.resistance.ResistanceFigures.PhaseOhm;
 import etchloom.electric.resistance.ResistanceFigures.TerminalOhm;
 import etchloom.rules.Finding;
+import etchloom.rules.RuleReport;
 import etchloom.spec.Spec;
 import etchloom.units.Numbers;
+import java.util.List;
+import java.util.Map;
 import java.util.Optional;
 
 /**
@@ -13,13 +16,7 @@ import java.util.Optional;
  * top of that.
  */
 public final class Summary {
-  private final Results r;
-  private final Page page;
-
-  private Summary(Results r, boolean colour) {
-    this.r = r;
-    page = new Page(colour);
-  }
+  private Summary() {}
 
   /**
    * @param where the folder that was written, as the user may type it
@@ -27,85 +24,86 @@ public final class Summary {
    * @return lines, each with its end
    */
   public static String text(Results r, Optional<String> where, boolean colour) {
-    Summary s = new Summary(r, colour);
-    s.geometry();
-    s.rules();
-    s.resistance();
-    s.end(where);
-    return s.page.text();
+    Page page = new Page(colour);
+    board(page, r);
+    rules(page, r.rules());
+    resistance(page, r);
+    end(page, r, ReportJson.figures(r), where);
+    return page.text();
   }
 
-  private void geometry() {
+  static void board(Page page, Results r) {
     Spec spec = r.spec();
     page.heading(r.artwork().title() + ", revision " + r.artwork().revision());
     Spec.Board b = spec.board();
     page.item(
         "board",
-        mm(b.diameterMm())
-            + (b.boreMm() > 0 ? ", bore " + mm(b.boreMm()) : ", no bore")
+        OrderLines.mm(b.diameterMm())
+            + (b.boreMm() > 0 ? ", bore " + OrderLines.mm(b.boreMm()) : ", no bore")
             + ", "
             + b.layers()
             + " layers, "
-            + mm(b.thicknessMm()));
+            + OrderLines.mm(b.thicknessMm()));
     page.item(
         "winding",
-        count(r.winding().phases(), "phase")
+        Words.count(r.winding().phases(), "phase")
             + ", "
             + WindingTree.word(spec.winding().connection())
             + ", "
-            + count(r.winding().coils(), "coil")
+            + Words.count(r.winding().coils(), "coil")
             + ", "
             + r.winding().poles()
             + " poles, winding factor "
             + Numbers.fixed(r.winding().windingFactor(), 4));
     page.item(
         "coil",
-        count(r.artwork().turnsPerLayer(), "turn")
+        Words.count(r.artwork().turnsPerLayer(), "turn")
             + " a layer, track "
-            + mm(spec.coil().trackMm())
+            + OrderLines.mm(spec.coil().trackMm())
             + ", space "
-            + mm(spec.coil().spaceMm())
+            + OrderLines.mm(spec.coil().spaceMm())
             + ", "
-            + count((int) r.vias(), "via"));
+            + Words.count(r.vias(), "via"));
   }
 
-  private static String count(int n, String word) {
-    return n + " " + word + (n == 1 ? "" : "s");
-  }
-
-  private void rules() {
+  static void rules(Page page, RuleReport rules) {
     page.blank();
     page.row("rule", "measured", "required", "tightest at");
-    for (Finding f : r.rules().minima()) {
-      boolean broken = r.rules().findings().stream().anyMatch(x -> x.rule().equals(f.rule()));
-      String at = (f.layer().isEmpty() ? "" : f.layer() + " ") + FindingText.point(f) + " mm";
+    for (Finding f : rules.minima()) {
+      boolean broken = FindingText.broken(rules, f.rule());
       page.row(
           f.rule(),
           FindingText.value(f.measured(), f, broken),
           (FindingText.upperBound(f, broken) ? "<= " : ">= ")
               + FindingText.value(f.required(), f, broken),
-          at + (broken ? "  BROKEN" : ""));
+          FindingText.shortPlace(f) + (broken ? "  BROKEN" : ""));
     }
-    r.rules().notes().forEach(n -> page.item("note", n));
+    rules.notes().forEach(n -> page.item("note", n));
   }
 
-  private void resistance() {
+  private static void resistance(Page page, Results r) {
     ResistanceFigures f = r.resistance();
     page.blank();
     page.row("resistance at 20 C", "", "", "");
     page.cells("phase", f.phases(), Summary::phase);
     page.cells("terminals", f.terminals(), Summary::terminals);
+    List<PairLimits> limits = PairLimits.lines(r);
     page.item(
         "limits",
-        f.worst()
-            .map(
-                l ->
-                    OrderLines.ohm(l.minTerminalOhm())
-                        + " to "
-                        + OrderLines.ohm(l.maxTerminalOhm())
-                        + " between terminals, worst case of the fab")
-            .orElse("none: within the fab's tolerance a track could be etched away"));
+        limits.isEmpty()
+            ? "none: within the fab's tolerance a track could be etched away"
+            : PairLimits.span(limits)
+                + ", "
+                + pairs(limits, f.terminals().size())
+                + ", worst case of the fab");
     page.item("imbalance", Numbers.fixed(f.imbalancePercent(), 2) + " %");
+  }
+
+  private static String pairs(List<PairLimits> limits, int all) {
+    if (limits.size() == 1) {
+      return limits.get(0).pair();
+    }
+    return limits.size() == all ? "any pair" : "any pair without a star point";
   }
 
   private static String phase(PhaseOhm p) {
@@ -116,22 +114,8 @@ public final class Summary {
     return t.key() + " " + OrderLines.ohm(t.ohm());
   }
 
-  private void end(Optional<String> where) {
-    page.blank();
-    int broken = r.rules().findings().size();
-    String fab = r.fab().title();
-    if (r.rules().passed()) {
-      page.good("MAY BE MADE", "every rule checked is kept: " + fab);
-    } else {
-      page.bad(
-          "MAY NOT BE MADE",
-          broken + (broken == 1 ? " place breaks" : " places break") + " the rules: " + fab);
-    }
-    page.item("cautions", Cautions.line(r));
+  static void end(Page page, Results r, Map<String, Object> figures, Optional<String> where) {
+    Verdicts.add(page, r, figures);
     where.ifPresent(w -> page.item("files", (r.artwork().draft() ? "DRAFT, " : "") + w));
-  }
-
-  private static String mm(double v) {
-    return Numbers.trimmed(v, 3) + " mm";
   }
 }

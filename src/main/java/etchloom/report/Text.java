@@ -4,11 +4,11 @@ import java.util.ArrayList;
 import java.util.List;
 
 /** Text for a terminal: safe to print, and measured in columns. */
-final class Text {
+public final class Text {
   private Text() {}
 
   /** Control characters and those that hide or turn the writing direction become {@code ?}. */
-  static String safe(String s) {
+  public static String safe(String s) {
     StringBuilder out = new StringBuilder(s.length());
     s.codePoints().forEach(c -> out.appendCodePoint(printable(c) ? c : '?'));
     return out.toString();
@@ -29,7 +29,7 @@ final class Text {
   }
 
   /** Columns on a terminal: two for the wide scripts and pictures, none for combining marks. */
-  static int columns(String s) {
+  public static int columns(String s) {
     return s.codePoints().map(Text::columns).sum();
   }
 
@@ -53,7 +53,7 @@ final class Text {
   }
 
   /** Cut to so many columns, with {@code ...} where something is left out. */
-  static String cut(String s, int columns) {
+  public static String cut(String s, int columns) {
     if (columns(s) <= columns) {
       return s;
     }
@@ -70,17 +70,17 @@ final class Text {
   }
 
   /** Filled up with spaces on the right. */
-  static String left(String s, int columns) {
+  public static String left(String s, int columns) {
     return s + " ".repeat(Math.max(0, columns - columns(s)));
   }
 
   /** Filled up with spaces on the left. */
-  static String right(String s, int columns) {
+  public static String right(String s, int columns) {
     return " ".repeat(Math.max(0, columns - columns(s))) + s;
   }
 
   /** Broken between words; a word longer than a line is cut into pieces. */
-  static List<String> wrap(String s, int columns) {
+  public static List<String> wrap(String s, int columns) {
     List<String> out = new ArrayList<>();
     String line = "";
     for (String word : s.split(" ", -1)) {

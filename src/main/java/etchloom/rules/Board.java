@@ -5,8 +5,6 @@ import etchloom.geometry.Nearest;
 import etchloom.geometry.Point;
 import etchloom.spec.FabRules;
 import etchloom.spec.Spec;
-import java.util.ArrayList;
-import java.util.List;
 import java.util.Optional;
 
 /** What is judged, what it is judged by, and measurements that several rules share. */
@@ -17,24 +15,17 @@ final class Board {
   private final Artwork artwork;
   private final Spec spec;
   private final FabRules fab;
-  private final RuleContext context;
-  private final List<LayerCopper> copper = new ArrayList<>();
-  private final List<CloseSearch> close = new ArrayList<>();
+  private final Outline outline;
+  private final Potentials potentials;
+  private final Exposure exposure;
 
   Board(Artwork artwork, Spec spec, FabRules fab, RuleContext context) {
     this.artwork = artwork;
     this.spec = spec;
     this.fab = fab;
-    this.context = context;
-    double space = spec.coil().spaceMm();
-    for (FabRules.CopperRow row : fab.copper()) {
-      space = Math.max(space, row.spaceMm());
-    }
-    for (int layer = 1; layer <= artwork.layers(); layer++) {
-      LayerCopper c = new LayerCopper(artwork, layer, space);
-      copper.add(c);
-      close.add(new CloseSearch(c, spaceMm(layer)));
-    }
+    outline = new Outline(artwork.profile());
+    potentials = new Potentials(artwork, spec, context);
+    exposure = new Exposure(artwork);
   }
 
   Artwork artwork() {
@@ -49,21 +40,16 @@ final class Board {
     return fab;
   }
 
-  RuleContext context() {
-    return context;
+  Outline outline() {
+    return outline;
   }
 
-  List<LayerCopper> copper() {
-    return copper;
+  Potentials potentials() {
+    return potentials;
   }
 
-  CloseSearch close(int layer) {
-    return close.get(layer - 1);
-  }
-
-  /** Greatest extent of the board's edge, mm. */
-  double sizeMm() {
-    return BoardShape.sizeMm(artwork.profile());
+  Exposure exposure() {
+    return exposure;
   }
 
   boolean outer(int layer) {

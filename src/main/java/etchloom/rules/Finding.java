@@ -20,4 +20,17 @@ public record Finding(
     double measured,
     double required,
     String unit,
-    String what) {}
+    String what) {
+
+  /** Distance of the place from the shaft's axis, mm. */
+  public double radiusMm() {
+    return at.norm();
+  }
+
+  /** Direction of the place seen from the shaft's axis, degrees in [0, 360). */
+  public double angleDegrees() {
+    double degrees = Math.toDegrees(at.angleRad());
+    double whole = degrees < 0 ? degrees + 360 : degrees + 0.0;
+    return whole < 360 ? whole : 0;
+  }
+}

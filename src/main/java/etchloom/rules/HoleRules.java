@@ -18,13 +18,13 @@ final class HoleRules implements Rule {
         continue;
       }
       double hole = j.hole().get();
-      String what = LayerCopper.jointWords(j);
+      Words what = Words.of(LayerCopper.jointWords(j));
       double ring = j.terminal() ? fab.ring().terminalMm() : fab.ring().viaMm();
       verdicts.add(
-          Measured.atLeast(RuleName.RING, 0, j.at(), (j.padMm() - hole) / 2, ring, () -> what)
+          Measured.atLeast(RuleName.RING, 0, j.at(), (j.padMm() - hole) / 2, ring, what)
               .ids(j.id(), 0));
       verdicts.add(
-          Measured.atLeast(RuleName.HOLE, 0, j.at(), hole, fab.hole().minMm(), () -> what)
+          Measured.atLeast(RuleName.HOLE, 0, j.at(), hole, fab.hole().minMm(), what)
               .ids(j.id(), 0));
       verdicts.add(
           Measured.atMost(RuleName.ASPECT, j.at(), thickness / hole, fab.hole().aspect(), "1", what)

@@ -5,7 +5,6 @@ import etchloom.artwork.Conductor;
 import etchloom.artwork.Joint;
 import etchloom.geometry.Arc;
 import etchloom.geometry.Line;
-import etchloom.geometry.Point;
 import etchloom.geometry.Segment;
 import etchloom.geometry.ShapeTree;
 import java.util.ArrayList;
@@ -25,6 +24,8 @@ final class LayerCopper {
   private final List<Piece> pieces;
   private final ShapeTree tree;
   private final Walk walk;
+  private final List<Segment> shapes;
+  private final double[] fatMm;
 
   /**
    * @param spaceMm the greatest space that will be asked for
@@ -40,15 +41,17 @@ final class LayerCopper {
       add(out, artwork, c);
     }
     pieces = List.copyOf(out);
-    double[] fat = new double[pieces.size()];
-    for (int i = 0; i < fat.length; i++) {
-      fat[i] = pieces.get(i).fatMm();
+    fatMm = new double[pieces.size()];
+    shapes = new ArrayList<>(fatMm.length);
+    for (int i = 0; i < fatMm.length; i++) {
+      fatMm[i] = pieces.get(i).fatMm();
+      shapes.add(pieces.get(i).shape());
     }
-    tree = new ShapeTree(pieces.stream().map(Piece::shape).toList(), fat);
+    tree = new ShapeTree(shapes, fatMm);
     walk = new Walk(artwork, tracks, spaceMm);
   }
 
-  int layer() {
+  int number() {
     return layer;
   }
 
@@ -64,6 +67,11 @@ final class LayerCopper {
     return walk;
   }
 
+  /** A search for what lies near other shapes, with no memory of earlier ones. */
+  Nearby nearby(double startMm) {
+    return new Nearby(tree, shapes, fatMm, startMm);
+  }
+
   private static void add(List<Piece> out, Artwork artwork, Conductor c) {
     List<Segment> path = c.path().segments();
     Joint first = artwork.joints().get(c.fromJoint());
@@ -75,7 +83,8 @@ final class LayerCopper {
       double from = k == 0 ? hidden(s, first, c) : 0;
       double to = length - (k == path.size() - 1 ? hidden(s.reversed(), last, c) : 0);
       if (to - from > SLIVER_MM) {
-        cut(out, new Piece(s, c.widthMm() / 2, c.id(), k, at, at + length, -1), at + from, at + to);
+        Piece whole = new Piece(s, c.widthMm() / 2, c.id(), k, at, at + length, -1);
+        cut(out, whole, at + from, at + to);
       }
       at += length;
     }
@@ -100,7 +109,7 @@ final class LayerCopper {
     int n = 1;
     if (whole.shape() instanceof Arc a) {
       double sweep = Math.abs(a.sweepRad()) * (toMm - fromMm) / whole.lengthMm();
-      n = (int) Math.ceil(sweep / ShapeTree.MAX_SWEEP_RAD);
+      n = ArcPieces.count(sweep);
     }
     if (n == 1 && fromMm == whole.fromMm() && toMm == whole.toMm()) {
       out.add(whole);
@@ -123,10 +132,5 @@ final class LayerCopper {
   /** {@code terminal U1}, or what the joint is called. */
   static String jointWords(Joint j) {
     return j.terminal() ? "terminal " + j.mark() : j.what();
-  }
-
-  /** A point of the piece, to tell its place. */
-  static Point place(Piece p) {
-    return p.shape().at(0.5);
   }
 }

@@ -13,6 +13,9 @@ import etchloom.geometry.Segment;
  * @param segment place of the shape in the conductor's path; -1 for a pad
  * @param fromMm length of the conductor's path up to the start of the shape; 0 for a pad
  * @param toMm the same for its end
+ * @param turnFromRad by how much the conductor's path has turned up to the start of the shape, left
+ *     and right alike counted as positive, corners included; 0 for a pad
+ * @param turnToRad the same for its end
  * @param joint of a pad; -1 for a track
  */
 record Piece(
@@ -45,8 +48,13 @@ record Piece(
 
   /** Length of the conductor's path up to a point of the shape. */
   double walkMm(Point p) {
-    double share =
-        shape.match(l -> p.distanceTo(l.start()) / l.lengthMm(), a -> angle(a, p) / a.sweepRad());
+    double share;
+    if (shape instanceof Line l) {
+      share = p.distanceTo(l.start()) / l.lengthMm();
+    } else {
+      Arc a = (Arc) shape;
+      share = angle(a, p) / a.sweepRad();
+    }
     // Not finite where the piece has no length.
     return fromMm + (share > 0 ? lengthMm() * Math.min(1, share) : 0);
   }

@@ -1,6 +1,6 @@
 package etchloom.rules;
 
-/** One rule, or rules that share their measurements. */
+/** A rule, or rules that share their measurements, about the board as a whole. */
 @FunctionalInterface
 interface Rule {
   void check(Board board, Verdicts verdicts);

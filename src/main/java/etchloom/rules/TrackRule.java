@@ -21,7 +21,7 @@ final class TrackRule implements Rule {
                               middle.at(0.5),
                               c.widthMm(),
                               row.trackMm(),
-                              () -> c.what().describe(-1))
+                              Words.of(c.what().describe(-1)))
                           .ids(c.id(), 0)));
     }
   }

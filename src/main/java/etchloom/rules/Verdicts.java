@@ -2,13 +2,10 @@ package etchloom.rules;
 
 import etchloom.geometry.Point;
 import java.util.ArrayList;
-import java.util.Comparator;
 import java.util.EnumMap;
 import java.util.HashMap;
 import java.util.List;
-import java.util.Locale;
 import java.util.Map;
-import java.util.function.Supplier;
 
 /**
  * Collects what the rules measure: the tightest place of each, and those that break it.
@@ -42,20 +39,20 @@ final class Verdicts {
       double tightness,
       long first,
       long second,
-      Supplier<String> what) {
+      Words what) {
 
     /** A length that must reach what is required, 1 nm of slack given. */
     static Measured atLeast(
-        RuleName rule, int layer, Point at, double mm, double required, Supplier<String> what) {
+        RuleName rule, int layer, Point at, double mm, double required, Words what) {
       return new Measured(
           rule, layer, at, mm, required, "mm", mm >= required - STEP_MM, mm, 0, 0, what);
     }
 
     /** A value that must not pass what is required. */
     static Measured atMost(
-        RuleName rule, Point at, double value, double required, String unit, String what) {
+        RuleName rule, Point at, double value, double required, String unit, Words what) {
       boolean kept = value <= required + 1e-9 * Math.max(1, Math.abs(required));
-      return new Measured(rule, 0, at, value, required, unit, kept, -value, 0, 0, () -> what);
+      return new Measured(rule, 0, at, value, required, unit, kept, -value, 0, 0, what);
     }
 
     Measured ids(long a, long b) {
@@ -74,25 +71,31 @@ final class Verdicts {
 
     Finding finding() {
       return new Finding(
-          rule.word(), layer == 0 ? "" : "L" + layer, at, value, required, unit, what.get());
+          rule.word(), layer == 0 ? "" : "L" + layer, at, value, required, unit, what.toString());
     }
   }
 
-  private static final Comparator<Measured> TIGHTEST =
-      Comparator.comparing(Measured::kept)
-          .thenComparingLong(Measured::step)
-          .thenComparingInt(Measured::layer)
-          .thenComparingLong(Measured::first)
-          .thenComparingLong(Measured::second)
-          .thenComparingDouble(m -> m.at().x())
-          .thenComparingDouble(m -> m.at().y());
+  /** The tightest first. */
+  private static int byTightness(Measured a, Measured b) {
+    int c = Boolean.compare(a.kept(), b.kept());
+    c = c != 0 ? c : Long.compare(a.step(), b.step());
+    c = c != 0 ? c : Integer.compare(a.layer(), b.layer());
+    return c != 0 ? c : byIds(a, b);
+  }
 
-  private static final Comparator<Measured> BY_PLACE =
-      Comparator.comparingInt(Measured::layer)
-          .thenComparingDouble(m -> m.at().x())
-          .thenComparingDouble(m -> m.at().y())
-          .thenComparingLong(Measured::first)
-          .thenComparingLong(Measured::second);
+  private static int byPlace(Measured a, Measured b) {
+    int c = Integer.compare(a.layer(), b.layer());
+    c = c != 0 ? c : Double.compare(a.at().x(), b.at().x());
+    c = c != 0 ? c : Double.compare(a.at().y(), b.at().y());
+    return c != 0 ? c : byIds(a, b);
+  }
+
+  private static int byIds(Measured a, Measured b) {
+    int c = Long.compare(a.first(), b.first());
+    c = c != 0 ? c : Long.compare(a.second(), b.second());
+    c = c != 0 ? c : Double.compare(a.at().x(), b.at().x());
+    return c != 0 ? c : Double.compare(a.at().y(), b.at().y());
+  }
 
   private record Things(int layer, String what) {}
 
@@ -102,16 +105,25 @@ final class Verdicts {
 
   /** A broken place is told once for the same two things on a layer, where it is tightest. */
   void add(Measured m) {
-    tightest.merge(m.rule(), m, Verdicts::tighter);
+    Measured before = tightest.get(m.rule());
+    if (before == null || byTightness(m, before) < 0) {
+      tightest.put(m.rule(), m);
+    }
     if (!m.kept()) {
-      broken
-          .computeIfAbsent(m.rule(), k -> new HashMap<>())
-          .merge(new Things(m.layer(), m.what().get()), m, Verdicts::tighter);
+      Map<Things, Measured> all = broken.computeIfAbsent(m.rule(), k -> new HashMap<>());
+      Things things = new Things(m.layer(), m.what().toString());
+      Measured known = all.get(things);
+      if (known == null || byTightness(m, known) < 0) {
+        all.put(things, m);
+      }
     }
   }
 
-  private static Measured tighter(Measured a, Measured b) {
-    return TIGHTEST.compare(a, b) <= 0 ? a : b;
+  /** Takes over what was found elsewhere. */
+  void take(Verdicts other) {
+    other.tightest.values().forEach(this::add);
+    other.broken.values().forEach(all -> all.values().forEach(this::add));
+    notes.addAll(other.notes);
   }
 
   void note(String text) {
@@ -123,16 +135,20 @@ final class Verdicts {
     List<Finding> findings = new ArrayList<>();
     List<String> told = new ArrayList<>(notes);
     for (Map.Entry<RuleName, Map<Things, Measured>> e : broken.entrySet()) {
-      List<Measured> all = e.getValue().values().stream().sorted(TIGHTEST).toList();
-      all.stream().limit(LISTED).sorted(BY_PLACE).map(Measured::finding).forEach(findings::add);
+      List<Measured> all = e.getValue().values().stream().sorted(Verdicts::byTightness).toList();
+      all.stream()
+          .limit(LISTED)
+          .sorted(Verdicts::byPlace)
+          .map(Measured::finding)
+          .forEach(findings::add);
       if (all.size() > LISTED) {
         told.add(
-            String.format(
-                Locale.ROOT,
-                "%s: broken at %d places; the %d tightest are listed",
-                e.getKey().word(),
-                all.size(),
-                LISTED));
+            e.getKey().word()
+                + ": broken at "
+                + all.size()
+                + " places; the "
+                + LISTED
+                + " tightest are listed");
       }
     }
     return new RuleReport(minima, findings, told);

@@ -4,6 +4,7 @@ import etchloom.artwork.Artwork;
 import etchloom.artwork.Conductor;
 import etchloom.artwork.Joint;
 import java.util.ArrayList;
+import java.util.Arrays;
 import java.util.Comparator;
 import java.util.HashMap;
 import java.util.List;
@@ -26,6 +27,16 @@ final class Walk {
       return base + a * firstMm + b * secondMm;
     }
 
+    /** Where on the first piece its neighbours on the second end; not finite where nowhere. */
+    double firstAtMm(Piece q, double nearMm) {
+      return (nearMm - base - b * (b > 0 ? q.fromMm() : q.toMm())) / a;
+    }
+
+    /** The same for the second piece. */
+    double secondAtMm(Piece p, double nearMm) {
+      return (nearMm - base - a * (a > 0 ? p.fromMm() : p.toMm())) / b;
+    }
+
     double leastMm(Piece p, Piece q) {
       return lengthMm(a > 0 ? p.fromMm() : p.toMm(), b > 0 ? q.fromMm() : q.toMm());
     }
@@ -45,10 +56,10 @@ final class Walk {
   }
 
   private final List<Conductor> conductors;
-  private final Map<Integer, Double> lengthMm = new HashMap<>();
+  private final double[] lengthMm;
+  private final double[] narrowestMm;
   private final Map<Integer, List<Hop>> hops = new HashMap<>();
   private final Map<Integer, Map<Integer, Double>> reached = new HashMap<>();
-  private final Map<Integer, Double> narrowestMm = new HashMap<>();
   private final double farthestMm;
 
   /**
@@ -57,13 +68,16 @@ final class Walk {
    */
   Walk(Artwork artwork, List<Conductor> tracks, double spaceMm) {
     conductors = artwork.conductors();
+    lengthMm = new double[conductors.size()];
+    narrowestMm = new double[artwork.joints().size()];
+    Arrays.fill(narrowestMm, Double.POSITIVE_INFINITY);
     double widest = 0;
     for (Conductor c : tracks) {
       double length = c.path().lengthMm();
-      lengthMm.put(c.id(), length);
+      lengthMm[c.id()] = length;
       widest = Math.max(widest, c.widthMm());
-      narrowestMm.merge(c.fromJoint(), c.widthMm(), Math::min);
-      narrowestMm.merge(c.toJoint(), c.widthMm(), Math::min);
+      narrowestMm[c.fromJoint()] = Math.min(narrowestMm[c.fromJoint()], c.widthMm());
+      narrowestMm[c.toJoint()] = Math.min(narrowestMm[c.toJoint()], c.widthMm());
       hops.computeIfAbsent(c.fromJoint(), k -> new ArrayList<>()).add(new Hop(c.toJoint(), length));
       hops.computeIfAbsent(c.toJoint(), k -> new ArrayList<>()).add(new Hop(c.fromJoint(), length));
     }
@@ -90,11 +104,18 @@ final class Walk {
     if (!of.isPad()) {
       return 2 * of.fatMm();
     }
-    return partner.isPad() ? narrowestMm.getOrDefault(of.joint(), 0.0) : 2 * partner.fatMm();
+    if (!partner.isPad()) {
+      return 2 * partner.fatMm();
+    }
+    double narrowest = narrowestMm[of.joint()];
+    return Double.isFinite(narrowest) ? narrowest : 0;
   }
 
   /** All ways between two different pieces that are somewhere no longer than the limit. */
   List<Way> ways(Piece p, Piece q, double limitMm) {
+    if (p.conductor() != q.conductor() && (far(p, limitMm) || far(q, limitMm))) {
+      return List.of();
+    }
     List<Way> out = new ArrayList<>(2);
     if (!p.isPad() && p.conductor() == q.conductor()) {
       boolean forward = p.fromMm() <= q.fromMm();
@@ -120,6 +141,11 @@ final class Walk {
     }
   }
 
+  /** Whether no way from the piece to a joint is within the limit. */
+  private boolean far(Piece p, double limitMm) {
+    return !p.isPad() && p.fromMm() > limitMm && lengthMm[p.conductor()] - p.toMm() > limitMm;
+  }
+
   private List<End> ends(Piece p, double limitMm) {
     if (p.isPad()) {
       return List.of(new End(p.joint(), 0, 0));
@@ -127,7 +153,7 @@ final class Walk {
     Conductor c = conductors.get(p.conductor());
     List<End> out = new ArrayList<>(2);
     End back = new End(c.fromJoint(), 0, 1);
-    End ahead = new End(c.toJoint(), lengthMm.get(c.id()), -1);
+    End ahead = new End(c.toJoint(), lengthMm[c.id()], -1);
     if (back.leastMm(p) <= limitMm) {
       out.add(back);
     }

@@ -17,13 +17,16 @@ record BoardDraft(
     double bore,
     Optional<HolesDraft> holes,
     TerminalsDraft terminals,
+    Optional<TabDraft> tab,
     boolean starPointOut,
     String finish,
     String mask,
     double laminateTg) {
 
-  private static final Map<String, Boolean> STAR_POINT =
+  static final Map<String, Boolean> STAR_POINT =
       Words.of("inside", false).and("terminal", true).map();
+
+  private static final double LAMINATE_TG_C = 150;
 
   static BoardDraft read(Section s) {
     int layers = s.count("layers", Limits.LAYERS_MIN, Limits.LAYERS_MAX, true).required();
@@ -38,18 +41,20 @@ record BoardDraft(
             s.length("bore", Limits.DIAMETER_OR_NONE).or(0),
             s.optionalGroup("holes").map(HolesDraft::read),
             s.optionalGroup("terminals").map(TerminalsDraft::read).orElse(TerminalsDraft.DEFAULT),
+            s.optionalGroup("tab").map(TabDraft::read),
             s.word("star-point", STAR_POINT).or(false),
-            s.text("finish", Limits.WORDS_MAX, "a finish, such as ENIG").or("ENIG"),
-            s.text("mask", Limits.WORDS_MAX, "a colour, such as green").or("green"),
-            s.optionalGroup("laminate").map(BoardDraft::glassTransition).orElse(150.0));
+            Titles.plain(s, "finish", "a finish, such as ENIG").orElse("ENIG"),
+            Titles.plain(s, "mask", "a colour, such as green").orElse("green"),
+            s.optionalGroup("laminate").map(BoardDraft::glassTransition).orElse(LAMINATE_TG_C));
     s.close();
     draft.checkBore();
     draft.checkStackup();
+    draft.tab().ifPresent(t -> t.checkPlace(draft.diameter(), draft.terminals()));
     return draft;
   }
 
   private static double glassTransition(Section s) {
-    double tg = s.number("tg", Dimension.TEMPERATURE, Limits.TEMPERATURES).or(150);
+    double tg = s.number("tg", Dimension.TEMPERATURE, Limits.TEMPERATURES).or(LAMINATE_TG_C);
     s.close();
     return tg;
   }
@@ -94,10 +99,11 @@ record BoardDraft(
         diameter,
         bore,
         holes.map(HolesDraft::build),
-        terminals.build(),
+        terminals.build(tab.map(t -> t.angle(terminals)).orElse(terminals.start())),
         starPointOut,
         finish,
         mask,
-        laminateTg);
+        laminateTg,
+        tab.map(t -> t.build(terminals)));
   }
 }

@@ -18,15 +18,18 @@ record CoilDraft(
     double track,
     double space,
     OptionalDouble corner,
-    boolean parallelLayers) {
+    boolean parallelLayers,
+    boolean taper) {
 
-  private static final Map<String, CoilOutline> OUTLINES =
+  static final Map<String, CoilOutline> OUTLINES =
       Words.of("wedge", CoilOutline.WEDGE)
           .and("round", CoilOutline.ROUND)
           .and("racetrack", CoilOutline.RACETRACK)
           .map();
-  private static final Map<String, Boolean> LAYERS =
-      Words.of("series", false).and("parallel", true).map();
+  static final Map<String, Boolean> LAYERS = Words.of("series", false).and("parallel", true).map();
+
+  /** Whether the track widens where the wedge has room for it. */
+  private static final Map<String, Boolean> TAPER = Words.of("off", false).and("on", true).map();
 
   static CoilDraft read(Section s) {
     CoilDraft draft =
@@ -40,7 +43,8 @@ record CoilDraft(
             s.length("track", Limits.COPPER_SIZE).required(),
             s.length("space", Limits.COPPER_SIZE).required(),
             s.length("corner", Limits.FILLET).optional(),
-            s.word("layers", LAYERS).or(false));
+            s.word("layers", LAYERS).or(false),
+            s.word("taper", TAPER).or(false));
     s.close();
     draft.check();
     return draft;
@@ -72,6 +76,9 @@ record CoilDraft(
               + " has no room for a turn between the radii, "
               + Show.mm(outerRadius - innerRadius)
               + " apart");
+    }
+    if (outline.isPresent() && outline.get() == CoilOutline.ROUND && section.has("corner")) {
+      section.error(Codes.KEY_CONFLICT, "corner", "a coil of outline round has no corners");
     }
     boolean racetrack = outline.isPresent() && outline.get() == CoilOutline.RACETRACK;
     if (racetrack) {

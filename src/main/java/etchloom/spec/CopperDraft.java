@@ -43,7 +43,7 @@ record CopperDraft(Copper outer, Copper inner) {
 
   private static Optional<Copper> copper(Scalar v, ValueReader reader) {
     boolean byWeight = v.text().endsWith("oz");
-    Range range = byWeight ? Limits.WEIGHT : Limits.FINISHED_COPPER;
+    Range range = byWeight ? Limits.WEIGHT : Limits.ORDERED_COPPER;
     Quantity q = reader.quantity(v, Dimension.COPPER, range);
     if (!q.ok()) {
       return Optional.empty();

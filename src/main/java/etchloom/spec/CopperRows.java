@@ -16,8 +16,7 @@ final class CopperRows {
   private CopperRows() {}
 
   private static final String KEY = "copper";
-  private static final Map<String, Boolean> SIDES =
-      Words.of("outer", true).and("inner", false).map();
+  static final Map<String, Boolean> SIDES = Words.of("outer", true).and("inner", false).map();
 
   static List<CopperRow> read(Section top, List<Integer> layers) {
     top.missing(KEY, "a row for every copper weight that the fab offers");
@@ -30,13 +29,15 @@ final class CopperRows {
       s.close();
       checkEtch(s, row);
       faulty |= outer.isEmpty();
-      if (!Double.isNaN(row.ounces()) && !seen.add(row.ounces() + (row.outer() ? "o" : "i"))) {
+      if (outer.isPresent()
+          && !Double.isNaN(row.ounces())
+          && !seen.add(row.ounces() + (row.outer() ? "o" : "i"))) {
         String weight = Numbers.trimmed(row.ounces(), 3) + " oz";
         s.error(Codes.FAB, "weight", "there is already a row for " + weight + " on these layers");
       }
       rows.add(row);
     }
-    if (!faulty && top.has(KEY)) {
+    if (!faulty && !rows.isEmpty()) {
       checkSides(top, rows, layers);
     }
     return rows;

@@ -19,8 +19,7 @@ record DutyDraft(
     double copperLimit,
     double cooling) {
 
-  private static final Map<String, Boolean> USES =
-      Words.of("motor", false).and("generator", true).map();
+  static final Map<String, Boolean> USES = Words.of("motor", false).and("generator", true).map();
 
   /** The default of the current loop's bandwidth: a twentieth of the switching frequency. */
   private static final double BANDWIDTH_SHARE = 20;

@@ -17,12 +17,9 @@ final class FabDraft {
   private FabDraft() {}
 
   static FabRules read(Section top) {
-    String title = top.text("title", Limits.TITLE_MAX, "a text").required().orElse("");
+    String title = Titles.fabTitle(top);
     top.missing("layers", "the layer counts that the fab builds, such as `[2, 4]`");
     List<Integer> layers = top.counts("layers", Limits.LAYERS_MIN, Limits.LAYERS_MAX, true);
-    if (top.has("layers") && layers.isEmpty() && !top.findings().failed()) {
-      top.error(Codes.FAB, "layers", "the list is empty; name at least one layer count");
-    }
     List<Stackup> stackups = stackups(top, layers);
     Section thickness = top.group("thickness");
     double thin = rule(thickness, "min");

@@ -3,8 +3,7 @@ package etchloom.spec;
 import etchloom.diagnostic.Findings;
 import etchloom.diagnostic.Staged;
 import etchloom.spec.yaml.YamlFile;
-import etchloom.spec.yaml.YamlNode.Mapping;
-import java.util.Optional;
+import etchloom.spec.yaml.YamlTree;
 
 /** Reads a fab's rules file, with the same care and the same bounds as {@link SpecReader}. */
 public final class FabReader {
@@ -15,10 +14,17 @@ public final class FabReader {
   /** Reads a rules file's bytes; {@code fileName} is for messages only. */
   public static Staged<FabRules> read(String fileName, byte[] bytes) {
     Findings findings = new Findings();
-    Optional<Mapping> root = YamlFile.read(fileName, bytes, findings);
-    return root.isEmpty()
-        ? Staged.failed(findings.sorted())
-        : check(fileName, root.get(), findings);
+    return YamlFile.read(fileName, bytes, VERSION_KEY + ": 1", findings)
+        .map(tree -> check(tree, findings))
+        .orElseGet(() -> Staged.failed(findings.sorted()));
+  }
+
+  /**
+   * Whether a {@code fab:} value, which holds a dot or a slash, names a rules file (relative to the
+   * spec) rather than a built-in class.
+   */
+  public static boolean isPath(String fab) {
+    return fab.indexOf('.') >= 0 || fab.indexOf('/') >= 0;
   }
 
   /** A built-in class. */
@@ -28,8 +34,8 @@ public final class FabReader {
         .orElseThrow(() -> new IllegalStateException("fab class " + name + ": " + read));
   }
 
-  private static Staged<FabRules> check(String fileName, Mapping root, Findings findings) {
-    Section top = Section.top(findings, fileName, root);
+  private static Staged<FabRules> check(YamlTree tree, Findings findings) {
+    Section top = Section.top(findings, tree);
     if (!FormatVersion.check(top, VERSION_KEY, SpecReader.VERSION_KEY, "a spec")) {
       return Staged.failed(findings.sorted());
     }

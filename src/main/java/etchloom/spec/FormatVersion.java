@@ -7,7 +7,7 @@ import java.util.Optional;
 final class FormatVersion {
   private FormatVersion() {}
 
-  private static final String KNOWN = "1";
+  static final String KNOWN = "1";
 
   /**
    * Whether the file can be read further. A missing version is reported and the reading goes on; a

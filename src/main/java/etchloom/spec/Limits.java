@@ -39,9 +39,10 @@ final class Limits {
   /** Copper widths, gaps and fillets, and everything else that is drawn in copper. */
   static final Range COPPER_SIZE = Range.of(LENGTH, "0.02 mm", "20 mm");
 
-  static final Range FILLET = Range.above(LENGTH, "0 mm", "100 mm");
-  static final Range RADIUS = Range.above(LENGTH, "0 mm", "500 mm");
-  static final Range DIAMETER = Range.above(LENGTH, "0 mm", "1000 mm");
+  static final Range FILLET = Range.of(LENGTH, "0.01 mm", "100 mm");
+  static final Range RADIUS = Range.of(LENGTH, "0.1 mm", "500 mm");
+  static final Range DIAMETER = Range.of(LENGTH, "1 mm", "1000 mm");
+  static final Range TAB = Range.of(LENGTH, "1 mm", "500 mm");
   static final Range DIAMETER_OR_NONE = Range.of(LENGTH, "0 mm", "1000 mm");
   static final Range HOLE = Range.of(LENGTH, "0.05 mm", "10 mm");
   static final Range SCREW_HOLE = Range.of(LENGTH, "0.2 mm", "100 mm");
@@ -49,26 +50,31 @@ final class Limits {
   static final Range PITCH = Range.of(LENGTH, "0.2 mm", "50 mm");
   static final Range BOARD_THICKNESS = Range.of(LENGTH, "0.1 mm", "10 mm");
   static final Range DIELECTRIC = Range.of(LENGTH, "0.01 mm", "10 mm");
+  static final Range ORDERED_COPPER =
+      Range.of(LENGTH, "5 um", "500 um").named("0.1 oz to 15 oz or 5 um to 500 um");
   static final Range FINISHED_COPPER = Range.of(LENGTH, "5 um", "500 um");
   static final Range WEIGHT = Range.of(COPPER_WEIGHT, "0.1 oz", "15 oz");
-  static final Range GAP = Range.above(LENGTH, "0 mm", "100 mm");
-  static final Range MAGNET_SIZE = Range.above(LENGTH, "0 mm", "500 mm");
+
+  /** A magnet that touches the board cannot turn. */
+  static final Range GAP = Range.of(LENGTH, "0.01 mm", "100 mm");
+
+  static final Range MAGNET_SIZE = Range.of(LENGTH, "0.1 mm", "500 mm");
   static final Range ANY_ANGLE = Range.of(ANGLE, "-360 deg", "360 deg");
-  static final Range SPAN = Range.above(ANGLE, "0 deg", "180 deg");
+  static final Range SPAN = Range.of(ANGLE, "0.1 deg", "180 deg");
 
   /** No permanent magnet comes near 2 T; sintered neodymium ends at about 1.5 T. */
-  static final Range REMANENCE = Range.above(FLUX_DENSITY, "0 T", "2 T");
+  static final Range REMANENCE = Range.of(FLUX_DENSITY, "0.01 T", "2 T");
 
   static final Range DRIFT = Range.of(RATIO, "-2 %", "2 %");
   static final Range TEMPERATURES = Range.of(TEMPERATURE, "-200 C", "500 C");
   static final Range DENSITY = Range.of(RATIO, "100", "30000");
-  static final Range TORQUES = Range.above(TORQUE, "0 N m", "10000 N m");
-  static final Range LOAD = Range.above(RESISTANCE, "0 ohm", "1000000 ohm");
-  static final Range BUS = Range.above(VOLTAGE, "0 V", "10000 V");
-  static final Range SPEEDS = Range.above(SPEED, "0 rpm", "200000 rpm");
-  static final Range CURRENTS = Range.above(CURRENT, "0 A", "1000 A");
-  static final Range FREQUENCIES = Range.above(FREQUENCY, "0 Hz", "10 MHz");
-  static final Range COOLING = Range.above(HEAT_TRANSFER, "0 W/m2K", "100000 W/m2K");
+  static final Range TORQUES = Range.of(TORQUE, "0.0001 mN m", "10000 N m");
+  static final Range LOAD = Range.of(RESISTANCE, "0.1 mohm", "1000000 ohm");
+  static final Range BUS = Range.of(VOLTAGE, "1 mV", "10000 V");
+  static final Range SPEEDS = Range.of(SPEED, "0.01 rpm", "200000 rpm");
+  static final Range CURRENTS = Range.of(CURRENT, "0.01 mA", "1000 A");
+  static final Range FREQUENCIES = Range.of(FREQUENCY, "1 Hz", "10 MHz");
+  static final Range COOLING = Range.of(HEAT_TRANSFER, "0.01 W/m2K", "100000 W/m2K");
 
   static final Range RULE = Range.of(LENGTH, "0 mm", "20 mm");
   static final Range PLATING = Range.of(LENGTH, "1 um", "200 um");

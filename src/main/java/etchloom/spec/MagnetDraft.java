@@ -3,6 +3,7 @@ package etchloom.spec;
 import etchloom.spec.Spec.Magnet;
 import etchloom.spec.Spec.MagnetOutline;
 import etchloom.units.Dimension;
+import etchloom.units.Numbers;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
@@ -25,11 +26,17 @@ record MagnetDraft(
     double density,
     double limit) {
 
-  private static final Map<String, MagnetOutline> OUTLINES =
+  static final Map<String, MagnetOutline> OUTLINES =
       Words.of("disc", MagnetOutline.DISC)
           .and("sector", MagnetOutline.SECTOR)
           .and("block", MagnetOutline.BLOCK)
           .map();
+
+  /** The temperature that the remanence is stated for. */
+  private static final double REMANENCE_C = 20;
+
+  /** With less than this share left, a straight line says nothing about the magnet any more. */
+  private static final double LEAST_REMANENCE = 0.1;
 
   private static final List<String> SIZE_KEYS =
       List.of(
@@ -57,6 +64,7 @@ record MagnetDraft(
             s.number("limit", Dimension.TEMPERATURE, Limits.TEMPERATURES).or(80));
     s.close();
     draft.checkHeat();
+    draft.checkRemanence();
     return draft;
   }
 
@@ -76,17 +84,12 @@ record MagnetDraft(
         s.error(
             Codes.KEY_CONFLICT,
             key,
-            "a magnet of outline " + word(outline) + " has no such size; it takes " + takes);
+            "a magnet of outline "
+                + Words.wordFor(OUTLINES, outline)
+                + " has no such size; it takes "
+                + takes);
       }
     }
-  }
-
-  private static String word(MagnetOutline outline) {
-    return OUTLINES.entrySet().stream()
-        .filter(e -> e.getValue() == outline)
-        .findFirst()
-        .orElseThrow()
-        .getKey();
   }
 
   private static double size(Section s, String key, Optional<MagnetOutline> outline) {
@@ -112,6 +115,23 @@ record MagnetDraft(
               + ", above its limit of "
               + Show.celsius(limit)
               + ": it may lose its magnetisation for good");
+    }
+  }
+
+  /** The drift is a straight line, which no magnet follows down to nought. */
+  private void checkRemanence() {
+    double share = 1 + drift * (temperature - REMANENCE_C);
+    if (share < LEAST_REMANENCE) {
+      section.error(
+          Codes.MAGNET_HEAT,
+          section.has("remanence-drift") ? "remanence-drift" : "temperature",
+          "at "
+              + Show.celsius(temperature)
+              + " this drift leaves "
+              + Numbers.trimmed(100 * share, 1)
+              + " % of the remanence; at least "
+              + Numbers.trimmed(100 * LEAST_REMANENCE, 0)
+              + " % must be left");
     }
   }
 

@@ -7,6 +7,9 @@ final class MagnetFit {
   /** Magnets may touch; this much overlap, mm and rad, is rounding. */
   private static final double SLACK = 1e-9;
 
+  /** Keeps a whole number of thousandths from being rounded down to the one below. */
+  private static final double ROUNDING = 1e-7;
+
   static void check(MagnetDraft m, int poles, double discDiameter) {
     if (m.outline().isEmpty()) {
       return;
@@ -17,6 +20,9 @@ final class MagnetFit {
         case SECTOR -> sectors(m, poles);
         case BLOCK -> blocks(m, poles);
       }
+    }
+    if (m.outline().get() == Spec.MagnetOutline.SECTOR) {
+      radii(m);
     }
     double reach = reachMm(m);
     if (reach > discDiameter / 2 + SLACK) {
@@ -42,8 +48,11 @@ final class MagnetFit {
   private static void sectors(MagnetDraft m, int poles) {
     double room = 2 * Math.PI / poles;
     if (m.span() > room + SLACK) {
-      overlap(m, "span", Show.degrees(m.span()), poles, "at most " + Show.degrees(room));
+      overlap(m, "span", Show.degrees(m.span()), poles, "at most " + degreesDown(room));
     }
+  }
+
+  private static void radii(MagnetDraft m) {
     if (m.innerRadius() >= m.outerRadius()) {
       m.section()
           .error(
@@ -83,7 +92,11 @@ final class MagnetFit {
   }
 
   private static String mmDown(double mm) {
-    return Show.mm(Math.floor(mm * 1000) / 1000);
+    return Show.mm(Math.floor(mm * 1000 + ROUNDING) / 1000);
+  }
+
+  private static String degreesDown(double rad) {
+    return Show.degrees(Math.toRadians(Math.floor(Math.toDegrees(rad) * 1000 + ROUNDING) / 1000));
   }
 
   private static double reachMm(MagnetDraft m) {

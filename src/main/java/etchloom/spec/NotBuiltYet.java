@@ -1,8 +1,5 @@
 package etchloom.spec;
 
-import etchloom.spec.Spec.CoilOutline;
-import java.util.Optional;
-
 /**
  * Keys of the format whose capability comes later. They are read and checked like all others and
  * then refused here, in one place; a capability that lands takes its lines out.
@@ -10,22 +7,9 @@ import java.util.Optional;
 final class NotBuiltYet {
   private NotBuiltYet() {}
 
-  static void check(WindingDraft winding, CoilDraft coil, ViaDraft via) {
-    Optional<CoilOutline> outline = coil.outline();
-    if (outline.isPresent() && outline.get() != CoilOutline.WEDGE) {
-      refuse(coil.section(), "outline", "only `outline: wedge`");
-    }
-    if (coil.parallelLayers()) {
-      refuse(coil.section(), "layers", "only `layers: series`");
-    }
-    if (winding.paths() > 1) {
-      refuse(winding.section(), "parallel-paths", "only `parallel-paths: 1`");
-    }
-    if (winding.phases() != CountField.FAULTY && winding.phases() != 3) {
-      refuse(winding.section(), "phases", "only `phases: 3`");
-    }
-    if (via.count() > 1) {
-      refuse(via.section(), "count", "only `count: 1`");
+  static void check(CoilDraft coil) {
+    if (coil.taper()) {
+      refuse(coil.section(), "taper", "only `taper: off`");
     }
   }
 

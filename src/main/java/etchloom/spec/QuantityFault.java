@@ -5,6 +5,7 @@ import etchloom.diagnostic.SourceSpan;
 import etchloom.units.Dimension;
 import etchloom.units.Quantity;
 import etchloom.units.Unit;
+import java.util.List;
 import java.util.Locale;
 import java.util.Optional;
 
@@ -20,10 +21,10 @@ final class QuantityFault {
       String text,
       Quantity q,
       Dimension dimension,
-      String range) {
+      Range range) {
     String units = Show.units(dimension.units());
-    String wanted = dimension.phrase() + " in " + units + ", " + range;
-    String example = q.number() + " " + dimension.units().get(0).symbol();
+    String wanted = dimension.phrase() + " in " + units + ", " + range.text();
+    String example = q.number() + " " + likelyUnit(q, dimension, range);
     String found = Show.found(text) + " was found; ";
     switch (q.fault()) {
       case MISSING_UNIT ->
@@ -60,23 +61,42 @@ final class QuantityFault {
     }
   }
 
+  /** The first unit that makes the number a value which the key takes. */
+  private static String likelyUnit(Quantity q, Dimension dimension, Range range) {
+    if (dimension == Dimension.COPPER) { // nobody orders 35 oz
+      return Limits.WEIGHT.holds(Quantity.read(q.number() + " oz", dimension).value())
+          ? "oz"
+          : "um";
+    }
+    return dimension.units().stream()
+        .map(Unit::symbol)
+        .filter(u -> range.holds(Quantity.read(q.number() + " " + u, dimension).value()))
+        .findFirst()
+        .orElse(dimension.units().get(0).symbol());
+  }
+
   private static String line(String key, String value) {
     return key + ": " + value;
   }
 
-  /** The unit that differs only in case, in spaces, in a degree sign or in the sign for ohm. */
+  /**
+   * The unit that differs only in case, in spaces, in a degree sign or in the sign for ohm; else
+   * the nearest.
+   */
   private static Optional<String> meant(String unit, Dimension dimension) {
     String plain = plain(unit);
-    return dimension.units().stream()
-        .map(Unit::symbol)
+    List<String> symbols = dimension.units().stream().map(Unit::symbol).toList();
+    return symbols.stream()
         .filter(symbol -> plain(symbol).equals(plain))
-        .findFirst();
+        .findFirst()
+        .or(() -> Suggest.nearest(unit, symbols));
   }
 
   private static String plain(String unit) {
     String s = unit.toLowerCase(Locale.ROOT).replace("\u03c9", "ohm");
     StringBuilder out = new StringBuilder();
-    for (char c : s.toCharArray()) {
+    for (int i = 0; i < s.length(); i++) {
+      char c = s.charAt(i);
       if (c != ' ' && c != '\u00b0' && c != '.' && c != '*' && c != '\u00b7') {
         out.append(c);
       }

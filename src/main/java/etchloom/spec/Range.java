@@ -7,25 +7,23 @@ import etchloom.units.Quantity;
  * The values that a key takes.
  *
  * @param minimum smallest, in the dimension's base unit
- * @param open whether the minimum itself is left out
  * @param maximum largest, in the base unit
  * @param text for messages, in the units in which the range was written
  */
-record Range(double minimum, boolean open, double maximum, String text) {
-  /** Both ends allowed. */
+record Range(double minimum, double maximum, String text) {
+  /** Both ends are allowed. */
   static Range of(Dimension dimension, String minimum, String maximum) {
     String text = minimum + " to " + maximum;
-    return new Range(value(minimum, dimension), false, value(maximum, dimension), text);
+    return new Range(value(minimum, dimension), value(maximum, dimension), text);
   }
 
-  /** More than the minimum, up to the maximum. */
-  static Range above(Dimension dimension, String minimum, String maximum) {
-    String text = "more than " + minimum + ", at most " + maximum;
-    return new Range(value(minimum, dimension), true, value(maximum, dimension), text);
+  /** The same range in other words. */
+  Range named(String words) {
+    return new Range(minimum, maximum, words);
   }
 
   boolean holds(double value) {
-    return (open ? value > minimum : value >= minimum) && value <= maximum;
+    return value >= minimum && value <= maximum;
   }
 
   private static double value(String text, Dimension dimension) {

@@ -15,8 +15,8 @@ record RotorDraft(
     boolean iron,
     OptionalDouble counterPlateGap) {
 
-  private static final Map<String, Boolean> SIDES = Words.of("one", false).and("two", true).map();
-  private static final Map<String, Boolean> IRON =
+  static final Map<String, Boolean> SIDES = Words.of("one", false).and("two", true).map();
+  static final Map<String, Boolean> IRON =
       Words.of("none", false).and("behind-magnets", true).map();
 
   static RotorDraft read(Section s) {

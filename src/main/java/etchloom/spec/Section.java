@@ -6,6 +6,8 @@ import etchloom.spec.yaml.YamlNode;
 import etchloom.spec.yaml.YamlNode.Entry;
 import etchloom.spec.yaml.YamlNode.Mapping;
 import etchloom.spec.yaml.YamlNode.Scalar;
+import etchloom.spec.yaml.YamlNode.Sequence;
+import etchloom.spec.yaml.YamlTree;
 import etchloom.units.Dimension;
 import java.util.ArrayList;
 import java.util.LinkedHashSet;
@@ -24,17 +26,25 @@ final class Section {
   private final String path;
   private final SourceSpan span;
   private final Optional<Mapping> node;
+  private final boolean whole;
   private final Set<String> known = new LinkedHashSet<>();
 
-  private Section(Findings findings, String path, SourceSpan span, Optional<Mapping> node) {
+  private Section(
+      Findings findings, String path, SourceSpan span, Optional<Mapping> node, boolean whole) {
     this.findings = findings;
     this.path = path;
     this.span = span;
     this.node = node;
+    this.whole = whole;
   }
 
-  static Section top(Findings findings, String file, Mapping root) {
-    return new Section(findings, "", SourceSpan.ofFile(file), Optional.of(root));
+  static Section top(Findings findings, YamlTree tree) {
+    return new Section(findings, "", tree.root().span(), Optional.of(tree.root()), tree.whole());
+  }
+
+  /** False where the file could be read only in part, so that keys may be missing for that. */
+  boolean whole() {
+    return whole;
   }
 
   /** The full path of one of its keys. */
@@ -53,10 +63,6 @@ final class Section {
     return entry(key).isPresent();
   }
 
-  Findings findings() {
-    return findings;
-  }
-
   void error(String code, String key, String message, String... hints) {
     findings.error(code, at(key), pathOf(key), message, hints);
   }
@@ -67,7 +73,7 @@ final class Section {
 
   /** Reports a key that is not there, unless the whole group is absent, which was reported once. */
   void missing(String key, String wanted) {
-    if (node.isPresent() && !has(key)) {
+    if (whole && node.isPresent() && !has(key)) {
       findings.error(
           Codes.MISSING_KEY, span, pathOf(key), "this key is missing; it takes " + wanted);
     }
@@ -86,7 +92,7 @@ final class Section {
   }
 
   private Section absent(String key) {
-    return new Section(findings, pathOf(key), span, Optional.empty());
+    return new Section(findings, pathOf(key), span, Optional.empty(), true);
   }
 
   private Section sectionAt(String at, SourceSpan where, YamlNode value) {
@@ -105,7 +111,7 @@ final class Section {
               return Optional.empty();
             },
             b -> Optional.empty());
-    return new Section(findings, at, where, mapping);
+    return new Section(findings, at, where, mapping, true);
   }
 
   /** A list of groups. */
@@ -151,6 +157,9 @@ final class Section {
   private List<YamlNode> items(String key, String wanted) {
     known.add(key);
     Optional<Entry> e = entry(key);
+    if (e.isPresent() && e.get().value() instanceof Sequence q && q.items().isEmpty()) {
+      findings.error(Codes.EMPTY_VALUE, q.span(), pathOf(key), "the list is empty");
+    }
     if (e.isEmpty()) {
       return List.of();
     }
@@ -165,7 +174,7 @@ final class Section {
               wrongShape(pathOf(key), e.get().keySpan(), "here belongs " + wanted);
               return List.of();
             },
-            YamlNode.Sequence::items,
+            Sequence::items,
             b -> List.of());
   }
 
@@ -213,7 +222,7 @@ final class Section {
               Optional<Scalar> s = reader(key).scalar(e.value());
               if (s.isPresent() && s.get().isNull()) {
                 findings.error(
-                    Codes.EMPTY_VALUE, e.keySpan(), pathOf(key), "nothing stands after the colon");
+                    Codes.EMPTY_VALUE, e.keySpan(), pathOf(key), "this key has no value");
                 return Optional.empty();
               }
               return s;
@@ -243,7 +252,7 @@ final class Section {
     String[] hints =
         Suggest.nearest(e.key(), known).map(k -> "did you mean '" + k + "'?").stream()
             .toArray(String[]::new);
-    findings.error(Codes.UNKNOWN_KEY, e.keySpan(), pathOf(e.key()), message, hints);
+    findings.error(Codes.UNKNOWN_KEY, e.keySpan(), pathOf(e.label()), message, hints);
   }
 
   private void wrongShape(String at, SourceSpan where, String message) {

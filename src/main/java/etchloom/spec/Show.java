@@ -14,10 +14,13 @@ final class Show {
 
   /** What was found, in quotes, cut short where it is long. */
   static String found(String text) {
+    return "'" + cut(text).replace("\t", "\\t").replace("\n", "\\n") + "'";
+  }
+
+  /** Cut short where it is long. */
+  static String cut(String text) {
     int n = text.codePointCount(0, text.length());
-    String shown =
-        n <= LONGEST ? text : text.substring(0, text.offsetByCodePoints(0, LONGEST)) + "...";
-    return "'" + shown + "'";
+    return n <= LONGEST ? text : text.substring(0, text.offsetByCodePoints(0, LONGEST)) + "...";
   }
 
   /** A length in mm to the nanometre. */

@@ -3,8 +3,8 @@ package etchloom.spec;
 import etchloom.diagnostic.Findings;
 import etchloom.diagnostic.Staged;
 import etchloom.spec.yaml.YamlFile;
-import etchloom.spec.yaml.YamlNode.Mapping;
-import java.util.Optional;
+import etchloom.spec.yaml.YamlTree;
+import java.util.Map;
 
 /**
  * Reads a spec: every key's shape, unit and range, defaults, and whatever the keys can say about
@@ -22,19 +22,36 @@ public final class SpecReader {
 
   /** Reads a spec file's bytes; {@code fileName} is for messages only. */
   public static Staged<SpecFile> read(String fileName, byte[] bytes) {
-    Findings findings = new Findings();
-    Optional<Mapping> root = YamlFile.read(fileName, bytes, findings);
-    return root.isEmpty()
-        ? Staged.failed(findings.sorted())
-        : check(fileName, root.get(), findings);
+    return read(fileName, bytes, Map.of());
   }
 
-  private static Staged<SpecFile> check(String fileName, Mapping root, Findings findings) {
-    Section top = Section.top(findings, fileName, root);
+  /**
+   * Reads a spec with some keys set anew, as a survey does.
+   *
+   * @param overrides full key path to value as text, {@code coil.track} to {@code 0.2mm}; the unit
+   *     may follow its number without a space. A key that is absent is added with its groups. A
+   *     fault of such a value has the text {@code coil.track=0.2mm on the command line} for its
+   *     file, and no line; a fault elsewhere that only these values bring about has a hint that
+   *     names them
+   */
+  public static Staged<SpecFile> read(
+      String fileName, byte[] bytes, Map<String, String> overrides) {
+    Findings findings = new Findings();
+    Staged<SpecFile> read =
+        YamlFile.read(fileName, bytes, VERSION_KEY + ": 1", findings)
+            .map(tree -> check(fileName, new Overrides(findings).apply(tree, overrides), findings))
+            .orElseGet(() -> Staged.failed(findings.sorted()));
+    return read.value().isPresent() || overrides.isEmpty()
+        ? read
+        : Overrides.blame(read, read(fileName, bytes), overrides);
+  }
+
+  private static Staged<SpecFile> check(String fileName, YamlTree tree, Findings findings) {
+    Section top = Section.top(findings, tree);
     if (!FormatVersion.check(top, VERSION_KEY, FabReader.VERSION_KEY, "a fab rules file")) {
       return Staged.failed(findings.sorted());
     }
     SpecDraft draft = SpecDraft.read(top);
-    return findings.staged(() -> new SpecFile(draft.build(), KeyPlaces.of(fileName, root)));
+    return findings.staged(() -> new SpecFile(draft.build(), KeyPlaces.of(fileName, tree.root())));
   }
 }

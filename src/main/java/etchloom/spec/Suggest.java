@@ -1,6 +1,7 @@
 package etchloom.spec;
 
 import java.util.Collection;
+import java.util.List;
 import java.util.Locale;
 import java.util.Optional;
 
@@ -16,7 +17,8 @@ final class Suggest {
 
   /**
    * The one word within reach, or none. Words that differ only in case, or in {@code _} or a space
-   * for {@code -}, count as equal; else up to one slip in three letters, two at most.
+   * for {@code -}, count as equal; else up to one slip in three letters, two at most; else the one
+   * word of which this is a part, as {@code gap} is of {@code air-gap}.
    */
   static Optional<String> nearest(String wrong, Collection<String> words) {
     if (wrong.isEmpty() || wrong.length() > LONGEST) {
@@ -37,7 +39,16 @@ final class Suggest {
       best = word;
       bestDistance = d;
     }
-    return best.isEmpty() || tie ? Optional.empty() : Optional.of(best);
+    if (best.isEmpty()) {
+      return whole(wrong, words);
+    }
+    return tie ? Optional.empty() : Optional.of(best);
+  }
+
+  private static Optional<String> whole(String part, Collection<String> words) {
+    List<String> all =
+        words.stream().filter(w -> List.of(w.split("-")).contains(part)).distinct().toList();
+    return all.size() == 1 ? Optional.of(all.get(0)) : Optional.empty();
   }
 
   private static String plain(String word) {

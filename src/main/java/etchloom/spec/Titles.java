@@ -1,6 +1,8 @@
 package etchloom.spec;
 
+import java.util.List;
 import java.util.Optional;
+import java.util.stream.IntStream;
 
 /** The spec's three texts: title, revision and fab. A faulty one reads as empty. */
 final class Titles {
@@ -8,17 +10,64 @@ final class Titles {
 
   static final String DEFAULT_REVISION = "A";
 
-  /** Any printable text: it is quoted wherever it is shown, and files are named by its slug. */
+  /**
+   * Signs that a title may not hold. Files are named by the slug and everything that shows a title
+   * quotes it, so nothing depends on this; but no board is called like that, and other programs
+   * that read our files may be less careful.
+   */
+  private static final String TITLE_REFUSED = "/\\<>";
+
+  /** For the other texts a slash is harmless and usual. */
+  private static final String TEXT_REFUSED = "<>";
+
+  /** Any printable text of one line without path separators and markup. */
   static String title(Section top) {
+    String key = "title";
     Optional<String> title =
-        top.text("title", Limits.TITLE_MAX, "a text, for the legend and the file names").required();
-    if (title.isPresent() && Slug.of(title.get()).isEmpty()) {
+        top.text(key, Limits.TITLE_MAX, "a text, for the legend and the file names").required();
+    boolean clean = without(top, key, title, TITLE_REFUSED);
+    if (clean && title.isPresent() && Slug.of(title.get()).isEmpty()) {
       top.error(
           Codes.TEXT,
-          "title",
+          key,
           Show.found(title.get()) + " has no letter a-z and no digit, which file names need");
     }
     return title.orElse("");
+  }
+
+  /** A short text without markup. */
+  static Optional<String> plain(Section s, String key, String wanted) {
+    Optional<String> text = s.text(key, Limits.WORDS_MAX, wanted).value();
+    without(s, key, text, TEXT_REFUSED);
+    return text;
+  }
+
+  /** A rules file's title: it names no files. */
+  static String fabTitle(Section top) {
+    Optional<String> title = top.text("title", Limits.TITLE_MAX, "a text").required();
+    without(top, "title", title, TEXT_REFUSED);
+    return title.orElse("");
+  }
+
+  private static boolean without(Section s, String key, Optional<String> text, String refused) {
+    String found = text.orElse("");
+    List<String> bad = quoted(refused.chars().filter(c -> found.indexOf(c) >= 0));
+    if (bad.isEmpty()) {
+      return true;
+    }
+    s.error(
+        Codes.TEXT,
+        key,
+        Show.found(found)
+            + " holds "
+            + Show.allOf(bad)
+            + "; all signs are allowed here but "
+            + Show.allOf(quoted(refused.chars())));
+    return false;
+  }
+
+  private static List<String> quoted(IntStream chars) {
+    return chars.mapToObj(c -> "`" + (char) c + "`").toList();
   }
 
   /**
@@ -53,14 +102,9 @@ final class Titles {
     Optional<String> fab =
         top.text("fab", Limits.PATH_MAX, Show.oneOf(Templates.fabNames()) + ", or a file's path")
             .required();
-    fab.filter(f -> !isPath(f) && !Templates.fabNames().contains(f))
+    fab.filter(f -> !FabReader.isPath(f) && !Templates.fabNames().contains(f))
         .ifPresent(f -> unknownFab(top, f));
     return fab.orElse("");
-  }
-
-  /** Whether a {@code fab:} value names a file rather than a built-in class. */
-  static boolean isPath(String fab) {
-    return fab.indexOf('.') >= 0 || fab.indexOf('/') >= 0;
   }
 
   private static void unknownFab(Section top, String fab) {

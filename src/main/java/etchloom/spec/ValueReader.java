@@ -46,9 +46,10 @@ final class ValueReader {
 
   /** As {@link #number}, with the unit that was written. */
   Quantity quantity(Scalar s, Dimension dimension, Range range) {
-    Quantity q = Quantity.read(s.text(), dimension);
+    String text = s.typed() ? Quantity.spaced(s.text()) : s.text();
+    Quantity q = Quantity.read(text, dimension);
     if (!q.ok()) {
-      QuantityFault.report(findings, s.span(), path, key, s.text(), q, dimension, range.text());
+      QuantityFault.report(findings, s.span(), path, key, s.text(), q, dimension, range);
       return q;
     }
     return checked(s, q, range);
@@ -72,7 +73,10 @@ final class ValueReader {
     if (range.holds(q.value())) {
       return q;
     }
-    error(Codes.OUT_OF_RANGE, s, s.text() + " is out of range; allowed is " + range.text());
+    error(
+        Codes.OUT_OF_RANGE,
+        s,
+        Show.found(s.text()) + " is out of range; allowed is " + range.text());
     return new Quantity(Double.NaN, Fault.NOT_FINITE, q.number(), q.unit());
   }
 

@@ -92,11 +92,7 @@ record WindingDraft(
   }
 
   static String word(Connection c) {
-    return CONNECTIONS.entrySet().stream()
-        .filter(e -> e.getValue() == c)
-        .findFirst()
-        .orElseThrow()
-        .getKey();
+    return Words.wordFor(CONNECTIONS, c);
   }
 
   Winding build() {

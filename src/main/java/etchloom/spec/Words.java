@@ -17,6 +17,16 @@ final class Words<E> {
     return Collections.unmodifiableMap(words);
   }
 
+  /** The word that stands for a meaning. */
+  static <E> String wordFor(Map<String, E> words, E meaning) {
+    for (Map.Entry<String, E> e : words.entrySet()) {
+      if (e.getValue().equals(meaning)) {
+        return e.getKey();
+      }
+    }
+    throw new IllegalArgumentException("no word stands for " + meaning);
+  }
+
   static <E> Words<E> of(String word, E meaning) {
     return new Words<E>().and(word, meaning);
   }

@@ -37,6 +37,8 @@ public enum Dimension {
   RATIO("a ratio", Unit.exact("%", "0.01"), List.of());
 
   private final String phrase;
+
+  @SuppressWarnings("ImmutableEnumChecker") // List.of never changes
   private final List<Unit> units;
 
   Dimension(String phrase, Unit first, List<Unit> others) {

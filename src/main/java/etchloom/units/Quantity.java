@@ -32,6 +32,12 @@ public record Quantity(double value, Fault fault, String number, String unit) {
   /** Longer numbers than this are refused unread: nobody means them, and big decimals cost time. */
   static final int MAX_NUMBER_LENGTH = 40;
 
+  /**
+   * Beyond this a number of {@link #MAX_NUMBER_LENGTH} digits is nought or infinite as a double,
+   * and a big decimal would spend its time on zeros.
+   */
+  private static final int MAX_EXPONENT = 400;
+
   public boolean ok() {
     return fault == Fault.NONE;
   }
@@ -145,15 +151,38 @@ public record Quantity(double value, Fault fault, String number, String unit) {
   }
 
   private static Quantity of(String number, Unit unit) {
-    double value;
-    try {
-      value = unit.toBase(new BigDecimal(number));
-    } catch (NumberFormatException | ArithmeticException e) { // an exponent beyond 32 bits
-      value = Double.POSITIVE_INFINITY;
-    }
+    double value = unit.toBase(decimal(number));
     return Double.isFinite(value)
         ? new Quantity(value + 0.0, Fault.NONE, number, unit.symbol()) // + 0.0: no negative zero
         : new Quantity(Double.NaN, Fault.NOT_FINITE, number, unit.symbol());
+  }
+
+  /** Nought for what is far below any double, infinity's stand-in for what is far above. */
+  private static BigDecimal decimal(String number) {
+    int e = Math.max(number.indexOf('e'), number.indexOf('E'));
+    if (e < 0) {
+      return new BigDecimal(number);
+    }
+    String mantissa = number.substring(0, e);
+    BigDecimal digits = new BigDecimal(mantissa);
+    String exponent = number.substring(e + 1);
+    boolean down = exponent.startsWith("-");
+    int value = exponent(exponent);
+    if (digits.signum() == 0 || (down && value > MAX_EXPONENT)) {
+      return BigDecimal.ZERO;
+    }
+    return digits.scaleByPowerOfTen(down ? -value : Math.min(value, MAX_EXPONENT));
+  }
+
+  /** The digits' value without the sign; beyond {@link #MAX_EXPONENT} one more than that. */
+  private static int exponent(String text) {
+    int value = 0;
+    for (int i = 0; i < text.length(); i++) {
+      if (isDigit(text.charAt(i))) {
+        value = Math.min(MAX_EXPONENT + 1, value * 10 + text.charAt(i) - '0');
+      }
+    }
+    return value;
   }
 
   private static Quantity spacing(String number, Unit unit) {

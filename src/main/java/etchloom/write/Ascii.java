@@ -11,7 +11,7 @@ final class Ascii {
     byte[] out = new byte[text.length()];
     for (int i = 0; i < out.length; i++) {
       char c = text.charAt(i);
-      if (c > 126 || c < 32 && c != '\n' && c != '\r') {
+      if (c > 126 || (c < 32 && c != '\n' && c != '\r')) {
         throw new IllegalArgumentException("character " + (int) c + " in a file of ASCII text");
       }
       out[i] = (byte) c;
@@ -25,7 +25,8 @@ final class Ascii {
    */
   static String gerberField(String text) {
     StringBuilder s = new StringBuilder(text.length());
-    for (char c : text.toCharArray()) {
+    for (int i = 0; i < text.length(); i++) {
+      char c = text.charAt(i);
       if (c < 32 || c > 126 || c == '%' || c == '*' || c == '\\' || c == ',') {
         s.append("\\u").append(hex(c));
       } else {
@@ -40,7 +41,9 @@ final class Ascii {
    */
   static String plain(String text) {
     StringBuilder s = new StringBuilder(text.length());
-    for (char c : Normalizer.normalize(spelt(text), Normalizer.Form.NFD).toCharArray()) {
+    String apart = Normalizer.normalize(spelt(text), Normalizer.Form.NFD);
+    for (int i = 0; i < apart.length(); i++) {
+      char c = apart.charAt(i);
       if (c >= 32 && c <= 126) {
         s.append(c);
       } else if (Character.getType(c) != Character.NON_SPACING_MARK) {
@@ -63,13 +66,18 @@ final class Ascii {
         .replace("\u00d7", "x");
   }
 
-  /** Text of an XML element or attribute; beyond ASCII as a numeric reference. */
+  /**
+   * Text of an XML element or attribute; beyond ASCII as a numeric reference, what XML does not
+   * allow at all as {@code ?}.
+   */
   static String xml(String text) {
     StringBuilder s = new StringBuilder(text.length());
     text.codePoints()
         .forEach(
             c -> {
-              if (c == '&' || c == '<' || c == '>' || c == '"' || c > 126) {
+              if ((c >= 0xD800 && c <= 0xDFFF) || c == 0xFFFE || c == 0xFFFF) {
+                s.append('?');
+              } else if (c == '&' || c == '<' || c == '>' || c == '"' || c > 126) {
                 s.append("&#").append(c).append(';');
               } else {
                 s.append(c < 32 ? ' ' : (char) c);
@@ -81,7 +89,7 @@ final class Ascii {
   private static String hex(char c) {
     StringBuilder s = new StringBuilder(4);
     for (int shift = 12; shift >= 0; shift -= 4) {
-      s.append("0123456789ABCDEF".charAt(c >> shift & 15));
+      s.append("0123456789ABCDEF".charAt((c >> shift) & 15));
     }
     return s.toString();
   }

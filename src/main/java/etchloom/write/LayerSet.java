@@ -9,6 +9,9 @@ public final class LayerSet {
   private LayerSet() {}
 
   /**
+   * All files of the set that do not need a report: layers, drill, netlist, drawings, notes, job,
+   * and the fab's archive.
+   *
    * @param art on the nanometre grid: {@code artwork.onGrid()}
    * @return by file name; reports, inputs and the manifest are the caller's to add
    * @throws IllegalArgumentException when a point is off the grid or beyond what a format can say
@@ -18,7 +21,13 @@ public final class LayerSet {
     SortedMap<String, byte[]> out = new TreeMap<>();
     new GerberLayers(art, info).write(out);
     XncWriter.write(art, out);
+    out.put(names.netlist(), IpcWriter.write(art));
+    out.put(names.dxf(), DxfWriter.lines(art));
+    out.put(names.outlines(), DxfWriter.outlines(art));
+    out.put(names.picture(), SvgWriter.write(art));
+    out.put(names.notes(), NotesWriter.write(art, info));
     out.put(names.job(), JobWriter.whole(art, info));
+    out.put(names.fabZip(), FabZip.write(art, info, out));
     return out;
   }
 }

@@ -36,23 +36,43 @@ final class Numbers {
 
   /** A whole number of {@code 10^-decimals} steps, end zeros left out but one. */
   static String fixed(long steps, int decimals) {
-    String digits = Long.toString(Math.abs(steps));
-    StringBuilder s = new StringBuilder(digits.length() + decimals + 3);
-    if (steps < 0) {
-      s.append('-');
-    }
-    int whole = digits.length() - decimals;
-    if (whole > 0) {
-      s.append(digits, 0, whole).append('.').append(digits, whole, digits.length());
-    } else {
-      s.append("0.").append("0".repeat(-whole)).append(digits);
-    }
-    int end = s.length();
-    while (s.charAt(end - 1) == '0' && s.charAt(end - 2) != '.') {
-      end--;
-    }
-    s.setLength(end);
+    StringBuilder s = new StringBuilder(24);
+    fixed(s, steps, decimals);
     return s.toString();
+  }
+
+  /** As {@link #mm(long)}, at the end of a text in the making. */
+  static void mm(StringBuilder to, long nm) {
+    fixed(to, nm, MM_DECIMALS);
+  }
+
+  /** Half of a whole number of nanometres, as mm: a radius from a diameter. */
+  static void half(StringBuilder to, long nm) {
+    fixed(to, 5 * nm, MM_DECIMALS + 1);
+  }
+
+  /** As {@link #ratio}, at the end of a text in the making. */
+  static void ratio(StringBuilder to, double value) {
+    fixed(to, Math.round(finite(value) * RATIO_STEPS), RATIO_DECIMALS);
+  }
+
+  /** As {@link #fixed(long, int)}, at the end of a text in the making. */
+  static void fixed(StringBuilder to, long steps, int decimals) {
+    long unit = 1;
+    for (int i = 0; i < decimals; i++) {
+      unit *= 10;
+    }
+    long size = Math.abs(steps);
+    if (steps < 0) {
+      to.append('-');
+    }
+    to.append(size / unit).append('.');
+    long rest = size % unit;
+    do {
+      unit /= 10;
+      to.append((char) ('0' + rest / unit));
+      rest %= unit;
+    } while (rest != 0);
   }
 
   /** A whole number with leading zeros. */

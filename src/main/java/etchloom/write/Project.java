@@ -18,7 +18,7 @@ final class Project {
   static String guid(Artwork art) {
     UUID hash =
         UUID.nameUUIDFromBytes(("etchloom/" + art.title()).getBytes(StandardCharsets.UTF_8));
-    long high = hash.getMostSignificantBits() & ~0xF000L | 0x4000L;
+    long high = (hash.getMostSignificantBits() & ~0xF000L) | 0x4000L;
     return new UUID(high, hash.getLeastSignificantBits()).toString();
   }
 

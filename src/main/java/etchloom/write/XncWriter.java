@@ -52,9 +52,23 @@ final class XncWriter {
     for (Holes.Tool t : tools) {
       s.append('T').append(Numbers.padded(++number, 2)).append('\n');
       for (Holes.Hit h : t.hits()) {
-        s.append('X').append(Numbers.mm(h.x())).append('Y').append(Numbers.mm(h.y())).append('\n');
+        place(s, 'X', h.x());
+        place(s, 'Y', h.y());
+        s.append('\n');
       }
     }
     return Ascii.bytes(s.append("M30\n"));
+  }
+
+  /**
+   * Always with its sign: from {@code X20.5} one reader guesses a zero suppression, decimal point
+   * or not, for the 0 after digits; {@code X+20.5} leaves it nothing to guess.
+   */
+  private static void place(StringBuilder s, char axis, long nm) {
+    s.append(axis);
+    if (nm >= 0) {
+      s.append('+');
+    }
+    Numbers.mm(s, nm);
   }
 }

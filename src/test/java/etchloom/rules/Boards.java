@@ -117,6 +117,15 @@ final class Boards {
     return RuleCheck.check(artwork(), spec, fab, RuleContext.NONE);
   }
 
+  /** The only finding of a rule that is broken once; all other rules are kept. */
+  static Finding only(RuleReport report, String rule) {
+    List<Finding> all = report.findings();
+    if (all.size() != 1 || !all.get(0).rule().equals(rule)) {
+      throw new AssertionError("expected one finding of " + rule + ", got " + all);
+    }
+    return all.get(0);
+  }
+
   static Spec spec(int layers, Optional<Spec.Duty> duty) {
     return spec(layers, duty, OptionalDouble.empty(), SPACE);
   }
@@ -162,7 +171,8 @@ final class Boards {
             false,
             "ENIG",
             "green",
-            150),
+            150,
+            Optional.empty()),
         "standard",
         duty);
   }

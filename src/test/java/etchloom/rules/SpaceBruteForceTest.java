@@ -13,7 +13,6 @@ import etchloom.geometry.Segment;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Map;
-import java.util.Optional;
 import java.util.Random;
 import java.util.TreeMap;
 import java.util.stream.LongStream;
@@ -39,17 +38,11 @@ class SpaceBruteForceTest {
   void gapsOfAllPairs_againstSampledPairs(long seed) {
     Boards b = wander(new Random(seed));
     Artwork a = b.artwork();
-    Board board = new Board(a, Boards.spec(2, Optional.empty()), Boards.fab(), RuleContext.NONE);
     for (int layer = 1; layer <= 2; layer++) {
       Map<String, Double> sampled = sampled(a, layer);
       Map<String, Double> got = new TreeMap<>();
-      LayerCopper copper = board.copper().get(layer - 1);
-      for (Close c : board.close(layer).upTo(Boards.SPACE)) {
-        Piece p = copper.pieces().get(c.first());
-        Piece q = copper.pieces().get(c.second());
-        String pair = pair(p.conductor(), p.joint(), q.conductor(), q.joint());
-        got.merge(pair, c.gapMm(), Math::min);
-      }
+      new PairSearch(new LayerCopper(a, layer, Boards.SPACE), Boards.SPACE, List.of(collector(got)))
+          .run(Boards.SPACE, Boards.SPACE);
       // A sample is never nearer than the copper; no point is further than half a step from one.
       sampled.forEach(
           (pair, gap) ->
@@ -62,6 +55,21 @@ class SpaceBruteForceTest {
                   gap >= sampled.getOrDefault(pair, Boards.SPACE) - 1.01 * STEP,
                   () -> pair + ": got " + gap + ", sampled " + sampled.get(pair)));
     }
+  }
+
+  private static PairWatch collector(Map<String, Double> got) {
+    return new PairWatch() {
+      @Override
+      public double wantedMm() {
+        return Boards.SPACE;
+      }
+
+      @Override
+      public void see(Close c) {
+        String pair = pair(c.p().conductor(), c.p().joint(), c.q().conductor(), c.q().joint());
+        got.merge(pair, c.gapMm(), Math::min);
+      }
+    };
   }
 
   private static String pair(int c1, int j1, int c2, int j2) {
@@ -169,7 +177,7 @@ class SpaceBruteForceTest {
         p.conductor() >= 0 && p.conductor() == q.conductor()
             ? Math.abs(p.walk() - q.walk())
             : Double.POSITIVE_INFINITY;
-    return direct <= near || walk(a, layer, p, q, near) <= near;
+    return direct <= near || walk(a, layer, p, q) <= near;
   }
 
   private static double width(Artwork a, int layer, Dot pad, Dot partner) {
@@ -184,7 +192,7 @@ class SpaceBruteForceTest {
   }
 
   /** Shortest way over joints by trying all chains of tracks. */
-  private static double walk(Artwork a, int layer, Dot p, Dot q, double limit) {
+  private static double walk(Artwork a, int layer, Dot p, Dot q) {
     double[] fromP = toJoints(a, p);
     double[] fromQ = toJoints(a, q);
     for (int round = 0; round < 4; round++) {

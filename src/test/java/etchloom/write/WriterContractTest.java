@@ -52,7 +52,7 @@ class WriterContractTest {
                   return;
                 }
                 for (byte b : bytes) {
-                  assertTrue(b == '\n' || b == '\r' || b >= 32 && b <= 126, name + ": byte " + b);
+                  assertTrue(b == '\n' || b == '\r' || (b >= 32 && b <= 126), name + ": byte " + b);
                 }
                 String text = new String(bytes, StandardCharsets.US_ASCII);
                 assertTrue(text.endsWith("\n"), name);

@@ -116,6 +116,23 @@ public record MagnetArray(
     return sum;
   }
 
+  /**
+   * Whether the axial field is the same at any height and its negative: every sheet has one of the
+   * other sign on the other side, and so has the iron.
+   */
+  boolean even() {
+    for (ChargeSheet s : sheets) {
+      if (!sheets.contains(new ChargeSheet(-s.heightMm(), -s.charge()))) {
+        return false;
+      }
+    }
+    OptionalDouble above = iron.aboveMm();
+    OptionalDouble below = iron.belowMm();
+    return above.isPresent()
+        ? below.isPresent() && above.getAsDouble() == -below.getAsDouble()
+        : below.isEmpty();
+  }
+
   /** Least distance of a height from the magnets' faces, mm. */
   public double clearanceMm(double heightMm) {
     double least = Double.POSITIVE_INFINITY;

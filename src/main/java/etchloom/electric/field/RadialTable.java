@@ -50,6 +50,10 @@ final class RadialTable {
     return m;
   }
 
+  int width() {
+    return width;
+  }
+
   /** Outside the knots the nearest end's value holds. */
   void at(double r, double[] out) {
     double x = Math.max(knot[0], Math.min(knot[knot.length - 1], r));

@@ -3,76 +3,61 @@ package etchloom.electric.field;
 import java.util.ArrayList;
 import java.util.List;
 
-/**
- * A magnet array's harmonics, tabled over the radius at each layer's height.
- *
- * <p>Knots stand a fifth of the distance to the magnets apart at the magnets' ends and wider
- * elsewhere; the splines keep the harmonics to about 1e-4 of the largest.
- */
-public final class RotorField implements AxialField {
-  private static final double KNOTS_A_SCALE = 5;
-  private static final double WIDEN = 0.15;
-  private static final int MOST_KNOTS = 1500;
+/** A magnet array's harmonics, tabled over the radius at each layer's height. */
+public final class RotorField implements AxialField, RadialField {
+  /** Heights are told apart to a nanometre: the field changes over a tenth of a millimetre. */
+  private static final double SAME_MM = 1e-6;
 
   private final int polePairs;
   private final int orders;
   private final double[] scaleMm;
-  private final List<RadialTable> layers = new ArrayList<>();
+  private final List<LayerTable> layers = new ArrayList<>();
+  private final FieldHarmonics harmonics;
 
   /**
+   * As many orders as matter on the layer nearest to the magnets.
+   *
    * @param heightMm height of each layer's copper over the board's mid-plane, L1 first
    * @param innerMm smallest radius asked for
    * @param outerMm largest radius asked for
    */
   public RotorField(MagnetArray array, double[] heightMm, double innerMm, double outerMm) {
+    this(array, heightMm, innerMm, outerMm, ordersFor(array, heightMm));
+  }
+
+  /** The first few orders only. */
+  public RotorField(
+      MagnetArray array, double[] heightMm, double innerMm, double outerMm, int orders) {
+    this.orders = orders;
     polePairs = array.polePairs();
+    harmonics = new FieldHarmonics(array, orders);
     scaleMm = new double[heightMm.length];
-    double least = Double.POSITIVE_INFINITY;
     for (int i = 0; i < heightMm.length; i++) {
       scaleMm[i] = array.clearanceMm(heightMm[i]);
-      least = Math.min(least, scaleMm[i]);
-    }
-    orders = FieldHarmonics.ordersFor(array, least);
-    FieldHarmonics harmonics = new FieldHarmonics(array, orders);
-    for (int i = 0; i < heightMm.length; i++) {
-      layers.add(table(array, harmonics, heightMm[i], scaleMm[i], innerMm, outerMm));
+      int twin = array.even() ? mirrored(heightMm, i) : -1;
+      layers.add(
+          twin >= 0
+              ? layers.get(twin)
+              : new LayerTable(array, heightMm[i], innerMm, outerMm, orders));
     }
   }
 
-  private static RadialTable table(
-      MagnetArray array,
-      FieldHarmonics harmonics,
-      double height,
-      double scale,
-      double inner,
-      double outer) {
-    double[] knot = knots(array.shape(), scale, inner, outer);
-    double[][] rows = new double[knot.length][];
-    for (int i = 0; i < knot.length; i++) {
-      rows[i] = harmonics.at(knot[i], height);
-    }
-    return new RadialTable(knot, rows);
-  }
-
-  private static double[] knots(MagnetShape shape, double scale, double inner, double outer) {
-    double margin = 2 * scale;
-    double from = Math.max(0, inner - margin);
-    double to = outer + margin;
-    double fine = Math.max(scale / KNOTS_A_SCALE, (to - from) / MOST_KNOTS);
-    double coarse = Math.max(fine, (to - from) / 60);
-    List<Double> out = new ArrayList<>();
-    double r = from;
-    while (r < to) {
-      out.add(r);
-      double edge = Double.POSITIVE_INFINITY;
-      for (double b : shape.breaksMm()) {
-        edge = Math.min(edge, Math.abs(b - r));
+  /** An earlier layer as far from the mid-plane on its other side, or -1. */
+  private static int mirrored(double[] heightMm, int layer) {
+    for (int i = 0; i < layer; i++) {
+      if (Math.abs(heightMm[i] + heightMm[layer]) < SAME_MM) {
+        return i;
       }
-      double wide = fine + WIDEN * Math.max(0, edge - 2 * scale);
-      r += Math.min(coarse, wide);
     }
-    out.add(r);
-    return out.stream().mapToDouble(Double::doubleValue).toArray();
+    return -1;
+  }
+
+  private static int ordersFor(MagnetArray array, double[] heightMm) {
+    double least = Double.POSITIVE_INFINITY;
+    for (double h : heightMm) {
+      least = Math.min(least, array.clearanceMm(h));
+    }
+    return FieldHarmonics.ordersFor(array, least);
   }
 
   @Override
@@ -93,5 +78,10 @@ public final class RotorField implements AxialField {
   @Override
   public double scaleMm(int layer) {
     return scaleMm[layer - 1];
+  }
+
+  @Override
+  public void radialAmplitudes(double radiusMm, double heightMm, double[] out) {
+    System.arraycopy(harmonics.radialAt(radiusMm, heightMm), 0, out, 0, orders);
   }
 }

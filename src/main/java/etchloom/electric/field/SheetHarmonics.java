@@ -16,6 +16,16 @@ final class SheetHarmonics {
   private static final double PANEL = 1.6;
 
   private static final int LEAST_DEPTH = 2;
+
+  /**
+   * A point nearer to the sheet than this share of its radius is taken to be this far off: closer
+   * by, the kernel's cost grows without bound, and no built air gap comes near it.
+   */
+  private static final double NEAREST = 1e-3;
+
+  /** A stretch of the outline this small beside the whole needs no parting for its own sake. */
+  private static final double SHORT = 0.1;
+
   private static final int MOST_DEPTH = 24;
 
   private final MagnetShape shape;
@@ -28,6 +38,7 @@ final class SheetHarmonics {
   private double d;
   private double scale;
   private double[] out;
+  private boolean radial;
   private double low;
   private double high;
 
@@ -48,18 +59,30 @@ final class SheetHarmonics {
    * @param amplitudes T, entry i for order 2i + 1
    */
   void add(double radiusMm, double heightMm, double chargeTesla, double[] amplitudes) {
+    radial = false;
+    addAll(radiusMm, heightMm, chargeTesla, amplitudes);
+  }
+
+  /** The same for the field along the radius, outwards. */
+  void addRadial(double radiusMm, double heightMm, double chargeTesla, double[] amplitudes) {
+    radial = true;
+    addAll(radiusMm, heightMm, chargeTesla, amplitudes);
+  }
+
+  private void addAll(double radiusMm, double heightMm, double chargeTesla, double[] amplitudes) {
     if (radiusMm <= 0) {
       return;
     }
     r = radiusMm;
-    d = heightMm;
+    d = Math.copySign(Math.max(Math.abs(heightMm), NEAREST * radiusMm), heightMm);
     out = amplitudes;
     scale = chargeTesla / (4 * Math.PI) * 4 / Math.PI;
+    double whole = breaks[breaks.length - 1] - breaks[0];
     for (int i = 0; i + 1 < breaks.length; i++) {
       low = breaks[i];
       high = breaks[i + 1];
       if (high - low > 1e-9 * high) {
-        panel(0, 1, 0);
+        panel(0, 1, high - low > SHORT * whole ? 0 : LEAST_DEPTH);
       }
     }
   }
@@ -73,7 +96,7 @@ final class SheetHarmonics {
     double s1 = radius(t1);
     double off = Math.max(0, Math.max(s0 - r, r - s1));
     boolean fine = s1 - s0 <= PANEL * Math.hypot(d, off);
-    if (depth < LEAST_DEPTH || !fine && depth < MOST_DEPTH) {
+    if (depth < LEAST_DEPTH || (!fine && depth < MOST_DEPTH)) {
       double mid = (t0 + t1) / 2;
       panel(t0, mid, depth + 1);
       panel(mid, t1, depth + 1);
@@ -89,7 +112,7 @@ final class SheetHarmonics {
 
   /** One ring: charge of order ν is 4/(νπ) (sin νPb − sin νPa) between the outline's angles. */
   private void ring(double s, double weight) {
-    int n = kernel.fill(r, s, d, kernelOut);
+    int n = radial ? kernel.fillRadial(r, s, d, kernelOut) : kernel.fill(r, s, d, kernelOut);
     if (n == 0) {
       return;
     }

@@ -119,6 +119,20 @@ public final class Network {
     return edges;
   }
 
+  /**
+   * The same nodes with other resistors between them, for boards with a fault.
+   *
+   * @param others between nodes of this network only
+   */
+  public Network with(List<Edge> others) {
+    for (Edge e : others) {
+      if (!index.containsKey(e.from()) || !index.containsKey(e.to())) {
+        throw new IllegalArgumentException("no such nodes: " + e);
+      }
+    }
+    return new Network(artwork, index, others);
+  }
+
   /** Where a terminal is measured: its pad on the uppermost layer. */
   public static Node terminalNode(Joint terminal) {
     return new Node(terminal.id(), terminal.firstLayer());

@@ -20,10 +20,14 @@ final class SourceText {
   private final String text;
   private final List<String> lines;
 
+  /** Code points in each line: counted once, because a hostile file may be one long line. */
+  private final int[] lengths;
+
   private SourceText(String file, String text) {
     this.file = file;
     this.text = text;
     this.lines = split(text);
+    this.lengths = lines.stream().mapToInt(l -> l.codePointCount(0, l.length())).toArray();
   }
 
   String text() {
@@ -40,12 +44,12 @@ final class SourceText {
    */
   static Staged<SourceText> decode(String file, byte[] bytes, int maxBytes) {
     if (bytes.length > maxBytes) {
-      String found = "the file has " + bytes.length + " bytes, at most " + maxBytes + " are read";
-      return failed(YamlCodes.TOO_BIG, SourceSpan.ofFile(file), found);
+      String found = "the file is too large; at most " + maxBytes + " bytes are read";
+      return failed(YamlCodes.TOO_BIG, start(file), found);
     }
     if (bytes.length >= 2 && isUtf16Mark(bytes[0], bytes[1])) {
-      return failed(
-          YamlCodes.ENCODING, SourceSpan.ofFile(file), "the file is UTF-16 text; save it as UTF-8");
+      String found = "the file is UTF-16 text; save it as UTF-8";
+      return failed(YamlCodes.ENCODING, start(file), found);
     }
     CharBuffer chars = CharBuffer.allocate(bytes.length);
     CharsetDecoder decoder =
@@ -99,19 +103,22 @@ final class SourceText {
     return Optional.empty();
   }
 
-  private SourceSpan end() {
+  static SourceSpan start(String file) {
+    return new SourceSpan(file, 1, 1, 0, "");
+  }
+
+  SourceSpan end() {
     int last = lines.size() - 1;
-    String line = lines.get(last);
-    return span(last, line.codePointCount(0, line.length()), last, Integer.MAX_VALUE);
+    return span(last, lengths[last], last, lengths[last]);
   }
 
   /** A place by lines and columns from 0, columns in code points; the mark stays on one line. */
   SourceSpan span(int line, int column, int endLine, int endColumn) {
     int l = Math.min(line, lines.size() - 1);
-    String shown = lines.get(l);
-    int length = shown.codePointCount(0, shown.length());
+    int length = lengths[l];
+    int from = l == line ? Math.min(column, length) : length;
     int stop = endLine == line ? Math.min(endColumn, length) : length;
-    return new SourceSpan(file, l + 1, column + 1, Math.max(1, stop - column), shown);
+    return new SourceSpan(file, l + 1, from + 1, Math.max(1, stop - from), lines.get(l));
   }
 
   private static List<String> split(String text) {

@@ -31,6 +31,9 @@ public final class YamlCodes {
   /** Groups within groups beyond any sense. */
   public static final String DEPTH = "depth";
 
+  /** Far more keys and values than any spec has. */
+  public static final String TOO_MANY = "too-many-values";
+
   /** The same key twice in one group; delete one. */
   public static final String DUPLICATE_KEY = "duplicate-key";
 

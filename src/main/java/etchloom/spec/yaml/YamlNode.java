@@ -21,8 +21,10 @@ public sealed interface YamlNode
    * A single value.
    *
    * @param plain whether it stands without quotes, so that numbers and null are what they look like
+   * @param typed whether it comes from a command line, where a unit may follow its number without a
+   *     space
    */
-  record Scalar(String text, boolean plain, SourceSpan span) implements YamlNode {
+  record Scalar(String text, boolean plain, boolean typed, SourceSpan span) implements YamlNode {
     /** Null of the core schema: nothing at all, {@code ~} or {@code null}. */
     public boolean isNull() {
       return plain
@@ -44,7 +46,22 @@ public sealed interface YamlNode
   }
 
   /** A key with its value. */
-  record Entry(String key, SourceSpan keySpan, YamlNode value) {}
+  record Entry(String key, SourceSpan keySpan, YamlNode value) {
+    /** Longer keys than any of ours are cut short where a message shows them. */
+    private static final int LONGEST_LABEL = 60;
+
+    /** The key as messages show it. */
+    public String label() {
+      return label(key);
+    }
+
+    static String label(String key) {
+      int n = key.codePointCount(0, key.length());
+      return n <= LONGEST_LABEL
+          ? key
+          : key.substring(0, key.offsetByCodePoints(0, LONGEST_LABEL)) + "...";
+    }
+  }
 
   /** A group of keys in the file's order; no key occurs twice. */
   record Mapping(List<Entry> entries, SourceSpan span) implements YamlNode {

@@ -160,11 +160,95 @@ class FieldHarmonicsTest {
     }
   }
 
+  /** Tables by distance lose no image, with plates close by and magnets wide beside the gap. */
+  @Test
+  void tableBetweenPlatesAgreesWithTheHarmonics() {
+    MagnetArray[] arrays = {
+      new MagnetArray(new SectorShape(20, 60, 0.9 * Math.PI), 1, BR, oneSided(1), planes(6, -1)),
+      new MagnetArray(new DiscShape(21, 5), 6, BR, twoSided(1.4), planes(6.4, -6.4))
+    };
+    for (MagnetArray a : arrays) {
+      double[] height = {0.3, -0.3};
+      RotorField f = new RotorField(a, height, 12, 34, 5);
+      FieldHarmonics h = new FieldHarmonics(a, 5);
+      double[] got = new double[5];
+      for (int layer = 1; layer <= 2; layer++) {
+        for (double r = 12.03; r < 34; r += 1.37) {
+          double[] want = h.at(r, height[layer - 1]);
+          f.amplitudes(layer, r, got);
+          for (int i = 0; i < 5; i++) {
+            assertEquals(want[i], got[i], 2e-4, "L" + layer + " r " + r + " order " + i);
+          }
+        }
+      }
+    }
+  }
+
   /** A north face looking down on L1 sends its field down. */
   @Test
   void northFaceOverTheBoardMakesADownwardField() {
     MagnetArray a = new MagnetArray(new DiscShape(21, 5), 6, BR, oneSided(0.8), IronPlanes.NONE);
     assertTrue(a.axialTesla(21, 0, 0) < -0.3);
     assertTrue(new FieldHarmonics(a, 1).at(21, 0)[0] < -0.3);
+  }
+
+  /**
+   * No current flows in the gap: the radial field's rise with height is the axial one's outwards.
+   */
+  @Test
+  void radialFieldHasNoCurl() {
+    MagnetShape shape = new DiscShape(21, 5);
+    MagnetArray[] arrays = {
+      new MagnetArray(shape, 6, BR, oneSided(1.4), IronPlanes.NONE),
+      new MagnetArray(shape, 6, BR, twoSided(1.4), planes(6.4, -6.4))
+    };
+    for (MagnetArray a : arrays) {
+      FieldHarmonics h = new FieldHarmonics(a, 3);
+      for (double r : new double[] {14, 17, 25}) {
+        double e = 1e-3;
+        double[] up = h.radialAt(r, 0.2 + e);
+        double[] down = h.radialAt(r, 0.2 - e);
+        double[] out = h.at(r + e, 0.2);
+        double[] in = h.at(r - e, 0.2);
+        for (int i = 0; i < 3; i++) {
+          double want = (out[i] - in[i]) / (2 * e);
+          assertEquals(want, (up[i] - down[i]) / (2 * e), 1e-4 * Math.abs(want) + 1e-6);
+        }
+      }
+    }
+  }
+
+  /** The radial field itself, by Coulomb's law over the faces' charge. */
+  @Test
+  void radialFieldAgreesWithCoulombsLaw() {
+    MagnetArray a = new MagnetArray(new DiscShape(21, 5), 2, BR, oneSided(1.4), IronPlanes.NONE);
+    double[] b = new FieldHarmonics(a, 60).radialAt(18, 0);
+    for (double angle : new double[] {0, 0.1, 0.5}) {
+      double want = 0;
+      for (ChargeSheet s : a.sheets()) {
+        for (int k = 0; k < 4; k++) {
+          want += (k % 2 == 0 ? 1 : -1) * s.charge() * coulomb(angle - k * Math.PI / 2, s);
+        }
+      }
+      assertEquals(want, sum(b, 2, angle), 1e-4 * 0.3, "angle " + angle);
+    }
+  }
+
+  private static double coulomb(double angle, ChargeSheet sheet) {
+    double x = 18 * Math.cos(angle);
+    double y = 18 * Math.sin(angle);
+    int n = 400;
+    double sum = 0;
+    for (int i = 0; i < n; i++) {
+      double q = 5 * (i + 0.5) / n;
+      for (int j = 0; j < n; j++) {
+        double t = 2 * Math.PI * (j + 0.5) / n;
+        double dx = x - 21 - q * Math.cos(t);
+        double dy = y - q * Math.sin(t);
+        double d3 = Math.pow(dx * dx + dy * dy + sheet.heightMm() * sheet.heightMm(), 1.5);
+        sum += (dx * Math.cos(angle) + dy * Math.sin(angle)) / d3 * q;
+      }
+    }
+    return BR / (4 * Math.PI) * sum * 5.0 / n * 2 * Math.PI / n;
   }
 }

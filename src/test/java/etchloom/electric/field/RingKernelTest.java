@@ -38,4 +38,30 @@ class RingKernelTest {
     double want = quadrature(20, 20.02, 0.2, 8 * 79);
     assertEquals(want, out[39], 1e-8 * Math.abs(want));
   }
+
+  /** The radial kernel, {@code (r − s cos) cos(n·) / (…)^(3/2)}, by the trapezium rule. */
+  @Test
+  void radialAgreesWithQuadrature() {
+    double[][] places = {{20, 20.1, 0.8}, {12, 26, 0.8}, {20, 20, 6}, {25, 15, -3}, {21, 19, 1}};
+    for (double[] p : places) {
+      double[] out = new double[4];
+      int n = new RingKernel(6, 4).fillRadial(p[0], p[1], p[2], out);
+      for (int i = 0; i < n; i++) {
+        double want = radial(p[0], p[1], p[2], 6 * (2 * i + 1));
+        double scale = Math.abs(radial(p[0], p[1], p[2], 0));
+        assertEquals(want, out[i], 1e-7 * Math.abs(want) + 1e-12 * scale, p[0] + " order " + i);
+      }
+    }
+  }
+
+  private static double radial(double r, double s, double d, int n) {
+    int points = 20_000;
+    double sum = 0;
+    for (int i = 0; i < points; i++) {
+      double a = 2 * Math.PI * i / points;
+      double q = r * r + s * s + d * d - 2 * r * s * Math.cos(a);
+      sum += (r - s * Math.cos(a)) * Math.cos(n * a) / (q * Math.sqrt(q));
+    }
+    return sum * 2 * Math.PI / points;
+  }
 }

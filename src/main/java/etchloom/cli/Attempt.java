@@ -1,0 +1,43 @@
+package etchloom.cli;
+
+import etchloom.diagnostic.Diagnostic;
+import etchloom.diagnostic.Staged;
+import etchloom.report.FindingText;
+import etchloom.report.Results;
+import etchloom.run.Drawn;
+import etchloom.run.Pipeline;
+import java.util.ArrayList;
+import java.util.List;
+
+/** A run of a command's inputs, with what the user is to be told. */
+record Attempt(InputFiles.Inputs inputs, Drawn drawn, List<Diagnostic> warnings) {
+  Attempt {
+    warnings = List.copyOf(warnings);
+  }
+
+  /**
+   * @param draft whether the board is to be marked as one that breaks rules
+   * @throws BadInput where the spec cannot be drawn
+   */
+  static Attempt of(InputFiles.Inputs in, boolean draft) {
+    Staged<Drawn> staged = Pipeline.run(in.file().spec(), in.fab(), in.file().positions(), draft);
+    Drawn drawn = staged.value().orElseThrow(() -> new BadInput(staged.diagnostics()));
+    List<Diagnostic> warnings = new ArrayList<>(in.warnings());
+    warnings.addAll(staged.diagnostics());
+    return new Attempt(in, drawn, warnings);
+  }
+
+  boolean passed() {
+    return drawn.rules().passed();
+  }
+
+  Results results() {
+    return drawn.results(Version.TEXT);
+  }
+
+  /** Warnings and broken rules, to the stream for them. */
+  void tell(Console console) {
+    console.warn(warnings);
+    drawn.rules().findings().forEach(f -> console.err().println(FindingText.line(f)));
+  }
+}

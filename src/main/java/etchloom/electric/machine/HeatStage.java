@@ -1,0 +1,237 @@
+package etchloom.electric.machine;
+
+import etchloom.electric.machine.drive.Generator;
+import etchloom.electric.machine.drive.Ripple;
+import etchloom.electric.machine.heat.EddyLoss;
+import etchloom.electric.machine.heat.HeatBalance;
+import etchloom.electric.machine.heat.Losses;
+import etchloom.electric.machine.heat.TrackChart;
+import etchloom.electric.resistance.Copper;
+import etchloom.spec.Spec;
+import etchloom.units.Numbers;
+import java.util.ArrayList;
+import java.util.List;
+import java.util.Optional;
+import java.util.OptionalDouble;
+import java.util.function.DoubleUnaryOperator;
+import java.util.function.IntToDoubleFunction;
+
+/** Losses at the duty and the temperature they lead to. */
+final class HeatStage {
+  /** Orders and layers with less than this share of the eddy loss are not listed. */
+  private static final double FAINT = 1e-4;
+
+  /** A laminate held for long should stay so far below its glass transition (common practice). */
+  private static final double BELOW_GLASS_K = 20;
+
+  private static final OptionalDouble NONE = OptionalDouble.empty();
+
+  private final Setting s;
+  private final Optional<Linked> linked;
+  private final Losses losses;
+  private final boolean currentKnown;
+  private final boolean rippleKnown;
+  private final ThermalFigures thermal;
+
+  HeatStage(Setting s, Optional<Linked> linked) {
+    this.s = s;
+    this.linked = linked;
+    OptionalDouble ripple = DriveStage.ripple(s);
+    rippleKnown = ripple.isPresent();
+    Optional<DoubleUnaryOperator> current = current();
+    currentKnown = current.isPresent();
+    boolean turning = s.duty().speedRadPerSecond().isPresent();
+    losses =
+        new Losses(
+            s.circuit(),
+            current.orElse(t -> 0),
+            rippleKnown ? Ripple.meanSquare(ripple.getAsDouble()) : 0,
+            turning ? linked.map(Linked::eddy) : Optional.empty(),
+            turning ? linked.flatMap(Linked::circulating) : Optional.empty(),
+            turning ? linked.map(Linked::layersWatt).orElse(OptionalDouble.empty()) : NONE,
+            s.radPerSecond());
+    thermal = balance();
+  }
+
+  /** A winding's current by the copper's temperature. */
+  private Optional<DoubleUnaryOperator> current() {
+    Spec.Duty duty = s.duty();
+    if (duty.generator() && linked.isPresent() && duty.loadOhm().isPresent()) {
+      if (duty.speedRadPerSecond().isPresent()) {
+        Generator g =
+            new Generator(
+                s.circuit(),
+                linked.get().fluxWeber(),
+                s.radPerSecond(),
+                duty.loadOhm().getAsDouble());
+        return Optional.of(g::ampereRms);
+      }
+    }
+    OptionalDouble stated = duty.currentAmpereRms();
+    return stated.isPresent() ? Optional.of(t -> stated.getAsDouble()) : Optional.empty();
+  }
+
+  ThermalFigures thermal() {
+    return thermal;
+  }
+
+  Losses losses() {
+    return losses;
+  }
+
+  private ThermalFigures balance() {
+    Spec.Duty duty = s.duty();
+    double limit = duty.copperLimitC();
+    double area = HeatBalance.surfaceM2(s.artwork());
+    HeatBalance board =
+        new HeatBalance(area, duty.coolingWattPerSquareMetreKelvin(), duty.ambientC());
+    OptionalDouble copper = OptionalDouble.empty();
+    Optional<Boolean> stable = Optional.empty();
+    if (currentKnown) {
+      copper = board.solve(losses::totalWatt);
+      stable = Optional.of(copper.isPresent());
+      warn(copper, board);
+    } else {
+      s.ledger().has("thermal.copperC", s.current());
+    }
+    return new ThermalFigures(
+        copper,
+        continuous(board, limit),
+        stable,
+        TrackChart.narrowest(s.artwork(), limit - duty.ambientC()),
+        copper.orElse(limit),
+        area);
+  }
+
+  /** What current the balance leaves room for at the copper's limit. */
+  private OptionalDouble continuous(HeatBalance board, double limit) {
+    double left = board.leavingWatt(limit) - losses.otherWatt(limit);
+    if (left > 0) {
+      double ohm = s.circuit().phases() * s.circuit().windingOhm(limit);
+      return OptionalDouble.of(Math.sqrt(left / ohm));
+    }
+    s.ledger()
+        .caution(
+            "no-current-left",
+            "eddy, ripple and circulating losses alone take "
+                + Numbers.engineering(losses.otherWatt(limit), "W", 3)
+                + ", more than the surface carries off at the copper's limit");
+    s.ledger().absent("thermal.maxContinuousAmpereRms", "duty.cooling");
+    return OptionalDouble.empty();
+  }
+
+  private void warn(OptionalDouble copper, HeatBalance board) {
+    if (copper.isEmpty()) {
+      s.ledger()
+          .caution(
+              "no-stable-temperature",
+              "the loss grows faster with temperature than the surface carries it off ("
+                  + Numbers.engineering(board.wattPerKelvin(), "W/K", 3)
+                  + "): there is no temperature at which the copper settles");
+      s.ledger().absent("thermal.copperC", "duty.current");
+      return;
+    }
+    double glass = s.spec().board().laminateTgC();
+    double c = copper.getAsDouble();
+    if (c > glass - BELOW_GLASS_K) {
+      s.ledger()
+          .caution(
+              "laminate-heat",
+              "the copper settles at "
+                  + Numbers.fixed(c, 0)
+                  + " C; a laminate of Tg "
+                  + Numbers.fixed(glass, 0)
+                  + " C is best kept 20 K below it");
+    }
+  }
+
+  LossFigures loss() {
+    double t = thermal.hotC();
+    boolean eddy = losses.eddy().isPresent();
+    if (linked.isPresent()) {
+      s.ledger().has("loss.eddyWatt", s.speed());
+    }
+    if (!currentKnown) {
+      s.ledger().has("loss.copperWatt", s.current());
+    }
+    if (!rippleKnown) {
+      s.ledger().has("loss.rippleWatt", s.bus(), s.switching());
+    }
+    return new LossFigures(
+        t,
+        when(currentKnown, losses.copperWatt(t)),
+        when(eddy, losses.eddyWatt(t)),
+        when(rippleKnown, losses.rippleWatt(t)),
+        when(
+            losses.circulating().isPresent() || losses.layersWatt().isPresent(),
+            losses.circulatingWatt(t)),
+        eddy ? byOrder(losses.eddy().get(), t) : List.of(),
+        eddy ? byLayer(losses.eddy().get(), t) : List.of());
+  }
+
+  private static OptionalDouble when(boolean known, double value) {
+    return known ? OptionalDouble.of(value) : OptionalDouble.empty();
+  }
+
+  private List<LossFigures.Part> byOrder(EddyLoss e, double tempC) {
+    List<LossFigures.Part> out = new ArrayList<>();
+    double all = e.watt(s.radPerSecond(), tempC);
+    for (int i = 0; i < e.orders(); i++) {
+      int order = i;
+      double w = sum(e.layers(), l -> e.watt(l + 1, order, s.radPerSecond(), tempC));
+      if (w > FAINT * all) {
+        out.add(new LossFigures.Part(2 * i + 1, w));
+      }
+    }
+    return out;
+  }
+
+  private List<LossFigures.Part> byLayer(EddyLoss e, double tempC) {
+    List<LossFigures.Part> out = new ArrayList<>();
+    for (int l = 1; l <= e.layers(); l++) {
+      int layer = l;
+      double w = sum(e.orders(), i -> e.watt(layer, i, s.radPerSecond(), tempC));
+      out.add(new LossFigures.Part(l, w));
+    }
+    return out;
+  }
+
+  private static double sum(int n, IntToDoubleFunction part) {
+    double sum = 0;
+    for (int i = 0; i < n; i++) {
+      sum += part.applyAsDouble(i);
+    }
+    return sum;
+  }
+
+  /** Rms round the delta at the duty's speed, copper hot. */
+  OptionalDouble circulatingAmpere() {
+    if (linked.flatMap(Linked::circulating).isEmpty()) {
+      return OptionalDouble.empty();
+    }
+    if (s.circuit().zeroHenry() <= 0) {
+      s.ledger()
+          .caution(
+              "zero-sequence-inductance",
+              "self and mutual inductance add up to nothing round the delta; only its resistance"
+                  + " is taken");
+    }
+    return s.ledger().has("emf.deltaCirculatingAmpere", s.speed())
+        ? OptionalDouble.of(
+            linked.get().circulating().orElseThrow().ampereRms(s.radPerSecond(), thermal.hotC()))
+        : OptionalDouble.empty();
+  }
+
+  /** Drag of eddy and circulating currents at a speed, N·m, copper hot. */
+  DoubleUnaryOperator drag() {
+    double t = thermal.hotC();
+    return w -> {
+      if (!(w > 0) || linked.isEmpty()) {
+        return 0;
+      }
+      double layers = linked.get().layersWatt().orElse(0) * w * w / Copper.factor(t);
+      double round = linked.get().circulating().map(c -> c.watt(w, t)).orElse(0.0) + layers;
+      return (linked.get().eddy().watt(w, t) + round) / w;
+    };
+  }
+}

@@ -1,0 +1,63 @@
+package etchloom.receive;
+
+import etchloom.report.Html;
+import etchloom.report.HtmlHead;
+import etchloom.units.Numbers;
+import java.nio.charset.StandardCharsets;
+import java.util.List;
+
+/** The result as one HTML page that asks for nothing from outside. */
+public final class ReceivePage {
+  private ReceivePage() {}
+
+  /** UTF-8. */
+  public static byte[] write(Outcome o) {
+    Html h = new Html();
+    HtmlHead.write(h, "Delivery of " + o.title() + ", revision " + o.revision(), false);
+    h.open("body").open("header").element("h1", "Delivery of " + o.title());
+    h.element("p", "Revision " + o.revision() + ", Etchloom " + o.toolVersion(), "class=\"quiet\"");
+    h.close("header").open("main");
+    String kind = o.accepted() ? "yes" : "no";
+    h.open("div", "class=\"verdict " + kind + "\"");
+    h.element("strong", o.accepted() ? "All accepted" : "Not all accepted").text(" ");
+    h.text(Shown.counts(o) + ".").close("div");
+    Shown.spread(o.batch()).ifPresent(s -> h.element("p", s + "."));
+    h.table("Boards", Shown.HEAD, o.boards().stream().map(Shown::row).toList(), 0);
+    causes(h, o);
+    h.element("h2", "Every pair, at the temperature it was measured at");
+    for (Verdict v : o.boards()) {
+      h.table(v.board(), HEAD, v.pairs().stream().map(ReceivePage::row).toList(), 5);
+    }
+    h.close("main").close("body").close("html");
+    return h.toString().getBytes(StandardCharsets.UTF_8);
+  }
+
+  private static final List<String> HEAD =
+      List.of("pair", "measured", "at", "least", "as drawn", "most", "");
+
+  private static List<String> row(PairVerdict p) {
+    return List.of(
+        p.pair(),
+        Shown.ohm(p.ohm()),
+        Numbers.fixed(p.celsius(), 1) + " C",
+        Shown.ohm(p.leastOhm()),
+        Shown.ohm(p.expectedOhm()),
+        Double.isFinite(p.mostOhm()) ? Shown.ohm(p.mostOhm()) : "",
+        p.within() ? "within" : "OUTSIDE");
+  }
+
+  private static void causes(Html h, Outcome o) {
+    List<Cause> found =
+        o.boards().stream()
+            .map(Verdict::cause)
+            .filter(c -> c != Cause.NONE)
+            .distinct()
+            .sorted()
+            .toList();
+    if (!found.isEmpty()) {
+      h.open("ul");
+      found.forEach(c -> h.open("li").text(c.word() + ": " + c.meaning() + ".").close("li"));
+      h.close("ul");
+    }
+  }
+}

@@ -1,0 +1,25 @@
+package etchloom.run;
+
+import etchloom.board.Assembly;
+import etchloom.report.Results;
+import etchloom.rules.RuleReport;
+import etchloom.spec.FabRules;
+import etchloom.spec.Spec;
+
+/** What one run came to: the board, what its copper does, and whether it may be made. */
+public record Drawn(
+    Spec spec, FabRules fab, Assembly assembly, Electrics electrics, RuleReport rules) {
+
+  /** All that a report is made of, but the proof of written files. */
+  public Results results(String toolVersion) {
+    return Results.of(
+            toolVersion,
+            spec,
+            fab,
+            assembly.artwork(),
+            assembly.winding(),
+            rules,
+            electrics.resistance())
+        .withElectrics(electrics.inductance(), electrics.machine());
+  }
+}

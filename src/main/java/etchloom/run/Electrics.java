@@ -1,0 +1,65 @@
+package etchloom.run;
+
+import etchloom.board.Assembly;
+import etchloom.electric.field.IronPlanes;
+import etchloom.electric.field.MagnetArray;
+import etchloom.electric.inductance.Inductance;
+import etchloom.electric.inductance.InductanceFigures;
+import etchloom.electric.machine.InductanceValues;
+import etchloom.electric.machine.Machine;
+import etchloom.electric.machine.MachineFigures;
+import etchloom.electric.machine.circuit.Circuit;
+import etchloom.electric.resistance.Resistance;
+import etchloom.electric.resistance.ResistanceFigures;
+import etchloom.rules.RuleContext;
+import etchloom.spec.FabRules;
+import etchloom.spec.Spec;
+import java.util.OptionalDouble;
+
+/** What the drawn copper does. */
+public record Electrics(
+    ResistanceFigures resistance, InductanceFigures inductance, MachineFigures machine) {
+
+  static Electrics of(Assembly assembly, Spec spec, FabRules fab) {
+    ResistanceFigures ohms = Resistance.of(assembly.artwork(), fab.tolerance());
+    InductanceFigures henries =
+        Inductance.of(
+            assembly.artwork(),
+            spec.winding().connection(),
+            iron(spec.rotor(), assembly.artwork().stackup().thicknessMm()));
+    InductanceValues values =
+        new InductanceValues(
+            henries.phaseSelfHenry(),
+            henries.phaseMutualHenry().orElse(0),
+            henries.synchronousHenry(),
+            henries.terminalHenry());
+    MachineFigures machine =
+        Machine.of(assembly.artwork(), spec, fab, assembly.winding(), ohms, values);
+    return new Electrics(ohms, henries, machine);
+  }
+
+  /** The rotor's iron, as far as the spec tells where it is. */
+  private static IronPlanes iron(Spec.Rotor rotor, double boardMm) {
+    if (rotor.magnet().isPresent() && rotor.airGapMm().isPresent()) {
+      return MagnetArray.of(rotor, boardMm).iron();
+    }
+    OptionalDouble gap = rotor.counterPlateGapMm();
+    return gap.isPresent()
+        ? new IronPlanes(
+            OptionalDouble.empty(), OptionalDouble.of(-boardMm / 2 - gap.getAsDouble()))
+        : IronPlanes.NONE;
+  }
+
+  /** What the rule check must know: the back-EMF between two terminals at the duty's speed. */
+  RuleContext rules(Spec spec) {
+    OptionalDouble speed =
+        spec.duty().map(Spec.Duty::speedRadPerSecond).orElse(OptionalDouble.empty());
+    if (machine.emf().isEmpty() || speed.isEmpty()) {
+      return RuleContext.NONE;
+    }
+    double perSpeed =
+        Circuit.greatestShare(spec.winding().phases(), spec.winding().connection())
+            * machine.emf().get().phasePeakVoltSecondPerRadian();
+    return new RuleContext(OptionalDouble.of(perSpeed * speed.getAsDouble()));
+  }
+}

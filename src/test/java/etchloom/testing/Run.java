@@ -1,0 +1,29 @@
+package etchloom.testing;
+
+import etchloom.cli.App;
+import etchloom.cli.Console;
+import java.io.ByteArrayOutputStream;
+import java.io.PrintStream;
+import java.nio.charset.StandardCharsets;
+import java.util.Map;
+
+/** One command line, run in this process, with all that a user sees of it. */
+public record Run(int code, String out, String err) {
+  public static Run of(String... args) {
+    return with(Map.of(), args);
+  }
+
+  public static Run with(Map<String, String> environment, String... args) {
+    ByteArrayOutputStream out = new ByteArrayOutputStream();
+    ByteArrayOutputStream err = new ByteArrayOutputStream();
+    Console console =
+        new Console(
+            new PrintStream(out, true, StandardCharsets.UTF_8),
+            new PrintStream(err, true, StandardCharsets.UTF_8),
+            environment,
+            false);
+    int code = App.run(args, console);
+    return new Run(
+        code, out.toString(StandardCharsets.UTF_8), err.toString(StandardCharsets.UTF_8));
+  }
+}
