@@ -23,7 +23,7 @@ final class BoardCopper {
   private static final double CHORD_ERROR = 0.05;
 
   /** Longest filament over the track's width: about as long as the gaps to the next turns. */
-  private static final double LONGEST = 3;
+  private static final double LONGEST = 4;
 
   private final Artwork artwork;
   private final List<CrossSection> sections = new ArrayList<>();

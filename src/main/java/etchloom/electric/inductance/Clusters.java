@@ -9,13 +9,13 @@ import java.util.List;
  */
 final class Clusters {
   /** Most filaments of a cluster without children: where pairs and moments cost about the same. */
-  private static final int LEAF = 20;
+  private static final int LEAF = 16;
 
   /**
    * Sum of radii over distance at which leaves count as far. With the fourth order this leaves a
    * coupling off by some 1e-5 of the bodies' self couplings.
    */
-  private static final double OPENING = 0.75;
+  private static final double OPENING = 0.95;
 
   /** Larger clusters must be further apart, by this power of their size: more is at stake. */
   private static final double GROWTH = 0.15;

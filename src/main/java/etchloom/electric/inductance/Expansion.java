@@ -22,7 +22,9 @@ final class Expansion {
 
   private final Terms terms = Terms.all();
   private final double[] power = new double[COUNT];
-  private final double[] derivative = new double[COUNT];
+
+  /** The last stands for terms that do not exist and stays 0. */
+  private final double[] derivative = new double[COUNT + 1];
 
   /** Powers of a vector over their factorials. */
   private void powers(double x, double y, double z) {
@@ -91,19 +93,16 @@ final class Expansion {
       double[] second,
       int b,
       boolean upsideDown) {
-    derivatives(x, y, z);
+    double[] d = derivatives(x, y, z);
     double sum = 0;
     for (int m = 0; m < COUNT; m++) {
       int[] both = terms.sums(m);
       double sx = 0;
       double sy = 0;
       for (int n = 0; n < both.length; n++) {
-        double d = derivative[both[n]];
-        if (upsideDown && (terms.power(2, n) & 1) != 0) {
-          d = -d;
-        }
-        sx += d * second[b + n];
-        sy += d * second[b + COUNT + n];
+        double share = upsideDown ? terms.mirrored(n) * d[both[n]] : d[both[n]];
+        sx += share * second[b + n];
+        sy += share * second[b + COUNT + n];
       }
       double part = sx * first[a + m] + sy * first[a + COUNT + m];
       sum += (terms.degree(m) & 1) == 0 ? part : -part;
@@ -113,22 +112,21 @@ final class Expansion {
 
   /** All derivatives of 1/r at a place, by the recurrence of its Taylor coefficients. */
   double[] derivatives(double x, double y, double z) {
+    double[] d = derivative;
     double inverse = 1 / (x * x + y * y + z * z);
-    derivative[0] = Math.sqrt(inverse);
-    for (int m = 1; m < COUNT; m++) {
-      double degree = terms.degree(m);
-      double one =
-          x * at(terms.oneLess(0, m)) + y * at(terms.oneLess(1, m)) + z * at(terms.oneLess(2, m));
-      double two = at(terms.twoLess(0, m)) + at(terms.twoLess(1, m)) + at(terms.twoLess(2, m));
-      derivative[m] = -((2 - 1 / degree) * one + (1 - 1 / degree) * two) * inverse;
+    d[0] = Math.sqrt(inverse);
+    for (int degree = 1; degree <= Terms.ORDER; degree++) {
+      double first = -(2 - 1.0 / degree) * inverse;
+      double second = -(1 - 1.0 / degree) * inverse;
+      for (int m = terms.first(degree); m < terms.first(degree + 1); m++) {
+        double one = x * d[terms.oneLess(0, m)] + y * d[terms.oneLess(1, m)];
+        double two = d[terms.twoLess(0, m)] + d[terms.twoLess(1, m)] + d[terms.twoLess(2, m)];
+        d[m] = first * (one + z * d[terms.oneLess(2, m)]) + second * two;
+      }
     }
     for (int m = 0; m < COUNT; m++) {
-      derivative[m] *= terms.factorial(m);
+      d[m] *= terms.factorial(m);
     }
-    return derivative;
-  }
-
-  private double at(int m) {
-    return m < 0 ? 0 : derivative[m];
+    return d;
   }
 }

@@ -6,9 +6,9 @@ import etchloom.electric.field.GaussRule;
  * Neumann's integral over pairs of straight bars, {@code ∬ dl·dl' / r}, mm, each weighted with both
  * currents. The magnetic constant over 4π makes it an inductance.
  *
- * <p>Pairs three times the longer bar's size apart: the integral's expansion to second order in the
- * bars' lengths, widths and thicknesses. Down to one and a quarter times: to fourth order in the
- * lengths. A single pair is then off by 2e-3 at worst, where both are in line, and sums over
+ * <p>Pairs 2.2 times the longer bar's size apart: the integral's expansion to second order in the
+ * bars' lengths, widths and thicknesses. Down to 1.25 times: to fourth order in the lengths. A
+ * single pair is then off by one per cent at worst, where both are in line, and sums over
  * directions by much less. Nearer ones: bars whose sideways distance hardly changes along them in
  * closed form, others with the closed form of the longer bar's potential and Gauss's rule along the
  * shorter.
@@ -26,7 +26,7 @@ final class PairSum {
   private static final double APART = 1.25 * 1.25;
 
   /** Square of how many sizes apart the expansion to second order holds. */
-  private static final double FAR = 3 * 3;
+  private static final double FAR = 2.2 * 2.2;
 
   /** Sideways change over mean distance up to which bars count as parallel. */
   private static final double PARALLEL = 0.01;
@@ -38,12 +38,16 @@ final class PairSum {
     new GaussRule(1),
     new GaussRule(2),
     new GaussRule(3),
+    new GaussRule(4),
     new GaussRule(5),
     new GaussRule(8),
     new GaussRule(16)
   };
 
-  private static final double[] RULE_UP_TO = {0.2, 0.65, 1.4, 3, 6};
+  /**
+   * Length of the shorter bar over the distance up to which each rule errs by no more than 1e-3.
+   */
+  private static final double[] RULE_UP_TO = {0.2, 0.7, 1.6, 2.2, 3, 6};
 
   private final Pieces a;
   private final Pieces b;
@@ -198,22 +202,25 @@ final class PairSum {
    * the distances that have the given geometric mean and mean square.
    */
   private static double potential(double along, double half, double square, double mean) {
-    double root = Math.sqrt(Math.max(0, mean * mean - square * square));
     double from = -half - along;
     double to = half - along;
-    if (to < 0) {
-      double swap = -to;
-      to = -from;
-      from = swap;
-    }
-    double f2 = from * from + mean;
-    double t2 = to * to + mean;
-    double far = (to + Math.sqrt(t2 + root)) * (to + Math.sqrt(t2 - root));
-    double near = Math.sqrt(f2 + root);
-    double other = Math.sqrt(f2 - root);
-    return from < 0
-        ? Math.log(far * (near - from) * (other - from) / (square * square)) / 2
-        : Math.log(far / ((near + from) * (other + from))) / 2;
+    double root2 = Math.max(0, mean * mean - square * square);
+    double f = product(Math.abs(from), mean, root2);
+    double t = product(Math.abs(to), mean, root2);
+    double ratio = from < 0 && to > 0 ? f * t / (square * square) : to > 0 ? t / f : f / t;
+    return Math.log(ratio) / 2;
+  }
+
+  /**
+   * {@code (u + r)(u + s)}, r and s the distances from a line's end u further on to both lines: u²
+   * + u (r + s) + r s.
+   *
+   * @param root2 a quarter of the square of the difference of the lines' squared distances
+   */
+  private static double product(double u, double mean, double root2) {
+    double u2 = u * u + mean;
+    double rs = Math.sqrt(u2 * u2 - root2);
+    return u * u + u * Math.sqrt(2 * (u2 + rs)) + rs;
   }
 
   /**
@@ -224,21 +231,21 @@ final class PairSum {
    * @param mean of the square of the distance
    */
   static double parallel(double along, double length1, double length2, double square, double mean) {
-    double root = Math.sqrt(Math.max(0, mean * mean - square * square));
+    double root2 = Math.max(0, mean * mean - square * square);
     double sum = (length1 + length2) / 2;
     double difference = (length1 - length2) / 2;
-    return twice(along + sum, square, mean, root)
-        - twice(along + difference, square, mean, root)
-        - twice(along - difference, square, mean, root)
-        + twice(along - sum, square, mean, root);
+    return twice(along + sum, square, mean, root2)
+        - twice(along + difference, square, mean, root2)
+        - twice(along - difference, square, mean, root2)
+        + twice(along - sum, square, mean, root2);
   }
 
   /** The integral's own integral over both lengths, the mean of two lines. */
-  private static double twice(double t, double square, double mean, double root) {
+  private static double twice(double t, double square, double mean, double root2) {
     double u = Math.abs(t);
     double u2 = u * u + mean;
-    double r = Math.sqrt(u2 + root);
-    double s = Math.sqrt(u2 - root);
-    return (u * Math.log((u + r) * (u + s) / square) - r - s) / 2;
+    double rs = Math.sqrt(u2 * u2 - root2);
+    double both = Math.sqrt(2 * (u2 + rs));
+    return (u * Math.log((u * (u + both) + rs) / square) - both) / 2;
   }
 }

@@ -32,10 +32,11 @@ final class PhaseBodies {
     PhaseBodies out = new PhaseBodies(n);
     int coil = out.body(flow.coilFilaments(copper, closed));
     out.term(coil, coil)[0] = 1;
+    List<Filaments> all = new ArrayList<>();
     for (int p = 0; p < n; p++) {
-      out.body(flow.phaseFilaments(copper, p, true, closed));
+      all.add(flow.phaseFilaments(copper, p, true, closed));
     }
-    out.eachPair(coil + 1);
+    out.eachPair(all);
     return out.clustered(copper);
   }
 
@@ -56,9 +57,8 @@ final class PhaseBodies {
       }
       links.add(f);
     }
-    if (links.stream().noneMatch(f -> f.size() == 0)) {
-      out.links(links, repeats);
-    }
+    out.eachPair(links);
+    out.linksWithCoils(links, repeats);
     return out.clustered(copper);
   }
 
@@ -78,12 +78,7 @@ final class PhaseBodies {
     }
   }
 
-  private void links(List<Filaments> links, Repeats repeats) {
-    int first = filaments.size();
-    for (Filaments f : links) {
-      body(f);
-    }
-    eachPair(first);
+  private void linksWithCoils(List<Filaments> links, Repeats repeats) {
     for (int p = 0; p < phases; p++) {
       for (int q = 0; q < phases; q++) {
         Filaments onto = new Filaments();
@@ -92,20 +87,28 @@ final class PhaseBodies {
             onto.addTurned(links.get(p), -k * repeats.pitchRad(), repeats.factor(k));
           }
         }
-        double[] share = term(body(onto), 0);
-        share[at(p, q)] += 1;
-        share[at(q, p)] += 1;
+        if (onto.size() > 0) {
+          double[] share = term(body(onto), 0);
+          share[at(p, q)] += 1;
+          share[at(q, p)] += 1;
+        }
       }
     }
   }
 
-  /** Each phase's body with each phase's, the first phase's body given. */
-  private void eachPair(int first) {
+  /** Each phase's body with each phase's; a phase may have none. */
+  private void eachPair(List<Filaments> ofPhases) {
+    int[] bodyOf = new int[phases];
+    for (int p = 0; p < phases; p++) {
+      bodyOf[p] = ofPhases.get(p).size() == 0 ? -1 : body(ofPhases.get(p));
+    }
     for (int p = 0; p < phases; p++) {
       for (int q = p; q < phases; q++) {
-        double[] share = term(first + p, first + q);
-        share[at(p, q)] = 1;
-        share[at(q, p)] = 1;
+        if (bodyOf[p] >= 0 && bodyOf[q] >= 0) {
+          double[] share = term(bodyOf[p], bodyOf[q]);
+          share[at(p, q)] = 1;
+          share[at(q, p)] = 1;
+        }
       }
     }
   }

@@ -16,7 +16,7 @@ final class Terms {
   /** First term of each degree, and one past the last. */
   private final int[] firstOf = new int[ORDER + 2];
 
-  /** For x, y, z: the term with one power fewer, then with two fewer; -1 where there is none. */
+  /** For x, y, z: the term with one power fewer, then with two fewer; COUNT where there is none. */
   private final int[][] less = new int[6][COUNT];
 
   /** For terms m and n whose degrees add up to no more than the order, the term of both powers. */
@@ -52,9 +52,9 @@ final class Terms {
     factorial[m] = ofNumber(i) * ofNumber(j) * ofNumber(k);
     for (int fewer = 1; fewer <= 2; fewer++) {
       int row = 3 * (fewer - 1);
-      less[row][m] = i < fewer ? -1 : at[i - fewer][j][k];
-      less[row + 1][m] = j < fewer ? -1 : at[i][j - fewer][k];
-      less[row + 2][m] = k < fewer ? -1 : at[i][j][k - fewer];
+      less[row][m] = i < fewer ? COUNT : at[i - fewer][j][k];
+      less[row + 1][m] = j < fewer ? COUNT : at[i][j - fewer][k];
+      less[row + 2][m] = k < fewer ? COUNT : at[i][j][k - fewer];
     }
   }
 
@@ -81,6 +81,11 @@ final class Terms {
     return degree[m];
   }
 
+  /** -1 for an odd power of z, else 1: what turning upside down does. */
+  int mirrored(int m) {
+    return (power[2][m] & 1) == 0 ? 1 : -1;
+  }
+
   /** First term of a degree, up to one beyond the highest. */
   int first(int ofDegree) {
     return firstOf[ofDegree];
@@ -91,12 +96,12 @@ final class Terms {
     return factorial[m];
   }
 
-  /** The term with one power of an axis fewer; -1 where there is none. */
+  /** The term with one power of an axis fewer; COUNT where there is none. */
   int oneLess(int axis, int m) {
     return less[axis][m];
   }
 
-  /** The term with two powers of an axis fewer; -1 where there is none. */
+  /** The term with two powers of an axis fewer; COUNT where there is none. */
   int twoLess(int axis, int m) {
     return less[3 + axis][m];
   }

@@ -104,7 +104,7 @@ class ClustersTest {
       reversed.add(x + dx, y - dy, x - dx, y + dy, coil.section(i), 1);
     }
     double self = Bodies.clustered(coil, SECTIONS);
-    assertEquals(self, Bodies.clustered(mirrored, SECTIONS), 2e-5 * self);
+    assertEquals(self, Bodies.clustered(mirrored, SECTIONS), 1e-4 * self);
     Filaments ring = Bodies.circle(35, 0.02, 2);
     double flux = Bodies.clustered(coil, ring, SECTIONS, Mirror.NONE);
     assertTrue(flux > 0, "counter-clockwise within counter-clockwise");

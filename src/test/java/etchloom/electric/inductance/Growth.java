@@ -11,7 +11,7 @@ import java.util.Locale;
  *
  * <p>Times are processor time of all threads.
  *
- * <p>The coil is rings of 0.2 mm track at 0.4 mm pitch on four layers, filaments of 0.6 mm: the
+ * <p>The coil is rings of 0.2 mm track at 0.4 mm pitch on four layers, filaments of 0.8 mm: the
  * density of a board's coil, more of it each time.
  */
 final class Growth {
@@ -27,11 +27,11 @@ final class Growth {
   public static void main(String[] args) {
     int mostDirect = args.length > 0 ? Integer.parseInt(args[0]) : 10_000;
     for (int i = 0; i < 15; i++) {
-      Bodies.clustered(rings(24), SECTIONS);
+      Bodies.clustered(rings(28), SECTIONS);
     }
     double lastN = 0;
     double lastMs = 0;
-    for (int turns : new int[] {24, 34, 49, 77, 109, 154}) {
+    for (int turns : new int[] {28, 40, 56, 89, 126, 178}) {
       Filaments f = rings(turns);
       double l = 0;
       double ms = Double.POSITIVE_INFINITY;
@@ -111,7 +111,7 @@ final class Growth {
     for (int layer = 0; layer < 4; layer++) {
       for (int k = 1; k <= turns; k++) {
         double r = 0.4 * k;
-        int n = (int) Math.ceil(2 * Math.PI * r / 0.6);
+        int n = (int) Math.ceil(2 * Math.PI * r / 0.8);
         f.addTurned(Bodies.polygon(n, r, 1, layer), 0.3 * layer, 1);
       }
     }
