@@ -33,7 +33,8 @@ final class PageWriter extends RowWriter {
   PageWriter(Path dir, Plan plan, Summary summary) throws IOException {
     super(dir.resolve("survey.html"));
     keys = plan.axes().stream().map(Axis::key).toList();
-    columns = summary.columns();
+    // a figure of the same name as a varied key has the same value
+    columns = summary.columns().stream().filter(c -> !keys.contains(c)).toList();
     variants = dir.resolve("variants");
     Html h = new Html();
     HtmlHead.write(h, "Survey of " + plan.title(), true);

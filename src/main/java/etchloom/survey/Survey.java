@@ -35,7 +35,8 @@ public final class Survey {
   public static Staged<Done> grid(
       Path dir, Bench bench, Spec spec, Grid grid, Part part, Wish wish, Progress progress)
       throws IOException {
-    Map<String, Object> sample = sample(bench, grid.values(1));
+    boolean named = !(wish.keep() + wish.rank()).isEmpty();
+    Map<String, Object> sample = named ? sample(bench, grid.values(1)) : Map.of();
     Staged<Listing> listing = listing(wish, sample);
     List<Diagnostic> wrong = new ArrayList<>(keys(bench, grid));
     wrong.addAll(listing.diagnostics());
