@@ -53,6 +53,11 @@ public final class Bench {
     return shelf;
   }
 
+  /** The spec itself. */
+  Optional<SpecFile> file() {
+    return SpecReader.read(specName, spec).value();
+  }
+
   /** What is wrong with a set of values as far as reading them can tell. */
   public List<Diagnostic> reading(Map<String, String> values) {
     return SpecReader.read(specName, spec, values).diagnostics();
@@ -83,6 +88,11 @@ public final class Bench {
     Map<String, Object> figures = new LinkedHashMap<>(ReportJson.figures(d.results(toolVersion)));
     figures.keySet().removeAll(NO_FIGURES);
     return new Trial(reason(d.rules()), yaml, figures, Optional.of(d.rules()), Optional.empty());
+  }
+
+  /** The variant's own file without drawing it; empty where the values make none. */
+  Optional<String> yaml(Map<String, String> values) {
+    return SpecReader.read(specName, spec, values).value().map(f -> yaml(f, values));
   }
 
   /** The variant's own file, ready for {@code draw}. */

@@ -1,12 +1,20 @@
 package etchloom.survey;
 
+import java.util.Optional;
+
 /** A finished survey, as its command tells of it. */
 public final class Done {
   private final Plan plan;
   private final Summary summary;
   private final long faults;
+  private final Optional<Best> best;
 
   Done(Plan plan, Summary summary, long faults) {
+    this(plan, summary, faults, Optional.empty());
+  }
+
+  Done(Plan plan, Summary summary, long faults, Optional<Best> best) {
+    this.best = best;
     this.plan = plan;
     this.summary = summary;
     this.faults = faults;
@@ -14,7 +22,7 @@ public final class Done {
 
   /** The table for the terminal. */
   public String text(String where) {
-    return SurveyText.text(plan, summary, where);
+    return best.map(b -> b.text() + "\n").orElse("") + SurveyText.text(plan, summary, where);
   }
 
   /** Variants shown that keep every rule. */

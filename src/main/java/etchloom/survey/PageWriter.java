@@ -60,7 +60,7 @@ final class PageWriter extends RowWriter {
 
   private static String words(Plan plan, Summary s) {
     String keep = s.listing().keepText();
-    return plan.count()
+    return s.count()
         + " variants"
         + (plan.part().equals(Part.WHOLE) ? "" : ", part " + plan.part())
         + (keep.isEmpty() ? "" : "; " + s.kept() + " with " + keep)
