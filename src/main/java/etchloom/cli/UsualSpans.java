@@ -12,7 +12,7 @@ import java.util.Optional;
 final class UsualSpans {
   private UsualSpans() {}
 
-  /** From the fab's least track and space up to three times the spec's own; radii round theirs. */
+  /** From the fab's least track and space up to a few times the spec's own; radii round theirs. */
   static List<Span> of(InputFiles.Inputs in) {
     Spec.Coil coil = in.file().spec().coil();
     Optional<FabRules.CopperRow> row = in.fab().row(in.file().spec().board().outerCopper(), true);
@@ -20,7 +20,7 @@ final class UsualSpans {
     double space = row.map(FabRules.CopperRow::spaceMm).orElse(coil.spaceMm() / 2);
     double edge = in.file().spec().board().diameterMm() / 2;
     return List.of(
-        span("coil.track", track, 3 * Math.max(track, coil.trackMm())),
+        span("coil.track", track, 5 * Math.max(track, coil.trackMm())),
         span("coil.space", space, 3 * Math.max(space, coil.spaceMm())),
         span("coil.inner-radius", 0.5 * coil.innerRadiusMm(), 1.4 * coil.innerRadiusMm()),
         span(

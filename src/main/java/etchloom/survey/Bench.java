@@ -25,6 +25,9 @@ public final class Bench {
   /** What is the same in every row and no figure. */
   private static final Set<String> NO_FIGURES = Set.of("tool.version", "title", "revision");
 
+  /** How the reason begins where the program itself failed. */
+  static final String FAULT = "error[fault]";
+
   private final String specName;
   private final byte[] spec;
   private final Shelf shelf;
@@ -67,7 +70,7 @@ public final class Bench {
     try {
       return tried(values);
     } catch (RuntimeException e) {
-      String reason = "error[fault]: a fault in Etchloom itself: " + e.getClass().getSimpleName();
+      String reason = FAULT + ": a fault in Etchloom itself: " + e.getClass().getSimpleName();
       return new Trial(reason, Optional.empty(), Map.of(), Optional.empty(), Optional.of(e));
     }
   }

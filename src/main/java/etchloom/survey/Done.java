@@ -6,18 +6,12 @@ import java.util.Optional;
 public final class Done {
   private final Plan plan;
   private final Summary summary;
-  private final long faults;
   private final Optional<Best> best;
 
-  Done(Plan plan, Summary summary, long faults) {
-    this(plan, summary, faults, Optional.empty());
-  }
-
-  Done(Plan plan, Summary summary, long faults, Optional<Best> best) {
-    this.best = best;
+  Done(Plan plan, Summary summary, Optional<Best> best) {
     this.plan = plan;
     this.summary = summary;
-    this.faults = faults;
+    this.best = best;
   }
 
   /** The table for the terminal. */
@@ -30,8 +24,8 @@ public final class Done {
     return summary.passed();
   }
 
-  /** Variants of this run in which the program itself failed. */
+  /** Variants in which the program itself failed. */
   public long faults() {
-    return faults;
+    return summary.faults();
   }
 }

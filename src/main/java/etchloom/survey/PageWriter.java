@@ -55,7 +55,7 @@ final class PageWriter extends RowWriter {
     h.raw("<thead id=\"head\"></thead><tbody id=\"body\"></tbody></table></div>\n");
     h.element("p", "", "id=\"more\"", "class=\"quiet\"").close("main");
     h.raw("<script type=\"application/json\" id=\"data\">");
-    put(h.toString()).put(head(summary));
+    put(h.toString()).put(head(plan, summary));
   }
 
   private static String words(Plan plan, Summary s) {
@@ -87,7 +87,7 @@ final class PageWriter extends RowWriter {
   }
 
   /** The data's object up to the rows. */
-  private String head(Summary s) throws IOException {
+  private String head(Plan plan, Summary s) throws IOException {
     List<String> shown = new ArrayList<>();
     for (FigureName n : s.listing().names()) {
       columns.stream()
@@ -100,7 +100,7 @@ final class PageWriter extends RowWriter {
     head.put("shown", shown);
     head.put("low", columns.stream().filter(Ranking::low).toList());
     head.put("order", s.listing().rank().isPresent() ? s.onPage() : List.of());
-    head.put("x", FIRST_X);
+    head.put("x", plan.kind().equals(Plan.GRID) ? FIRST_X : "variant");
     head.put("y", shown.stream().findFirst().orElse(firstY()));
     String text = safe(JSON.std.asString(head));
     return text.substring(0, text.length() - 1) + ",\"rows\":[";

@@ -36,6 +36,7 @@ final class Search {
   private final Journal journal;
   private final List<Row> before = new ArrayList<>();
   private final Consumer<Row> told;
+  private final Progress progress;
   private final int budget;
   private final Map<Map<String, String>, Double> known = new HashMap<>();
   private int done;
@@ -57,7 +58,8 @@ final class Search {
       String name,
       Journal journal,
       int budget,
-      Consumer<Row> told)
+      Consumer<Row> told,
+      Progress progress)
       throws IOException {
     this.bench = bench;
     this.space = space;
@@ -66,6 +68,7 @@ final class Search {
     this.journal = journal;
     this.budget = budget;
     this.told = told;
+    this.progress = progress;
     bestPoint = anchor.clone();
     Journal.each(dir, name, before::add);
   }
@@ -113,12 +116,7 @@ final class Search {
       return row;
     }
     Trial trial = bench.run(values);
-    trial
-        .fault()
-        .ifPresent(
-            f -> {
-              throw f;
-            });
+    trial.fault().ifPresent(f -> progress.fault(index + 1, f));
     Row row = new Row(index + 1, values, trial.passed(), trial.reason(), goal.figures(trial));
     journal.append(row);
     return row;

@@ -128,8 +128,8 @@ public final class Seek {
       List<List<Row>> all = search();
       merge(journal, all);
     }
-    Summary summary = Folder.tables(dir, plan, listing);
-    return new Done(plan, summary, 0, Optional.of(trace()));
+    Optional<Best> best = Optional.of(trace());
+    return new Done(plan, Folder.tables(dir, plan, listing, best), best);
   }
 
   private List<List<Row>> search() throws IOException {
@@ -155,7 +155,17 @@ public final class Seek {
     double[] from = points[first];
     String name = name(SEARCHES + 1);
     try (Journal j = Journal.open(dir, name, plan, 1)) {
-      new Search(bench, space, goal, anchor, dir, name, j, polish, row -> tell(row, best, count))
+      new Search(
+              bench,
+              space,
+              goal,
+              anchor,
+              dir,
+              name,
+              j,
+              polish,
+              row -> tell(row, best, count),
+              progress)
           .polish(from);
     }
     List<List<Row>> rows = new ArrayList<>();
@@ -174,7 +184,7 @@ public final class Seek {
   private Search one(int k, double[] anchor, int budget, java.util.function.Consumer<Row> told) {
     String name = name(k);
     try (Journal j = Journal.open(dir, name, plan, 1)) {
-      Search s = new Search(bench, space, goal, anchor, dir, name, j, budget, told);
+      Search s = new Search(bench, space, goal, anchor, dir, name, j, budget, told, progress);
       s.evolve(wish.seed() * SEARCHES + k, k == 1);
       return s;
     } catch (IOException e) {
@@ -227,7 +237,7 @@ public final class Seek {
 
   private Best trace() throws IOException {
     Best best = new Best(goal);
-    best.begin(own);
+    best.begin(own, wish.spans());
     Journal.each(dir, best::add);
     return best;
   }
