@@ -1,5 +1,6 @@
 package etchloom.artwork;
 
+import etchloom.geometry.Line;
 import etchloom.geometry.Path;
 import etchloom.geometry.Point;
 import java.util.ArrayList;
@@ -10,6 +11,7 @@ import java.util.Optional;
 public final class CopperBuilder {
   private final List<Joint> joints = new ArrayList<>();
   private final List<Conductor> conductors = new ArrayList<>();
+  private int circuits;
 
   /** A plated hole with a pad on layers 1 to {@code layers}; gives its number. */
   public int drilled(
@@ -50,6 +52,38 @@ public final class CopperBuilder {
     int id = conductors.size();
     conductors.add(new Conductor(id, layer, widthMm, path, from, to, net, what));
     return id;
+  }
+
+  /**
+   * Joins vias of one joint by straight tracks, which makes closed circuits of them.
+   *
+   * @param joints the vias in line
+   * @param layers where the joint is reached by copper
+   * @return the tracks from the first via to the last, those side by side one after the other
+   */
+  public List<Phase.Step> row(
+      List<Integer> joints, List<Integer> layers, double widthMm, String net, Feature what) {
+    List<Phase.Step> out = new ArrayList<>();
+    for (int k = 0; k + 1 < joints.size(); k++) {
+      int from = joints.get(k);
+      int to = joints.get(k + 1);
+      for (int layer : layers) {
+        Path path = Path.of(new Line(joint(from).at(), joint(to).at()));
+        out.add(new Phase.Step(track(layer, widthMm, path, from, to, net, what), true));
+      }
+      circuits += layers.size() - 1;
+    }
+    return out;
+  }
+
+  /** Counts circuits that copper drawn otherwise closes. */
+  public void closes(int more) {
+    circuits += more;
+  }
+
+  /** Independent closed circuits made on purpose so far. */
+  public int circuits() {
+    return circuits;
   }
 
   public Joint joint(int id) {

@@ -8,7 +8,7 @@ import etchloom.artwork.Stackup;
 import etchloom.artwork.Stroke;
 import etchloom.coil.CoilPlan;
 import etchloom.coil.CoilSize;
-import etchloom.coil.Wedge;
+import etchloom.coil.Coils;
 import etchloom.diagnostic.Staged;
 import etchloom.geometry.Path;
 import etchloom.geometry.Point;
@@ -18,6 +18,7 @@ import etchloom.rim.RimSize;
 import etchloom.spec.FabRules;
 import etchloom.spec.Positions;
 import etchloom.spec.Spec;
+import etchloom.winding.ParallelPaths;
 import etchloom.winding.StarOfSlots;
 import etchloom.winding.Winding;
 import java.util.ArrayList;
@@ -66,11 +67,7 @@ public final class Assembler {
       return Optional.empty();
     }
     RimBuilder.Result rim =
-        RimBuilder.plan(
-            winding.get(),
-            spec.winding().connection(),
-            spec.board().starPointOut(),
-            rimSize(coil.get()));
+        RimBuilder.plan(winding.get(), spec.winding(), spec.board().starPointOut(), rimSize());
     rim.refusal().ifPresent(r -> problems.add("rim", r.key(), r.message()));
     if (rim.planned().isEmpty()) {
       return Optional.empty();
@@ -106,29 +103,51 @@ public final class Assembler {
               + "-phase winding; nearest: "
               + near);
     }
+    w.ifPresent(this::paths);
     return w;
+  }
+
+  private void paths(Winding w) {
+    int paths = spec.winding().parallelPaths();
+    if (!ParallelPaths.equal(w, paths)) {
+      List<Integer> possible = ParallelPaths.possible(w);
+      problems.add(
+          "paths",
+          "winding.parallel-paths",
+          paths
+              + " paths would not carry the same EMF and drive currents through each other; with "
+              + w.coils()
+              + " coils and "
+              + w.poles()
+              + " poles equal paths are: "
+              + String.join(", ", possible.stream().map(String::valueOf).toList()),
+          "`parallel-paths: " + possible.get(possible.size() - 1) + "`");
+    }
   }
 
   private CoilSize coilSize() {
     Spec.Coil c = spec.coil();
-    double pitch = c.trackMm() + c.spaceMm();
     return new CoilSize(
+        c.outline(),
         spec.winding().coils(),
         spec.board().layers(),
+        c.parallelLayers(),
         c.innerRadiusMm(),
         c.outerRadiusMm(),
+        c.widthMm(),
         c.trackMm(),
         c.spaceMm(),
-        c.cornerMm().orElse(Math.max(c.trackMm(), pitch / 2)),
+        c.cornerMm(),
         spec.via().padMm(),
         spec.via().holeMm(),
+        spec.via().count(),
         fab.hole().gapMm(),
         spec.rim().trackMm());
   }
 
   private Optional<CoilPlan> coil() {
     CoilSize size = coilSize();
-    if (size.cornerMm() < size.pitchMm() / 2 - 1e-9) {
+    if (size.cornerMm().orElse(size.leastCornerMm()) < size.leastCornerMm() - 1e-9) {
       problems.add(
           "corner",
           "coil.corner",
@@ -136,21 +155,37 @@ public final class Assembler {
               Locale.ROOT,
               "a corner of %.3f mm closes the gap at the coil's inner end; at least half of track"
                   + " and space: %.3f mm",
-              size.cornerMm(),
-              size.pitchMm() / 2),
-          String.format(Locale.ROOT, "`corner: %.3f mm`", size.pitchMm() / 2));
+              size.cornerMm().orElseThrow(),
+              size.leastCornerMm()),
+          String.format(Locale.ROOT, "`corner: %.3f mm`", size.leastCornerMm()));
       return Optional.empty();
     }
-    int most = Wedge.mostTurns(size);
+    double over = Coils.overhangMm(size);
+    if (over > 1e-9) {
+      problems.add(
+          "sector",
+          size.widthMm().isPresent() ? "coil.width" : "coil.outer-radius",
+          String.format(
+              Locale.ROOT,
+              "the coil with its space is %.3f mm wider than its sector, where neighbours touch; %s"
+                  + " or fewer winding.coils would do",
+              over,
+              size.widthMm().isPresent()
+                  ? "a smaller coil.width, a larger coil.inner-radius"
+                  : "a smaller coil.outer-radius, a larger coil.inner-radius"));
+      return Optional.empty();
+    }
+    int most = Coils.mostTurns(size);
     int turns = spec.coil().turns().orElse(most);
     if (most == 0) {
       problems.add(
           "turns",
           "coil.outer-radius",
-          "the sector has no room for a single turn around its "
-              + size.layers() / 2
-              + " eye vias; a larger coil.outer-radius, a smaller via.pad, fewer board.layers or"
-              + " fewer winding.coils would do");
+          "the coil has no room for a single turn around its "
+              + coilVias(size)
+              + "; a larger coil.outer-radius, a smaller via.pad, "
+              + (size.viaCount() > 1 ? "a smaller via.count, " : "")
+              + "fewer board.layers or fewer winding.coils would do");
       return Optional.empty();
     }
     if (turns > most) {
@@ -161,35 +196,45 @@ public final class Assembler {
           "`turns: " + most + "` or `turns: fill`");
       return Optional.empty();
     }
-    return Wedge.draw(size, turns);
+    return Coils.draw(size, turns);
   }
 
-  private RimSize rimSize(CoilPlan coil) {
+  private static String coilVias(CoilSize size) {
+    int vias = (size.nodes() - 1) * size.viaCount();
+    return vias == 1 ? "eye via" : vias + " eye vias";
+  }
+
+  private RimSize rimSize() {
+    CoilSize coil = coilSize();
     return new RimSize(
-        spec.winding().coils(),
-        coil.nodeAnglesRad().size(),
-        spec.board().layers(),
+        coil.coils(),
+        coil.nodes(),
+        coil.layers(),
         coil.nodeRadiusMm(),
-        coil.nodeAnglesRad().get(0),
+        coil.nodeAngleRad(0),
         spec.rim().trackMm(),
         spec.coil().spaceMm(),
         spec.via().padMm(),
         spec.via().holeMm(),
+        spec.via().count(),
+        coil.viaPitchMm(),
         spec.board().diameterMm() / 2,
         fab.edge().copperMm(),
         fab.edge().holeMm(),
-        spec.board().terminals());
+        spec.board().terminals(),
+        spec.board().tab());
   }
 
   private Assembly draw(
       Stackup stackup, Winding winding, CoilPlan coil, RimBuilder.Planned planned) {
-    boolean open = spec.winding().connection() == Spec.Connection.OPEN;
+    NetNames nets = new NetNames(winding, spec.winding().connection());
     CopperBuilder copper = new CopperBuilder();
-    CoilPlacer placer = new CoilPlacer(spec, coil, winding, copper, open);
+    CoilPlacer placer = new CoilPlacer(spec, coil, winding, copper, nets);
     placer.place();
-    Rim rim = planned.draw(copper, placer::joint, phase -> open ? phase : "WINDING");
+    Rim rim = planned.draw(copper, placer::joint, nets::of);
     List<MountingHole> holes = mountingHoles();
-    List<Path> profile = profile();
+    List<Path> profile = BoardEdge.of(spec.board());
+    new TerminalPlaces(spec, fab, problems).check(copper.joints(), holes);
     Mask mask = Mask.over(copper.joints(), holes, fab.mask().expansionMm());
     PlacedLegend legend =
         new LegendBuilder(spec, fab, copper.joints(), holes, mask.top()).build(draft);
@@ -216,17 +261,18 @@ public final class Assembler {
             placer.coils(),
             PhaseTracer.trace(copper, placer.coils(), rim),
             coil.turns(),
-            spec.winding().connection() == Spec.Connection.DELTA ? 1 : 0);
+            circuits(copper));
     return new Assembly(art, winding, rim);
   }
 
-  private List<Path> profile() {
-    List<Path> out = new ArrayList<>();
-    out.add(Path.circle(Point.ORIGIN, spec.board().diameterMm() / 2));
-    if (spec.board().boreMm() > 0) {
-      out.add(Path.circle(Point.ORIGIN, spec.board().boreMm() / 2));
-    }
-    return out;
+  /**
+   * A delta closes one circuit; each path beside the first closes one more in its phase; rows of
+   * vias and layers side by side close theirs.
+   */
+  private int circuits(CopperBuilder copper) {
+    Spec.Winding w = spec.winding();
+    int delta = w.connection() == Spec.Connection.DELTA ? 1 : 0;
+    return copper.circuits() + delta + w.phases() * (w.parallelPaths() - 1);
   }
 
   private List<MountingHole> mountingHoles() {

@@ -43,6 +43,7 @@ final class LegendBuilder {
         new LegendRoom(
             spec.board().diameterMm() / 2,
             spec.board().boreMm() / 2,
+            spec.board().tab(),
             holes,
             openings,
             fab.legend().gapMm(),

@@ -5,8 +5,10 @@ import etchloom.artwork.Opening;
 import etchloom.geometry.Path;
 import etchloom.geometry.Point;
 import etchloom.geometry.Segment;
+import etchloom.spec.Spec;
 import java.util.ArrayList;
 import java.util.List;
+import java.util.Optional;
 
 /** Where the legend may go: clear of openings, holes, the edge, and what is already there. */
 final class LegendRoom {
@@ -15,6 +17,7 @@ final class LegendRoom {
 
   private final double boardRadiusMm;
   private final double boreRadiusMm;
+  private final Optional<Spec.Tab> tab;
   private final double gapMm;
   private final double lineMm;
   private final List<double[]> circles = new ArrayList<>();
@@ -23,12 +26,14 @@ final class LegendRoom {
   LegendRoom(
       double boardRadiusMm,
       double boreRadiusMm,
+      Optional<Spec.Tab> tab,
       List<MountingHole> holes,
       List<Opening> openings,
       double gapMm,
       double lineMm) {
     this.boardRadiusMm = boardRadiusMm;
     this.boreRadiusMm = boreRadiusMm;
+    this.tab = tab;
     this.gapMm = gapMm;
     this.lineMm = lineMm;
     for (MountingHole h : holes) {
@@ -63,7 +68,7 @@ final class LegendRoom {
 
   private boolean free(Point p) {
     double r = p.norm();
-    if (r > outerMm() || r < innerMm()) {
+    if (r > outerMm() && !onTab(p) || r < innerMm()) {
       return false;
     }
     // The points stand apart, so what lies between them is covered by half a step more.
@@ -79,6 +84,17 @@ final class LegendRoom {
       }
     }
     return true;
+  }
+
+  private boolean onTab(Point p) {
+    if (tab.isEmpty()) {
+      return false;
+    }
+    Point q = p.rotated(-tab.get().angleRad());
+    double in = gapMm + lineMm / 2;
+    return q.x() > 0
+        && q.x() <= boardRadiusMm + tab.get().lengthMm() - in
+        && Math.abs(q.y()) <= tab.get().widthMm() / 2 - in;
   }
 
   private static List<Point> points(List<Path> paths) {

@@ -12,6 +12,6 @@ final class FailedProof extends IllegalStateException {
         "the files, read back, are not the winding that was asked for ("
             + proof.findings().stream().map(ProofFinding::name).distinct().toList()
             + ")\n"
-            + String.join("\n", proof.findings().stream().map(ProofFinding::toString).toList()));
+            + String.join("\n", proof.findings().stream().map(ProofFinding::text).toList()));
   }
 }

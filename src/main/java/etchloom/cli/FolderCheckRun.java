@@ -39,7 +39,7 @@ final class FolderCheckRun {
               FolderReader.read(path),
               layers,
               circuits,
-              (n, copper) -> FolderRules.limits(fab, n, copper));
+              (n, copper) -> FolderRules.shop(fab, n, copper));
     } catch (UnreadableFile e) {
       throw new BadInput(List.of(Diagnostic.error(e.code(), e.where(), "", e.reason())));
     } catch (IOException e) {
@@ -51,6 +51,7 @@ final class FolderCheckRun {
         .findings()
         .forEach(f -> console.err().println("error[" + f.name() + "]: " + rest(f.text())));
     rules.findings().forEach(f -> console.err().println(FindingText.line(f)));
+    List<String> terminals = found.ohms().map(FolderRules::words).orElse(List.of());
     if (o.json()) {
       console.print(ReportJson.writeCheck(Version.TEXT, rules, found.proof()));
     } else if (!o.quiet()) {
@@ -58,7 +59,7 @@ final class FolderCheckRun {
           .out()
           .print(
               FolderSummary.text(
-                  path.toString(), fab.title(), rules, found.proof(), List.of(), console.colour()));
+                  path.toString(), fab.title(), rules, found.proof(), terminals, console.colour()));
     }
     return rules.passed() && found.proof().passed() ? ExitCode.DONE : ExitCode.REFUSED;
   }

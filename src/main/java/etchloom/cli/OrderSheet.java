@@ -36,14 +36,18 @@ final class OrderSheet {
         r.fab().title(),
         drawn,
         board.layers() > 2 ? Optional.of(inner) : Optional.empty(),
-        circuits(spec.winding().connection()),
+        circuits(spec.winding()),
         OrderLines.resistance(r));
   }
 
-  private static String circuits(Spec.Connection c) {
-    return c == Spec.Connection.OPEN
-        ? "open, one net for each phase"
-        : c.name().toLowerCase(Locale.ROOT) + ", the whole winding is one net";
+  private static String circuits(Spec.Winding w) {
+    if (w.connection() == Spec.Connection.OPEN) {
+      return "open, one net for each phase";
+    }
+    String name = w.connection().name().toLowerCase(Locale.ROOT);
+    return w.phases() == 6
+        ? "two " + name + "s of three phases, one net for each"
+        : name + ", the whole winding is one net";
   }
 
   /**

@@ -1,6 +1,7 @@
 package etchloom.coil;
 
 import etchloom.geometry.Path;
+import etchloom.geometry.Point;
 import java.util.List;
 
 /**
@@ -8,20 +9,17 @@ import java.util.List;
  *
  * @param turns on each layer
  * @param layers one spiral a layer, L1 first, in the walking direction from start to finish
- * @param eyeRadiiMm radii of the eye vias on the axis; pair {@code j} of layers takes the j-th
- * @param nodeRadiusMm radius of the rim nodes
- * @param nodeAnglesRad angles of the rim nodes from the axis, clockwise-most first
+ * @param eyes the vias at the centre, a row for each place where the current changes layers there
+ * @param nodes the vias at the rim, clockwise-most first; a first row of one place that only L1
+ *     uses needs no hole
+ * @param parallel whether all inward layers run side by side, and all outward layers
  */
 public record CoilPlan(
-    int turns,
-    List<Spiral> layers,
-    List<Double> eyeRadiiMm,
-    double nodeRadiusMm,
-    List<Double> nodeAnglesRad) {
+    int turns, List<Spiral> layers, List<Row> eyes, List<Row> nodes, boolean parallel) {
   public CoilPlan {
     layers = List.copyOf(layers);
-    eyeRadiiMm = List.copyOf(eyeRadiiMm);
-    nodeAnglesRad = List.copyOf(nodeAnglesRad);
+    eyes = List.copyOf(eyes);
+    nodes = List.copyOf(nodes);
   }
 
   /**
@@ -30,6 +28,18 @@ public record CoilPlan(
   public record Spiral(Path path, List<Integer> turnOf) {
     public Spiral {
       turnOf = List.copyOf(turnOf);
+    }
+  }
+
+  /**
+   * Vias of one joint in one line. Copper arrives at the one end of the row and leaves from the
+   * other, so that the current shares evenly.
+   *
+   * @param at in an eye from the outermost in, at the rim from the radial's own via on
+   */
+  public record Row(List<Point> at) {
+    public Row {
+      at = List.copyOf(at);
     }
   }
 }

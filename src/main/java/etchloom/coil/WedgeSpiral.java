@@ -56,7 +56,7 @@ final class WedgeSpiral {
 
   private static double leadFillet(CoilSize size, WedgeTurns turns) {
     double room = size.nodeRadiusMm() - turns.outerArc(0);
-    return Math.min(room, Math.max(size.cornerMm(), size.pitchMm() / 2));
+    return Math.min(room, Math.max(size.wedgeCornerMm(), size.pitchMm() / 2));
   }
 
   private void label(int turn) {

@@ -35,13 +35,13 @@ final class WedgeTurns {
   static Optional<WedgeTurns> fit(CoilSize size, int count) {
     WedgeTurns t = new WedgeTurns(size, new double[count]);
     double least = size.pitchMm() / 2;
-    double cap = size.cornerMm();
+    double cap = size.wedgeCornerMm();
     for (int i = count - 1; i >= 0; i--) {
       if (!t.fits(i, least, count)) {
         return Optional.empty();
       }
       t.fillet[i] = t.largest(i, least, Math.max(cap, least), count);
-      cap = Math.min(size.cornerMm(), t.fillet[i] + size.pitchMm());
+      cap = Math.min(size.wedgeCornerMm(), t.fillet[i] + size.pitchMm());
     }
     return t.joins() ? Optional.of(t) : Optional.empty();
   }
@@ -79,7 +79,7 @@ final class WedgeTurns {
     if (hasInnerArc(last, r)) {
       least = Math.max(least, innerArc(last) + clear);
     }
-    double innermost = eyeRadius(last, size.layers() / 2 - 1);
+    double innermost = eyeRadius(last, size.eyes() - 1);
     if (!(innermost >= least)) {
       return false;
     }

@@ -14,6 +14,7 @@ import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
 import java.util.SortedMap;
+import java.util.SortedSet;
 import java.util.TreeMap;
 import java.util.TreeSet;
 
@@ -93,9 +94,9 @@ final class DeclaredNets {
     }
   }
 
-  private void apart(TreeMap<Integer, Declared> places) {
-    Declared a = places.firstEntry().getValue();
-    Declared b = places.lastEntry().getValue();
+  private void apart(SortedMap<Integer, Declared> places) {
+    Declared a = places.get(places.firstKey());
+    Declared b = places.get(places.lastKey());
     String more = places.size() > 2 ? " (" + places.size() + " pieces)" : "";
     String message =
         "net "
@@ -109,7 +110,7 @@ final class DeclaredNets {
     out.add(ProofNames.OPEN, b.file(), b.line(), b.layer(), b.at(), message);
   }
 
-  private void together(TreeMap<String, Declared> places) {
+  private void together(SortedMap<String, Declared> places) {
     TreeSet<String> others = new TreeSet<>(places.keySet());
     String first = others.pollFirst();
     String message = "nets " + first + " and " + String.join(", ", others) + " are joined";
@@ -128,7 +129,8 @@ final class DeclaredNets {
   private record Contact(Point at, int line) {}
 
   /** An object of one of the others that touches copper drawn for the first net. */
-  private static Optional<Contact> contact(LayerImage image, String first, TreeSet<String> others) {
+  private static Optional<Contact> contact(
+      LayerImage image, String first, SortedSet<String> others) {
     List<DrawnObject> own =
         image.objects().stream()
             .filter(o -> o.dark() && o.attributes().net().equals(first))

@@ -9,6 +9,8 @@ import etchloom.proof.image.JobFile;
 import etchloom.proof.image.LayerImage;
 import etchloom.proof.image.LayerSet;
 import etchloom.proof.image.ReadWarning;
+import etchloom.proof.ohm.CopperBuild;
+import etchloom.proof.ohm.FileResistance;
 import etchloom.proof.plane.Figure;
 import etchloom.proof.plane.OutOfRange;
 import etchloom.proof.read.SetFolder;
@@ -76,13 +78,26 @@ public final class FolderCheck {
     /**
      * @param copperMm finished copper of each layer from L1 down, where the job file tells
      */
-    CopperLimits limits(int layers, List<OptionalDouble> copperMm);
+    Shop of(int layers, List<OptionalDouble> copperMm);
+  }
+
+  /**
+   * What the fab asks and what it makes.
+   *
+   * @param copper of each layer from L1 down
+   */
+  public record Shop(CopperLimits limits, List<CopperBuild.Layer> copper, double platingMm) {
+    public Shop {
+      copper = List.copyOf(copper);
+    }
   }
 
   /**
    * @param rules what the copper alone keeps of the fab's rules
+   * @param ohms between pads marked as pins; empty where fewer than two are
    */
-  public record FolderReport(ProofReport proof, CopperRuleReport rules) {}
+  public record FolderReport(
+      ProofReport proof, CopperRuleReport rules, Optional<FileResistance.Ohms> ohms) {}
 
   private FolderReport check(Fab fab) {
     for (ReadWarning w : set.allWarnings()) {
@@ -95,18 +110,22 @@ public final class FolderCheck {
     Connectivity net = new Connectivity(figures(copper), holes);
     DeclaredNets names = nets(net, holes);
     circuits(net);
+    Shop shop = fab.of(copper.size(), copperMm());
     CopperRuleReport rules =
         CopperRules.check(
             net,
             holes,
             BoardSheets.of(set.profile(), set.maskTop(), set.maskBottom()),
-            fab.limits(copper.size(), copperMm()),
+            shop.limits(),
             set.job()
                 .map(JobFile::boardThicknessMm)
                 .filter(OptionalDouble::isPresent)
                 .map(OptionalDouble::getAsDouble),
             (layer, island) -> names.words(net.piece(layer, island)));
-    return new FolderReport(report(net), rules);
+    Optional<FileResistance.Ohms> ohms =
+        new FolderOhms(List.copyOf(copper.values()), set.job())
+            .between(net, shop.copper(), shop.platingMm());
+    return new FolderReport(report(net), rules, ohms);
   }
 
   private List<OptionalDouble> copperMm() {

@@ -12,13 +12,14 @@ import java.util.function.Function;
 
 /** Holds the holes of one set of drill files against the design's. */
 final class HoleProof {
-  /** Drill files give at most six decimals, old ones three. */
-  private static final double SAME_MM = 0.0006;
+  /** Drill files give six decimals, as the design's grid has. */
+  private static final double SAME_MM = 2e-6;
 
   /** A missing and an extra hole of one size no farther apart are one hole that was moved. */
   private static final double MOVED_MM = 5;
 
-  private record Wanted(Point at, double diameterMm, boolean plated, String net, String what) {}
+  private record Wanted(
+      Point at, double diameterMm, boolean plated, String function, String net, String what) {}
 
   private final Function<Boolean, String> file;
   private final Findings out;
@@ -40,11 +41,12 @@ final class HoleProof {
     List<Wanted> out = new ArrayList<>();
     for (Pad p : e.pads()) {
       if (p.holeMm().isPresent()) {
-        out.add(new Wanted(p.at(), p.holeMm().getAsDouble(), true, p.net(), p.what()));
+        String function = p.terminal() ? "ComponentDrill" : "ViaDrill";
+        out.add(new Wanted(p.at(), p.holeMm().getAsDouble(), true, function, p.net(), p.what()));
       }
     }
     for (Disc d : e.nonPlated()) {
-      out.add(new Wanted(d.at(), d.diameterMm(), false, "", "mounting hole"));
+      out.add(new Wanted(d.at(), d.diameterMm(), false, "MechanicalDrill", "", "mounting hole"));
     }
     return out;
   }
@@ -107,6 +109,10 @@ final class HoleProof {
       String is = h.slot().isPresent() ? "a slot" : mm(h.diameterMm());
       String message = w.what() + ": the hole is " + is + ", it must be " + mm(w.diameterMm());
       out.add(ProofNames.HOLE_SIZE, h.file(), h.line(), 0, h.at(), message);
+    }
+    if (!h.function().equals(w.function())) {
+      String message = w.what() + " is called " + h.function() + ", it is " + w.function();
+      out.add(ProofNames.FUNCTION, h.file(), h.line(), 0, h.at(), message);
     }
     if (!h.nets().isEmpty() && !w.net().isEmpty() && !h.nets().equals(List.of(w.net()))) {
       String message =

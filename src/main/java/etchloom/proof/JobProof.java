@@ -6,6 +6,7 @@ import etchloom.proof.image.DrillFile;
 import etchloom.proof.image.JobFile;
 import etchloom.proof.image.LayerImage;
 import java.util.ArrayList;
+import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Locale;
 import java.util.Map;
@@ -39,6 +40,22 @@ final class JobProof {
     }
     size();
     stackup(layers);
+    one(".SameCoordinates");
+    one(".ProjectId");
+  }
+
+  /** An attribute that all files of one drawing share. */
+  private void one(String attribute) {
+    Map<List<String>, String> values = new LinkedHashMap<>();
+    set.images().forEach(i -> values.putIfAbsent(i.fileAttribute(attribute), i.fileName()));
+    set.gerberDrills()
+        .forEach(
+            d ->
+                values.putIfAbsent(
+                    d.fileAttributes().getOrDefault(attribute, List.of()), d.fileName()));
+    if (values.size() > 1) {
+      wrong("files do not share their " + attribute + ": " + String.join(", ", values.values()));
+    }
   }
 
   private void files(Set<String> names) {
@@ -78,8 +95,10 @@ final class JobProof {
               + "; the file says "
               + String.join(",", function));
     }
-    if (!polarity.isEmpty() && !e.polarity().isEmpty() && !polarity.get(0).equals(e.polarity())) {
-      wrong("says that " + e.path() + " is " + e.polarity() + "; the file says " + polarity.get(0));
+    String says = String.join(",", polarity);
+    boolean gerber = e.path().endsWith(".gbr");
+    if (!e.polarity().isEmpty() && (gerber || !says.isEmpty()) && !says.equals(e.polarity())) {
+      wrong("says that " + e.path() + " is " + e.polarity() + "; the file says '" + says + "'");
     }
   }
 

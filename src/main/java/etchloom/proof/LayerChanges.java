@@ -8,6 +8,7 @@ import etchloom.proof.plane.Figure;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
+import java.util.SortedSet;
 import java.util.TreeMap;
 import java.util.TreeSet;
 
@@ -43,7 +44,7 @@ final class LayerChanges {
   }
 
   /** Groups of the design that a patch touches, in ascending order. */
-  TreeSet<Integer> touched(Patch patch) {
+  SortedSet<Integer> touched(Patch patch) {
     TreeSet<Integer> out = new TreeSet<>();
     for (Point p : patch.rim()) {
       for (int island : wanted.islandsWithin(Nm.of(p.x()), Nm.of(p.y()), TOUCH_MM * Nm.PER_MM)) {

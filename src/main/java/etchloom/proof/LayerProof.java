@@ -10,12 +10,15 @@ import etchloom.proof.ProofExpectation.Track;
 import etchloom.proof.copper.Connectivity;
 import etchloom.proof.copper.CopperDifference.Patch;
 import etchloom.proof.copper.DrawnPiece;
+import etchloom.proof.image.DrawnObject;
 import etchloom.proof.image.LayerImage;
 import etchloom.proof.plane.Figure;
 import java.util.ArrayList;
+import java.util.Comparator;
 import java.util.List;
 import java.util.Locale;
 import java.util.Optional;
+import java.util.SortedSet;
 import java.util.TreeMap;
 import java.util.TreeSet;
 
@@ -60,7 +63,7 @@ final class LayerProof {
   }
 
   private void patch(Patch p) {
-    TreeSet<Integer> touched = changes.orElseThrow().touched(p);
+    SortedSet<Integer> touched = changes.orElseThrow().touched(p);
     String where = touched.isEmpty() ? "" : " at " + words(touched);
     String size = String.format(Locale.ROOT, "%.4f mm2", p.areaMm2());
     if (p.extra()) {
@@ -99,14 +102,14 @@ final class LayerProof {
     TreeSet<Integer> told = new TreeSet<>();
     if (changes.isPresent()) {
       for (Patch p : changes.get().patches()) {
-        TreeSet<Integer> touched = p.extra() ? changes.get().touched(p) : new TreeSet<>();
+        SortedSet<Integer> touched = p.extra() ? changes.get().touched(p) : new TreeSet<>();
         if (touched.size() > 1) {
           add(ProofNames.SHORT, p.at(), "this joins " + words(touched));
           told.addAll(touched);
         }
       }
     }
-    for (TreeSet<Integer> on : groupsOn.values()) {
+    for (SortedSet<Integer> on : groupsOn.values()) {
       if (on.size() > 1 && !told.containsAll(on)) {
         add(ProofNames.SHORT, closest(on), "one piece of copper joins " + words(on));
       }
@@ -114,7 +117,7 @@ final class LayerProof {
   }
 
   /** Where the design's copper of two groups comes nearest. */
-  private Point closest(TreeSet<Integer> some) {
+  private Point closest(SortedSet<Integer> some) {
     List<DrawnPiece> mine = groups.pieces().stream().filter(p -> some.contains(p.tag())).toList();
     Nearest best = null;
     double least = Double.POSITIVE_INFINITY;
@@ -197,18 +200,47 @@ final class LayerProof {
                 .flatMap(c -> c.closing(copper, loop.ring(), loop.at()))
                 .map(Patch::at)
                 .orElse(loop.at());
-        TreeSet<Integer> on = groupsOn.getOrDefault(loop.island(), new TreeSet<>());
+        SortedSet<Integer> on = groupsOn.getOrDefault(loop.island(), new TreeSet<>());
         String size = String.format(Locale.ROOT, "%.3f mm2", loop.areaMm2());
         add(ProofNames.LOOP, at, "copper encloses a gap of " + size + ": " + words(on));
       }
     }
   }
 
+  /** Whether tracks are called tracks, and pads what they are for. */
+  void functions() {
+    TreeSet<Point> terminals = new TreeSet<>(BY_PLACE);
+    for (Group g : groups.groups()) {
+      g.pads().stream().map(groups::pad).filter(Pad::terminal).forEach(p -> terminals.add(p.at()));
+    }
+    for (DrawnObject o : image.objects()) {
+      List<String> wanted =
+          !(o instanceof DrawnObject.Flash f)
+              ? List.of("Conductor")
+              : terminals.contains(f.at())
+                  ? List.of("ComponentPad", "SMDPad")
+                  : List.of("ViaPad", "Conductor");
+      if (!wanted.contains(o.attributes().function())) {
+        String is = o.attributes().function().isEmpty() ? "nothing" : o.attributes().function();
+        out.add(
+            ProofNames.FUNCTION,
+            image.fileName(),
+            o.line(),
+            groups.layer,
+            SheetProof.place(o),
+            "this is called " + is + ", it is " + String.join(" or ", wanted));
+      }
+    }
+  }
+
+  private static final Comparator<Point> BY_PLACE =
+      Comparator.comparingDouble(Point::x).thenComparingDouble(Point::y);
+
   /** Whether a piece of the copper carries another net's name than the design's. */
   void nets() {
-    for (var o : image.objects()) {
+    for (DrawnObject o : image.objects()) {
       List<String> names = o.attributes().nets();
-      Point at = o.match(s -> s.path().start(), f -> f.at(), r -> r.contours().get(0).start());
+      Point at = SheetProof.place(o);
       TreeSet<String> wanted = new TreeSet<>();
       for (int i : copper.islandsWithin(Nm.of(at.x()), Nm.of(at.y()), 2)) {
         groupsOn.getOrDefault(i, new TreeSet<>()).forEach(g -> wanted.add(groups.group(g).net()));
@@ -227,7 +259,7 @@ final class LayerProof {
     }
   }
 
-  private String words(TreeSet<Integer> some) {
+  private String words(SortedSet<Integer> some) {
     List<String> list = some.stream().limit(3).map(g -> groups.group(g).what()).toList();
     String more = some.size() > 3 ? " and " + (some.size() - 3) + " more" : "";
     return String.join(" | ", list) + more;

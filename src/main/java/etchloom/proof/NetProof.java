@@ -10,6 +10,7 @@ import java.util.ArrayList;
 import java.util.Arrays;
 import java.util.List;
 import java.util.Map;
+import java.util.SortedSet;
 import java.util.TreeMap;
 import java.util.TreeSet;
 
@@ -52,7 +53,7 @@ final class NetProof {
     }
   }
 
-  private TreeSet<Integer> piecesAt(Pad p) {
+  private SortedSet<Integer> piecesAt(Pad p) {
     TreeSet<Integer> out = new TreeSet<>();
     for (int l = p.fromLayer(); l <= p.toLayer(); l++) {
       int piece = net.pieceAt(l, p.at());
@@ -142,7 +143,7 @@ final class NetProof {
       DrawnObject.Flash f,
       String pin,
       List<Integer> some,
-      TreeSet<Integer> marked) {
+      SortedSet<Integer> marked) {
     Point at = f.at();
     for (int p : some) {
       Pad t = expected.pads().get(p);

@@ -1,5 +1,8 @@
 package etchloom.proof;
 
+import etchloom.geometry.Distance;
+import etchloom.geometry.Path;
+import etchloom.geometry.Segment;
 import etchloom.proof.ProofExpectation.Pad;
 import etchloom.proof.image.NetlistFile;
 import etchloom.proof.image.NetlistFile.TestPoint;
@@ -7,11 +10,17 @@ import etchloom.proof.image.Plating;
 import java.util.ArrayList;
 import java.util.Comparator;
 import java.util.List;
+import java.util.Locale;
 
 /** Holds a bare-board netlist against the design: every test point, and a point at every hole. */
 final class NetlistProof {
   /** Micrometres in the file, rounded. */
   private static final double SAME_MM = 0.00072;
+
+  /** Chords stand in for arcs, which the format does not have. */
+  private static final double CHORD_MM = 0.01;
+
+  private static final double LENGTH = 1e-3;
 
   private final NetlistFile file;
   private final Findings out;
@@ -47,6 +56,7 @@ final class NetlistProof {
         out.add(ProofNames.NETLIST, file.fileName(), 0, 0, p.at(), p.what() + " has no test point");
       }
     }
+    outline(expected.profile());
     long tooling = file.points().stream().filter(t -> t.operation() == 367).count();
     if (tooling != expected.nonPlated().size()) {
       String message =
@@ -81,6 +91,13 @@ final class NetlistProof {
     if (p.terminal() && !t.pin().equals(p.mark())) {
       wrong(t, p.what() + " is called pin " + t.pin());
     }
+    if (!p.terminal() && !t.pin().isEmpty()) {
+      wrong(t, p.what() + " is called pin " + t.pin() + ", it is none");
+    }
+    if (p.holeMm().isPresent() != (t.operation() == 317)
+        || t.access().orElse(-1) != (p.holeMm().isPresent() ? 0 : 1)) {
+      wrong(t, p.what() + " is listed as another kind of point");
+    }
     if (p.holeMm().isPresent() != t.holeMm().isPresent()) {
       wrong(
           t, p.what() + (t.holeMm().isPresent() ? " has no hole" : " has a hole, none is listed"));
@@ -95,6 +112,43 @@ final class NetlistProof {
     }
     if (t.widthMm() > 0 && Math.abs(t.widthMm() - p.diameterMm()) > SAME_MM) {
       wrong(t, p.what() + ": pad of " + SheetProof.mm(t.widthMm()) + " listed");
+    }
+  }
+
+  /** Chords of the board's edge, which leave it by no more than the format's usage bears. */
+  private void outline(List<Path> profile) {
+    double wanted = profile.stream().mapToDouble(Path::lengthMm).sum();
+    double found = 0;
+    for (NetlistFile.NetLine line : file.lines()) {
+      if (line.operation() == 389) {
+        for (Path p : line.paths()) {
+          found += p.lengthMm();
+          edge(p, line.line(), profile);
+        }
+      }
+    }
+    if (Math.abs(found - wanted) > LENGTH * wanted) {
+      String message =
+          String.format(
+              Locale.ROOT, "the board's edge is %.3f mm long here, it is %.3f mm", found, wanted);
+      out.add(ProofNames.NETLIST, file.fileName(), message);
+    }
+  }
+
+  private void edge(Path p, int line, List<Path> profile) {
+    for (Segment s : p.segments()) {
+      for (double t : new double[] {0, 0.5, 1}) {
+        double off = Double.POSITIVE_INFINITY;
+        for (Path edge : profile) {
+          for (Segment e : edge.segments()) {
+            off = Math.min(off, Distance.between(s.at(t), e).distanceMm());
+          }
+        }
+        if (off > (t == 0.5 ? CHORD_MM : SAME_MM)) {
+          String message = "the board's edge is " + SheetProof.mm(off) + " from here";
+          out.add(ProofNames.NETLIST, file.fileName(), line, 0, s.at(t), message);
+        }
+      }
     }
   }
 

@@ -21,6 +21,7 @@ import java.util.Locale;
 import java.util.Map;
 import java.util.Optional;
 import java.util.OptionalDouble;
+import java.util.Set;
 
 /** Holds the drawings, DXF and SVG, against the Gerber and drill files. */
 final class PictureProof {
@@ -39,6 +40,16 @@ final class PictureProof {
 
   /** Centre lines, pads, holes and sheets of the drawing. */
   void drawing(DxfFile dxf) {
+    Set<String> known = drawn().keySet();
+    for (DxfFile.Entity x : dxf.entities()) {
+      if (!known.contains(x.layer())) {
+        String message =
+            "something is drawn on a layer " + x.layer() + ", which is none of the set";
+        out.add(
+            new ProofFinding(
+                ProofNames.DXF, dxf.fileName(), x.line(), "", Optional.empty(), message));
+      }
+    }
     for (Map.Entry<String, List<DrawnPiece>> e : drawn().entrySet()) {
       boolean edge = e.getKey().equals("PROFILE");
       List<DrawnPiece> found = new ArrayList<>();

@@ -44,6 +44,9 @@ public final class ProofNames {
   /** A terminal's pad does not carry its mark, or another pad does. */
   public static final String TERMINAL = "terminal";
 
+  /** A track, pad or hole is said to be for something that it is not for. */
+  public static final String FUNCTION = "function";
+
   public static final String MISSING_HOLE = "missing-hole";
   public static final String EXTRA_HOLE = "extra-hole";
 
@@ -61,6 +64,9 @@ public final class ProofNames {
   public static final String DXF = "dxf";
   public static final String OUTLINES = "outlines";
   public static final String SVG = "svg";
+
+  /** The copper of the files resists otherwise than the report says. */
+  public static final String RESISTANCE = "resistance";
 
   public static final String ARCHIVE = "archive";
 

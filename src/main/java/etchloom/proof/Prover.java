@@ -8,6 +8,7 @@ import etchloom.proof.copper.PieceMatch;
 import etchloom.proof.image.DrillFile;
 import etchloom.proof.image.LayerImage;
 import etchloom.proof.image.Plating;
+import etchloom.proof.ohm.CopperBuild;
 import etchloom.proof.plane.Figure;
 import etchloom.proof.plane.OutOfRange;
 import java.util.ArrayList;
@@ -17,6 +18,7 @@ import java.util.Optional;
 import java.util.OptionalDouble;
 import java.util.OptionalInt;
 import java.util.SortedMap;
+import java.util.SortedSet;
 import java.util.TreeMap;
 import java.util.TreeSet;
 
@@ -35,6 +37,7 @@ public final class Prover {
   private final Findings out = new Findings();
   private final SetFiles set;
   private final SortedMap<String, byte[]> files;
+  private Optional<ResistanceProof> reported = Optional.empty();
   private OptionalDouble areaDifferenceMm2 = OptionalDouble.empty();
 
   private Prover(SortedMap<String, byte[]> files, ProofExpectation expected) {
@@ -48,6 +51,22 @@ public final class Prover {
    */
   public static ProofReport prove(SortedMap<String, byte[]> files, ProofExpectation expected) {
     return new Prover(files, expected).prove();
+  }
+
+  /**
+   * The same, and the resistances between the terminals from the copper of the files against those
+   * reported: a finding where they differ by more than 1 %.
+   *
+   * @param terminalOhm by pairs of marks, {@code U1-V1}, at 20 °C
+   */
+  public static ProofReport prove(
+      SortedMap<String, byte[]> files,
+      ProofExpectation expected,
+      CopperBuild build,
+      SortedMap<String, Double> terminalOhm) {
+    Prover p = new Prover(files, expected);
+    p.reported = Optional.of(new ResistanceProof(build, terminalOhm, p.out));
+    return p.prove();
   }
 
   private ProofReport prove() {
@@ -102,13 +121,14 @@ public final class Prover {
     for (int l = 1; l <= expected.layers(); l++) {
       groups.add(new LayerGroups(expected, l));
     }
-    TreeSet<Integer> same = asDesigned(groups);
-    TreeSet<Integer> swapped = swapped(groups, same);
+    SortedSet<Integer> same = asDesigned(groups);
+    SortedSet<Integer> swapped = swapped(groups, same);
     for (LayerGroups g : groups) {
       if (!swapped.contains(g.layer)) {
         LayerProof proof = new LayerProof(g, set.copper().get(g.layer), net, out);
         proof.check(same.contains(g.layer));
         proof.nets();
+        proof.functions();
       }
     }
     NetProof whole = new NetProof(expected, net, out);
@@ -117,6 +137,7 @@ public final class Prover {
     }
     whole.circuits();
     whole.terminals(set.copper().values());
+    reported.ifPresent(r -> r.check(List.copyOf(set.copper().values()), net, expected));
     PictureProof pictures = new PictureProof(set, holes, out);
     set.drawing().ifPresent(pictures::drawing);
     set.picture().ifPresent(pictures::picture);
@@ -125,7 +146,7 @@ public final class Prover {
   }
 
   /** Layers whose file draws the design to the last piece. */
-  private TreeSet<Integer> asDesigned(List<LayerGroups> groups) {
+  private SortedSet<Integer> asDesigned(List<LayerGroups> groups) {
     TreeSet<Integer> found = new TreeSet<>();
     for (LayerGroups g : groups) {
       if (draws(g.layer, g)) {
@@ -136,7 +157,7 @@ public final class Prover {
   }
 
   /** Layers whose file draws another layer of the design to the last piece. */
-  private TreeSet<Integer> swapped(List<LayerGroups> groups, TreeSet<Integer> same) {
+  private SortedSet<Integer> swapped(List<LayerGroups> groups, SortedSet<Integer> same) {
     TreeSet<Integer> found = new TreeSet<>();
     for (LayerGroups g : groups) {
       for (LayerGroups other : groups) {

@@ -55,7 +55,7 @@ final class ZipProof {
     job(entries);
   }
 
-  private void job(TreeMap<String, byte[]> entries) {
+  private void job(SortedMap<String, byte[]> entries) {
     for (String file : entries.keySet()) {
       if (file.endsWith(".gbrjob")) {
         try {
@@ -69,7 +69,7 @@ final class ZipProof {
     }
   }
 
-  private void lists(JobFile job, TreeMap<String, byte[]> entries) {
+  private void lists(JobFile job, SortedMap<String, byte[]> entries) {
     TreeSet<String> listed = new TreeSet<>();
     job.files().forEach(e -> listed.add(e.path()));
     for (String file : listed) {

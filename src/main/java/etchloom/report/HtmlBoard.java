@@ -47,6 +47,14 @@ final class HtmlBoard {
     String bore = s.board().boreMm() > 0 ? OrderLines.mm(s.board().boreMm()) : "none";
     rows.add(List.of("Board diameter", OrderLines.mm(s.board().diameterMm())));
     rows.add(List.of("Bore", bore));
+    s.board()
+        .tab()
+        .ifPresent(
+            t ->
+                rows.add(
+                    List.of(
+                        "Tab, width and length",
+                        OrderLines.mm(t.widthMm()) + ", " + OrderLines.mm(t.lengthMm()))));
     rows.add(List.of("Thickness over the copper", OrderLines.mm(s.board().thicknessMm())));
     rows.add(
         List.of(
@@ -84,6 +92,9 @@ final class HtmlBoard {
             + WindingTree.word(r.spec().winding().connection())
             + ", "
             + Words.count(r.winding().coils(), "coil")
+            + (r.spec().winding().parallelPaths() > 1
+                ? " in " + r.spec().winding().parallelPaths() + " parallel paths a phase"
+                : "")
             + ", "
             + r.winding().poles()
             + " poles, winding factor "

@@ -4,6 +4,7 @@ import etchloom.electric.machine.DriveFigures;
 import etchloom.electric.machine.EmfFigures;
 import etchloom.electric.machine.EmfFigures.PhaseEmf;
 import etchloom.electric.machine.EmfFigures.Sample;
+import etchloom.electric.machine.SharingFigures;
 import etchloom.electric.machine.drive.TorqueSpeed;
 import etchloom.units.Numbers;
 import java.util.ArrayList;
@@ -22,6 +23,7 @@ final class HtmlMachine {
   }
 
   void emf() {
+    r.machine().flatMap(m -> m.sharing()).ifPresent(this::sharing);
     r.machine().flatMap(m -> m.emf()).ifPresent(this::emf);
   }
 
@@ -56,6 +58,31 @@ final class HtmlMachine {
     }
     h.table(
         "Harmonics of the back-EMF", List.of("Order", "Peak, a phase", "Of the first"), rows, 2);
+  }
+
+  private void sharing(SharingFigures f) {
+    List<List<String>> rows = new ArrayList<>();
+    for (SharingFigures.Layer l : f.layers()) {
+      rows.add(
+          List.of(
+              "L" + l.layer(),
+              Numbers.fixed(100 * l.currentShare(), 2) + " %",
+              Numbers.fixed(100 * l.evenShare(), 2) + " %",
+              l.linkageRatio().isPresent() ? Numbers.fixed(l.linkageRatio().getAsDouble(), 4) : "",
+              l.circulatingAmpereRms().isPresent()
+                  ? Numbers.engineering(l.circulatingAmpereRms().getAsDouble(), "A", 3)
+                  : ""));
+    }
+    h.table(
+        "Layers side by side in a coil",
+        List.of(
+            "Layer",
+            "Of the coil's current",
+            "If shared evenly",
+            "Flux linkage over the mean",
+            "Circulating at speed, rms"),
+        rows,
+        1);
   }
 
   void axes() {

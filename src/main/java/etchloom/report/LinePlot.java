@@ -18,8 +18,10 @@ final class LinePlot {
   private static final int TICKS = 6;
   private static final double FULL_TURN = 360;
   private static final String INK = "#1b201e";
-  private static final List<String> PAINTS = List.of("#8a3f10", "#1d4e89", "#1c6337", "#6b2a73");
-  private static final List<String> DASHES = List.of("", "9 4", "2 4", "12 4 2 4");
+  private static final List<String> PAINTS =
+      List.of("#8a3f10", "#1d4e89", "#1c6337", "#6b2a73", "#5b5210", "#1f5f66");
+  private static final List<String> DASHES =
+      List.of("", "9 4", "2 4", "12 4 2 4", "16 5", "12 4 2 4 2 4");
 
   /** One line through the points (x[i], y[i]). */
   record Series(String name, List<Double> x, List<Double> y) {

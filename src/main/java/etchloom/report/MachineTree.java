@@ -7,6 +7,7 @@ import etchloom.electric.machine.GeneratorFigures;
 import etchloom.electric.machine.LossFigures;
 import etchloom.electric.machine.Need;
 import etchloom.electric.machine.RotorFigures;
+import etchloom.electric.machine.SharingFigures;
 import etchloom.electric.machine.ThermalFigures;
 import etchloom.electric.machine.TorqueFigures;
 import etchloom.electric.machine.spread.SpreadFigures;
@@ -48,6 +49,24 @@ final class MachineTree {
       out.put(marks.get(p), s.voltSecondPerRadian().get(p));
     }
     return out;
+  }
+
+  static JsonTree sharing(SharingFigures f) {
+    return new JsonTree()
+        .putObjects(
+            "layers",
+            f.layers().stream()
+                .map(
+                    l ->
+                        new JsonTree()
+                            .put("layer", "L" + l.layer())
+                            .put("currentShare", l.currentShare())
+                            .put("evenShare", l.evenShare())
+                            .put("linkageRatio", l.linkageRatio())
+                            .put("circulatingAmpereRms", l.circulatingAmpereRms()))
+                .toList())
+        .put("overloadPercent", 100 * f.worstOverload())
+        .put("circulatingAmpereRms", f.circulatingAmpereRms());
   }
 
   static JsonTree torque(TorqueFigures f) {

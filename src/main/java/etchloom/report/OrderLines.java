@@ -68,10 +68,18 @@ public final class OrderLines {
 
   private static String outline(Spec.Board b) {
     String bore = b.boreMm() > 0 ? ", bore " + mm(b.boreMm()) : ", no bore";
-    return "round, " + mm(b.diameterMm()) + bore;
+    String tab =
+        b.tab()
+            .map(t -> ", tab of " + mm(t.widthMm()) + " standing out by " + mm(t.lengthMm()))
+            .orElse("");
+    return "round, " + mm(b.diameterMm()) + bore + tab;
   }
 
   private static String test(Spec.Winding w) {
+    if (w.connection() != Spec.Connection.OPEN && w.phases() == 6) {
+      return "each set of three phases is one net by design: test its continuity, and isolation"
+          + " between the two sets";
+    }
     return w.connection() == Spec.Connection.OPEN
         ? "each phase is one net by design: test its continuity, and isolation between phases"
         : "the winding is one net by design: test continuity, no isolation test between terminals";

@@ -66,6 +66,7 @@ public final class ReportJson {
   }
 
   private static void machine(JsonTree out, MachineFigures m, List<String> marks) {
+    m.sharing().ifPresent(x -> out.put("sharing", MachineTree.sharing(x)));
     m.emf().ifPresent(e -> out.put("emf", MachineTree.emf(e, marks)));
     m.torque().ifPresent(t -> out.put("torque", MachineTree.torque(t)));
     out.put("loss", MachineTree.loss(m.loss()))

@@ -2,11 +2,15 @@ package etchloom.rim;
 
 import java.util.List;
 
-/** A phase's coils in the order in which its current passes them. */
+/** The coils of one path of a phase in the order in which its current passes them. */
 record Chain(String phase, List<Pin> entries, List<Pin> exits) {
   Chain {
     entries = List.copyOf(entries);
     exits = List.copyOf(exits);
+  }
+
+  List<Integer> coils() {
+    return entries.stream().map(Pin::coil).toList();
   }
 
   Pin first() {

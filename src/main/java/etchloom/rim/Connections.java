@@ -12,23 +12,39 @@ import java.util.function.ToDoubleFunction;
 /**
  * What is to be joined with what: the phases' chains, and the links between coils and terminals.
  */
-record Connections(List<Chain> chains, List<Link> links) {
+record Connections(List<List<Chain>> phases, List<Link> links) {
+  /** How many phases of six share a star point. */
+  private static final int OF_A_SET = 3;
+
   Connections {
-    chains = List.copyOf(chains);
+    phases = phases.stream().map(List::copyOf).toList();
     links = List.copyOf(links);
   }
 
+  /**
+   * How the phases are joined.
+   *
+   * @param starPointOut whether star points come out
+   * @param paths parallel paths of each phase
+   */
+  record Scheme(Spec.Connection connection, boolean starPointOut, int paths) {}
+
   /** The terminals' marks in counter-clockwise order along the row. */
-  static List<String> marks(Winding winding, Spec.Connection connection, boolean starPointOut) {
+  static List<String> marks(Winding winding, Scheme scheme) {
     List<String> out = new ArrayList<>();
     winding.marks().forEach(m -> out.add(m + "1"));
-    if (connection == Spec.Connection.OPEN) {
+    if (scheme.connection() == Spec.Connection.OPEN) {
       winding.marks().forEach(m -> out.add(m + "2"));
     }
-    if (connection == Spec.Connection.STAR && starPointOut) {
-      out.add("N");
+    if (scheme.connection() == Spec.Connection.STAR && scheme.starPointOut()) {
+      out.addAll(starPoints(winding.phases()));
     }
     return out;
+  }
+
+  /** The marks of the star points: one, or one for each set of three. */
+  private static List<String> starPoints(int phases) {
+    return phases == 2 * OF_A_SET ? List.of("1N", "2N") : List.of("N");
   }
 
   /**
@@ -38,35 +54,36 @@ record Connections(List<Chain> chains, List<Link> links) {
    */
   static Connections make(
       Winding winding,
-      Spec.Connection connection,
-      boolean starPointOut,
+      Scheme scheme,
       ToDoubleFunction<Pin> angle,
       ToDoubleFunction<String> terminalAngle,
       boolean counterClockwise) {
-    List<Chain> chains = new ArrayList<>();
-    for (int p = 0; p < winding.phases(); p++) {
-      int phase = p;
-      List<PhaseCoil> coils = winding.sequence().stream().filter(c -> c.phase() == phase).toList();
-      String mark = winding.marks().get(p);
-      double target = terminalAngle.applyAsDouble(mark + "1");
-      chains.add(chain(mark, coils, target, angle, counterClockwise));
-    }
+    List<List<Chain>> phases = new ArrayList<>();
     List<Link> links = new ArrayList<>();
-    chains.forEach(c -> betweenCoils(c, links));
-    switch (connection) {
-      case STAR -> star(chains, starPointOut, links);
-      case DELTA -> delta(chains, links);
-      case OPEN -> open(chains, links);
+    for (int p = 0; p < winding.phases(); p++) {
+      String mark = winding.marks().get(p);
+      List<PhaseCoil> coils = winding.coilsOf(p);
+      double target = terminalAngle.applyAsDouble(mark + "1");
+      int first = nearest(coils, target, angle);
+      List<Chain> chains = new ArrayList<>();
+      int n = coils.size() / scheme.paths();
+      for (int k = 0; k < scheme.paths(); k++) {
+        int from = first + (counterClockwise ? k * n : -k * n);
+        chains.add(chain(mark, coils, from, n, counterClockwise));
+      }
+      chains.forEach(c -> betweenCoils(c, links));
+      phases.add(chains);
     }
-    return new Connections(chains, links);
+    switch (scheme.connection()) {
+      case STAR -> star(phases, scheme.starPointOut(), links);
+      case DELTA -> delta(phases, links);
+      case OPEN -> open(phases, links);
+    }
+    return new Connections(phases, links);
   }
 
-  private static Chain chain(
-      String mark,
-      List<PhaseCoil> coils,
-      double target,
-      ToDoubleFunction<Pin> angle,
-      boolean counterClockwise) {
+  /** The coil whose entry stands nearest to an angle. */
+  private static int nearest(List<PhaseCoil> coils, double target, ToDoubleFunction<Pin> angle) {
     int first = 0;
     double best = Double.POSITIVE_INFINITY;
     for (int i = 0; i < coils.size(); i++) {
@@ -76,11 +93,15 @@ record Connections(List<Chain> chains, List<Link> links) {
         first = i;
       }
     }
-    int n = coils.size();
+    return first;
+  }
+
+  private static Chain chain(
+      String mark, List<PhaseCoil> coils, int from, int count, boolean counterClockwise) {
     List<Pin> entries = new ArrayList<>();
     List<Pin> exits = new ArrayList<>();
-    for (int i = 0; i < n; i++) {
-      PhaseCoil c = coils.get(Math.floorMod(first + (counterClockwise ? i : -i), n));
+    for (int i = 0; i < count; i++) {
+      PhaseCoil c = coils.get(Math.floorMod(from + (counterClockwise ? i : -i), coils.size()));
       entries.add(entry(c));
       exits.add(exit(c));
     }
@@ -104,31 +125,46 @@ record Connections(List<Chain> chains, List<Link> links) {
     }
   }
 
-  private static void star(List<Chain> chains, boolean starPointOut, List<Link> links) {
-    for (Chain c : chains) {
-      links.add(terminal(c.phase(), List.of(c.first()), c.phase() + "1"));
+  private static void star(List<List<Chain>> phases, boolean starPointOut, List<Link> links) {
+    phases.forEach(p -> links.add(terminal(mark(p), firsts(p), mark(p) + "1")));
+    List<String> points = starPoints(phases.size());
+    int each = phases.size() / points.size();
+    for (int i = 0; i < points.size(); i++) {
+      List<Pin> ends =
+          phases.subList(i * each, (i + 1) * each).stream()
+              .flatMap(p -> lasts(p).stream())
+              .toList();
+      String n = points.get(i);
+      String what = points.size() > 1 ? "star point " + n : "star point";
+      links.add(new Link("", ends, starPointOut ? Optional.of(n) : Optional.empty(), what));
     }
-    List<Pin> ends = chains.stream().map(Chain::last).toList();
-    links.add(new Link("", ends, starPointOut ? Optional.of("N") : Optional.empty(), "star point"));
   }
 
   /** U2 joins V1, V2 joins W1, W2 joins U1. */
-  private static void delta(List<Chain> chains, List<Link> links) {
-    int n = chains.size();
+  private static void delta(List<List<Chain>> phases, List<Link> links) {
+    int n = phases.size();
     for (int i = 0; i < n; i++) {
-      Chain c = chains.get(i);
-      Pin before = chains.get((i + n - 1) % n).last();
-      links.add(terminal("", List.of(c.first(), before), c.phase() + "1"));
+      List<Pin> pins = new ArrayList<>(firsts(phases.get(i)));
+      pins.addAll(lasts(phases.get((i + n - 1) % n)));
+      links.add(terminal("", pins, mark(phases.get(i)) + "1"));
     }
   }
 
-  private static void open(List<Chain> chains, List<Link> links) {
-    for (Chain c : chains) {
-      links.add(terminal(c.phase(), List.of(c.first()), c.phase() + "1"));
-    }
-    for (Chain c : chains) {
-      links.add(terminal(c.phase(), List.of(c.last()), c.phase() + "2"));
-    }
+  private static void open(List<List<Chain>> phases, List<Link> links) {
+    phases.forEach(p -> links.add(terminal(mark(p), firsts(p), mark(p) + "1")));
+    phases.forEach(p -> links.add(terminal(mark(p), lasts(p), mark(p) + "2")));
+  }
+
+  private static String mark(List<Chain> phase) {
+    return phase.get(0).phase();
+  }
+
+  private static List<Pin> firsts(List<Chain> phase) {
+    return phase.stream().map(Chain::first).toList();
+  }
+
+  private static List<Pin> lasts(List<Chain> phase) {
+    return phase.stream().map(Chain::last).toList();
   }
 
   private static Link terminal(String phase, List<Pin> pins, String mark) {

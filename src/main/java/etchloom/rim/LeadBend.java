@@ -41,10 +41,13 @@ record LeadBend(double trackMm, double laneMm, Point start, Point end, double tu
     return room(end.norm() - laneMm);
   }
 
-  /** A corner may take half of the lane's run and of the straight piece beside it. */
+  /**
+   * A corner may take half of the lane's run and of the straight piece beside it. Tighter than half
+   * the track's width its inner side would fold over itself: then it stays sharp.
+   */
   private double room(double straightMm) {
     double run = laneMm * Math.abs(turnRad);
     double r = Math.min(trackMm, Math.min(straightMm / 2, run / 4));
-    return r > trackMm / 20 ? r : 0;
+    return r >= trackMm / 2 ? r : 0;
   }
 }

@@ -83,7 +83,7 @@ record RimPlan(
   double ringRadiusMm(RingArc arc) {
     for (int i = 0; i < rings.rings().size(); i++) {
       if (rings.rings().get(i).contains(arc)) {
-        return size.firstRingMm() + i * size.ringPitchMm();
+        return size.ringMm(i);
       }
     }
     throw new IllegalArgumentException("the arc of " + arc.link().what() + " is on no ring");
@@ -94,7 +94,7 @@ record RimPlan(
     int n = rings.rings().size();
     return n == 0
         ? size.nodeRadiusMm() + size.wideMm() / 2
-        : size.firstRingMm() + (n - 1) * size.ringPitchMm() + size.wideMm() / 2;
+        : size.ringMm(n - 1) + size.wideMm() / 2;
   }
 
   Optional<Double> laneRadiusMm(String mark) {
@@ -103,8 +103,11 @@ record RimPlan(
   }
 
   private double laneRadiusMm(int lane) {
+    // A lead that bends over its own drop's row of vias narrows the gap short of the lane.
+    double notch = size.viaCount() > 1 ? size.spaceMm() / 2 : 0;
     return ringsEdgeMm()
         + size.spaceMm()
+        + notch
         + size.trackMm() / 2
         + lane * (size.trackMm() + size.spaceMm());
   }
@@ -113,5 +116,24 @@ record RimPlan(
   double leadsEdgeMm() {
     int most = lanes.values().stream().mapToInt(Integer::intValue).max().orElse(-1);
     return most < 0 ? ringsEdgeMm() : laneRadiusMm(most) + size.trackMm() / 2;
+  }
+
+  /**
+   * By how much neighbouring leads are too near: they run radially, so they are nearest to each
+   * other at the first lane, and to a pad beside the neighbour's.
+   */
+  double leadsShortMm() {
+    double most = 0;
+    List<TerminalRow.Spot> spots = row.spots();
+    for (int i = 1; i < spots.size(); i++) {
+      double a = spots.get(i - 1).at().norm();
+      double b = spots.get(i).at().norm();
+      double sin = Math.abs(spots.get(i - 1).at().cross(spots.get(i).at())) / (a * b);
+      double leads = size.trackMm() + size.spaceMm() - laneRadiusMm(0) * sin;
+      double pads =
+          (size.terminals().padMm() + size.trackMm()) / 2 + size.spaceMm() - Math.min(a, b) * sin;
+      most = Math.max(most, Math.max(leads, pads));
+    }
+    return most;
   }
 }

@@ -9,6 +9,7 @@ import etchloom.geometry.Path;
 import etchloom.geometry.PathBuilder;
 import etchloom.geometry.Point;
 import etchloom.spec.Spec;
+import java.util.ArrayList;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
@@ -76,29 +77,49 @@ final class RimRouter {
     String net = netOf.apply(link);
     double radius = plan.ringRadiusMm(arc);
     Map<Double, Integer> drops = new TreeMap<>();
+    double row = size.rowRad(radius);
     int before = -1;
     double angleBefore = 0;
-    for (double stop : arc.stops()) {
-      double angle = arc.startRad() + stop;
-      int joint =
-          copper.drilled(
-              Joint.Kind.DROP,
-              Point.polar(radius, angle),
-              size.padMm(),
-              size.holeMm(),
-              size.layers(),
-              net,
-              "drop of " + link.what());
-      drops.put(angle, joint);
+    for (int i = 0; i < arc.stops().size(); i++) {
+      boolean last = i > 0 && i == arc.stops().size() - 1;
+      double angle = arc.startRad() + arc.stops().get(i);
+      List<Integer> vias = drop(link, radius, angle, last ? -row : row, net);
+      int here = vias.get(0);
+      int far = vias.get(vias.size() - 1);
+      drops.put(angle, here);
       if (before >= 0) {
+        int to = last ? far : here;
+        double sweep = (last ? angle - row : angle) - angleBefore;
         Feature what = new Feature(Feature.Kind.RING, link.phase(), 0, List.of());
-        Path path = between(before, joint, radius, angle - angleBefore);
-        copper.track(size.layers(), size.trackMm(), path, before, joint, net, what);
+        Path path = between(before, to, radius, sweep);
+        copper.track(size.layers(), size.trackMm(), path, before, to, net, what);
       }
-      before = joint;
-      angleBefore = angle;
+      before = far;
+      angleBefore = angle + row;
     }
     return drops;
+  }
+
+  /**
+   * The vias of one drop, in a line into the arc: the radial comes to the first, the ring leaves
+   * from the last, so that the current shares evenly.
+   */
+  private List<Integer> drop(Link link, double radius, double angle, double row, String net) {
+    Point first = Point.polar(radius, angle);
+    Point last = Point.polar(radius, angle + row);
+    List<Integer> out = new ArrayList<>();
+    int n = size.viaCount();
+    for (int k = 0; k < n; k++) {
+      Point at =
+          k == 0 ? first : k == n - 1 ? last : first.plus(last.minus(first).times(k / (n - 1.0)));
+      String what = "drop of " + link.what() + (n == 1 ? "" : ", " + (k + 1) + " of " + n);
+      out.add(
+          copper.drilled(
+              Joint.Kind.DROP, at, size.padMm(), size.holeMm(), size.layers(), net, what));
+    }
+    Feature bar = new Feature(Feature.Kind.LINK, link.phase(), 0, List.of());
+    copper.row(out, List.of(1, size.layers()), size.padMm(), net, bar);
+    return out;
   }
 
   /** An arc about the shaft from one joint to the next; more than half a turn in two pieces. */

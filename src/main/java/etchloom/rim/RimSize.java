@@ -1,6 +1,7 @@
 package etchloom.rim;
 
 import etchloom.spec.Spec;
+import java.util.Optional;
 
 /**
  * What the rim is made from. Lengths in mm.
@@ -9,6 +10,8 @@ import etchloom.spec.Spec;
  * @param nodes of one coil
  * @param nodeRadiusMm of all nodes
  * @param firstNodeRad angle of a coil's first node from its axis; the last lies opposite
+ * @param viaCount vias side by side at every joint
+ * @param viaPitchMm distance between them
  * @param edgeCopperMm least distance of copper from the board's edge
  * @param edgeHoleMm least distance of a hole's edge from the board's edge
  */
@@ -22,10 +25,13 @@ public record RimSize(
     double spaceMm,
     double padMm,
     double holeMm,
+    int viaCount,
+    double viaPitchMm,
     double boardRadiusMm,
     double edgeCopperMm,
     double edgeHoleMm,
-    Spec.Terminals terminals) {
+    Spec.Terminals terminals,
+    Optional<Spec.Tab> tab) {
 
   /** The wider of pad and track. */
   double wideMm() {
@@ -37,8 +43,32 @@ public record RimSize(
     return axis + (pin.start() ? firstNodeRad : -firstNodeRad);
   }
 
+  /** A joint's row of vias is a chord of this length, both ends on its ring. */
+  double rowMm() {
+    return (viaCount - 1) * viaPitchMm;
+  }
+
+  /** Angle that a joint's row takes on a ring. */
+  double rowRad(double ringMm) {
+    return 2 * Math.asin(rowMm() / (2 * ringMm));
+  }
+
   double firstRingMm() {
-    return nodeRadiusMm + padMm / 2 + spaceMm + wideMm() / 2;
+    return aboutRow(nodeRadiusMm + padMm / 2 + spaceMm + wideMm() / 2);
+  }
+
+  /** Radius of a ring, from 0 innermost. */
+  double ringMm(int ring) {
+    double r = firstRingMm();
+    for (int i = 0; i < ring; i++) {
+      r = aboutRow(r + ringPitchMm());
+    }
+    return r;
+  }
+
+  /** The middle of a row of vias stands further in than its ends. */
+  private double aboutRow(double middleMm) {
+    return viaCount == 1 ? middleMm : Math.hypot(middleMm, rowMm() / 2);
   }
 
   /** Distance of neighbouring rings, whose vias never share an angle: pad to track. */
@@ -46,16 +76,21 @@ public record RimSize(
     return wideMm() / 2 + spaceMm + trackMm / 2;
   }
 
-  /** Least angle between two drops, or a drop and a radial, seen at the first ring. */
-  double clearRad() {
-    return Math.asin(Math.min(1, (wideMm() + spaceMm) / firstRingMm()));
+  /** What a joint needs along its ring, with a second one's row beside it. */
+  double besideMm() {
+    return wideMm() + spaceMm + 2 * rowMm();
   }
 
-  /** How far from the shaft a terminal's centre may stand. */
-  double terminalReachMm() {
+  /** Least angle between two drops, or a drop and a radial, seen at the first ring. */
+  double clearRad() {
+    return Math.asin(Math.min(1, besideMm() / firstRingMm()));
+  }
+
+  /** Least distance of a terminal's centre from the board's edge. */
+  double terminalMarginMm() {
     double copper = terminals.padMm() / 2 + edgeCopperMm;
     double hole =
         terminals.kind() == Spec.TerminalKind.HOLE ? terminals.holeMm() / 2 + edgeHoleMm : 0;
-    return boardRadiusMm - Math.max(copper, hole);
+    return Math.max(copper, hole);
   }
 }

@@ -32,6 +32,9 @@ final class Exposure {
 
   /** Whether a piece is a pad that stands bare in an opening of the mask. */
   boolean bare(int layer, Piece p) {
-    return p.isPad() && (layer == 1 && top[p.joint()] || layer == layers && bottom[p.joint()]);
+    if (!p.isPad()) {
+      return false;
+    }
+    return (layer == 1 && top[p.joint()]) || (layer == layers && bottom[p.joint()]);
   }
 }

@@ -15,6 +15,9 @@ import java.util.List;
  * the mask even then, so it keeps that growth once more.
  */
 final class MaskRule implements LayerRule {
+  /** Tells copper from openings where two places are equally tight. */
+  private static final long COPPER = 1L << 32;
+
   @Override
   public void check(Layer layer, Verdicts verdicts) {
     if (layer.number() == 1) {
@@ -79,13 +82,9 @@ final class MaskRule implements LayerRule {
                           required,
                           Words.of("opening of ", o.what(), " and ", layer.words(p)))
                       .byMargin()
-                      .ids(number, openingCount(layer) + (long) i));
+                      .ids(number, COPPER + i));
               return clear;
             });
-  }
-
-  private static long openingCount(Layer layer) {
-    return layer.board().artwork().maskTop().size() + layer.board().artwork().maskBottom().size();
   }
 
   /** The gap that counts; null for the opening's own pad and the tracks that lead from it. */
@@ -97,8 +96,7 @@ final class MaskRule implements LayerRule {
     if (p.joint() == opening.joint()) {
       return null;
     }
-    Gaps.Gap g = gaps.gap(opening, p, gapMm, requiredMm - Board.SLACK_MM);
-    return g;
+    return gaps.gap(opening, p, gapMm, requiredMm - Board.SLACK_MM);
   }
 
   /** The joint whose pad the opening lays bare; -1 where it lies over none. */

@@ -47,26 +47,56 @@ final class Potentials {
     }
   }
 
+  /** Path by path: where paths are in parallel, the voltage lies along each of them. */
   private void follow(Artwork artwork, int k) {
+    artwork.phases().get(k).paths().forEach(path -> follow(artwork, k, path));
+  }
+
+  private void follow(Artwork artwork, int k, List<Phase.Step> path) {
     List<Conductor> all = artwork.conductors();
     double whole = 0;
-    for (Phase.Step s : artwork.phases().get(k).steps()) {
+    Phase.Step before = null;
+    for (Phase.Step s : path) {
       lengthMm[s.conductor()] = all.get(s.conductor()).path().lengthMm();
-      whole += lengthMm[s.conductor()];
+      whole += sideBySide(all, before, s) ? 0 : lengthMm[s.conductor()];
+      before = s;
     }
     double at = 0;
-    for (Phase.Step s : artwork.phases().get(k).steps()) {
+    double next = 0;
+    before = null;
+    for (Phase.Step s : path) {
       Conductor c = all.get(s.conductor());
-      double next = at + lengthMm[c.id()];
-      if (c.what().kind() == Feature.Kind.SPIRAL) {
+      if (!sideBySide(all, before, s)) {
+        at = next;
+        next = at + lengthMm[c.id()];
+      }
+      before = s;
+      if (ofCoil(c)) {
         phaseOf[c.id()] = k;
         shareFrom[c.id()] = (s.forward() ? at : next) / whole;
         shareTo[c.id()] = (s.forward() ? next : at) / whole;
         put(artwork, c.fromJoint(), k, shareFrom[c.id()]);
         put(artwork, c.toJoint(), k, shareTo[c.id()]);
       }
-      at = next;
     }
+  }
+
+  /** A spiral, or a track between the vias of one of the coil's joints. */
+  private static boolean ofCoil(Conductor c) {
+    Feature f = c.what();
+    return f.kind() == Feature.Kind.SPIRAL || (f.kind() == Feature.Kind.LINK && f.coil() > 0);
+  }
+
+  /** Whether two steps that follow each other lead from the same joint to the same next one. */
+  private static boolean sideBySide(List<Conductor> all, Phase.Step before, Phase.Step s) {
+    if (before == null) {
+      return false;
+    }
+    Conductor a = all.get(before.conductor());
+    Conductor b = all.get(s.conductor());
+    return before.forward() == s.forward()
+        ? a.fromJoint() == b.fromJoint() && a.toJoint() == b.toJoint()
+        : a.fromJoint() == b.toJoint() && a.toJoint() == b.fromJoint();
   }
 
   private void put(Artwork artwork, int joint, int k, double share) {

@@ -19,12 +19,16 @@ final class SpaceRule implements LayerRule {
     private final Layer layer;
     private final double requiredMm;
     private final Verdicts verdicts;
+    private final Gaps drawn;
+    private final double drawnMm;
     private double bestMm = Double.POSITIVE_INFINITY;
 
     Watch(Layer layer, double requiredMm, Verdicts verdicts) {
       this.layer = layer;
       this.requiredMm = requiredMm;
       this.verdicts = verdicts;
+      this.drawnMm = Math.max(requiredMm, layer.board().spec().coil().spaceMm());
+      this.drawn = new Gaps(layer.copper().walk(), drawnMm);
     }
 
     @Override
@@ -35,7 +39,7 @@ final class SpaceRule implements LayerRule {
     @Override
     public void see(Close c) {
       boolean broken = c.gapMm() < requiredMm - Board.SLACK_MM;
-      if (broken || (!c.bend() && c.gapMm() < bestMm)) {
+      if (broken || (!c.bend() && c.gapMm() < bestMm && apart(c))) {
         bestMm = Math.min(bestMm, c.gapMm());
         verdicts.add(
             Measured.atLeast(
@@ -47,6 +51,15 @@ final class SpaceRule implements LayerRule {
                     layer.words(c.p(), c.q()))
                 .ids(c.first(), c.second()));
       }
+    }
+
+    /**
+     * Whether a gap that is kept says something about the spacing, and not only that the copper
+     * turns there as tightly as the space it is drawn with allows.
+     */
+    private boolean apart(Close c) {
+      Gaps.Gap g = drawn.gap(c.p(), c.q(), c.gapMm() + Board.SLACK_MM, drawnMm - Board.SLACK_MM);
+      return g != null && !g.bend();
     }
   }
 }

@@ -10,20 +10,32 @@ package etchloom.rules;
  */
 enum Spacing2221 {
   /** Inner layers. */
-  B1(0.0025, 0.05, 0.05, 0.1, 0.1, 0.2, 0.2, 0.2, 0.2, 0.25),
+  B1(1),
   /** Outer layers under a permanent polymer coating: the solder mask. */
-  B4(0.00305, 0.05, 0.05, 0.13, 0.13, 0.4, 0.4, 0.4, 0.4, 0.8),
+  B4(2),
   /** Bare terminations on the outside. */
-  A6(0.00305, 0.13, 0.25, 0.4, 0.5, 0.8, 0.8, 0.8, 0.8, 1.5);
+  A6(3);
 
-  private static final double[] UP_TO_VOLT = {15, 30, 50, 100, 150, 170, 250, 300, 500};
+  /** The voltage up to which a row holds, then mm in the columns B1, B4, A6. */
+  private static final double[][] ROWS = {
+    {15, 0.05, 0.05, 0.13},
+    {30, 0.05, 0.05, 0.25},
+    {50, 0.1, 0.13, 0.4},
+    {100, 0.1, 0.13, 0.5},
+    {150, 0.2, 0.4, 0.8},
+    {170, 0.2, 0.4, 0.8},
+    {250, 0.2, 0.4, 0.8},
+    {300, 0.2, 0.4, 0.8},
+    {500, 0.25, 0.8, 1.5},
+  };
 
-  private final double slopeMmPerVolt;
-  private final double[] spacingMm;
+  /** The same for every volt above the last row. */
+  private static final double[] SLOPE = {1, 0.0025, 0.00305, 0.00305};
 
-  Spacing2221(double slopeMmPerVolt, double... spacingMm) {
-    this.slopeMmPerVolt = slopeMmPerVolt;
-    this.spacingMm = spacingMm;
+  private final int column;
+
+  Spacing2221(int column) {
+    this.column = column;
   }
 
   /**
@@ -31,12 +43,12 @@ enum Spacing2221 {
    * @return mm
    */
   double requiredMm(double volt) {
-    for (int i = 0; i < UP_TO_VOLT.length; i++) {
-      if (volt <= UP_TO_VOLT[i]) {
-        return spacingMm[i];
+    for (double[] row : ROWS) {
+      if (volt <= row[0]) {
+        return row[column];
       }
     }
-    int last = UP_TO_VOLT.length - 1;
-    return spacingMm[last] + slopeMmPerVolt * (volt - UP_TO_VOLT[last]);
+    double[] last = ROWS[ROWS.length - 1];
+    return last[column] + SLOPE[column] * (volt - last[0]);
   }
 }

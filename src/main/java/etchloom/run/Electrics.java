@@ -8,6 +8,7 @@ import etchloom.electric.inductance.InductanceFigures;
 import etchloom.electric.machine.InductanceValues;
 import etchloom.electric.machine.Machine;
 import etchloom.electric.machine.MachineFigures;
+import etchloom.electric.machine.circuit.Circuit;
 import etchloom.electric.resistance.Resistance;
 import etchloom.electric.resistance.ResistanceFigures;
 import etchloom.rules.RuleContext;
@@ -56,7 +57,9 @@ public record Electrics(
     if (machine.emf().isEmpty() || speed.isEmpty()) {
       return RuleContext.NONE;
     }
-    double perSpeed = machine.emf().get().terminalPeakVoltSecondPerRadian();
+    double perSpeed =
+        Circuit.greatestShare(spec.winding().phases(), spec.winding().connection())
+            * machine.emf().get().phasePeakVoltSecondPerRadian();
     return new RuleContext(OptionalDouble.of(perSpeed * speed.getAsDouble()));
   }
 }

@@ -49,7 +49,7 @@ record BoardDraft(
     s.close();
     draft.checkBore();
     draft.checkStackup();
-    draft.tab().ifPresent(t -> t.checkPlace(draft.diameter()));
+    draft.tab().ifPresent(t -> t.checkPlace(draft.diameter(), draft.terminals()));
     return draft;
   }
 
@@ -99,10 +99,11 @@ record BoardDraft(
         diameter,
         bore,
         holes.map(HolesDraft::build),
-        terminals.build(),
+        terminals.build(tab.map(t -> t.angle(terminals)).orElse(terminals.start())),
         starPointOut,
         finish,
         mask,
-        laminateTg);
+        laminateTg,
+        tab.map(t -> t.build(terminals)));
   }
 }

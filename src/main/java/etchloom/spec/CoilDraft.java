@@ -77,6 +77,9 @@ record CoilDraft(
               + Show.mm(outerRadius - innerRadius)
               + " apart");
     }
+    if (outline.isPresent() && outline.get() == CoilOutline.ROUND && section.has("corner")) {
+      section.error(Codes.KEY_CONFLICT, "corner", "a coil of outline round has no corners");
+    }
     boolean racetrack = outline.isPresent() && outline.get() == CoilOutline.RACETRACK;
     if (racetrack) {
       section.missing("width", "a length: the tangential size over the copper");

@@ -1,9 +1,5 @@
 package etchloom.spec;
 
-import etchloom.spec.Spec.CoilOutline;
-import etchloom.spec.Spec.TerminalKind;
-import java.util.Optional;
-
 /**
  * Keys of the format whose capability comes later. They are read and checked like all others and
  * then refused here, in one place; a capability that lands takes its lines out.
@@ -11,32 +7,9 @@ import java.util.Optional;
 final class NotBuiltYet {
   private NotBuiltYet() {}
 
-  static void check(WindingDraft winding, CoilDraft coil, ViaDraft via, BoardDraft board) {
-    Optional<CoilOutline> outline = coil.outline();
-    if (outline.isPresent() && outline.get() != CoilOutline.WEDGE) {
-      refuse(coil.section(), "outline", "only `outline: wedge`");
-    }
-    if (coil.parallelLayers()) {
-      refuse(coil.section(), "layers", "only `layers: series`");
-    }
+  static void check(CoilDraft coil) {
     if (coil.taper()) {
       refuse(coil.section(), "taper", "only `taper: off`");
-    }
-    if (winding.paths() > 1) {
-      refuse(winding.section(), "parallel-paths", "only `parallel-paths: 1`");
-    }
-    if (winding.phases() != CountField.FAULTY && winding.phases() != 3) {
-      refuse(winding.section(), "phases", "only `phases: 3`");
-    }
-    if (via.count() > 1) {
-      refuse(via.section(), "count", "only `count: 1`");
-    }
-    if (board.tab().isPresent()) {
-      refuse(board.section(), "tab", "a round board without a tab");
-    }
-    TerminalsDraft terminals = board.terminals();
-    if (terminals.kind() == TerminalKind.PAD) {
-      refuse(terminals.section().orElseThrow(), "kind", "only `kind: hole`");
     }
   }
 

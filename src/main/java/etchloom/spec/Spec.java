@@ -118,7 +118,15 @@ public record Spec(
       TerminalKind kind, double startRad, double pitchMm, double holeMm, double padMm) {}
 
   /**
+   * A rectangle that stands out of the round board and carries the terminals.
+   *
+   * @param lengthMm by how much its end stands beyond the round edge, along its middle
+   */
+  public record Tab(double angleRad, double widthMm, double lengthMm) {}
+
+  /**
    * @param stackupMm dielectrics from L1 down; empty: the fab's, else equal
+   * @param tab where there is one, the terminals' start is its angle
    */
   public record Board(
       int layers,
@@ -133,7 +141,8 @@ public record Spec(
       boolean starPointOut,
       String finish,
       String mask,
-      double laminateTgC) {
+      double laminateTgC,
+      Optional<Tab> tab) {
     public Board {
       stackupMm = List.copyOf(stackupMm);
     }

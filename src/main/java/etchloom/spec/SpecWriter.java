@@ -20,6 +20,7 @@ import etchloom.spec.Spec.Duty;
 import etchloom.spec.Spec.Holes;
 import etchloom.spec.Spec.Magnet;
 import etchloom.spec.Spec.Rotor;
+import etchloom.spec.Spec.Tab;
 import etchloom.spec.Spec.Terminals;
 import etchloom.spec.Spec.Via;
 import etchloom.spec.Spec.Winding;
@@ -129,6 +130,7 @@ public final class SpecWriter {
     mm(y, "bore", b.boreMm());
     b.holes().ifPresent(h -> y.group("holes", g -> holes(g, h)));
     y.group("terminals", g -> terminals(g, b.terminals()));
+    b.tab().ifPresent(t -> y.group("tab", g -> tab(g, t)));
     y.value("star-point", Words.wordFor(BoardDraft.STAR_POINT, b.starPointOut()));
     y.text("finish", b.finish()).text("mask", b.mask());
     y.group("laminate", g -> quantity(g, "tg", b.laminateTgC(), TEMPERATURE, "C"));
@@ -154,6 +156,12 @@ public final class SpecWriter {
     mm(y, "pitch", t.pitchMm());
     mm(y, "hole", t.holeMm());
     mm(y, "pad", t.padMm());
+  }
+
+  private static void tab(YamlText y, Tab t) {
+    quantity(y, "angle", t.angleRad(), ANGLE, "deg");
+    mm(y, "width", t.widthMm());
+    mm(y, "length", t.lengthMm());
   }
 
   private static void duty(YamlText y, Duty d) {

@@ -11,7 +11,18 @@ public final class Templates {
   private Templates() {}
 
   private static final List<String> NAMES =
-      List.of("filter-wheel", "dosing-pump", "reaction-wheel", "wind-logger");
+      List.of(
+          "filter-wheel",
+          "dosing-pump",
+          "reaction-wheel",
+          "wind-logger",
+          "sample-stirrer",
+          "focuser",
+          "rover-wheel",
+          "sample-shaker",
+          "blind-drive",
+          "tide-meter",
+          "test-bench");
   private static final List<String> FAB_NAMES = List.of("economy", "standard", "fine");
 
   /** The starting specs, in the order in which they are listed. */

@@ -6,10 +6,15 @@ import etchloom.units.Dimension;
 import java.util.Map;
 import java.util.Optional;
 
-/** The terminals' keys as read, with their defaults. */
+/**
+ * The terminals' keys as read, with their defaults.
+ *
+ * @param placed whether the start is the file's own
+ */
 record TerminalsDraft(
     Optional<Section> section,
     TerminalKind kind,
+    boolean placed,
     double start,
     double pitch,
     double hole,
@@ -23,11 +28,12 @@ record TerminalsDraft(
   private static final double PAD_MM = 2.0;
 
   static final TerminalsDraft DEFAULT =
-      new TerminalsDraft(Optional.empty(), TerminalKind.HOLE, START_RAD, PITCH_MM, HOLE_MM, PAD_MM);
+      new TerminalsDraft(
+          Optional.empty(), TerminalKind.HOLE, false, START_RAD, PITCH_MM, HOLE_MM, PAD_MM);
 
   static TerminalsDraft read(Section s) {
     WordField<TerminalKind> kind = s.word("kind", KINDS);
-    double start = s.number("start", Dimension.ANGLE, Limits.ANY_ANGLE).or(START_RAD);
+    NumberField start = s.number("start", Dimension.ANGLE, Limits.ANY_ANGLE);
     double pitch = s.length("pitch", Limits.PITCH).or(PITCH_MM);
     double hole = s.length("hole", Limits.HOLE).or(HOLE_MM);
     double pad = s.length("pad", Limits.PAD).or(PAD_MM);
@@ -45,10 +51,17 @@ record TerminalsDraft(
               + Show.mm(pad)
               + ": terminals would touch");
     }
-    return new TerminalsDraft(Optional.of(s), kind.or(TerminalKind.HOLE), start, pitch, hole, pad);
+    return new TerminalsDraft(
+        Optional.of(s),
+        kind.or(TerminalKind.HOLE),
+        start.present(),
+        start.or(START_RAD),
+        pitch,
+        hole,
+        pad);
   }
 
-  Terminals build() {
-    return new Terminals(kind, start, pitch, hole, pad);
+  Terminals build(double startRad) {
+    return new Terminals(kind, startRad, pitch, hole, pad);
   }
 }

@@ -66,7 +66,7 @@ final class Summary {
   /** Only what decides the order. */
   private Row light(Row row) {
     java.util.Map<String, Object> figures = new java.util.LinkedHashMap<>();
-    listing.rank().flatMap(r -> r.of(row).map(v -> figures.put(r.name().name(), v)));
+    listing.rank().ifPresent(r -> r.of(row).ifPresent(v -> figures.put(r.name().name(), v)));
     return new Row(row.variant(), java.util.Map.of(), row.passed(), "", figures);
   }
 

@@ -27,6 +27,11 @@ public record Winding(
     axisRad = List.copyOf(axisRad);
   }
 
+  /** A phase's coils, counter-clockwise from coil 1. */
+  public List<PhaseCoil> coilsOf(int phase) {
+    return sequence.stream().filter(c -> c.phase() == phase).toList();
+  }
+
   public double windingFactor() {
     return distributionFactor * pitchFactor;
   }

@@ -21,7 +21,7 @@ final class SvgPhases {
 
   /** Dash and gap in band widths, a pattern for each phase in the order of their marks. */
   private static final double[][] DASHES = {
-    {}, {3, 1.6}, {0.01, 1.9}, {6, 1.6}, {3, 1.6, 0.01, 1.6}
+    {}, {3, 1.6}, {0.01, 1.9}, {6, 1.6}, {3, 1.6, 0.01, 1.6}, {6, 1.6, 0.01, 1.6, 0.01, 1.6}
   };
 
   private final Artwork art;

@@ -26,7 +26,7 @@ final class SvgWriter {
   private static final String LEGEND = "#22303a";
 
   /** Red, green and blue of the lowest layer, the middle and L1. */
-  private static final int[][] COPPER = {{232, 205, 176}, {196, 128, 84}, {120, 52, 22}};
+  private static final int[][] COPPER = {{214, 176, 138}, {176, 108, 66}, {112, 46, 20}};
 
   private final Artwork art;
   private final StringBuilder out;

@@ -8,8 +8,7 @@ import java.util.SortedMap;
  * Drill files in XNC form, one for plated and one for non-plated holes, finished diameters.
  *
  * <p>Source: XNC Format Specification 2021.11. Every number carries a decimal point: without it
- * readers guess a zero suppression and {@code X10} becomes 0.010 mm. Coordinates carry their sign:
- * one reader (gerber-parser 4.2) otherwise takes the 0 of {@code X30.5} for a suppressed one's.
+ * readers guess a zero suppression and {@code X10} becomes 0.010 mm.
  */
 final class XncWriter {
   /** Longer tool numbers are read as tool and compensation. */
@@ -53,8 +52,8 @@ final class XncWriter {
     for (Holes.Tool t : tools) {
       s.append('T').append(Numbers.padded(++number, 2)).append('\n');
       for (Holes.Hit h : t.hits()) {
-        signed(s.append('X'), h.x());
-        signed(s.append('Y'), h.y());
+        place(s, 'X', h.x());
+        place(s, 'Y', h.y());
         s.append('\n');
       }
     }
@@ -71,9 +70,5 @@ final class XncWriter {
       s.append('+');
     }
     Numbers.mm(s, nm);
-  }
-
-  private static void signed(StringBuilder s, long nm) {
-    Numbers.mm(nm < 0 ? s : s.append('+'), nm);
   }
 }

@@ -50,7 +50,7 @@ class BadInputTest {
         Arguments.of("winding:", "winding: &w", List.of("anchor")),
         Arguments.of("  layers: 4", "\tlayers: 4", List.of("tab")),
         Arguments.of("  layers: 4", "  layers: 3", List.of("layers", "even")),
-        Arguments.of("  outline: wedge", "  outline: round", List.of("not built yet")),
+        Arguments.of("  outline: wedge", "  outline: oval", List.of("round", "racetrack")),
         Arguments.of("  sides: one", "  sides: three", List.of("sides", "one", "two")),
         Arguments.of("fab: standard", "fab: standart", List.of("standart", "economy", "fine")));
   }

@@ -9,9 +9,16 @@ import etchloom.artwork.Coil;
 import etchloom.artwork.Conductor;
 import etchloom.artwork.Phase;
 import etchloom.diagnostic.Diagnostic;
+import etchloom.proof.ProofExpectation;
+import etchloom.proof.ProofFinding;
+import etchloom.proof.ProofReport;
+import etchloom.proof.Prover;
+import etchloom.rules.Finding;
 import etchloom.run.Drawn;
 import etchloom.spec.Spec;
 import etchloom.testing.RandomSpecs;
+import etchloom.testing.ToyOrders;
+import etchloom.write.LayerSet;
 import java.io.IOException;
 import java.nio.file.Files;
 import java.nio.file.Path;
@@ -19,7 +26,9 @@ import java.util.ArrayList;
 import java.util.HashMap;
 import java.util.List;
 import java.util.Map;
+import java.util.Optional;
 import java.util.TreeMap;
+import java.util.function.LongFunction;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.api.io.TempDir;
 
@@ -27,22 +36,47 @@ import org.junit.jupiter.api.io.TempDir;
 class RandomSpecsTest {
   private static final int SEEDS = Integer.getInteger("etchloom.seeds", 300);
 
+  /** Each so many seeds the files are written and read back too. */
+  private static final int PROVED = 3;
+
   @TempDir Path folder;
 
   @Test
   void everySpecIsDrawnCleanOrRefusedByKey() throws IOException {
+    drawOrRefuse(RandomSpecs::yaml, SEEDS, SEEDS / 4, PROVED);
+  }
+
+  /** All outlines, layers side by side, rows of vias; the written files proven for some. */
+  @Test
+  void everyShapeIsDrawnCleanOrRefusedByKey() throws IOException {
+    drawOrRefuse(RandomSpecs::shapes, SEEDS / 2, SEEDS / 6, 5 * PROVED);
+  }
+
+  /**
+   * @param atLeast so many must be drawn
+   * @param proveEvery the files of every so-manieth seed are written and read back
+   */
+  private void drawOrRefuse(LongFunction<String> yamlOf, int seeds, int atLeast, int proveEvery)
+      throws IOException {
     int drawn = 0;
     Map<String, Integer> refusals = new TreeMap<>();
-    for (long seed = 0; seed < SEEDS; seed++) {
-      String yaml = RandomSpecs.yaml(seed);
+    for (long seed = 0; seed < seeds; seed++) {
+      String yaml = yamlOf.apply(seed);
       String name = "seed " + seed + "\n" + yaml;
       Path spec = Files.writeString(folder.resolve("s" + seed + ".yaml"), yaml);
       try {
-        InputFiles.Inputs in = InputFiles.read(spec.toString(), java.util.Optional.empty());
-        Drawn d = Attempt.of(in, false).drawn();
+        InputFiles.Inputs in = InputFiles.read(spec.toString(), Optional.empty());
+        Attempt attempt = Attempt.of(in, false);
+        Drawn d = attempt.drawn();
         assertEquals(List.of(), d.rules().findings(), name);
         everyPhaseIsOneChain(d, name);
         everyNumberIsFinite(d, name);
+        theSpaceIsWhatWasAskedFor(d, name);
+        if (seed % proveEvery == 0) {
+          assertTrue(
+              SetFiles.of(attempt, Optional.empty()).results().proof().orElseThrow().passed(),
+              name);
+        }
         drawn++;
       } catch (BadInput e) {
         for (Diagnostic x : e.diagnostics()) {
@@ -52,9 +86,47 @@ class RandomSpecsTest {
         }
       }
     }
-    int atLeast = SEEDS / 4;
-    assertTrue(drawn >= atLeast, drawn + " of " + SEEDS + " drawn; refused: " + refusals);
-    System.out.println(drawn + " of " + SEEDS + " drawn; refused: " + refusals);
+    assertTrue(drawn >= atLeast, drawn + " of " + seeds + " drawn; refused: " + refusals);
+    System.out.println(drawn + " of " + seeds + " drawn; refused: " + refusals);
+  }
+
+  /**
+   * Every phase count and parallel paths, tabs, pads and screws: clean and proved, or refused by
+   * key. Only screws that meet rings or leads are left to the rule check.
+   */
+  @Test
+  void everyWindingIsDrawnCleanAndProvedOrRefusedByKey() throws IOException {
+    int seeds = SEEDS / 3;
+    int drawn = 0;
+    Map<String, Integer> refusals = new TreeMap<>();
+    for (long seed = 0; seed < seeds; seed++) {
+      String yaml = RandomSpecs.wide(seed);
+      String name = "wide seed " + seed + "\n" + yaml;
+      Path spec = Files.writeString(folder.resolve("w" + seed + ".yaml"), yaml);
+      try {
+        InputFiles.Inputs in = InputFiles.read(spec.toString(), Optional.empty());
+        Drawn d = Attempt.of(in, false).drawn();
+        List<Finding> others =
+            d.rules().findings().stream()
+                .filter(f -> !yaml.contains("holes:") || !f.toString().contains("mounting hole"))
+                .toList();
+        assertEquals(List.of(), others, name);
+        everyNumberIsFinite(d, name);
+        Artwork art = d.assembly().artwork().onGrid();
+        ProofReport r =
+            Prover.prove(LayerSet.write(art, ToyOrders.plain(1.2)), ProofExpectation.of(art));
+        assertEquals(List.of(), r.findings().stream().map(ProofFinding::text).toList(), name);
+        drawn++;
+      } catch (BadInput e) {
+        for (Diagnostic x : e.diagnostics()) {
+          assertFalse(x.key().isEmpty(), () -> name + x);
+          refusals.merge(x.key(), 1, Integer::sum);
+        }
+      }
+    }
+    String all = drawn + " of " + seeds + " windings drawn; refused: " + refusals;
+    assertTrue(drawn >= seeds / 3, all);
+    System.out.println(all);
   }
 
   /** Each phase passes each spiral of each of its coils once, end to end, in the coil's sense. */
@@ -63,15 +135,23 @@ class RandomSpecsTest {
     int[] passes = new int[art.conductors().size()];
     for (Phase p : art.phases()) {
       int at = p.entryJoint();
+      int before = -1;
       for (Phase.Step s : p.steps()) {
         Conductor c = art.conductors().get(s.conductor());
-        assertEquals(at, s.forward() ? c.fromJoint() : c.toJoint(), name + p.mark());
-        at = s.forward() ? c.toJoint() : c.fromJoint();
+        int from = s.forward() ? c.fromJoint() : c.toJoint();
+        int to = s.forward() ? c.toJoint() : c.fromJoint();
+        boolean sideBySide = from == before && to == at;
+        assertEquals(sideBySide ? before : at, from, name + p.mark());
+        before = from;
+        at = to;
         passes[s.conductor()] += s.forward() ? 1 : -1;
       }
       assertEquals(p.exitJoint(), at, name + p.mark());
     }
     for (Coil c : art.coils()) {
+      for (int id : c.copper()) {
+        assertEquals(1, Math.abs(passes[id]), name + "coil " + c.number());
+      }
       for (int id : c.conductors()) {
         assertEquals(c.sign(), passes[id], name + "coil " + c.number());
       }
@@ -81,7 +161,21 @@ class RandomSpecsTest {
     int nodes = art.joints().size();
     int loops = art.conductors().size() - nodes + pieces;
     assertEquals(connection == Spec.Connection.OPEN ? 3 : 1, pieces, name);
-    assertEquals(connection == Spec.Connection.DELTA ? 1 : 0, loops, name);
+    assertEquals(art.expectedCircuits(), loops, name);
+    if (d.spec().via().count() == 1 && !d.spec().coil().parallelLayers()) {
+      assertEquals(connection == Spec.Connection.DELTA ? 1 : 0, loops, name);
+    }
+  }
+
+  /** The tightest gap is the one asked for, to the nanometre. */
+  private static void theSpaceIsWhatWasAskedFor(Drawn d, String name) {
+    double least =
+        d.rules().minima().stream()
+            .filter(f -> f.rule().equals("space"))
+            .mapToDouble(Finding::measured)
+            .min()
+            .orElseThrow();
+    assertTrue(least >= d.spec().coil().spaceMm() - 1e-6, () -> name + " space " + least);
   }
 
   /** Connected pieces of the whole copper as a graph. */

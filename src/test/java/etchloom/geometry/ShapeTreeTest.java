@@ -22,7 +22,23 @@ class ShapeTreeTest {
     return LongStream.range(0, 60);
   }
 
-  private record Shapes(List<Segment> shapes, double[] fat) {
+  private static final class Shapes {
+    private final List<Segment> shapes;
+    private final double[] fat;
+
+    Shapes(List<Segment> shapes, double[] fat) {
+      this.shapes = shapes;
+      this.fat = fat;
+    }
+
+    List<Segment> shapes() {
+      return shapes;
+    }
+
+    double[] fat() {
+      return fat;
+    }
+
     double gap(int i, int j) {
       return Distance.between(shapes.get(i), shapes.get(j)).distanceMm() - fat[i] - fat[j];
     }

@@ -11,6 +11,7 @@ import etchloom.geometry.Distance;
 import etchloom.geometry.Nearest;
 import etchloom.geometry.Point;
 import etchloom.geometry.Segment;
+import etchloom.proof.ohm.CopperBuild;
 import etchloom.proof.read.SetFolder;
 import etchloom.proof.read.UnreadableFile;
 import etchloom.proof.rules.CopperLimits;
@@ -30,7 +31,7 @@ class FolderCheckTest {
 
   @BeforeAll
   static void write() {
-    wind = WrittenSets.template("wind-logger");
+    wind = WrittenSets.fewTurns("wind-logger");
     windSet = WrittenSets.withoutSums(WrittenSets.write(wind));
   }
 
@@ -50,19 +51,24 @@ class FolderCheckTest {
       throws UnreadableFile {
     FolderCheck.Fab fab =
         (n, copperMm) ->
-            new CopperLimits(
-                Collections.nCopies(n, new CopperLimits.Layer(0.18, 0.18)),
-                0.13,
-                0.2,
-                0.3,
-                8,
-                0.25,
-                0.2,
-                0.3,
-                0.5,
-                0.1,
-                400,
-                List.of(2, 4, 6));
+            new FolderCheck.Shop(
+                new CopperLimits(
+                    Collections.nCopies(n, new CopperLimits.Layer(0.18, 0.18)),
+                    0.13,
+                    0.2,
+                    0.3,
+                    8,
+                    0.25,
+                    0.2,
+                    0.3,
+                    0.5,
+                    0.1,
+                    400,
+                    List.of(2, 4, 6)),
+                copperMm.stream()
+                    .map(t -> new CopperBuild.Layer(t.orElse(0.07), t.orElse(0.07) / 3))
+                    .toList(),
+                0.02);
     return FolderCheck.check(new SetFolder("set", files), List.of(layers), circuits, fab);
   }
 

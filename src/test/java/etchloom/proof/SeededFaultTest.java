@@ -497,6 +497,26 @@ class SeededFaultTest {
   }
 
   @Test
+  void netlistEdgeOffThePlace_isFound() {
+    Edit e = wheel();
+    String line = e.text(".ipc").lines().filter(l -> l.startsWith("089")).findFirst().get();
+    int x = line.indexOf("X", 6);
+    String moved = line.substring(0, x + 4) + (line.charAt(x + 4) == '0' ? '1' : '0');
+    e.replace(".ipc", line, moved + line.substring(x + 5));
+    assertTrue(e.prove().findings().stream().anyMatch(f -> f.name().equals(ProofNames.NETLIST)));
+  }
+
+  @Test
+  void padAndHoleCalledSomethingElse_areFound() {
+    Edit pad =
+        wheel().replace(copper(1), "%TA.AperFunction,ComponentPad*%", "%TA.AperFunction,ViaPad*%");
+    Joint t = wheel.terminals().get(0);
+    pad.mustFind(ProofNames.FUNCTION, 1, t.at(), 1e-6);
+    Edit hole = wheel().replace("-plated.xnc", "ComponentDrill", "ViaDrill");
+    hole.mustFind(ProofNames.FUNCTION, 0, t.at(), 1e-6);
+  }
+
+  @Test
   void jobFileThatSaysOtherwise_isFound() {
     Edit e = wheel().replace(".gbrjob", "Copper,L2,Inr", "Copper,L3,Inr");
     assertTrue(only(e.prove(), ProofNames.JOB_FILE).message().contains("-copper-L2.gbr"));

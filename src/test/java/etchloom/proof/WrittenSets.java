@@ -1,7 +1,9 @@
 package etchloom.proof;
 
 import etchloom.artwork.Artwork;
+import etchloom.artwork.Stackup;
 import etchloom.board.Assembler;
+import etchloom.proof.ohm.CopperBuild;
 import etchloom.spec.FabReader;
 import etchloom.spec.Positions;
 import etchloom.spec.Spec;
@@ -26,8 +28,13 @@ final class WrittenSets {
 
   /** The filter wheel with five turns a layer: all its constructs, a third of its copper. */
   static Artwork smallWheel() {
-    String spec = text(Templates.bytes("filter-wheel"));
-    return drawn("filter-wheel", spec.replace("turns: fill", "turns: 5").getBytes(ASCII));
+    return fewTurns("filter-wheel");
+  }
+
+  /** A template's board with five turns a layer. */
+  static Artwork fewTurns(String name) {
+    String spec = text(Templates.bytes(name));
+    return drawn(name, spec.replace("turns: fill", "turns: 5").getBytes(ASCII));
   }
 
   private static Artwork drawn(String name, byte[] spec) {
@@ -66,6 +73,15 @@ final class WrittenSets {
                 ? text(bytes).replaceAll("%TF\\.MD5,[0-9a-f]*\\*%\n", "").getBytes(ASCII)
                 : bytes);
     return out;
+  }
+
+  static CopperBuild build(Stackup s) {
+    return new CopperBuild(
+        s.copper().stream()
+            .map(c -> new CopperBuild.Layer(c.thicknessMm(), c.undercutMm()))
+            .toList(),
+        s.dielectricMm(),
+        s.platingMm());
   }
 
   static final java.nio.charset.Charset ASCII = StandardCharsets.US_ASCII;

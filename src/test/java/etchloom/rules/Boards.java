@@ -171,7 +171,8 @@ final class Boards {
             false,
             "ENIG",
             "green",
-            150),
+            150,
+            Optional.empty()),
         "standard",
         duty);
   }

@@ -89,7 +89,8 @@ class OrderRulesTest {
             p.starPointOut(),
             p.finish(),
             p.mask(),
-            tgC);
+            tgC,
+            p.tab());
     Spec spec =
         new Spec(
             s.title(),

@@ -177,7 +177,7 @@ class SpaceBruteForceTest {
         p.conductor() >= 0 && p.conductor() == q.conductor()
             ? Math.abs(p.walk() - q.walk())
             : Double.POSITIVE_INFINITY;
-    return direct <= near || walk(a, layer, p, q, near) <= near;
+    return direct <= near || walk(a, layer, p, q) <= near;
   }
 
   private static double width(Artwork a, int layer, Dot pad, Dot partner) {
@@ -192,7 +192,7 @@ class SpaceBruteForceTest {
   }
 
   /** Shortest way over joints by trying all chains of tracks. */
-  private static double walk(Artwork a, int layer, Dot p, Dot q, double limit) {
+  private static double walk(Artwork a, int layer, Dot p, Dot q) {
     double[] fromP = toJoints(a, p);
     double[] fromQ = toJoints(a, q);
     for (int round = 0; round < 4; round++) {

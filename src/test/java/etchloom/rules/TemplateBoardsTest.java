@@ -49,8 +49,17 @@ class TemplateBoardsTest {
     if (d.spec().duty().orElseThrow().busVolt().isEmpty()) {
       expected.remove("voltage");
     }
+    if (d.spec().board().holes().isEmpty() && d.spec().rotor().outerDiameterMm().isEmpty()) {
+      expected.remove("keep-out");
+    }
     assertEquals(expected, r.minima().stream().map(Finding::rule).toList());
-    double edge = d.spec().board().diameterMm() / 2;
+    double round = d.spec().board().diameterMm() / 2;
+    double edge =
+        d.spec()
+            .board()
+            .tab()
+            .map(t -> Math.hypot(round + t.lengthMm(), t.widthMm() / 2))
+            .orElse(round);
     for (Finding f : r.minima()) {
       assertTrue(f.at().norm() <= edge, f::toString);
       assertTrue(Double.isFinite(f.measured()) && Double.isFinite(f.required()), f::toString);

@@ -282,11 +282,12 @@ class RoundTripTest {
           c.turns(),
           of(c.trackMm()),
           of(c.spaceMm()),
-          OptionalDouble.of(of(c.trackMm())),
+          c.outline() == Spec.CoilOutline.ROUND ? c.cornerMm() : OptionalDouble.of(of(c.trackMm())),
           c.parallelLayers());
     }
 
     private Spec.Board of(Spec.Board b) {
+      Spec.Terminals terminals = of(b.terminals());
       return new Spec.Board(
           b.layers(),
           of(b.thicknessMm()),
@@ -296,11 +297,12 @@ class RoundTripTest {
           of(b.diameterMm()),
           of(b.boreMm()),
           b.holes().map(this::of),
-          of(b.terminals()),
+          terminals,
           b.starPointOut(),
           b.finish(),
           b.mask(),
-          of(b.laminateTgC()));
+          of(b.laminateTgC()),
+          Optional.of(new Spec.Tab(terminals.startRad(), of(20.0), of(8.0))));
     }
 
     private Spec.Copper of(Spec.Copper c) {

@@ -123,7 +123,8 @@ public final class Specs {
             s.starPointOut(),
             "ENIG",
             "green",
-            150),
+            150,
+            Optional.empty()),
         "standard",
         Optional.empty());
   }

@@ -49,6 +49,7 @@ class SvgWriterTest {
             "drill-plated",
             "drill-nonplated",
             "datum",
+            "phases",
             "notes"),
         ids);
   }
@@ -138,11 +139,11 @@ class SvgWriterTest {
       for (int i = 1; i < layers; i++) {
         double upper = lightness(SvgWriter.colour(i, layers));
         double lower = lightness(SvgWriter.colour(i + 1, layers));
-        assertTrue(upper - lower > 3, layers + " layers, L" + i + ": " + upper + ", " + lower);
+        assertTrue(lower - upper > 3, layers + " layers, L" + i + ": " + upper + ", " + lower);
       }
     }
-    double board = lightness("#26323d");
-    assertTrue(lightness(SvgWriter.colour(4, 4)) - board > 25);
+    double board = lightness("#eceee8");
+    assertTrue(board - lightness(SvgWriter.colour(4, 4)) > 15);
   }
 
   /** IEC 61966-2-1 for the linear values and Y; CIE 1976 L*. */

@@ -18,9 +18,9 @@ import java.util.Map;
 final class BoardCopper {
   /**
    * Chord error over the track's width. On the boards measured this moves a coil's inductance by
-   * less than 3e-5.
+   * less than 1e-4.
    */
-  private static final double CHORD_ERROR = 0.1;
+  private static final double CHORD_ERROR = 0.05;
 
   /** Longest filament over the track's width: about as long as the gaps to the next turns. */
   private static final double LONGEST = 3;

@@ -13,12 +13,12 @@ final class Clusters {
 
   /**
    * Sum of radii over distance at which leaves count as far. With the fourth order this leaves a
-   * coupling 1e-5 of the larger self coupling off.
+   * coupling off by some 1e-5 of the bodies' self couplings.
    */
   private static final double OPENING = 0.75;
 
   /** Larger clusters must be further apart, by this power of their size: more is at stake. */
-  private static final double GROWTH = 0.1;
+  private static final double GROWTH = 0.15;
 
   /** Exact for a straight piece's moments up to the fifth degree. */
   private static final GaussRule ALONG = new GaussRule(3);

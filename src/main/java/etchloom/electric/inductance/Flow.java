@@ -35,7 +35,7 @@ record Flow(Artwork artwork, Currents coil, List<Currents> phases) {
   Filaments coilFilaments(BoardCopper copper, boolean closed) {
     Filaments out = new Filaments();
     Coil c = firstCoil();
-    for (int id : c.conductors()) {
+    for (int id : c.copper()) {
       copper.add(id, coil.ofConductor(id), out);
     }
     if (closed) {
@@ -53,7 +53,7 @@ record Flow(Artwork artwork, Currents coil, List<Currents> phases) {
     Filaments out = new Filaments();
     Currents currents = phases.get(phase);
     boolean[] inCoil = new boolean[artwork.conductors().size()];
-    artwork.coils().forEach(c -> c.conductors().forEach(id -> inCoil[id] = true));
+    artwork.coils().forEach(c -> c.copper().forEach(id -> inCoil[id] = true));
     for (Conductor c : artwork.conductors()) {
       double ampere = currents.ofConductor(c.id());
       if (ampere != 0 && (coilsToo || !inCoil[c.id()])) {

@@ -6,10 +6,13 @@ import java.util.List;
  * Filaments laid out for sums over pairs, in an order that keeps neighbours together. Lengths in
  * mm.
  *
- * <p>{@code qxx} and the like are the second moments of the piece as a bar (length, width,
- * thickness) over 2, for pairs some lengths apart.
+ * <p>{@code qxx} and the like are half the second moments of the piece as a bar (length, width,
+ * thickness), {@code reach} the square of its size, for pairs some sizes apart.
  */
 final class Pieces {
+  /** A width weighs so much more than a length: expansions go to higher order along than across. */
+  private static final double ACROSS = 1.6;
+
   final int size;
   final double[] x;
   final double[] y;
@@ -119,7 +122,7 @@ final class Pieces {
     qzz[i] = s.thicknessMm() * s.thicknessMm() / 24;
     height[i] = s.heightMm();
     width[i] = s.widthMm();
-    double size = Math.max(length[i], Math.max(s.widthMm(), s.thicknessMm()));
+    double size = Math.max(length[i], ACROSS * Math.max(s.widthMm(), s.thicknessMm()));
     reach[i] = size * size;
   }
 }

@@ -72,12 +72,13 @@ final class Repeats {
 
   /** The coil's currents over the first coil's; no number where they are not in proportion. */
   private static double factor(Flow flow, Coil coil, Currents currents) {
-    List<Integer> first = flow.firstCoil().conductors();
+    List<Integer> first = flow.firstCoil().copper();
+    List<Integer> own = coil.copper();
     double f =
         currents.ofConductor(coil.conductors().get(0)) / flow.coil().ofConductor(first.get(0));
     for (int i = 0; i < first.size(); i++) {
       double want = f * flow.coil().ofConductor(first.get(i));
-      if (!(Math.abs(currents.ofConductor(coil.conductors().get(i)) - want) <= SLACK_AMPERE)) {
+      if (!(Math.abs(currents.ofConductor(own.get(i)) - want) <= SLACK_AMPERE)) {
         return Double.NaN;
       }
     }
@@ -88,12 +89,14 @@ final class Repeats {
     Coil first = art.coils().get(0);
     Coil coil = art.coils().get(k);
     double rad = 2 * Math.PI * k / art.coils().size();
-    if (coil.conductors().size() != first.conductors().size()) {
+    List<Integer> some = first.copper();
+    List<Integer> others = coil.copper();
+    if (some.size() != others.size()) {
       return false;
     }
-    for (int i = 0; i < first.conductors().size(); i++) {
-      Conductor a = art.conductors().get(first.conductors().get(i));
-      Conductor b = art.conductors().get(coil.conductors().get(i));
+    for (int i = 0; i < some.size(); i++) {
+      Conductor a = art.conductors().get(some.get(i));
+      Conductor b = art.conductors().get(others.get(i));
       if (a.layer() != b.layer() || a.widthMm() != b.widthMm() || !turned(a, b, rad)) {
         return false;
       }

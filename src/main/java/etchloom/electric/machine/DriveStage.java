@@ -29,12 +29,13 @@ final class DriveStage {
     this.heat = heat;
   }
 
-  /** The PWM ripple in a terminal, where bus, switching frequency and formula are known. */
+  /** The PWM ripple in a terminal, where bus and switching frequency are known. */
   static OptionalDouble ripple(Setting s) {
     Spec.Duty d = s.duty();
     return d.busVolt().isPresent() && d.switchingHertz().isPresent()
-        ? Ripple.amperePeakToPeak(
-            s.circuit(), d.busVolt().getAsDouble(), d.switchingHertz().getAsDouble())
+        ? OptionalDouble.of(
+            Ripple.amperePeakToPeak(
+                s.circuit(), d.busVolt().getAsDouble(), d.switchingHertz().getAsDouble()))
         : OptionalDouble.empty();
   }
 
@@ -49,8 +50,7 @@ final class DriveStage {
         s.ledger().has("drive.proportionalGain", Given.of("duty.switching", d.bandwidthHertz()))
             ? Optional.of(CurrentLoop.of(c, d.bandwidthHertz().getAsDouble()))
             : Optional.empty();
-    Given formula = new Given("winding.connection", Ripple.known(c));
-    s.ledger().has("drive.rippleAmperePeakToPeak", s.bus(), s.switching(), formula);
+    s.ledger().has("drive.rippleAmperePeakToPeak", s.bus(), s.switching());
     return new DriveFigures(
         c.polePairs(),
         c.lineOhm(20),
@@ -58,7 +58,7 @@ final class DriveStage {
         hertz,
         c.windingHenry() / c.windingOhm20(),
         ripple(s),
-        series(formula),
+        series(),
         of(loop.map(CurrentLoop::proportionalGain)),
         of(loop.map(CurrentLoop::integralGain)),
         of(loop.map(CurrentLoop::bandwidthHertz)),
@@ -68,20 +68,16 @@ final class DriveStage {
         torqueSpeed());
   }
 
-  private OptionalDouble series(Given formula) {
+  private OptionalDouble series() {
     Spec.Duty d = s.duty();
     return s.ledger()
-            .has(
-                "drive.seriesInductanceForRippleHenry",
-                s.bus(),
-                s.switching(),
-                s.current(),
-                formula)
-        ? Ripple.seriesHenry(
-            s.circuit(),
-            d.busVolt().getAsDouble(),
-            d.switchingHertz().getAsDouble(),
-            s.circuit().lineAmpere(d.currentAmpereRms().getAsDouble()))
+            .has("drive.seriesInductanceForRippleHenry", s.bus(), s.switching(), s.current())
+        ? OptionalDouble.of(
+            Ripple.seriesHenry(
+                s.circuit(),
+                d.busVolt().getAsDouble(),
+                d.switchingHertz().getAsDouble(),
+                s.circuit().lineAmpere(d.currentAmpereRms().getAsDouble())))
         : OptionalDouble.empty();
   }
 

@@ -6,6 +6,7 @@ import etchloom.electric.machine.heat.EddyLoss;
 import etchloom.electric.machine.heat.HeatBalance;
 import etchloom.electric.machine.heat.Losses;
 import etchloom.electric.machine.heat.TrackChart;
+import etchloom.electric.resistance.Copper;
 import etchloom.spec.Spec;
 import etchloom.units.Numbers;
 import java.util.ArrayList;
@@ -22,6 +23,8 @@ final class HeatStage {
 
   /** A laminate held for long should stay so far below its glass transition (common practice). */
   private static final double BELOW_GLASS_K = 20;
+
+  private static final OptionalDouble NONE = OptionalDouble.empty();
 
   private final Setting s;
   private final Optional<Linked> linked;
@@ -45,6 +48,7 @@ final class HeatStage {
             rippleKnown ? Ripple.meanSquare(ripple.getAsDouble()) : 0,
             turning ? linked.map(Linked::eddy) : Optional.empty(),
             turning ? linked.flatMap(Linked::circulating) : Optional.empty(),
+            turning ? linked.map(Linked::layersWatt).orElse(OptionalDouble.empty()) : NONE,
             s.radPerSecond());
     thermal = balance();
   }
@@ -158,7 +162,9 @@ final class HeatStage {
         when(currentKnown, losses.copperWatt(t)),
         when(eddy, losses.eddyWatt(t)),
         when(rippleKnown, losses.rippleWatt(t)),
-        when(losses.circulating().isPresent(), losses.circulatingWatt(t)),
+        when(
+            losses.circulating().isPresent() || losses.layersWatt().isPresent(),
+            losses.circulatingWatt(t)),
         eddy ? byOrder(losses.eddy().get(), t) : List.of(),
         eddy ? byLayer(losses.eddy().get(), t) : List.of());
   }
@@ -223,7 +229,8 @@ final class HeatStage {
       if (!(w > 0) || linked.isEmpty()) {
         return 0;
       }
-      double round = linked.get().circulating().map(c -> c.watt(w, t)).orElse(0.0);
+      double layers = linked.get().layersWatt().orElse(0) * w * w / Copper.factor(t);
+      double round = linked.get().circulating().map(c -> c.watt(w, t)).orElse(0.0) + layers;
       return (linked.get().eddy().watt(w, t) + round) / w;
     };
   }

@@ -5,6 +5,8 @@ import etchloom.electric.machine.emf.Coupling;
 import etchloom.electric.machine.emf.FluxSeries;
 import etchloom.electric.machine.heat.CirculatingCurrent;
 import etchloom.electric.machine.heat.EddyLoss;
+import etchloom.electric.machine.heat.LayerSharing;
+import etchloom.electric.resistance.Copper;
 import etchloom.spec.Spec;
 import etchloom.winding.StarOfSlots;
 import java.util.ArrayList;
@@ -17,6 +19,7 @@ import java.util.OptionalDouble;
  *
  * @param fluxWeber peak of one winding's fundamental linkage: of the part of the phases that turns
  *     with the rotor in the order of the marks
+ * @param sharing among layers side by side
  * @param counterClockwise whether that part, and not its mirror, is the larger one
  */
 record Linked(
@@ -24,7 +27,8 @@ record Linked(
     double fluxWeber,
     boolean counterClockwise,
     EddyLoss eddy,
-    Optional<CirculatingCurrent> circulating) {
+    Optional<CirculatingCurrent> circulating,
+    Optional<LayerSharing> sharing) {
   private static final int SAMPLES = 120;
   private static final int LEAST_HARMONICS = 7;
   private static final double FAINT = 1e-5;
@@ -39,7 +43,15 @@ record Linked(
         Math.max(forward, backward) / coupling.polePairs(),
         forward >= backward,
         EddyLoss.of(s.artwork(), coupling),
-        delta ? Optional.of(new CirculatingCurrent(s.circuit(), phases)) : Optional.empty());
+        delta ? Optional.of(new CirculatingCurrent(s.circuit(), phases)) : Optional.empty(),
+        LayerSharing.of(s.artwork()));
+  }
+
+  /** W at 20 °C for each (rad/s)² that currents among layers side by side lose. */
+  OptionalDouble layersWatt() {
+    return sharing.isPresent()
+        ? OptionalDouble.of(sharing.get().watt(coupling, 1, Copper.REFERENCE_C))
+        : OptionalDouble.empty();
   }
 
   /** Peak of the symmetrical component of the fundamental, V·s/rad (textbook, Fortescue). */

@@ -2,7 +2,9 @@ package etchloom.electric.machine;
 
 import etchloom.artwork.Artwork;
 import etchloom.electric.field.MagnetArray;
+import etchloom.electric.machine.emf.Coupling;
 import etchloom.electric.machine.emf.HeightSensitivity;
+import etchloom.electric.machine.heat.LayerSharing;
 import etchloom.electric.machine.spread.Spread;
 import etchloom.electric.machine.spread.SpreadFigures;
 import etchloom.electric.resistance.ResistanceFigures;
@@ -10,11 +12,16 @@ import etchloom.spec.FabRules;
 import etchloom.spec.Spec;
 import etchloom.units.Numbers;
 import etchloom.winding.Winding;
+import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
+import java.util.OptionalDouble;
 
 /** Works out all figures of the machine, in the order in which they need each other. */
 public final class Machine {
+  /** Departures from an even share below this are no cause for a word. */
+  private static final double UNEVEN = 0.1;
+
   private Machine() {}
 
   /**
@@ -47,6 +54,7 @@ public final class Machine {
     RotorFigures rotor = RotorStage.figures(s, magnets);
     cautions(s, linked, spread);
     return new MachineFigures(
+        sharing(s, linked, heat),
         emf,
         linked.map(l -> l.torque(s.circuit())),
         loss,
@@ -58,6 +66,61 @@ public final class Machine {
         rotor,
         s.ledger().cautions(),
         s.ledger().absent());
+  }
+
+  private static Optional<SharingFigures> sharing(
+      Setting s, Optional<Linked> linked, HeatStage heat) {
+    Optional<LayerSharing> sharing = LayerSharing.of(s.artwork());
+    if (sharing.isEmpty()) {
+      return Optional.empty();
+    }
+    Optional<Coupling> coupling = linked.map(Linked::coupling);
+    boolean turning = coupling.isPresent() && s.duty().speedRadPerSecond().isPresent();
+    double hot = heat.thermal().hotC();
+    List<SharingFigures.Layer> layers = new ArrayList<>();
+    for (List<LayerSharing.Layer> group : sharing.get().groups()) {
+      for (LayerSharing.Layer l : group) {
+        layers.add(
+            new SharingFigures.Layer(
+                l.layer(),
+                l.share(),
+                l.evenShare(),
+                coupling.isPresent()
+                    ? OptionalDouble.of(sharing.get().linkageRatio(coupling.get(), l))
+                    : OptionalDouble.empty(),
+                turning
+                    ? OptionalDouble.of(
+                        sharing.get().ampereRms(coupling.get(), l, s.radPerSecond(), hot))
+                    : OptionalDouble.empty()));
+      }
+    }
+    OptionalDouble most =
+        turning
+            ? OptionalDouble.of(sharing.get().mostAmpereRms(coupling.get(), s.radPerSecond(), hot))
+            : OptionalDouble.empty();
+    double over = sharing.get().worstOverload();
+    if (over > UNEVEN) {
+      s.ledger()
+          .caution(
+              "uneven-layers",
+              "the layers side by side do not share evenly: the most loaded one carries "
+                  + Numbers.fixed(100 * over, 0)
+                  + " % more than its even share");
+    }
+    most.ifPresent(
+        a -> {
+          double ampere = s.duty().currentAmpereRms().orElse(0);
+          if (ampere > 0 && a > UNEVEN * ampere / Math.max(1, layers.size() / 2.0)) {
+            s.ledger()
+                .caution(
+                    "circulating-layers",
+                    "the magnets' field is not the same on all layers side by side: at speed it"
+                        + " drives up to "
+                        + Numbers.engineering(a, "A", 3)
+                        + " round through them, whatever the load");
+          }
+        });
+    return Optional.of(new SharingFigures(layers, over, most));
   }
 
   private static void cautions(Setting s, Optional<Linked> linked, SpreadFigures spread) {

@@ -9,6 +9,7 @@ import java.util.Optional;
  * would bring it; nothing is nought, infinite or no number for lack of input.
  */
 public record MachineFigures(
+    Optional<SharingFigures> sharing,
     Optional<EmfFigures> emf,
     Optional<TorqueFigures> torque,
     LossFigures loss,

@@ -3,6 +3,7 @@ package etchloom.electric.machine;
 import etchloom.artwork.Artwork;
 import etchloom.electric.machine.Ledger.Given;
 import etchloom.electric.machine.circuit.Circuit;
+import etchloom.electric.machine.drive.Ripple;
 import etchloom.electric.resistance.ResistanceFigures;
 import etchloom.spec.FabRules;
 import etchloom.spec.Spec;
@@ -49,6 +50,12 @@ record Setting(
             spec.rotor().poles() / 2,
             Circuit.windingOhm(connection, resistance.meanTerminalOhm()),
             inductance.synchronousHenry(),
+            Ripple.henry(
+                winding.phases(),
+                connection,
+                inductance.phaseSelfHenry(),
+                inductance.synchronousHenry(),
+                inductance.terminalHenry()),
             inductance.phaseSelfHenry() + mutuals);
     Spec.Duty duty = spec.duty().orElse(NO_DUTY);
     return new Setting(artwork, spec, fab, winding, circuit, duty, new Ledger());

@@ -21,7 +21,7 @@ public final class Chains {
   public static Currents coil(Artwork artwork, Coil coil, double tempC) {
     return run(
         artwork,
-        new TreeSet<>(coil.conductors()),
+        new TreeSet<>(coil.copper()),
         coil.startJoint(),
         coil.finishJoint(),
         "coil " + coil.number(),

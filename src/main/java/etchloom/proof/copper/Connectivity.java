@@ -12,6 +12,13 @@ import java.util.List;
  * <p>A plated hole joins every island that its finished circle touches on the layers it passes.
  */
 public final class Connectivity {
+  /**
+   * An enclosed gap no larger is no gap: it is 3 µm square, no process etches it, and rounding to
+   * the nanometre leaves some like it where tracks touch in a tangent. A short between turns
+   * encloses a gap at least as wide as the space and as long as the way round to it.
+   */
+  private static final double SLIVER_MM2 = 1e-5;
+
   private final List<Figure> layers;
   private final List<Hole> plated;
   private final int[] offset;
@@ -96,7 +103,7 @@ public final class Connectivity {
     for (int l = 1; l <= layers.size(); l++) {
       Figure f = layers.get(l - 1);
       for (int r = 0; r < f.rings(); r++) {
-        if (f.hole(r) && !drilled.covers(f, r, l)) {
+        if (f.hole(r) && -f.ringAreaMm2(r) > SLIVER_MM2 && !drilled.covers(f, r, l)) {
           loops.add(new Loop(l, f.island(r), r, -f.ringAreaMm2(r), Fold.place(f, r)));
         }
       }

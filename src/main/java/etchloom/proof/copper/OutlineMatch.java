@@ -1,17 +1,17 @@
 package etchloom.proof.copper;
 
 import etchloom.geometry.Path;
-import etchloom.proof.plane.EdgeCloud;
 import etchloom.proof.plane.EdgeSet;
 import etchloom.proof.plane.Figure;
 import etchloom.proof.plane.Overlay;
+import etchloom.proof.plane.RingWalk;
 import java.util.List;
 
 /**
  * Whether closed outlines bound a figure: outer ones counter-clockwise, holes clockwise.
  *
- * <p>Equal when every corner and edge of the one lies within {@link #NEAR_MM} of the other, and the
- * areas agree. Only where that is not so are the two laid over each other.
+ * <p>Equal when both run along each other within {@link #NEAR_MM}, and the areas agree. Only where
+ * that is not so are the two laid over each other.
  *
  * @param areaDifferenceMm2 area that only one of the two covers; where they follow each other, the
  *     difference of their areas
@@ -40,8 +40,7 @@ public record OutlineMatch(double areaDifferenceMm2, List<CopperDifference.Patch
     }
     double difference = Math.abs(area - copper.areaMm2());
     boolean same =
-        difference <= MEAN_MM * length
-            && EdgeCloud.of(copper).follows(new EdgeCloud(rings), NEAR_MM * RingPen.NM);
+        difference <= MEAN_MM * length && RingWalk.follow(rings, copper, NEAR_MM * RingPen.NM);
     if (same) {
       return new OutlineMatch(difference, List.of());
     }

@@ -3,8 +3,6 @@ package etchloom.proof.ohm;
 import etchloom.geometry.Point;
 import etchloom.proof.copper.Connectivity;
 import etchloom.proof.copper.Hole;
-import etchloom.proof.image.ApertureShape;
-import etchloom.proof.image.DrawnObject;
 import etchloom.proof.image.LayerImage;
 import etchloom.units.Constants;
 import java.util.ArrayList;
@@ -28,42 +26,53 @@ public final class FileResistance {
   public record TerminalOhm(String from, String to, double ohm) {}
 
   /**
-   * Each pair of terminals that copper joins, in the order given.
-   *
+   * @param pairs each pair of terminals that copper joins, in the order given
+   * @param error share by which they may be off where copper is not drawn in strokes; 0 where all
+   *     is
+   */
+  public record Ohms(List<TerminalOhm> pairs, double error) {
+    public Ohms {
+      pairs = List.copyOf(pairs);
+    }
+  }
+
+  /**
    * @param copper the images from L1 down
    * @param board what they were rebuilt to
    */
-  public static List<TerminalOhm> between(
+  public static Ohms between(
       List<LayerImage> copper, Connectivity board, CopperBuild build, List<Terminal> terminals) {
     OhmNetwork net = new OhmNetwork();
     int[][] walls = new int[board.plated().size()][copper.size()];
     int[] ends = new int[terminals.size()];
+    double error = 0;
     for (int l = 1; l <= copper.size(); l++) {
-      CentreLines lines = new CentreLines(net, build.layers().get(l - 1));
-      for (DrawnObject o : copper.get(l - 1).objects()) {
-        lay(o, lines);
-      }
+      LayerOhms layer =
+          new LayerOhms(net, copper.get(l - 1), board.copper(l), build.layers().get(l - 1));
       for (int h = 0; h < walls.length; h++) {
         Hole hole = board.plated().get(h);
         if (hole.through(l)) {
-          walls[h][l - 1] = lines.disc(hole.at(), hole.diameterMm());
+          walls[h][l - 1] = layer.contact(hole.at(), hole.diameterMm());
         }
       }
       for (int t = 0; t < ends.length; t++) {
         if (terminals.get(t).layer() == l) {
-          ends[t] = lines.disc(terminals.get(t).at(), 0);
+          ends[t] = layer.contact(terminals.get(t).at(), 0);
         }
       }
-      lines.connect();
+      error = Math.max(error, layer.connect());
     }
     for (int h = 0; h < walls.length; h++) {
       barrel(net, board.plated().get(h), walls[h], build);
     }
-    List<OptionalDouble> ohm = net.between(ends);
+    return new Ohms(pairs(terminals, net.between(ends)), error);
+  }
+
+  private static List<TerminalOhm> pairs(List<Terminal> terminals, List<OptionalDouble> ohm) {
     List<TerminalOhm> out = new ArrayList<>();
     int k = 0;
-    for (int i = 0; i < ends.length; i++) {
-      for (int j = i + 1; j < ends.length; j++) {
+    for (int i = 0; i < terminals.size(); i++) {
+      for (int j = i + 1; j < terminals.size(); j++) {
         OptionalDouble r = ohm.get(k++);
         if (r.isPresent()) {
           out.add(
@@ -72,14 +81,6 @@ public final class FileResistance {
       }
     }
     return out;
-  }
-
-  private static void lay(DrawnObject o, CentreLines lines) {
-    if (o instanceof DrawnObject.Stroke s) {
-      lines.stroke(s.path(), s.widthMm());
-    } else if (o instanceof DrawnObject.Flash f && f.shape() instanceof ApertureShape.Circle c) {
-      lines.disc(f.at(), c.diameterMm());
-    }
   }
 
   /** A tube of plating outside the finished hole, from each layer's middle to the next one's. */

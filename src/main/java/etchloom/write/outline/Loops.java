@@ -1,7 +1,6 @@
 package etchloom.write.outline;
 
 import etchloom.geometry.Arc;
-import etchloom.geometry.Grid;
 import etchloom.geometry.Line;
 import etchloom.geometry.Path;
 import etchloom.geometry.Point;
@@ -9,9 +8,7 @@ import etchloom.geometry.Segment;
 import java.util.ArrayList;
 import java.util.Arrays;
 import java.util.BitSet;
-import java.util.HashMap;
 import java.util.List;
-import java.util.Map;
 import java.util.Optional;
 
 /** Joins edges end to end into closed paths, in the order in which they came. */
@@ -19,32 +16,56 @@ final class Loops {
   /** Longest stretch that a tangent leaves in doubt, mm: a few sqrt(8 r · 20 nm). */
   private static final double FLAT_MM = 0.03;
 
-  private record Cell(long x, long y) {}
-
-  private final Map<Cell, List<Integer>> cells = new HashMap<>();
-  private final List<Point> corners = new ArrayList<>();
-  private final List<List<Integer>> leaving = new ArrayList<>();
+  private final Corners corners = new Corners();
   private final List<Edge> edges = new ArrayList<>();
-  private final List<Integer> ends = new ArrayList<>();
-  private final BitSet dropped = new BitSet();
-  private Point lastEnd = new Point(Double.NaN, Double.NaN);
+
+  /** By edge: its corners, and the edge that came before it from the same first corner, or -1. */
+  private int[] from = new int[256];
+
+  private int[] to = new int[256];
+  private int[] before = new int[256];
+
+  /** By corner: the edge that came last of those that leave it, or -1. */
+  private int[] leaving = new int[256];
+
+  private final BitSet used = new BitSet();
 
   void add(Edge e) {
-    int from = e.start.equals(lastEnd) ? ends.get(ends.size() - 1) : corner(e.start);
-    int to = corner(e.end);
-    if (from == to || known(from, to, e)) {
+    int n = edges.size();
+    boolean goesOn = n > 0 && e.start.equals(edges.get(n - 1).end);
+    int first = goesOn ? to[n - 1] : corner(e.start);
+    int second = corner(e.end);
+    if (first == second || known(first, second, e)) {
       return;
     }
-    leaving.get(from).add(edges.size());
+    if (n == from.length) {
+      from = Arrays.copyOf(from, 2 * n);
+      to = Arrays.copyOf(to, 2 * n);
+      before = Arrays.copyOf(before, 2 * n);
+    }
+    from[n] = first;
+    to[n] = second;
+    before[n] = leaving[first];
+    leaving[first] = n;
     edges.add(e);
-    ends.add(to);
-    lastEnd = e.end;
+  }
+
+  private int corner(Point p) {
+    int known = corners.count();
+    int c = corners.at(p);
+    if (c == leaving.length) {
+      leaving = Arrays.copyOf(leaving, 2 * c);
+    }
+    if (c == known) {
+      leaving[c] = -1;
+    }
+    return c;
   }
 
   /** Two edges between the same corners by the same way are one. */
-  private boolean known(int from, int to, Edge e) {
-    for (int i : leaving.get(from)) {
-      if (ends.get(i) == to && Edge.same(edges.get(i).middle(), e.middle())) {
+  private boolean known(int first, int second, Edge e) {
+    for (int i = leaving[first]; i >= 0; i = before[i]) {
+      if (to[i] == second && Edge.same(edges.get(i).middle(), e.middle())) {
         return true;
       }
     }
@@ -59,26 +80,21 @@ final class Loops {
    * @return whether every corner then has as many edges leaving as arriving
    */
   private boolean balance() {
-    int[] surplus = new int[corners.size()];
-    for (int i = 0; i < surplus.length; i++) {
-      surplus[i] = leaving.get(i).size();
+    int[] surplus = new int[corners.count()];
+    for (int e = 0; e < edges.size(); e++) {
+      surplus[from[e]]++;
+      surplus[to[e]]--;
     }
-    for (int to : ends) {
-      surplus[to]--;
-    }
-    for (int from = 0; from < surplus.length; from++) {
-      for (int k = leaving.get(from).size() - 1; k >= 0 && surplus[from] > 0; k--) {
-        int e = leaving.get(from).get(k);
-        int to = ends.get(e);
-        if (surplus[to] < 0 && Edge.apart(corners.get(from), corners.get(to)) <= FLAT_MM) {
-          leaving.get(from).remove(k);
-          dropped.set(e);
-          surplus[from]--;
-          surplus[to]++;
-        }
+    for (int e = 0; e < edges.size(); e++) {
+      if (surplus[from[e]] > 0
+          && surplus[to[e]] < 0
+          && Edge.apart(corners.point(from[e]), corners.point(to[e])) <= FLAT_MM) {
+        used.set(e);
+        surplus[from[e]]--;
+        surplus[to[e]]++;
       }
     }
-    return Arrays.stream(surplus).allMatch(b -> b == 0);
+    return Arrays.stream(surplus).allMatch(s -> s == 0);
   }
 
   /** The closed paths; empty where edges are left over. */
@@ -86,22 +102,10 @@ final class Loops {
     if (!balance()) {
       return Optional.empty();
     }
-    BitSet used = dropped;
-    int[] next = new int[corners.size()];
     List<Path> out = new ArrayList<>();
     for (int first = 0; first < edges.size(); first++) {
       if (!used.get(first)) {
-        List<Segment> loop = new ArrayList<>();
-        int start = corner(edges.get(first).start);
-        int at = start;
-        int e = first;
-        do {
-          used.set(e);
-          int to = ends.get(e);
-          segment(edges.get(e), corners.get(at), corners.get(to), loop);
-          at = to;
-          e = at == start ? -1 : leave(at, used, next);
-        } while (e >= 0);
+        List<Segment> loop = loop(first);
         if (loop.size() > 1) {
           out.add(new Path(loop));
         }
@@ -110,36 +114,52 @@ final class Loops {
     return Optional.of(out);
   }
 
-  private int leave(int corner, BitSet used, int[] next) {
-    List<Integer> list = leaving.get(corner);
-    while (next[corner] < list.size() && used.get(list.get(next[corner]))) {
-      next[corner]++;
-    }
-    return list.get(next[corner]);
-  }
-
-  private static void segment(Edge e, Point from, Point to, List<Segment> out) {
-    if (!from.equals(to)) {
-      out.add(e.isArc() ? new Arc(from, to, e.centre, e.turn > 0) : new Line(from, to));
-    }
-  }
-
-  /** The number of the corner at a point; points within {@link Edge#SAME_MM} share one. */
-  private int corner(Point p) {
-    long cx = (long) Math.floor(p.x() / Edge.SAME_MM);
-    long cy = (long) Math.floor(p.y() / Edge.SAME_MM);
-    for (long x = cx - 1; x <= cx + 1; x++) {
-      for (long y = cy - 1; y <= cy + 1; y++) {
-        for (int i : cells.getOrDefault(new Cell(x, y), List.of())) {
-          if (Edge.same(corners.get(i), p)) {
-            return i;
-          }
-        }
+  private List<Segment> loop(int first) {
+    List<Segment> loop = new ArrayList<>();
+    int e = first;
+    while (true) {
+      used.set(e);
+      segment(e, loop);
+      int at = to[e];
+      if (at == from[first]) {
+        return loop;
+      }
+      e = leaving[at];
+      while (used.get(e)) {
+        e = before[e];
       }
     }
-    cells.computeIfAbsent(new Cell(cx, cy), k -> new ArrayList<>(1)).add(corners.size());
-    corners.add(Grid.snap(p));
-    leaving.add(new ArrayList<>(1));
-    return corners.size() - 1;
+  }
+
+  /** An arc that goes on along the circle of the one before it is made one with it. */
+  private void segment(int edge, List<Segment> out) {
+    Edge e = edges.get(edge);
+    Point start = corners.point(from[edge]);
+    Point end = corners.point(to[edge]);
+    if (start.equals(end)) {
+      return;
+    }
+    if (!e.isArc()) {
+      out.add(new Line(start, end));
+      return;
+    }
+    Arc arc = new Arc(start, end, e.centre, e.turn > 0);
+    if (!out.isEmpty() && out.get(out.size() - 1) instanceof Arc last && oneCircle(last, arc)) {
+      out.set(out.size() - 1, new Arc(last.start(), end, e.centre, e.turn > 0));
+    } else {
+      out.add(arc);
+    }
+  }
+
+  /** Whether two arcs lie on one circle and make no more than half of it together. */
+  private static boolean oneCircle(Arc a, Arc b) {
+    if (!a.centre().equals(b.centre()) || a.counterClockwise() != b.counterClockwise()) {
+      return false;
+    }
+    Point u = a.start().minus(a.centre());
+    Point v = b.end().minus(a.centre());
+    double side = u.cross(v);
+    // Each is at most half a turn; together too, exactly when the end is still on the near side.
+    return a.counterClockwise() ? side > 0 : side < 0;
   }
 }

@@ -152,12 +152,12 @@ class PairSumTest {
     assertEquals(expected, Bodies.direct(Bodies.circle(20, 0.01, 0), sections), 2e-4 * expected);
   }
 
-  /** Flattening: with four times the chord error the circle's inductance hardly moves. */
+  /** Flattening: a small ring of 32 chords, and one of 142. */
   @Test
   void chordErrorHardlyMatters() {
     List<CrossSection> sections = List.of(new CrossSection(0.2, 0.035, 0));
     double fine = Bodies.direct(Bodies.circle(2, 0.0005, 0), sections);
-    assertEquals(fine, Bodies.direct(Bodies.circle(2, 0.01, 0), sections), 3e-4 * fine);
+    assertEquals(fine, Bodies.direct(Bodies.circle(2, 0.01, 0), sections), 5e-4 * fine);
   }
 
   /** Circular 74 of the Bureau of Standards, Terman 1943: square loop of tape, 40 mm, 140.36 nH. */

@@ -50,7 +50,7 @@ public final class CopperBenchmark {
     for (int c = 0; c < coils; c++) {
       double axis = 2 * Math.PI * c / coils;
       List<Segment> path = spiral(turns, pitch, inner, outer, alpha);
-      List<Segment> turned = path.stream().map(s -> (Segment) s.rotated(axis)).toList();
+      List<Segment> turned = path.stream().map(s -> s.rotated(axis)).toList();
       ApertureShape pen = new ApertureShape.Circle(0.2, 0);
       if (chains) {
         out.add(new DrawnObject.Stroke(joined(turned), pen, true, Attributes.NONE, 1));

@@ -12,6 +12,8 @@ import etchloom.spec.Spec.Connection;
  *
  * @param windingOhm20 one winding with its leads, at 20 °C
  * @param windingHenry synchronous: self less mutual
+ * @param rippleHenry what the pulses of a drive meet in one winding, see {@link
+ *     etchloom.electric.machine.drive.Ripple}
  * @param zeroHenry what a current equal in all windings meets: self plus all mutuals
  */
 public record Circuit(
@@ -20,7 +22,20 @@ public record Circuit(
     int polePairs,
     double windingOhm20,
     double windingHenry,
+    double rippleHenry,
     double zeroHenry) {
+
+  /** A machine whose pulses meet the synchronous inductance, as with three phases in star. */
+  public Circuit(
+      int phases,
+      Connection connection,
+      int polePairs,
+      double windingOhm20,
+      double windingHenry,
+      double zeroHenry) {
+    this(phases, connection, polePairs, windingOhm20, windingHenry, windingHenry, zeroHenry);
+  }
+
   public Circuit {
     if (!(windingOhm20 > 0 && windingOhm20 < Double.POSITIVE_INFINITY)) {
       throw new IllegalArgumentException("a winding of " + windingOhm20 + " ohm");
@@ -54,6 +69,10 @@ public record Circuit(
     return delta() ? windingHenry / 3 : windingHenry;
   }
 
+  public double lineRippleHenry() {
+    return delta() ? rippleHenry / 3 : rippleHenry;
+  }
+
   /** Current in a terminal for a current in a winding. */
   public double lineAmpere(double windingAmpere) {
     return delta() ? Math.sqrt(3) * windingAmpere : windingAmpere;
@@ -75,6 +94,21 @@ public record Circuit(
     return switch (phases) {
       case 2 -> Math.sqrt(2);
       case 5 -> 2 * Math.sin(Math.PI / 5);
+      default -> Math.sqrt(3);
+    };
+  }
+
+  /**
+   * The greatest voltage between any two terminals that a star point joins over that of a winding:
+   * with five phases not neighbours but phases 144° apart, {@code 2 cos π/10}.
+   */
+  public static double greatestShare(int phases, Connection connection) {
+    if (connection != Connection.STAR) {
+      return 1;
+    }
+    return switch (phases) {
+      case 2 -> Math.sqrt(2);
+      case 5 -> 2 * Math.cos(Math.PI / 10);
       default -> Math.sqrt(3);
     };
   }

@@ -2,13 +2,18 @@ package etchloom.electric.machine.drive;
 
 import etchloom.electric.machine.circuit.Circuit;
 import etchloom.spec.Spec.Connection;
-import java.util.OptionalDouble;
 
 /**
- * The current ripple of pulse-width modulation in a terminal, peak to peak, at its worst over the
- * modulation, with centred pulses: {@code V / (6 L f)} for a star of three and for a delta by its
- * star of L/3, {@code V / (8 L f)} for open windings on full bridges with unipolar pulses
- * (textbook; the first replayed by simulation elsewhere). Others are not known here.
+ * The current ripple of pulse-width modulation in a phase's terminal, peak to peak, at its worst
+ * over the modulation, with centred pulses, {@code V / (k L f)}.
+ *
+ * <p>k is 6 for a star of three, for each of two such stars, and for a delta by its star of L/3; 8
+ * for open windings on full bridges with unipolar pulses (textbook); 4 for two phases whose star
+ * point is on a third leg; 5(√5 − 1) for a star of five. The tests replay the stars pulse by pulse.
+ *
+ * <p>L is what the pulses meet, {@link Circuit#rippleHenry()}: the synchronous inductance in a star
+ * or delta of three, of two stars each by itself; elsewhere the pulses of the phases are not in
+ * step, and the lesser of self and synchronous inductance is taken.
  */
 public final class Ripple {
   /** Ripple that is commonly held small, peak to peak over the peak of the duty's current. */
@@ -16,24 +21,29 @@ public final class Ripple {
 
   private Ripple() {}
 
-  private static OptionalDouble divisor(Circuit c) {
+  private static double divisor(Circuit c) {
     if (c.connection() == Connection.OPEN) {
-      return OptionalDouble.of(8);
+      return 8;
     }
-    return c.phases() == 3 || c.phases() == 6 ? OptionalDouble.of(6) : OptionalDouble.empty();
+    return switch (c.phases()) {
+      case 2 -> 4;
+      case 5 -> 5 * (Math.sqrt(5) - 1);
+      default -> 6;
+    };
   }
 
-  /** Whether there is a formula for this connection. */
-  public static boolean known(Circuit c) {
-    return divisor(c).isPresent();
+  /** What the pulses meet in one winding, see above. Any unit. */
+  public static double henry(
+      int phases, Connection connection, double self, double synchronous, double terminal) {
+    if (phases == 6 && connection == Connection.STAR) {
+      return terminal / 2;
+    }
+    return phases == 3 && connection != Connection.OPEN ? synchronous : Math.min(self, synchronous);
   }
 
-  /** A, peak to peak; empty where no formula is known for the connection. */
-  public static OptionalDouble amperePeakToPeak(Circuit c, double busVolt, double switchingHertz) {
-    OptionalDouble k = divisor(c);
-    return k.isEmpty()
-        ? k
-        : OptionalDouble.of(busVolt / (k.getAsDouble() * c.lineHenry() * switchingHertz));
+  /** A, peak to peak. */
+  public static double amperePeakToPeak(Circuit c, double busVolt, double switchingHertz) {
+    return busVolt / (divisor(c) * c.lineRippleHenry() * switchingHertz);
   }
 
   /**
@@ -42,15 +52,11 @@ public final class Ripple {
    *
    * @param lineAmpereRms the duty's current in a terminal
    */
-  public static OptionalDouble seriesHenry(
+  public static double seriesHenry(
       Circuit c, double busVolt, double switchingHertz, double lineAmpereRms) {
-    OptionalDouble k = divisor(c);
-    if (k.isEmpty()) {
-      return k;
-    }
     double aim = AIM * Math.sqrt(2) * lineAmpereRms;
-    double whole = busVolt / (k.getAsDouble() * aim * switchingHertz);
-    return OptionalDouble.of(Math.max(0, whole - c.lineHenry()));
+    double whole = busVolt / (divisor(c) * aim * switchingHertz);
+    return Math.max(0, whole - c.lineRippleHenry());
   }
 
   /** What a ripple adds to the square of a current's rms: a triangle's, Δ²/12. */

@@ -4,6 +4,9 @@ import etchloom.artwork.Artwork;
 import etchloom.artwork.Conductor;
 import etchloom.electric.field.MagnetArray;
 import etchloom.electric.field.RotorField;
+import etchloom.electric.resistance.Chains;
+import etchloom.electric.resistance.Copper;
+import etchloom.electric.resistance.Currents;
 import etchloom.spec.Spec;
 import java.util.List;
 
@@ -20,6 +23,7 @@ public final class HeightSensitivity {
 
   private final Artwork artwork;
   private final Coupling now;
+  private final Currents shares;
   private final RadialReach reach;
   private double re;
   private double im;
@@ -27,12 +31,18 @@ public final class HeightSensitivity {
   private HeightSensitivity(Artwork artwork, Coupling now) {
     this.artwork = artwork;
     this.now = now;
+    shares = Chains.coil(artwork, artwork.coils().get(0), Copper.REFERENCE_C);
     reach =
         RadialReach.of(spirals().stream().map(id -> artwork.conductors().get(id).path()).toList());
     for (int id : spirals()) {
-      re += now.track(id).re(0);
-      im += now.track(id).im(0);
+      re += share(id) * now.track(id).re(0);
+      im += share(id) * now.track(id).im(0);
     }
+  }
+
+  /** What the spiral carries of the coil's current. */
+  private double share(int id) {
+    return shares.ofConductor(id);
   }
 
   private List<Integer> spirals() {
@@ -83,7 +93,7 @@ public final class HeightSensitivity {
       Conductor c = artwork.conductors().get(id);
       TrackIntegral t = integrator.along(c.layer(), c.path());
       FluxSeries was = now.track(id);
-      double along = (t.re(0) - was.re(0)) * re + (t.im(0) - was.im(0)) * im;
+      double along = share(id) * ((t.re(0) - was.re(0)) * re + (t.im(0) - was.im(0)) * im);
       out[c.layer() - 1] += along / (re * re + im * im) / STEP_MM;
     }
     return out;

@@ -91,6 +91,9 @@ final class PhaseCopper {
     if (terminal.isPresent()) {
       return terminal.get().id();
     }
+    if (artwork.joints().get(own).kind() == Joint.Kind.DROP) {
+      return own;
+    }
     return reached.stream()
         .filter(id -> artwork.joints().get(id).kind() == Joint.Kind.DROP)
         .findFirst()

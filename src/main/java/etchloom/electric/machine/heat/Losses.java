@@ -1,7 +1,9 @@
 package etchloom.electric.machine.heat;
 
 import etchloom.electric.machine.circuit.Circuit;
+import etchloom.electric.resistance.Copper;
 import java.util.Optional;
+import java.util.OptionalDouble;
 import java.util.function.DoubleUnaryOperator;
 
 /**
@@ -10,6 +12,7 @@ import java.util.function.DoubleUnaryOperator;
  * @param windingAmpereRms current of one winding at a temperature, without ripple; a generator's
  *     falls as its copper warms
  * @param rippleSquare what ripple adds to the square of the current's rms in a terminal, A²
+ * @param layersWatt at 20 °C for each (rad/s)², of currents among layers side by side
  * @param radPerSecond of the shaft
  */
 public record Losses(
@@ -18,6 +21,7 @@ public record Losses(
     double rippleSquare,
     Optional<EddyLoss> eddy,
     Optional<CirculatingCurrent> circulating,
+    OptionalDouble layersWatt,
     double radPerSecond) {
 
   /** I²R of the wanted current, W. */
@@ -35,7 +39,8 @@ public record Losses(
   }
 
   public double circulatingWatt(double tempC) {
-    return circulating.map(c -> c.watt(radPerSecond, tempC)).orElse(0.0);
+    double layers = layersWatt.orElse(0) * radPerSecond * radPerSecond / Copper.factor(tempC);
+    return circulating.map(c -> c.watt(radPerSecond, tempC)).orElse(0.0) + layers;
   }
 
   /** All but the wanted current's own. */

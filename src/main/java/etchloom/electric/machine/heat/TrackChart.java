@@ -2,9 +2,12 @@ package etchloom.electric.machine.heat;
 
 import etchloom.artwork.Artwork;
 import etchloom.artwork.Conductor;
+import etchloom.artwork.Feature;
 import etchloom.artwork.Stackup;
 import etchloom.electric.resistance.Section;
 import etchloom.units.Constants;
+import java.util.Map;
+import java.util.TreeMap;
 
 /**
  * The current of the IPC-2221 chart for one track standing alone: {@code I = k ΔT^0.44 A^0.725}, A
@@ -25,14 +28,23 @@ public final class TrackChart {
     return k * Math.pow(riseKelvin, 0.44) * Math.pow(areaMm2 / MIL2, 0.725);
   }
 
-  /** A for the narrowest tracks of a board, on the layer where they carry least. */
+  /**
+   * A of a winding for the narrowest tracks of a board, on the layer where they carry least; of
+   * layers side by side each carries its share only.
+   */
   public static double narrowest(Artwork artwork, double riseKelvin) {
+    Map<Integer, Double> shareOf = new TreeMap<>();
+    LayerSharing.of(artwork)
+        .ifPresent(s -> s.groups().forEach(g -> g.forEach(l -> shareOf.put(l.layer(), l.share()))));
     double width = Double.POSITIVE_INFINITY;
     double least = Double.POSITIVE_INFINITY;
     for (Conductor c : artwork.conductors()) {
       Stackup.Copper copper = artwork.stackup().copper().get(c.layer() - 1);
       boolean outer = c.layer() == 1 || c.layer() == artwork.layers();
       double a = ampere(Section.trackAreaMm2(c.widthMm(), copper), riseKelvin, outer);
+      if (c.what().kind() == Feature.Kind.SPIRAL) {
+        a /= shareOf.getOrDefault(c.layer(), 1.0);
+      }
       if (c.widthMm() < width) {
         width = c.widthMm();
         least = a;

@@ -8,6 +8,7 @@ import etchloom.electric.machine.emf.FluxSeries;
 import etchloom.spec.Spec.Connection;
 import java.util.List;
 import java.util.Optional;
+import java.util.OptionalDouble;
 import org.junit.jupiter.api.Test;
 
 class HeatTest {
@@ -46,7 +47,8 @@ class HeatTest {
 
   private static Losses losses(double ampere) {
     Circuit c = new Circuit(3, Connection.STAR, 6, 0.5, 1e-3, 1e-3);
-    return new Losses(c, t -> ampere, 0, Optional.empty(), Optional.empty(), 0);
+    return new Losses(
+        c, t -> ampere, 0, Optional.empty(), Optional.empty(), OptionalDouble.empty(), 0);
   }
 
   /** Ripple in a delta's line: three windings of R/3 as a star. */
@@ -56,9 +58,19 @@ class HeatTest {
     Circuit delta = new Circuit(3, Connection.DELTA, 6, 0.5, 1e-3, 1e-3);
     double square = 2 * 2 / 12.0;
     double inStar =
-        new Losses(star, t -> 0, square, Optional.empty(), Optional.empty(), 0).rippleWatt(20);
+        new Losses(
+                star, t -> 0, square, Optional.empty(), Optional.empty(), OptionalDouble.empty(), 0)
+            .rippleWatt(20);
     double inDelta =
-        new Losses(delta, t -> 0, square, Optional.empty(), Optional.empty(), 0).rippleWatt(20);
+        new Losses(
+                delta,
+                t -> 0,
+                square,
+                Optional.empty(),
+                Optional.empty(),
+                OptionalDouble.empty(),
+                0)
+            .rippleWatt(20);
     assertEquals(3 * square * 0.5, inStar, 1e-12);
     assertEquals(inStar / 3, inDelta, 1e-12);
   }
