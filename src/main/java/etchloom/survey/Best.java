@@ -1,5 +1,6 @@
 package etchloom.survey;
 
+import etchloom.report.JsonTree;
 import etchloom.units.Numbers;
 import java.util.ArrayList;
 import java.util.List;

@@ -26,6 +26,8 @@ final class Search {
   private static final double STEP = 0.08;
   private static final double LEAST_STEP = 5e-4;
 
+  private static final int[] PARTS = {1, -1, 2, -2};
+
   /** Calls for points known already, for each new one, before a search counts as done. */
   private static final int REPEATS = 20;
 
@@ -178,15 +180,16 @@ final class Search {
   }
 
   /**
-   * Goes from a point along each key in turn as long as that gets better, then with half the step:
-   * whole numbers one by one and two by two, which the strategy above rounds and may pass over.
+   * Goes from a point along each key in turn as long as that gets better; then along a whole number
+   * and another key at once, since one turn more often needs a wider track to be any better; then
+   * with half the step. The strategy above rounds whole numbers and may pass over their neighbours.
    */
   void polish(double[] from) {
     bestPoint = from.clone();
     try {
       at(from);
       for (double step = STEP; step > LEAST_STEP; ) {
-        if (!improved(step)) {
+        if (!alongOne(step) && !alongTwo(step)) {
           step /= 2;
         }
       }
@@ -195,16 +198,34 @@ final class Search {
     }
   }
 
-  private boolean improved(double step) {
+  private boolean alongOne(double step) {
     double before = best;
     for (int i = 0; i < space.size(); i++) {
-      for (double part : new double[] {1, -1, 2, -2}) {
-        double[] point = bestPoint.clone();
-        point[i] = Math.max(0, Math.min(1, point[i] + part * space.spans().get(i).move(step)));
-        at(point);
+      for (int part : PARTS) {
+        at(moved(bestPoint, i, part, step));
       }
     }
     return best < before;
+  }
+
+  private boolean alongTwo(double step) {
+    double before = best;
+    for (int i = 0; i < space.size(); i++) {
+      for (int j = 0; j < space.size() && space.spans().get(i).whole(); j++) {
+        for (int k = 0; k < PARTS.length * PARTS.length && i != j; k++) {
+          double[] first = moved(bestPoint, i, PARTS[k / PARTS.length], step);
+          at(moved(first, j, PARTS[k % PARTS.length], step));
+        }
+      }
+    }
+    return best < before;
+  }
+
+  private double[] moved(double[] from, int key, int part, double step) {
+    double[] out = from.clone();
+    double to = out[key] + part * space.spans().get(key).move(step);
+    out[key] = Math.max(0, Math.min(1, to));
+    return out;
   }
 
   /** The best point so far, and its score. */

@@ -18,7 +18,7 @@ public final class Seek {
   private static final int SEARCHES = 4;
 
   /** The share of the trials that go into polishing what the searches found. */
-  private static final int POLISH = 5;
+  private static final int POLISH = 3;
 
   public static final int LEAST_TRIALS = 40;
 
