@@ -36,12 +36,13 @@ import picocli.CommandLine.Parameters;
     synopsisHeading = "Usage: ",
     footer = {
       "",
-      "survey wheel.yaml --vary coil.track=0.15mm..0.3mm/6 board.layers=2,4 --rank motorConstant",
-      "survey wheel.yaml --seek motorConstant --within coil.track=0.15mm..0.4mm coil.turns=5..25",
+      "survey wheel.yaml --vary coil.track=0.15mm..0.3mm/6 board.layers=2,4",
+      "survey wheel.yaml --seek motorConstant --within coil.turns=5..25",
       "",
-      "VALUES: a,b,c, whole numbers 4..13, or a range in equal steps 0.15mm..0.3mm/5.",
-      "KEY of --keep, --rank and --seek: a path in report.json, or the end of one; :low or",
-      ":high behind it says which way is best. The same command goes on where it was interrupted."
+      "VALUES: a,b,c or whole numbers 4..13 or equal steps 0.15mm..0.3mm/5.",
+      "KEY of --keep, --rank, --seek: a path in report.json, or the end of one;",
+      "with :low or :high behind it, which way is best. The same command goes on",
+      "where it was interrupted."
     })
 final class SurveyCommand implements Callable<Integer> {
   private final Console console;
