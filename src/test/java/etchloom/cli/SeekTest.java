@@ -70,8 +70,9 @@ class SeekTest {
             "phaseSelfHenry:high");
     assertEquals(ExitCode.DONE, all.code(), all.err());
     Map<String, Object> g = json(grid);
-    Object first = ((List<?>) ((Map<?, ?>) g.get("rank")).get("variants")).get(0);
-    Map<?, ?> best = variant(g, Integer.valueOf(first.toString()));
+    List<?> ranking = (List<?>) ((Map<?, ?>) g.get("rank")).get("variants");
+    Map<?, ?> best = variant(g, Integer.valueOf(ranking.get(0).toString()));
+    Map<?, ?> second = variant(g, Integer.valueOf(ranking.get(1).toString()));
 
     Path dir = folder.resolve("seek");
     Run r =
@@ -91,8 +92,9 @@ class SeekTest {
     Map<?, ?> found = variant(s, ((Map<?, ?>) s.get("seek")).get("bestVariant"));
     String figure = "inductance.phaseSelfHenry";
     assertTrue(
-        figure(found, figure) >= figure(best, figure) * (1 - 1e-9),
-        () -> found.get("values") + " is no better than " + best.get("values"));
+        figure(found, figure) > figure(second, figure),
+        () ->
+            found.get("values") + " is no better than the grid's second, " + second.get("values"));
     assertEquals(
         ((Map<?, ?>) best.get("values")).get("coil.turns"),
         ((Map<?, ?>) found.get("values")).get("coil.turns"));
