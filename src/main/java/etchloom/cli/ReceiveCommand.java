@@ -29,8 +29,9 @@ import picocli.CommandLine.Parameters;
     synopsisHeading = "Usage: ",
     footer = {
       "",
-      "READINGS begins with the row board,from,to,ohm,celsius and has a row for each measurement;",
-      "OL stands where nothing connects, the board name lead for the leads' own resistance."
+      "READINGS begins with the row board,from,to,ohm,celsius; then comes a row for",
+      "each measurement. OL stands where nothing connects; the board name lead gives",
+      "the leads' own resistance."
     })
 final class ReceiveCommand implements Callable<Integer> {
   private final Console console;

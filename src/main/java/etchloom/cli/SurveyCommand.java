@@ -8,6 +8,9 @@ import etchloom.survey.Bench;
 import etchloom.survey.Done;
 import etchloom.survey.Grid;
 import etchloom.survey.Part;
+import etchloom.survey.Seek;
+import etchloom.survey.Span;
+import etchloom.survey.SpanReader;
 import etchloom.survey.Survey;
 import etchloom.survey.SurveyTrouble;
 import java.io.IOException;
@@ -33,11 +36,13 @@ import picocli.CommandLine.Parameters;
     synopsisHeading = "Usage: ",
     footer = {
       "",
-      "survey wheel.yaml --vary coil.track=0.15mm..0.3mm/6 board.layers=2,4 --rank motorConstant",
+      "survey wheel.yaml --vary coil.track=0.15mm..0.3mm/6 board.layers=2,4",
+      "survey wheel.yaml --seek motorConstant --within coil.turns=5..25",
       "",
-      "VALUES: a,b,c, whole numbers 4..13, or a range in equal steps 0.15mm..0.3mm/5.",
-      "KEY of --keep and --rank: a path in report.json, or the end of one; :low or :high",
-      "behind it says which way is best. The same command goes on where it was interrupted."
+      "VALUES: a,b,c or whole numbers 4..13 or equal steps 0.15mm..0.3mm/5.",
+      "KEY of --keep, --rank, --seek: a path in report.json, or the end of one;",
+      "with :low or :high behind it, which way is best. The same command goes on",
+      "where it was interrupted."
     })
 final class SurveyCommand implements Callable<Integer> {
   private final Console console;
@@ -60,6 +65,31 @@ final class SurveyCommand implements Callable<Integer> {
 
   @Option(names = "--rank", paramLabel = "KEY", description = "best first by this figure")
   private String rank = "";
+
+  @Option(
+      names = "--seek",
+      paramLabel = "KEY",
+      description = "instead of --vary: search for the best value of this figure")
+  private String seek;
+
+  @Option(
+      names = "--within",
+      arity = "1..*",
+      paramLabel = "KEY=LOW..HIGH",
+      description = "--seek: a key and its range; left out: track, space and radii of the coil")
+  private List<String> within = new ArrayList<>();
+
+  @Option(
+      names = "--trials",
+      paramLabel = "N",
+      description = "--seek: how many boards to draw (default: ${DEFAULT-VALUE})")
+  private int trials = 400;
+
+  @Option(
+      names = "--seed",
+      paramLabel = "N",
+      description = "--seek: another number searches by other ways (default: ${DEFAULT-VALUE})")
+  private long seed = 1;
 
   @Option(
       names = "--part",
@@ -85,8 +115,9 @@ final class SurveyCommand implements Callable<Integer> {
   @Override
   public Integer call() {
     takeBack(vary);
+    takeBack(within);
     try {
-      return join ? joined() : surveyed();
+      return join ? joined() : seek != null ? sought() : surveyed();
     } catch (SurveyTrouble e) {
       throw new DiskTrouble(e.getMessage());
     } catch (UncheckedIOException e) {
@@ -106,8 +137,8 @@ final class SurveyCommand implements Callable<Integer> {
     if (paths.size() != 1) {
       throw usage("one spec is wanted, found " + paths.size());
     }
-    if (vary.isEmpty()) {
-      throw usage("--vary KEY=VALUES is wanted: what is to be surveyed");
+    if (vary.isEmpty() || !within.isEmpty()) {
+      throw usage("--vary KEY=VALUES is wanted, or --seek KEY with --within KEY=LOW..HIGH");
     }
     Grid grid = new Grid(axes());
     if (grid.count() > Grid.MOST) {
@@ -121,6 +152,44 @@ final class SurveyCommand implements Callable<Integer> {
     Survey.Spec name = new Survey.Spec(in.file().spec().title(), slug);
     ProgressLine progress = new ProgressLine(console, options.quiet());
     return told(dir, Survey.grid(dir, bench, name, grid, own, wish(), progress));
+  }
+
+  private int sought() throws IOException {
+    if (paths.size() != 1) {
+      throw usage("one spec is wanted, found " + paths.size());
+    }
+    if (!vary.isEmpty() || part != null || !rank.isBlank()) {
+      throw usage("--seek goes with --within and --keep; not with --vary, --part or --rank");
+    }
+    if (trials < Seek.LEAST_TRIALS || trials > 1_000_000) {
+      throw usage("--trials takes " + Seek.LEAST_TRIALS + " to 1000000; found " + trials);
+    }
+    InputFiles.Inputs in = InputFiles.read(paths.get(0), options.fab());
+    List<Span> spans = within.isEmpty() ? UsualSpans.of(in) : spans();
+    String slug = in.file().spec().slug();
+    Path dir = folder == null ? beside(in, slug, Part.WHOLE) : InputFiles.path(folder);
+    Survey.Spec name = new Survey.Spec(in.file().spec().title(), slug);
+    Seek.Wish wish = new Seek.Wish(seek.strip(), spans, keep.strip(), trials, seed);
+    ProgressLine progress = new ProgressLine(console, options.quiet());
+    return told(dir, Seek.run(dir, bench(in, List.of()), name, wish, progress));
+  }
+
+  private List<Span> spans() {
+    List<Span> out = new ArrayList<>();
+    List<Diagnostic> wrong = new ArrayList<>();
+    Set<String> keys = new HashSet<>();
+    for (String w : within) {
+      Staged<Span> span = SpanReader.read(w);
+      wrong.addAll(span.diagnostics());
+      span.value().ifPresent(out::add);
+      if (span.value().isPresent() && !keys.add(span.value().get().key())) {
+        throw usage("--within names " + span.value().get().key() + " twice");
+      }
+    }
+    if (!wrong.isEmpty()) {
+      throw new BadInput(wrong);
+    }
+    return out;
   }
 
   private Bench bench(InputFiles.Inputs in, List<Axis> axes) {

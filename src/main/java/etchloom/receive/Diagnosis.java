@@ -1,5 +1,6 @@
 package etchloom.receive;
 
+import java.util.Arrays;
 import java.util.List;
 import java.util.Optional;
 
@@ -13,6 +14,18 @@ final class Diagnosis {
 
   private static final double LEAST = Math.log(0.02);
   private static final double MOST = Math.log(100);
+
+  /** Boards of one design usually differ by so much altogether, in the logarithm. */
+  private static final double USUAL_COMMON = 0.05;
+
+  /** A phase that is off usually is so by so much, in the logarithm. */
+  private static final double USUAL_FACTOR = 0.7;
+
+  /** What the choice of any factor costs against a fault that has none to choose. */
+  private static final double FREEDOM = 3;
+
+  /** What a misfit of 1, at the end of what is allowed, costs. */
+  private static final double MISFIT = 8;
 
   private final Model model;
   private final double loose;
@@ -43,7 +56,10 @@ final class Diagnosis {
    */
   record Finding(Cause cause, String where, Optional<Double> common) {}
 
-  private record Candidate(Suspect suspect, Fit fit) {}
+  /**
+   * @param cost the less, the likelier: twice the negative logarithm of a likelihood, up to a sum
+   */
+  private record Candidate(Suspect suspect, Fit fit, double cost) {}
 
   /**
    * @param ohm measured, at 20 °C, by pair; NaN where it was not, infinite where it is open
@@ -54,37 +70,54 @@ final class Diagnosis {
     if (accepted) {
       return new Finding(Cause.NONE, "", Optional.of(even.common()));
     }
+    if (tooFew(ohm)) {
+      return new Finding(Cause.UNCLEAR, "", Optional.empty());
+    }
     if (even.explains()) {
       Cause cause = within ? Cause.UNCLEAR : Cause.COPPER_THICKNESS;
       return new Finding(cause, "", Optional.of(even.common()));
     }
-    for (List<Suspect> some : model.suspects()) {
-      Optional<Candidate> best = best(ohm, some);
-      if (best.isPresent()) {
-        return finding(ohm, best.get());
-      }
-    }
-    return onePhase(ohm)
-        .or(() -> best(ohm, model.lastSuspects()))
+    return best(ohm, model.breaks(), 0)
+        .or(() -> best(ohm, model.swaps(), 0))
+        .or(() -> cheaper(best(ohm, model.shorts(), 0), onePhase(ohm)))
+        .or(() -> best(ohm, model.doubleBreaks(), 0))
         .map(c -> finding(ohm, c))
         .orElse(new Finding(Cause.UNCLEAR, "", Optional.empty()));
   }
 
+  /** One pair of several tells no pattern. */
+  private boolean tooFew(double[] ohm) {
+    long measured = Arrays.stream(ohm).filter(r -> !Double.isNaN(r)).count();
+    long joined = Arrays.stream(model.sound()).filter(Double::isFinite).count();
+    return measured < 2 && joined > 1;
+  }
+
   private static Finding finding(double[] ohm, Candidate c) {
-    boolean any = java.util.Arrays.stream(ohm).anyMatch(Double::isFinite);
+    boolean any = Arrays.stream(ohm).anyMatch(Double::isFinite);
     Optional<Double> common = any ? Optional.of(c.fit().common()) : Optional.empty();
     return new Finding(c.suspect().cause(), c.suspect().where(), common);
   }
 
-  private Optional<Candidate> best(double[] ohm, List<Suspect> some) {
-    Candidate best = null;
+  private Optional<Candidate> best(double[] ohm, List<Suspect> some, double price) {
+    Optional<Candidate> best = Optional.empty();
     for (Suspect s : some) {
-      Fit fit = Fit.of(ohm, s.ohm(), (p, q) -> loose);
-      if (good(fit) && (best == null || fit.misfit() < best.fit().misfit())) {
-        best = new Candidate(s, fit);
-      }
+      best = cheaper(best, candidate(ohm, s, price));
     }
-    return Optional.ofNullable(best);
+    return best;
+  }
+
+  private Optional<Candidate> candidate(double[] ohm, Suspect s, double price) {
+    Fit fit = Fit.of(ohm, s.ohm(), (p, q) -> loose);
+    if (!good(fit)) {
+      return Optional.empty();
+    }
+    double common = fit.common() / USUAL_COMMON;
+    double cost = price + common * common + MISFIT * fit.misfit() * fit.misfit();
+    return Optional.of(new Candidate(s, fit, cost));
+  }
+
+  private static Optional<Candidate> cheaper(Optional<Candidate> a, Optional<Candidate> b) {
+    return b.isEmpty() || (a.isPresent() && a.get().cost() <= b.get().cost()) ? a : b;
   }
 
   /** Explains the readings, on a board whose other copper is within the tolerances. */
@@ -92,29 +125,16 @@ final class Diagnosis {
     return fit.explains() && fit.common() >= lowest && fit.common() <= highest;
   }
 
-  /** The phase with the best fit; of equal ones the one that leaves the others nearest as drawn. */
+  /** The phase and factor that explain the readings best. */
   private Optional<Candidate> onePhase(double[] ohm) {
-    Candidate best = null;
+    Optional<Candidate> best = Optional.empty();
     for (PhaseShift shift : model.shifts()) {
-      Candidate own = null;
       for (double x = LEAST; x <= MOST; x += STEP) {
-        double[] pattern = shift.at(Math.exp(x));
-        Fit fit = Fit.of(ohm, pattern, (p, q) -> loose);
-        if (good(fit) && (own == null || fit.misfit() < own.fit().misfit())) {
-          own = new Candidate(new Suspect(Cause.ONE_PHASE, "phase " + shift.mark(), pattern), fit);
-        }
-      }
-      if (own != null && (best == null || better(own, best))) {
-        best = own;
+        Suspect s = new Suspect(Cause.ONE_PHASE, "phase " + shift.mark(), shift.at(Math.exp(x)));
+        double size = x / USUAL_FACTOR;
+        best = cheaper(best, candidate(ohm, s, FREEDOM + size * size));
       }
     }
-    return Optional.ofNullable(best);
-  }
-
-  private static boolean better(Candidate a, Candidate b) {
-    boolean equal = Math.abs(a.fit().misfit() - b.fit().misfit()) < STEP;
-    return equal
-        ? Math.abs(a.fit().common()) < Math.abs(b.fit().common())
-        : a.fit().misfit() < b.fit().misfit();
+    return best;
   }
 }

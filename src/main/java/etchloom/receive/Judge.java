@@ -142,7 +142,9 @@ public final class Judge {
 
   private static OptionalDouble deviation(double ohm, double sound) {
     double off = 100 * (ohm / sound - 1);
-    return Double.isFinite(off) ? OptionalDouble.of(off) : OptionalDouble.empty();
+    return Double.isFinite(off) && Double.isFinite(sound)
+        ? OptionalDouble.of(off)
+        : OptionalDouble.empty();
   }
 
   private OptionalDouble copper(double[] ohm20, Optional<Double> common) {

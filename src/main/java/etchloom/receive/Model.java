@@ -16,8 +16,10 @@ public final class Model {
   private final Parts parts;
   private final double copperUm;
   private final OptionalDouble predictedSpreadPercent;
-  private final List<List<Suspect>> suspects;
-  private final List<Suspect> lastSuspects;
+  private final List<Suspect> breaks;
+  private final List<Suspect> swaps;
+  private final List<Suspect> shorts;
+  private final List<Suspect> doubleBreaks;
   private final List<PhaseShift> shifts;
 
   Model(Artwork artwork, FabRules.Tolerance tolerance, boolean bounded, OptionalDouble spread) {
@@ -28,8 +30,10 @@ public final class Model {
     parts = Parts.of(artwork, tolerance, pairs);
     copperUm = 1000 * artwork.stackup().copper().get(0).thicknessMm();
     predictedSpreadPercent = spread;
-    suspects = List.of(bench.breaks(), bench.swaps(), bench.shorts());
-    lastSuspects = bench.doubleBreaks();
+    breaks = bench.breaks();
+    swaps = bench.swaps();
+    shorts = bench.shorts();
+    doubleBreaks = bench.doubleBreaks();
     shifts = bench.shifts();
   }
 
@@ -77,14 +81,20 @@ public final class Model {
     return predictedSpreadPercent;
   }
 
-  /** Faults to compare with, the likelier kinds first. */
-  List<List<Suspect>> suspects() {
-    return suspects;
+  List<Suspect> breaks() {
+    return breaks;
   }
 
-  /** Faults that are named only where nothing else explains the readings. */
-  List<Suspect> lastSuspects() {
-    return lastSuspects;
+  List<Suspect> swaps() {
+    return swaps;
+  }
+
+  List<Suspect> shorts() {
+    return shorts;
+  }
+
+  List<Suspect> doubleBreaks() {
+    return doubleBreaks;
   }
 
   List<PhaseShift> shifts() {

@@ -26,7 +26,7 @@ public final class ReceivePage {
     causes(h, o);
     h.element("h2", "Every pair, at the temperature it was measured at");
     for (Verdict v : o.boards()) {
-      h.table(v.board(), HEAD, v.pairs().stream().map(ReceivePage::row).toList(), 5);
+      h.table(caption(v), HEAD, v.pairs().stream().map(ReceivePage::row).toList(), 5);
     }
     h.close("main").close("body").close("html");
     return h.toString().getBytes(StandardCharsets.UTF_8);
@@ -34,6 +34,10 @@ public final class ReceivePage {
 
   private static final List<String> HEAD =
       List.of("pair", "measured", "at", "least", "as drawn", "most", "");
+
+  private static String caption(Verdict v) {
+    return v.board() + (v.accepted() ? ": accepted" : ": rejected, " + v.words());
+  }
 
   private static List<String> row(PairVerdict p) {
     return List.of(

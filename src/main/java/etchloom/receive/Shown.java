@@ -17,7 +17,8 @@ final class Shown {
         v.board(),
         v.accepted() ? "accepted" : "REJECTED",
         v.worstPair(),
-        percent(v.deviationPercent(), true).orElse(v.accepted() ? "" : "open"),
+        percent(v.deviationPercent(), true)
+            .orElse(v.accepted() ? "" : v.worstOpen() ? "open" : "joined"),
         percent(v.imbalancePercent(), false).orElse(""),
         v.copperUm().isPresent() ? Numbers.fixed(v.copperUm().getAsDouble(), 1) + " um" : "",
         v.words());

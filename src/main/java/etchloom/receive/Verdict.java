@@ -29,6 +29,11 @@ public record Verdict(
     missing = List.copyOf(missing);
   }
 
+  /** Whether the worst pair was found open. */
+  boolean worstOpen() {
+    return pairs.stream().anyMatch(p -> p.pair().equals(worstPair) && p.open());
+  }
+
   /** The cause with its place, for people; what is missing where that alone is wrong. */
   public String words() {
     if (accepted) {

@@ -7,8 +7,9 @@ import etchloom.units.Quantity;
 import java.math.BigDecimal;
 import java.math.MathContext;
 import java.math.RoundingMode;
-import java.util.ArrayList;
+import java.util.LinkedHashSet;
 import java.util.List;
+import java.util.Set;
 
 /**
  * Reads {@code KEY=VALUES}: a list {@code 0.15mm,0.2mm} or {@code star,delta}, whole numbers {@code
@@ -25,7 +26,7 @@ public final class AxisReader {
   private static final MathContext DIGITS = new MathContext(12, RoundingMode.HALF_EVEN);
 
   private final String text;
-  private final List<String> values = new ArrayList<>();
+  private final Set<String> values = new LinkedHashSet<>();
 
   private AxisReader(String text) {
     this.text = text;
@@ -63,7 +64,7 @@ public final class AxisReader {
     for (String item : text.substring(at + 1).split(",", -1)) {
       add(item.strip());
     }
-    return new Axis(key, values);
+    return new Axis(key, List.copyOf(values));
   }
 
   private void add(String item) throws Wrong {
@@ -79,13 +80,12 @@ public final class AxisReader {
   }
 
   private void put(String value) throws Wrong {
-    if (values.contains(value)) {
-      throw new Wrong("the value " + value + " is there twice");
-    }
     if (values.size() >= MOST) {
       throw new Wrong("there are more than " + MOST + " values");
     }
-    values.add(value);
+    if (!values.add(value)) {
+      throw new Wrong("the value " + value + " is there twice");
+    }
   }
 
   private void range(String low, String rest) throws Wrong {

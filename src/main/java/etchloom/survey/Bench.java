@@ -25,6 +25,9 @@ public final class Bench {
   /** What is the same in every row and no figure. */
   private static final Set<String> NO_FIGURES = Set.of("tool.version", "title", "revision");
 
+  /** How the reason begins where the program itself failed. */
+  static final String FAULT = "error[fault]";
+
   private final String specName;
   private final byte[] spec;
   private final Shelf shelf;
@@ -53,6 +56,11 @@ public final class Bench {
     return shelf;
   }
 
+  /** The spec itself. */
+  Optional<SpecFile> file() {
+    return SpecReader.read(specName, spec).value();
+  }
+
   /** What is wrong with a set of values as far as reading them can tell. */
   public List<Diagnostic> reading(Map<String, String> values) {
     return SpecReader.read(specName, spec, values).diagnostics();
@@ -62,7 +70,7 @@ public final class Bench {
     try {
       return tried(values);
     } catch (RuntimeException e) {
-      String reason = "error[fault]: a fault in Etchloom itself: " + e.getClass().getSimpleName();
+      String reason = FAULT + ": a fault in Etchloom itself: " + e.getClass().getSimpleName();
       return new Trial(reason, Optional.empty(), Map.of(), Optional.empty(), Optional.of(e));
     }
   }
@@ -83,6 +91,11 @@ public final class Bench {
     Map<String, Object> figures = new LinkedHashMap<>(ReportJson.figures(d.results(toolVersion)));
     figures.keySet().removeAll(NO_FIGURES);
     return new Trial(reason(d.rules()), yaml, figures, Optional.of(d.rules()), Optional.empty());
+  }
+
+  /** The variant's own file without drawing it; empty where the values make none. */
+  Optional<String> yaml(Map<String, String> values) {
+    return SpecReader.read(specName, spec, values).value().map(f -> yaml(f, values));
   }
 
   /** The variant's own file, ready for {@code draw}. */

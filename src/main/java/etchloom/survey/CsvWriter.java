@@ -13,7 +13,8 @@ final class CsvWriter extends RowWriter {
   CsvWriter(Path dir, Plan plan, Summary summary) throws IOException {
     super(dir.resolve("survey.csv"));
     keys = plan.axes().stream().map(Axis::key).toList();
-    columns = summary.columns();
+    // a figure of the same name as a varied key has the same value
+    columns = summary.columns().stream().filter(c -> !keys.contains(c)).toList();
     List<String> head = new ArrayList<>(List.of("variant"));
     head.addAll(keys);
     head.addAll(List.of("passed", "reason"));

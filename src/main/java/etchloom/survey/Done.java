@@ -1,20 +1,22 @@
 package etchloom.survey;
 
+import java.util.Optional;
+
 /** A finished survey, as its command tells of it. */
 public final class Done {
   private final Plan plan;
   private final Summary summary;
-  private final long faults;
+  private final Optional<Best> best;
 
-  Done(Plan plan, Summary summary, long faults) {
+  Done(Plan plan, Summary summary, Optional<Best> best) {
     this.plan = plan;
     this.summary = summary;
-    this.faults = faults;
+    this.best = best;
   }
 
   /** The table for the terminal. */
   public String text(String where) {
-    return SurveyText.text(plan, summary, where);
+    return best.map(b -> b.text() + "\n").orElse("") + SurveyText.text(plan, summary, where);
   }
 
   /** Variants shown that keep every rule. */
@@ -22,8 +24,8 @@ public final class Done {
     return summary.passed();
   }
 
-  /** Variants of this run in which the program itself failed. */
+  /** Variants in which the program itself failed. */
   public long faults() {
-    return faults;
+    return summary.faults();
   }
 }

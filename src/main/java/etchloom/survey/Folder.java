@@ -5,6 +5,7 @@ import java.nio.charset.StandardCharsets;
 import java.nio.file.Files;
 import java.nio.file.Path;
 import java.util.HashSet;
+import java.util.Optional;
 import java.util.Set;
 
 /** What a survey leaves in its folder besides the journal. */
@@ -29,13 +30,18 @@ final class Folder {
     }
   }
 
-  /** Goes through the journal twice: what columns there are, then the files. */
-  static Summary tables(Path dir, Plan plan, Listing listing) throws IOException {
+  /**
+   * Goes through the journal twice: what columns there are, then the files.
+   *
+   * @param best of a search
+   */
+  static Summary tables(Path dir, Plan plan, Listing listing, Optional<Best> best)
+      throws IOException {
     Summary summary = new Summary(listing);
     Journal.each(dir, summary::add);
     Set<Long> onPage = new HashSet<>(summary.onPage());
     try (RowWriter csv = new CsvWriter(dir, plan, summary);
-        RowWriter json = new JsonWriter(dir, plan, summary);
+        RowWriter json = new JsonWriter(dir, plan, summary, best);
         RowWriter page = new PageWriter(dir, plan, summary)) {
       Journal.each(
           dir,

@@ -45,18 +45,27 @@ final class Journal implements Closeable {
    */
   static Journal open(Path dir, Plan plan) throws IOException {
     Files.createDirectories(dir);
-    Path path = dir.resolve(NAME);
-    if (!Files.exists(path) && !empty(dir)) {
+    if (!Files.exists(dir.resolve(NAME)) && !empty(dir)) {
       throw new SurveyTrouble(
           dir + ": holds something that is no survey; name another folder with -o");
     }
+    return open(dir, NAME, plan, plan.first());
+  }
+
+  /**
+   * A journal beside the survey's own, in a folder that is known to be the survey's.
+   *
+   * @param first the first row's number
+   */
+  static Journal open(Path dir, String name, Plan plan, long first) throws IOException {
+    Path path = dir.resolve(name);
     FileChannel file =
         FileChannel.open(
             path, StandardOpenOption.CREATE, StandardOpenOption.READ, StandardOpenOption.WRITE);
     Journal j = new Journal(file);
     try {
       j.lock(dir);
-      j.resume(dir, path, plan);
+      j.resume(dir, path, plan, first);
     } catch (IOException | RuntimeException e) {
       file.close();
       throw e;
@@ -82,7 +91,7 @@ final class Journal implements Closeable {
     }
   }
 
-  private void resume(Path dir, Path path, Plan plan) throws IOException {
+  private void resume(Path dir, Path path, Plan plan, long first) throws IOException {
     String head = head(plan);
     byte[] wanted = (head + "\n").getBytes(StandardCharsets.UTF_8);
     byte[] found = new byte[wanted.length];
@@ -91,12 +100,12 @@ final class Journal implements Closeable {
       n = in.readNBytes(found, 0, found.length);
     }
     if (Arrays.equals(found, wanted)) {
-      scan(path, plan.first(), wanted.length);
+      scan(path, first, wanted.length);
     } else if (n < wanted.length && Arrays.equals(found, 0, n, wanted, 0, n)) {
       file.truncate(0);
       file.position(0);
       write(wanted);
-      next = plan.first();
+      next = first;
     } else {
       throw new SurveyTrouble(
           dir
@@ -217,7 +226,12 @@ final class Journal implements Closeable {
 
   /** Every row of a folder's journal in turn. */
   static void each(Path dir, Consumer<Row> sink) throws IOException {
-    try (BufferedReader in = reader(dir.resolve(NAME))) {
+    each(dir, NAME, sink);
+  }
+
+  /** As above, of a journal beside the survey's own. */
+  static void each(Path dir, String name, Consumer<Row> sink) throws IOException {
+    try (BufferedReader in = reader(dir.resolve(name))) {
       in.readLine();
       String line = in.readLine();
       while (line != null) {

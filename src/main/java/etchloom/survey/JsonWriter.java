@@ -4,12 +4,13 @@ import etchloom.report.JsonTree;
 import java.io.IOException;
 import java.nio.charset.StandardCharsets;
 import java.nio.file.Path;
+import java.util.Optional;
 
 /** {@code survey.json}: what was surveyed, then the variants, a line each. */
 final class JsonWriter extends RowWriter {
   private boolean first = true;
 
-  JsonWriter(Path dir, Plan plan, Summary summary) throws IOException {
+  JsonWriter(Path dir, Plan plan, Summary summary, Optional<Best> best) throws IOException {
     super(dir.resolve("survey.json"));
     JsonTree head = plan.json();
     head.put("part", plan.part().toString());
@@ -29,6 +30,7 @@ final class JsonWriter extends RowWriter {
                         .putTexts(
                             "variants",
                             summary.top().stream().map(b -> Long.toString(b.variant())).toList())));
+    best.ifPresent(b -> head.put("seek", b.json()));
     head.put("kept", summary.kept());
     head.put("passed", summary.passed());
     String text = new String(head.bytes(), StandardCharsets.UTF_8);

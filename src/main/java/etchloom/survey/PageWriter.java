@@ -33,7 +33,8 @@ final class PageWriter extends RowWriter {
   PageWriter(Path dir, Plan plan, Summary summary) throws IOException {
     super(dir.resolve("survey.html"));
     keys = plan.axes().stream().map(Axis::key).toList();
-    columns = summary.columns();
+    // a figure of the same name as a varied key has the same value
+    columns = summary.columns().stream().filter(c -> !keys.contains(c)).toList();
     variants = dir.resolve("variants");
     Html h = new Html();
     HtmlHead.write(h, "Survey of " + plan.title(), true);
@@ -54,12 +55,12 @@ final class PageWriter extends RowWriter {
     h.raw("<thead id=\"head\"></thead><tbody id=\"body\"></tbody></table></div>\n");
     h.element("p", "", "id=\"more\"", "class=\"quiet\"").close("main");
     h.raw("<script type=\"application/json\" id=\"data\">");
-    put(h.toString()).put(head(summary));
+    put(h.toString()).put(head(plan, summary));
   }
 
   private static String words(Plan plan, Summary s) {
     String keep = s.listing().keepText();
-    return plan.count()
+    return s.count()
         + " variants"
         + (plan.part().equals(Part.WHOLE) ? "" : ", part " + plan.part())
         + (keep.isEmpty() ? "" : "; " + s.kept() + " with " + keep)
@@ -86,7 +87,7 @@ final class PageWriter extends RowWriter {
   }
 
   /** The data's object up to the rows. */
-  private String head(Summary s) throws IOException {
+  private String head(Plan plan, Summary s) throws IOException {
     List<String> shown = new ArrayList<>();
     for (FigureName n : s.listing().names()) {
       columns.stream()
@@ -99,7 +100,7 @@ final class PageWriter extends RowWriter {
     head.put("shown", shown);
     head.put("low", columns.stream().filter(Ranking::low).toList());
     head.put("order", s.listing().rank().isPresent() ? s.onPage() : List.of());
-    head.put("x", FIRST_X);
+    head.put("x", plan.kind().equals(Plan.GRID) ? FIRST_X : "variant");
     head.put("y", shown.stream().findFirst().orElse(firstY()));
     String text = safe(JSON.std.asString(head));
     return text.substring(0, text.length() - 1) + ",\"rows\":[";

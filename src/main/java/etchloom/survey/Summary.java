@@ -25,6 +25,7 @@ final class Summary {
   private long kept;
   private long passed;
   private long undrawn;
+  private long faults;
 
   /** A row's place in the order, without its figures. */
   private record Place(Row row) {}
@@ -40,6 +41,9 @@ final class Summary {
     count++;
     if (!row.drawn()) {
       undrawn++;
+    }
+    if (row.reason().startsWith(Bench.FAULT)) {
+      faults++;
     }
     if (!listing.keeps(row)) {
       return;
@@ -88,6 +92,11 @@ final class Summary {
   /** Of all rows, those that could not be drawn. */
   long undrawn() {
     return undrawn;
+  }
+
+  /** Of all rows, those in which the program itself failed. */
+  long faults() {
+    return faults;
   }
 
   /** Every figure of the kept rows, in the report's order as far as rows agree. */

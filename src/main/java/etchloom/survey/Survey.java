@@ -35,7 +35,8 @@ public final class Survey {
   public static Staged<Done> grid(
       Path dir, Bench bench, Spec spec, Grid grid, Part part, Wish wish, Progress progress)
       throws IOException {
-    Map<String, Object> sample = sample(bench, grid.values(1));
+    boolean named = !(wish.keep() + wish.rank()).isEmpty();
+    Map<String, Object> sample = named ? sample(bench, grid.values(1)) : Map.of();
     Staged<Listing> listing = listing(wish, sample);
     List<Diagnostic> wrong = new ArrayList<>(keys(bench, grid));
     wrong.addAll(listing.diagnostics());
@@ -53,17 +54,20 @@ public final class Survey {
             grid.axes(),
             grid.count(),
             part);
-    long faults = work(dir, bench, grid, plan, progress);
-    Summary summary = Folder.tables(dir, plan, listing.value().orElseThrow());
-    return Staged.of(new Done(plan, summary, faults));
+    work(dir, bench, grid, plan, progress);
+    return Staged.of(done(dir, plan, listing.value().orElseThrow()));
   }
 
   /** What names a survey. */
   public record Spec(String title, String slug) {}
 
-  private static long work(Path dir, Bench bench, Grid grid, Plan plan, Progress progress)
+  private static Done done(Path dir, Plan plan, Listing listing) throws IOException {
+    Summary summary = Folder.tables(dir, plan, listing, Optional.empty());
+    return new Done(plan, summary, Optional.empty());
+  }
+
+  private static void work(Path dir, Bench bench, Grid grid, Plan plan, Progress progress)
       throws IOException {
-    long[] faults = {0};
     try (Journal journal = Journal.open(dir, plan)) {
       Folder.variants(dir);
       Folder.rules(dir, bench.shelf());
@@ -78,15 +82,11 @@ public final class Survey {
             if (trial.yaml().isPresent()) {
               Folder.variant(dir, n, trial.yaml().get());
             }
-            if (trial.fault().isPresent()) {
-              faults[0]++;
-              progress.fault(n, trial.fault().get());
-            }
+            trial.fault().ifPresent(f -> progress.fault(n, f));
             journal.append(trial.row(n, grid.values(n)));
             progress.at(n - first + 1, todo, "");
           });
     }
-    return faults[0];
   }
 
   /** Figures of the first variant, or else of the spec itself; none where neither can be drawn. */
@@ -176,7 +176,7 @@ public final class Survey {
     if (listing.value().isEmpty()) {
       return Staged.failed(listing.diagnostics());
     }
-    return Staged.of(new Done(whole, Folder.tables(dir, whole, listing.value().get()), 0));
+    return Staged.of(done(dir, whole, listing.value().get()));
   }
 
   /** Where joined parts go if nothing is said: beside the first of them. */

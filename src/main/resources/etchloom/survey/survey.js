@@ -10,7 +10,8 @@ const MOST = 1000; // table rows shown at once
 const columns = data.columns.map((path, i) => ({ path, of: (row) => row[4][i] }));
 const axes = data.keys.map((path, i) => ({ path, of: (row) => leading(row[3][i]) }))
   .filter((c) => data.rows.some((r) => typeof c.of(r) === "number"));
-const choices = axes.concat(columns.filter((c) => data.rows.some((r) => typeof c.of(r) === "number")));
+const choices = axes.concat(columns.filter((c) => data.rows.some((r) => typeof c.of(r) === "number")))
+  .concat([{ path: "variant", of: (row) => row[0] }]);
 let sorted = { of: null, down: false };
 let chosen = null;
 const points = new Map();

@@ -24,7 +24,7 @@ import org.junit.jupiter.params.provider.CsvSource;
 
 /** Boards with a known fault, made and measured by {@link BenchBoard}, must be named right. */
 class SeededFaultsTest {
-  private static final int TRIALS = 40;
+  private static final int TRIALS = 30;
   private static final double RIGHT = 0.95;
   private static final String HEAD = "board,from,to,ohm,celsius\nlead,,,0.1,\n";
 
@@ -76,13 +76,27 @@ class SeededFaultsTest {
   }
 
   @ParameterizedTest(name = "{0}")
-  @CsvSource({"dosing-pump", "dosing-pump delta", "reaction-wheel", "wind-logger"})
+  @CsvSource({
+    "dosing-pump",
+    "dosing-pump delta",
+    "reaction-wheel",
+    "wind-logger",
+    "focuser",
+    "sample-stirrer"
+  })
   void openPhase(String name) {
     named(Cause.OPEN_PHASE, trials(name, 1, TRIALS, BenchBoard::broken));
   }
 
   @ParameterizedTest(name = "{0}")
-  @CsvSource({"dosing-pump", "dosing-pump delta", "reaction-wheel", "wind-logger"})
+  @CsvSource({
+    "dosing-pump",
+    "dosing-pump delta",
+    "reaction-wheel",
+    "wind-logger",
+    "focuser",
+    "sample-stirrer"
+  })
   void shortedLayers(String name) {
     named(Cause.SHORTED_LAYERS, trials(name, 2, TRIALS, BenchBoard::shorted));
   }
@@ -107,13 +121,27 @@ class SeededFaultsTest {
   }
 
   @ParameterizedTest(name = "{0}")
-  @CsvSource({"dosing-pump", "dosing-pump delta", "reaction-wheel", "wind-logger"})
+  @CsvSource({
+    "dosing-pump",
+    "dosing-pump delta",
+    "reaction-wheel",
+    "wind-logger",
+    "focuser",
+    "sample-stirrer"
+  })
   void onePhaseEtched(String name) {
     named(Cause.ONE_PHASE, trials(name, 4, TRIALS, b -> b.etched(1.25)));
   }
 
   @ParameterizedTest(name = "{0}")
-  @CsvSource({"dosing-pump", "dosing-pump delta", "reaction-wheel", "wind-logger"})
+  @CsvSource({
+    "dosing-pump",
+    "dosing-pump delta",
+    "reaction-wheel",
+    "wind-logger",
+    "focuser",
+    "sample-stirrer"
+  })
   void onePhaseBadVia(String name) {
     named(Cause.ONE_PHASE, trials(name, 5, TRIALS, b -> b.badVia(0.4)));
   }
