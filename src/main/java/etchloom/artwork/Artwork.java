@@ -95,6 +95,7 @@ public record Artwork(
                         c.id(),
                         c.layer(),
                         c.widthMm(),
+                        c.widthsMm(),
                         c.path().mapped(Grid::snap),
                         c.fromJoint(),
                         c.toJoint(),

@@ -49,8 +49,25 @@ public final class CopperBuilder {
   /** A track from one joint to another; gives its number. */
   public int track(
       int layer, double widthMm, Path path, int from, int to, String net, Feature what) {
+    return track(layer, widthMm, List.of(), path, from, to, net, what);
+  }
+
+  /**
+   * A track whose width changes; gives its number.
+   *
+   * @param widthsMm one a segment, as in {@link Conductor}
+   */
+  public int track(
+      int layer,
+      double widthMm,
+      List<Double> widthsMm,
+      Path path,
+      int from,
+      int to,
+      String net,
+      Feature what) {
     int id = conductors.size();
-    conductors.add(new Conductor(id, layer, widthMm, path, from, to, net, what));
+    conductors.add(new Conductor(id, layer, widthMm, widthsMm, path, from, to, net, what));
     return id;
   }
 

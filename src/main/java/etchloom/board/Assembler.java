@@ -137,6 +137,7 @@ public final class Assembler {
         c.widthMm(),
         c.trackMm(),
         c.spaceMm(),
+        c.taper(),
         c.cornerMm(),
         spec.via().padMm(),
         spec.via().holeMm(),

@@ -142,7 +142,7 @@ final class CoilPlacer {
     CoilPlan.Spiral s = plan.layers().get(layer - 1);
     Feature what = new Feature(Feature.Kind.SPIRAL, p.phase, p.coil, s.turnOf());
     Path path = s.path().rotated(p.axis);
-    int id = copper.track(layer, spec.coil().trackMm(), path, from, to, p.net, what);
+    int id = copper.track(layer, spec.coil().trackMm(), s.widthsMm(), path, from, to, p.net, what);
     p.spirals.add(id);
     p.way.add(new Phase.Step(id, true));
   }

@@ -24,10 +24,16 @@ public record CoilPlan(
 
   /**
    * @param turnOf the turn, from 1 outermost, of each segment of the path
+   * @param widthsMm the width of each segment; empty where all have the coil's own
    */
-  public record Spiral(Path path, List<Integer> turnOf) {
+  public record Spiral(Path path, List<Integer> turnOf, List<Double> widthsMm) {
     public Spiral {
       turnOf = List.copyOf(turnOf);
+      widthsMm = List.copyOf(widthsMm);
+    }
+
+    Spiral(Path path, List<Integer> turnOf) {
+      this(path, turnOf, List.of());
     }
   }
 

@@ -10,6 +10,7 @@ import java.util.OptionalDouble;
  * @param layers copper layers, even
  * @param parallelLayers whether the inward layers run side by side, and the outward layers
  * @param widthMm a racetrack's tangential size over the copper
+ * @param taper whether a wedge's sides widen outwards
  * @param cornerMm wanted fillet radius on the centre line; absent: the outline's default
  * @param padMm pad of eye vias and rim nodes
  * @param viaCount vias side by side at every joint
@@ -26,6 +27,7 @@ public record CoilSize(
     OptionalDouble widthMm,
     double trackMm,
     double spaceMm,
+    boolean taper,
     OptionalDouble cornerMm,
     double padMm,
     double holeMm,

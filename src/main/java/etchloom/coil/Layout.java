@@ -77,6 +77,8 @@ final class Layout {
     Path path = inward.path().mirrored().reversed();
     List<Integer> turnOf = new ArrayList<>(inward.turnOf());
     Collections.reverse(turnOf);
-    return new CoilPlan.Spiral(path, turnOf);
+    List<Double> widths = new ArrayList<>(inward.widthsMm());
+    Collections.reverse(widths);
+    return new CoilPlan.Spiral(path, turnOf, widths);
   }
 }

@@ -12,16 +12,13 @@ import java.util.List;
 final class WedgeSpiral {
   private final CoilSize size;
   private final WedgeTurns turns;
-  private final Point leftRay;
-  private final Point rightRay;
   private final PathBuilder path;
   private final List<Integer> turnOf = new ArrayList<>();
+  private final List<Double> widths = new ArrayList<>();
 
   private WedgeSpiral(CoilSize size, WedgeTurns turns, double startRad) {
     this.size = size;
     this.turns = turns;
-    leftRay = Point.polar(1, size.halfSpanRad());
-    rightRay = leftRay.mirrored();
     path = new PathBuilder(Point.polar(size.nodeRadiusMm(), startRad));
   }
 
@@ -43,7 +40,8 @@ final class WedgeSpiral {
     }
     s.exit(last, turns.eyeRadius(eye));
     s.label(last);
-    return new CoilPlan.Spiral(s.path.build(), s.turnOf);
+    boolean even = s.widths.stream().allMatch(w -> w == size.trackMm());
+    return new CoilPlan.Spiral(s.path.build(), s.turnOf, even ? List.of() : s.widths);
   }
 
   /** Whether the lead from a node lands on the outer arc before its left corner. */
@@ -51,7 +49,7 @@ final class WedgeSpiral {
     double lead = leadFillet(size, turns);
     double r = turns.fillet(0);
     double landing = startRad + Math.asin(lead / (turns.outerArc(0) + lead));
-    return landing < turns.cornerAngle(turns.side(0), turns.outerArc(0), r);
+    return landing < turns.flank(0, turns.outerArc(0), r).cornerRad();
   }
 
   private static double leadFillet(CoilSize size, WedgeTurns turns) {
@@ -63,6 +61,20 @@ final class WedgeSpiral {
     while (turnOf.size() < path.size()) {
       turnOf.add(turn + 1);
     }
+    width(size.trackMm());
+  }
+
+  /** Of all pieces that have none yet. */
+  private void width(double mm) {
+    while (widths.size() < path.size()) {
+      widths.add(mm);
+    }
+  }
+
+  private void side(Point end, double widthMm) {
+    width(size.trackMm());
+    path.lineTo(end);
+    width(widthMm);
   }
 
   /** Radially in from the node, and counter-clockwise on to the outer arc. */
@@ -81,17 +93,21 @@ final class WedgeSpiral {
     double d = turns.side(i);
     double r = turns.fillet(i);
     double arc = turns.outerArc(i);
-    double a = turns.cornerAngle(d, arc, r);
-    path.arcTo(Point.polar(arc, a), Point.ORIGIN, true);
-    path.arcTo(left(WedgeTurns.outerTangent(d, arc, r), d), Point.polar(arc - r, a), true);
-    path.lineTo(left(turns.innerTangent(i), d));
+    Flank f = turns.flank(i, arc, r);
+    int n = f.at().size();
+    path.arcTo(Point.polar(arc, f.cornerRad()), Point.ORIGIN, true);
+    path.arcTo(f.at().get(n - 1), Point.polar(arc - r, f.cornerRad()), true);
+    for (int k = n - 1; k > 0; k--) {
+      side(f.at().get(k - 1), f.widthMm().get(k));
+    }
+    side(turns.left(turns.innerTangent(i), d), f.widthMm().get(0));
   }
 
   /** Round the inner end, by the inner arc or by one fillet at the apex. */
   private void innerEnd(int i) {
     double d = turns.side(i);
     double r = turns.fillet(i);
-    Point rightFoot = right(turns.innerTangent(i), d);
+    Point rightFoot = turns.left(turns.innerTangent(i), d).mirrored();
     if (!turns.hasInnerArc(i)) {
       path.arcTo(rightFoot, new Point(turns.apexRadius(i), 0), true);
       return;
@@ -105,30 +121,21 @@ final class WedgeSpiral {
 
   /** Up the right side and round the corner on to the next turn's outer arc. */
   private void rightSide(int i) {
-    double d = turns.side(i);
-    double r = turns.fillet(i + 1);
-    double arc = turns.outerArc(i + 1);
-    corner(d, arc, r);
+    corner(i, turns.outerArc(i + 1), turns.fillet(i + 1));
   }
 
   /** Up the right side as far as the eye via, and in to it along an arc about the shaft. */
   private void exit(int last, double eyeRadius) {
-    corner(turns.side(last), eyeRadius, turns.exitFillet());
+    corner(last, eyeRadius, turns.exitFillet());
     path.arcTo(new Point(eyeRadius, 0), Point.ORIGIN, true);
   }
 
-  private void corner(double d, double arc, double r) {
-    double a = turns.cornerAngle(d, arc, r);
-    path.lineTo(right(WedgeTurns.outerTangent(d, arc, r), d));
+  private void corner(int turn, double arc, double r) {
+    Flank f = turns.flank(turn, arc, r);
+    for (int k = 0; k < f.at().size(); k++) {
+      side(f.at().get(k).mirrored(), f.widthMm().get(k));
+    }
+    double a = f.cornerRad();
     path.arcTo(Point.polar(arc, -a), Point.polar(arc - r, -a), true);
-  }
-
-  /** The point {@code along} the left ray and {@code d} inside it. */
-  private Point left(double along, double d) {
-    return leftRay.times(along).plus(new Point(leftRay.y(), -leftRay.x()).times(d));
-  }
-
-  private Point right(double along, double d) {
-    return rightRay.times(along).plus(new Point(-rightRay.y(), rightRay.x()).times(d));
   }
 }

@@ -1,5 +1,7 @@
 package etchloom.coil;
 
+import etchloom.geometry.Point;
+import java.util.List;
 import java.util.Optional;
 
 /**
@@ -16,10 +18,12 @@ final class WedgeTurns {
   private final double sinHalf;
   private final double cosHalf;
   private final double[] fillet;
+  private final Optional<WedgeFan> fan;
 
-  private WedgeTurns(CoilSize size, double[] fillet) {
+  private WedgeTurns(CoilSize size, double[] fillet, Optional<WedgeFan> fan) {
     this.size = size;
     this.fillet = fillet;
+    this.fan = fan;
     sinHalf = Math.sin(size.halfSpanRad());
     cosHalf = Math.cos(size.halfSpanRad());
   }
@@ -33,7 +37,7 @@ final class WedgeTurns {
    * @return empty where {@code count} turns do not fit
    */
   static Optional<WedgeTurns> fit(CoilSize size, int count) {
-    WedgeTurns t = new WedgeTurns(size, new double[count]);
+    WedgeTurns t = new WedgeTurns(size, new double[count], Optional.empty());
     double least = size.pitchMm() / 2;
     double cap = size.wedgeCornerMm();
     for (int i = count - 1; i >= 0; i--) {
@@ -44,6 +48,15 @@ final class WedgeTurns {
       cap = Math.min(size.wedgeCornerMm(), t.fillet[i] + size.pitchMm());
     }
     return t.joins() ? Optional.of(t) : Optional.empty();
+  }
+
+  /**
+   * The same turns with sides that widen outwards.
+   *
+   * @param share of the full bend, 0 to 1
+   */
+  WedgeTurns widening(double share) {
+    return new WedgeTurns(size, fillet, WedgeFan.of(size, this, share));
   }
 
   private double largest(int turn, double low, double high, int count) {
@@ -176,6 +189,23 @@ final class WedgeTurns {
   /** Angle of that fillet's centre from the axis; NaN where there is none. */
   double cornerAngle(double d, double arc, double r) {
     return size.halfSpanRad() - Math.asin((d + r) / (arc - r));
+  }
+
+  /**
+   * A turn's left side, up to its fillet of radius {@code r} under an arc of radius {@code arc}.
+   */
+  Flank flank(int turn, double arc, double r) {
+    double d = side(turn);
+    double along = outerTangent(d, arc, r);
+    if (fan.isPresent() && fan.get().bends(turn, along)) {
+      return fan.get().flank(turn, arc, r);
+    }
+    return new Flank(cornerAngle(d, arc, r), List.of(left(along, d)), List.of(size.trackMm()));
+  }
+
+  /** The point {@code along} the left ray and {@code d} inside it. */
+  Point left(double along, double d) {
+    return new Point(along * cosHalf + d * sinHalf, along * sinHalf - d * cosHalf);
   }
 
   /** The other leg of a right triangle; NaN where there is none. */

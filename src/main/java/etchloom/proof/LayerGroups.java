@@ -2,6 +2,7 @@ package etchloom.proof;
 
 import etchloom.geometry.Point;
 import etchloom.proof.ProofExpectation.Pad;
+import etchloom.proof.ProofExpectation.Stroke;
 import etchloom.proof.ProofExpectation.Track;
 import etchloom.proof.copper.DrawnPiece;
 import etchloom.proof.image.ApertureShape;
@@ -109,7 +110,9 @@ final class LayerGroups {
     List<DrawnPiece> out = new ArrayList<>();
     for (int g = 0; g < groups.size(); g++) {
       for (Track t : groups.get(g).tracks()) {
-        DrawnPiece.add(t.path(), t.widthMm(), g, out);
+        for (Stroke s : t.strokes()) {
+          DrawnPiece.add(s.path(), s.widthMm(), g, out);
+        }
       }
       for (int p : groups.get(g).pads()) {
         if (pad(p).diameterMm() > 0) {
@@ -124,9 +127,10 @@ final class LayerGroups {
   List<DrawnObject> objects() {
     List<DrawnObject> out = new ArrayList<>();
     for (Track t : tracks) {
-      out.add(
-          new DrawnObject.Stroke(
-              t.path(), new ApertureShape.Circle(t.widthMm(), 0), true, Attributes.NONE, 0));
+      for (Stroke s : t.strokes()) {
+        ApertureShape pen = new ApertureShape.Circle(s.widthMm(), 0);
+        out.add(new DrawnObject.Stroke(s.path(), pen, true, Attributes.NONE, 0));
+      }
     }
     for (Group g : groups) {
       for (int p : g.pads()) {

@@ -161,8 +161,9 @@ final class LayerProof {
     for (Track t : group.tracks()) {
       int last = -1;
       List<Point> bare = new ArrayList<>();
-      for (Segment s : t.path().segments()) {
-        int n = (int) Math.min(100_000, 1 + Math.ceil(4 * s.lengthMm() / t.widthMm()));
+      for (Segment s : t.strokes().stream().flatMap(x -> x.path().segments().stream()).toList()) {
+        double width = t.strokes().get(0).widthMm();
+        int n = (int) Math.min(100_000, 1 + Math.ceil(4 * s.lengthMm() / width));
         for (int k = 0; k <= n; k++) {
           Point at = s.at(k / (double) n);
           int here = copper.islandAt(Nm.of(at.x()), Nm.of(at.y()));

@@ -62,11 +62,23 @@ public record ProofExpectation(
   }
 
   /**
+   * @param strokes its stretches of one width, each beginning where the one before it ends
    * @param from number of the pad where the path starts
    * @param to number of the pad where it ends
    */
-  public record Track(
-      int layer, Path path, double widthMm, int from, int to, String net, String what) {}
+  public record Track(int layer, List<Stroke> strokes, int from, int to, String net, String what) {
+    public Track {
+      strokes = List.copyOf(strokes);
+    }
+
+    /** A track of one width. */
+    public Track(int layer, Path path, double widthMm, int from, int to, String net, String what) {
+      this(layer, List.of(new Stroke(path, widthMm)), from, to, net, what);
+    }
+  }
+
+  /** A stretch of one width, with round ends. */
+  public record Stroke(Path path, double widthMm) {}
 
   public record Disc(Point at, double diameterMm) {}
 
@@ -82,8 +94,7 @@ public record ProofExpectation(
                 c ->
                     new Track(
                         c.layer(),
-                        c.path(),
-                        c.widthMm(),
+                        c.stretches().stream().map(s -> new Stroke(s.path(), s.widthMm())).toList(),
                         c.fromJoint(),
                         c.toJoint(),
                         c.net(),

@@ -3,11 +3,13 @@ package etchloom.receive;
 import etchloom.artwork.Artwork;
 import etchloom.artwork.Conductor;
 import etchloom.artwork.Joint;
+import etchloom.artwork.Stackup;
 import etchloom.electric.machine.spread.Tolerances;
 import etchloom.electric.resistance.Copper;
 import etchloom.electric.resistance.Currents;
 import etchloom.electric.resistance.Edge;
 import etchloom.electric.resistance.Network;
+import etchloom.electric.resistance.Tracks;
 import etchloom.spec.FabRules;
 import java.util.List;
 import java.util.Map;
@@ -68,8 +70,8 @@ record Parts(double[] track, double[] barrel, double[][] apart) {
       }
       track[pair] += lost;
       Conductor own = artwork.conductors().get(edge.conductor().getAsInt());
-      double cut = artwork.stackup().copper().get(own.layer() - 1).undercutMm();
-      double byTrack = tolerance.track() * own.widthMm() / (own.widthMm() - cut);
+      Stackup.Copper copper = artwork.stackup().copper().get(own.layer() - 1);
+      double byTrack = tolerance.track() * Tracks.sensitivity(own, copper);
       double sigma = Tolerances.LOCAL / 3 * Math.hypot(byTrack, tolerance.copper());
       int group = own.what().coil() * artwork.layers() + own.layer();
       groups.computeIfAbsent(group, g -> new double[1])[0] += lost / c.ohm() * sigma;

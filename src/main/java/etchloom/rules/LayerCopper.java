@@ -83,7 +83,7 @@ final class LayerCopper {
       double from = k == 0 ? hidden(s, first, c) : 0;
       double to = length - (k == path.size() - 1 ? hidden(s.reversed(), last, c) : 0);
       if (to - from > SLIVER_MM) {
-        Piece whole = new Piece(s, c.widthMm() / 2, c.id(), k, at, at + length, -1);
+        Piece whole = new Piece(s, c.widthMm(k) / 2, c.id(), k, at, at + length, -1);
         cut(out, whole, at + from, at + to);
       }
       at += length;

@@ -75,7 +75,7 @@ final class Walk {
     for (Conductor c : tracks) {
       double length = c.path().lengthMm();
       lengthMm[c.id()] = length;
-      widest = Math.max(widest, c.widthMm());
+      widest = Math.max(widest, c.widestMm());
       narrowestMm[c.fromJoint()] = Math.min(narrowestMm[c.fromJoint()], c.widthMm());
       narrowestMm[c.toJoint()] = Math.min(narrowestMm[c.toJoint()], c.widthMm());
       hops.computeIfAbsent(c.fromJoint(), k -> new ArrayList<>()).add(new Hop(c.toJoint(), length));

@@ -46,9 +46,6 @@ public final class Codes {
   /** A text that cannot be printed, is too long, or leaves nothing for file names. */
   public static final String TEXT = "text";
 
-  /** The key is known, but what it asks for is not built yet. */
-  public static final String NOT_BUILT_YET = "not-built-yet";
-
   /** A key that does not go with what another key says. */
   public static final String KEY_CONFLICT = "key-conflict";
 

@@ -29,7 +29,7 @@ record CoilDraft(
   static final Map<String, Boolean> LAYERS = Words.of("series", false).and("parallel", true).map();
 
   /** Whether the track widens where the wedge has room for it. */
-  private static final Map<String, Boolean> TAPER = Words.of("off", false).and("on", true).map();
+  static final Map<String, Boolean> TAPER = Words.of("off", false).and("on", true).map();
 
   static CoilDraft read(Section s) {
     CoilDraft draft =
@@ -80,6 +80,14 @@ record CoilDraft(
     if (outline.isPresent() && outline.get() == CoilOutline.ROUND && section.has("corner")) {
       section.error(Codes.KEY_CONFLICT, "corner", "a coil of outline round has no corners");
     }
+    if (taper && outline.isPresent() && outline.get() != CoilOutline.WEDGE) {
+      section.error(
+          Codes.KEY_CONFLICT,
+          "taper",
+          "only the sides of a wedge run apart and have room to widen; with outline "
+              + Words.wordFor(OUTLINES, outline.get())
+              + " it can only be `off`");
+    }
     boolean racetrack = outline.isPresent() && outline.get() == CoilOutline.RACETRACK;
     if (racetrack) {
       section.missing("width", "a length: the tangential size over the copper");
@@ -99,6 +107,7 @@ record CoilDraft(
         track,
         space,
         corner,
-        parallelLayers);
+        parallelLayers,
+        taper);
   }
 }

@@ -86,6 +86,7 @@ public record Spec(
   /**
    * @param turns absent: as many as fit
    * @param corner fillet radius on the centre line; absent: the default of the outline
+   * @param taper whether a wedge's sides widen outwards
    */
   public record Coil(
       CoilOutline outline,
@@ -96,7 +97,8 @@ public record Spec(
       double trackMm,
       double spaceMm,
       OptionalDouble cornerMm,
-      boolean parallelLayers) {}
+      boolean parallelLayers,
+      boolean taper) {}
 
   public record Rim(double trackMm) {}
 

@@ -109,6 +109,9 @@ public final class SpecWriter {
     mm(y, "space", c.spaceMm());
     optional(y, "corner", c.cornerMm(), Dimension.LENGTH, "mm");
     y.value("layers", Words.wordFor(CoilDraft.LAYERS, c.parallelLayers()));
+    if (c.taper()) {
+      y.value("taper", Words.wordFor(CoilDraft.TAPER, true));
+    }
   }
 
   private static void via(YamlText y, Via v) {

@@ -61,7 +61,9 @@ final class DxfWriter {
     DxfWriter w = new DxfWriter(art, true);
     for (int layer = 1; layer <= art.layers(); layer++) {
       for (Conductor c : art.conductorsOn(layer)) {
-        w.dxf.polyline(copper(layer), bulges(c.path()), false, Grid.nm(c.widthMm()));
+        for (Conductor.Stretch s : c.stretches()) {
+          w.dxf.polyline(copper(layer), bulges(s.path()), false, Grid.nm(s.widthMm()));
+        }
       }
       for (Joint j : art.padsOn(layer)) {
         w.circle(copper(layer), j.at(), j.padMm());

@@ -65,7 +65,9 @@ final class GerberLayers {
             true);
     for (Conductor c : art.conductorsOn(layer)) {
       f.net(Optional.of(c.net()));
-      f.draw(gerber(c.path()), "Conductor", Grid.nm(c.widthMm()));
+      for (Conductor.Stretch s : c.stretches()) {
+        f.draw(gerber(s.path()), "Conductor", Grid.nm(s.widthMm()));
+      }
     }
     for (Joint j : art.padsOn(layer)) {
       f.net(Optional.of(j.net()));

@@ -5,7 +5,6 @@ import etchloom.artwork.Coil;
 import etchloom.artwork.Conductor;
 import etchloom.geometry.Grid;
 import etchloom.geometry.Point;
-import etchloom.geometry.Segment;
 import java.util.ArrayList;
 import java.util.List;
 
@@ -47,8 +46,9 @@ final class SvgPhases {
     for (Coil coil : art.coils()) {
       for (int id : coil.conductors()) {
         Conductor c = art.conductors().get(id);
-        for (Segment s : c.path().segments()) {
-          least = Math.min(least, s.end().norm() - c.widthMm() / 2);
+        for (int k = 0; k < c.path().segments().size(); k++) {
+          double to = c.path().segments().get(k).end().norm();
+          least = Math.min(least, to - c.widthMm(k) / 2);
         }
       }
     }

@@ -93,7 +93,9 @@ final class SvgWriter {
     String colour = colour(layer, art.layers());
     lines(colour);
     for (Conductor c : art.conductorsOn(layer)) {
-      stroke(c.path(), c.widthMm(), c.what().describe(-1));
+      for (Conductor.Stretch s : c.stretches()) {
+        stroke(s.path(), s.widthMm(), c.what().describe(-1));
+      }
     }
     out.append("</g>\n<g fill=\"").append(colour).append("\">\n");
     for (Joint j : art.padsOn(layer)) {

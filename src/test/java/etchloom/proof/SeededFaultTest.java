@@ -614,7 +614,7 @@ class SeededFaultTest {
     ProofExpectation e = ProofExpectation.of(wheel);
     List<ProofExpectation.Track> tracks = new java.util.ArrayList<>(e.tracks());
     ProofExpectation.Track own = tracks.get(c.id());
-    List<Segment> longer = new java.util.ArrayList<>(own.path().segments());
+    List<Segment> longer = new java.util.ArrayList<>(c.path().segments());
     longer.add(new Line(c.path().end(), bridge.start()));
     longer.add(bridge);
     longer.add(bridge.reversed());
@@ -624,7 +624,7 @@ class SeededFaultTest {
         new ProofExpectation.Track(
             1,
             new etchloom.geometry.Path(longer),
-            own.widthMm(),
+            c.widthMm(),
             own.from(),
             own.to(),
             own.net(),
@@ -647,7 +647,7 @@ class SeededFaultTest {
           "%ADD9"
               + i % 10
               + "C,"
-              + own.widthMm()
+              + c.widthMm()
               + "*%\n%TO.N,WINDING*%\nD9"
               + i % 10
               + "*\n"

@@ -155,6 +155,7 @@ final class Boards {
             TRACK,
             spaceMm,
             OptionalDouble.empty(),
+            false,
             false),
         new Spec.Rim(0.4),
         new Spec.Via(0.3, 0.6, 1),

@@ -283,7 +283,8 @@ class RoundTripTest {
           of(c.trackMm()),
           of(c.spaceMm()),
           c.outline() == Spec.CoilOutline.ROUND ? c.cornerMm() : OptionalDouble.of(of(c.trackMm())),
-          c.parallelLayers());
+          c.parallelLayers(),
+          c.taper());
     }
 
     private Spec.Board of(Spec.Board b) {

@@ -107,6 +107,7 @@ public final class Specs {
             s.trackMm(),
             s.spaceMm(),
             OptionalDouble.empty(),
+            false,
             false),
         new Spec.Rim(2 * s.trackMm()),
         new Spec.Via(s.holeMm(), s.padMm(), 1),

@@ -25,32 +25,49 @@ final class BoardCopper {
   /** Longest filament over the track's width: about as long as the gaps to the next turns. */
   private static final double LONGEST = 4;
 
+  /**
+   * Widths of a track that widens count as the nearest in this ratio: over its length the errors,
+   * at most a tenth, cancel, and the number of sections, whose distances cost its square, stays
+   * small.
+   */
+  private static final double CLASS_RATIO = 1.2;
+
   private final Artwork artwork;
   private final List<CrossSection> sections = new ArrayList<>();
+  private final Map<CrossSection, Integer> numbers = new HashMap<>();
   private final int[] sectionOf;
 
   BoardCopper(Artwork artwork) {
     this.artwork = artwork;
     sectionOf = new int[artwork.conductors().size()];
-    Map<CrossSection, Integer> known = new HashMap<>();
     for (Conductor c : artwork.conductors()) {
-      CrossSection s = section(c);
-      Integer at = known.putIfAbsent(s, sections.size());
-      if (at == null) {
-        at = sections.size();
-        sections.add(s);
+      sectionOf[c.id()] = number(c, c.widthMm());
+      if (c.tapered()) {
+        c.stretches().forEach(s -> number(c, classMm(c, s.widthMm())));
       }
-      sectionOf[c.id()] = at;
     }
   }
 
-  private CrossSection section(Conductor c) {
+  private static double classMm(Conductor c, double widthMm) {
+    double steps = Math.rint(Math.log(widthMm / c.widthMm()) / Math.log(CLASS_RATIO));
+    return c.widthMm() * Math.pow(CLASS_RATIO, steps);
+  }
+
+  /** A section's number, which it gets where it is new. */
+  private int number(Conductor c, double widthMm) {
     Stackup stackup = artwork.stackup();
     Stackup.Copper copper = stackup.copper().get(c.layer() - 1);
-    return new CrossSection(
-        Section.meanWidthMm(c.widthMm(), copper),
-        copper.thicknessMm(),
-        stackup.heightMm(c.layer()));
+    CrossSection s =
+        new CrossSection(
+            Section.meanWidthMm(widthMm, copper),
+            copper.thicknessMm(),
+            stackup.heightMm(c.layer()));
+    Integer known = numbers.putIfAbsent(s, sections.size());
+    if (known != null) {
+      return known;
+    }
+    sections.add(s);
+    return sections.size() - 1;
   }
 
   /**
@@ -75,7 +92,14 @@ final class BoardCopper {
   /** A conductor's filaments; a positive current runs along its path. */
   void add(int conductor, double ampere, Filaments out) {
     Conductor c = artwork.conductors().get(conductor);
-    flattening(c).add(c.path(), sectionOf[conductor], ampere, out);
+    if (!c.tapered()) {
+      flattening(c.widthMm()).add(c.path(), sectionOf[conductor], ampere, out);
+      return;
+    }
+    for (Conductor.Stretch s : c.stretches()) {
+      int section = number(c, classMm(c, s.widthMm()));
+      flattening(s.widthMm()).add(s.path(), section, ampere, out);
+    }
   }
 
   /** A straight way from one joint to another in the plane and with the section of a conductor. */
@@ -83,11 +107,11 @@ final class BoardCopper {
     Point from = artwork.joints().get(fromJoint).at();
     Point to = artwork.joints().get(toJoint).at();
     Conductor c = artwork.conductors().get(like);
-    flattening(c).addLine(from, to, sectionOf[like], ampere, out);
+    flattening(c.widthMm()).addLine(from, to, sectionOf[like], ampere, out);
   }
 
-  private static Flattening flattening(Conductor c) {
-    return new Flattening(CHORD_ERROR * c.widthMm(), LONGEST * c.widthMm());
+  private static Flattening flattening(double widthMm) {
+    return new Flattening(CHORD_ERROR * widthMm, LONGEST * widthMm);
   }
 
   /** The stretches of plated holes that carry a share of the current. */

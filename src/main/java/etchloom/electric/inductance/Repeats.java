@@ -97,7 +97,10 @@ final class Repeats {
     for (int i = 0; i < some.size(); i++) {
       Conductor a = art.conductors().get(some.get(i));
       Conductor b = art.conductors().get(others.get(i));
-      if (a.layer() != b.layer() || a.widthMm() != b.widthMm() || !turned(a, b, rad)) {
+      if (a.layer() != b.layer()
+          || a.widthMm() != b.widthMm()
+          || !a.widthsMm().equals(b.widthsMm())
+          || !turned(a, b, rad)) {
         return false;
       }
     }

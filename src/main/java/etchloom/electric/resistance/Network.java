@@ -62,9 +62,7 @@ public final class Network {
     for (Conductor c : conductors) {
       Node from = new Node(c.fromJoint(), c.layer());
       Node to = new Node(c.toJoint(), c.layer());
-      double area =
-          variation.trackAreaMm2(c.widthMm(), artwork.stackup().copper().get(c.layer() - 1));
-      double ohm = Section.ohm(c.path().lengthMm(), area, tempC);
+      double ohm = Tracks.ohm(c, artwork.stackup().copper().get(c.layer() - 1), variation, tempC);
       edges.add(new Edge(from, to, ohm, OptionalInt.of(c.id())));
       nodes.add(from);
       nodes.add(to);

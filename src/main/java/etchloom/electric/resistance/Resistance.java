@@ -4,6 +4,7 @@ import etchloom.artwork.Artwork;
 import etchloom.artwork.Coil;
 import etchloom.artwork.Conductor;
 import etchloom.artwork.Joint;
+import etchloom.artwork.Stackup;
 import etchloom.electric.resistance.ResistanceFigures.CoilLayer;
 import etchloom.electric.resistance.ResistanceFigures.CopperLayer;
 import etchloom.electric.resistance.ResistanceFigures.Limits;
@@ -48,9 +49,9 @@ public final class Resistance {
 
   private static CoilLayer coilLayer(Artwork artwork, int id) {
     Conductor c = artwork.conductors().get(id);
-    double area = Section.trackAreaMm2(c.widthMm(), artwork.stackup().copper().get(c.layer() - 1));
-    double mm = c.path().lengthMm();
-    return new CoilLayer(c.layer(), mm, Section.ohm(mm, area, Copper.REFERENCE_C));
+    Stackup.Copper copper = artwork.stackup().copper().get(c.layer() - 1);
+    double ohm = Tracks.ohm(c, copper, Copper.REFERENCE_C);
+    return new CoilLayer(c.layer(), c.path().lengthMm(), ohm);
   }
 
   private static List<CopperLayer> copperLayers(Artwork artwork) {

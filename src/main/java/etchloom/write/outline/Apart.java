@@ -20,9 +20,10 @@ final class Apart {
   static List<Path> of(Artwork art, int layer) {
     List<Path> out = new ArrayList<>();
     for (Conductor c : art.conductorsOn(layer)) {
-      for (Segment s : c.path().segments()) {
+      for (int k = 0; k < c.path().segments().size(); k++) {
+        Segment s = c.path().segments().get(k);
         if (!s.start().equals(s.end())) {
-          out.add(round(s, c.widthMm() / 2).mapped(Grid::snap));
+          out.add(round(s, c.widthMm(k) / 2).mapped(Grid::snap));
         }
       }
     }

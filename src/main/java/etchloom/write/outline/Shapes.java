@@ -37,7 +37,7 @@ final class Shapes {
   Shapes(Artwork art, int layer) {
     discs(art, layer);
     for (Conductor c : art.conductorsOn(layer)) {
-      track(c);
+      c.stretches().forEach(this::track);
     }
     for (int i = 0; i < centres.size(); i++) {
       touching.add(new ArrayList<>(4));
@@ -86,8 +86,10 @@ final class Shapes {
       radius.merge(j.at(), j.padMm() / 2, Math::max);
     }
     for (Conductor c : art.conductorsOn(layer)) {
-      radius.merge(c.path().start(), c.widthMm() / 2, Math::max);
-      radius.merge(c.path().end(), c.widthMm() / 2, Math::max);
+      for (Conductor.Stretch s : c.stretches()) {
+        radius.merge(s.path().start(), s.widthMm() / 2, Math::max);
+        radius.merge(s.path().end(), s.widthMm() / 2, Math::max);
+      }
     }
     radius.forEach(
         (at, r) -> {
@@ -98,7 +100,7 @@ final class Shapes {
         });
   }
 
-  private void track(Conductor c) {
+  private void track(Conductor.Stretch c) {
     double half = c.widthMm() / 2;
     List<Segment> path = new ArrayList<>(c.path().segments().size());
     for (Segment s : c.path().segments()) {
@@ -107,6 +109,9 @@ final class Shapes {
       }
     }
     int n = path.size();
+    if (n == 0) {
+      return;
+    }
     int[] forward = new int[n];
     int[] back = new int[n];
     List<Segment> reversed = new ArrayList<>(n);

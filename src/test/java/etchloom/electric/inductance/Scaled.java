@@ -56,6 +56,7 @@ final class Scaled {
         c.id(),
         c.layer(),
         2 * c.widthMm(),
+        c.widthsMm().stream().map(w -> 2 * w).toList(),
         c.path().mapped(p -> p.times(2)),
         c.fromJoint(),
         c.toJoint(),

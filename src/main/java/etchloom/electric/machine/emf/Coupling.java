@@ -5,10 +5,12 @@ import etchloom.artwork.Coil;
 import etchloom.artwork.Conductor;
 import etchloom.artwork.Joint;
 import etchloom.artwork.Phase;
+import etchloom.artwork.Stackup;
 import etchloom.electric.field.AxialField;
 import etchloom.electric.field.RadialField;
 import etchloom.electric.resistance.Currents;
 import etchloom.electric.resistance.Edge;
+import etchloom.electric.resistance.Section;
 import etchloom.geometry.Path;
 import etchloom.geometry.Segment;
 import java.util.ArrayList;
@@ -35,7 +37,7 @@ public final class Coupling {
     coils(integrator);
     for (Conductor c : artwork.conductors()) {
       if (tracks[c.id()] == null) {
-        tracks[c.id()] = integrator.along(c.layer(), c.path());
+        tracks[c.id()] = along(integrator, c);
       }
     }
   }
@@ -60,17 +62,27 @@ public final class Coupling {
         Conductor model = artwork.conductors().get(first.conductors().get(i));
         boolean again = c.id() != model.id() && repeats(model, c, turn);
         tracks[c.id()] =
-            again
-                ? tracks[model.id()].rotated(field.polePairs(), turn)
-                : integrator.along(c.layer(), c.path());
+            again ? tracks[model.id()].rotated(field.polePairs(), turn) : along(integrator, c);
       }
     }
+  }
+
+  private TrackIntegral along(PathIntegrator integrator, Conductor c) {
+    if (!c.tapered()) {
+      return integrator.along(c.layer(), c.path());
+    }
+    Stackup.Copper copper = artwork.stackup().copper().get(c.layer() - 1);
+    double least = Section.meanWidthMm(c.widthMm(), copper);
+    return integrator.along(
+        c.layer(), c.path(), k -> Math.pow(Section.meanWidthMm(c.widthMm(k), copper) / least, 3));
   }
 
   private static boolean repeats(Conductor model, Conductor c, double turnRad) {
     Path a = model.path();
     Path b = c.path();
-    if (model.layer() != c.layer() || a.segments().size() != b.segments().size()) {
+    if (model.layer() != c.layer()
+        || !model.widthsMm().equals(c.widthsMm())
+        || a.segments().size() != b.segments().size()) {
       return false;
     }
     for (int i = 0; i < a.segments().size(); i++) {
@@ -143,7 +155,10 @@ public final class Coupling {
     return tracks[conductor].series(field.polePairs());
   }
 
-  /** {@code ∫ b² dl} along a conductor for the order 2i + 1, T²·m. */
+  /**
+   * {@code ∫ b² (w/w₀)³ dl} along a conductor for the order 2i + 1, T²·m: w its mean width, w₀ the
+   * least of it.
+   */
   public double squareTeslaMetre(int conductor, int i) {
     return tracks[conductor].square(i) * 1e-3;
   }

@@ -5,6 +5,7 @@ import etchloom.electric.field.GaussRule;
 import etchloom.geometry.Path;
 import etchloom.geometry.Point;
 import etchloom.geometry.Segment;
+import java.util.function.IntToDoubleFunction;
 
 /**
  * Integrates the axial field along flat paths: {@code dλ/dθ = ∮ r Bz dr}, lines and arcs exact.
@@ -31,6 +32,7 @@ final class PathIntegrator {
   private double[] re;
   private double[] im;
   private double[] squares;
+  private double counts;
 
   PathIntegrator(AxialField field, double panel) {
     this.field = field;
@@ -39,11 +41,20 @@ final class PathIntegrator {
   }
 
   TrackIntegral along(int layer, Path path) {
+    return along(layer, path, k -> 1);
+  }
+
+  /**
+   * @param share by which the square of the field counts on a segment
+   */
+  TrackIntegral along(int layer, Path path, IntToDoubleFunction share) {
     int n = field.orders();
     re = new double[n];
     im = new double[n];
     squares = new double[n];
-    for (Segment s : path.segments()) {
+    for (int k = 0; k < path.segments().size(); k++) {
+      Segment s = path.segments().get(k);
+      counts = share.applyAsDouble(k);
       if (s.<Boolean>match(l -> false, a -> a.centre().norm() < CENTRED_MM)) {
         field.amplitudes(layer, s.start().norm(), b);
         addSquares(s.lengthMm());
@@ -73,7 +84,7 @@ final class PathIntegrator {
 
   private void addSquares(double lengthMm) {
     for (int i = 0; i < b.length; i++) {
-      squares[i] += b[i] * b[i] * lengthMm;
+      squares[i] += b[i] * b[i] * lengthMm * counts;
     }
   }
 

@@ -3,7 +3,7 @@ package etchloom.electric.machine.emf;
 /**
  * The rotor's field integrated along one conductor, entry i of each for the odd order ν = 2i + 1:
  * {@code G = ∫ r b e^(iνPφ) dr}, Wb, whose part of dλ/dθ is {@code Re Σ G e^(−iνPθ)}, and {@code ∫
- * b² dl}, T²·mm.
+ * b² dl}, T²·mm, in which wider stretches count by the cube of their width.
  */
 final class TrackIntegral {
   private final double[] re;

@@ -42,7 +42,7 @@ public final class EddyLoss {
         double turns = (2 * i + 1) * coupling.polePairs() * w / 2;
         sum[c.layer() - 1][i] += turns * turns / 6 * area * coupling.squareTeslaMetre(c.id(), i);
       }
-      widest = Math.max(widest, c.widthMm());
+      widest = Math.max(widest, c.widestMm());
     }
     pads(artwork, coupling, sum);
     for (double[] layer : sum) {

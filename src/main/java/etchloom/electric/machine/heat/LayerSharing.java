@@ -8,7 +8,7 @@ import etchloom.electric.machine.emf.FluxSeries;
 import etchloom.electric.resistance.Chains;
 import etchloom.electric.resistance.Copper;
 import etchloom.electric.resistance.Currents;
-import etchloom.electric.resistance.Section;
+import etchloom.electric.resistance.Tracks;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Map;
@@ -61,9 +61,8 @@ public final class LayerSharing {
     for (List<Conductor> some : between.values()) {
       List<Layer> group = new ArrayList<>();
       for (Conductor c : some) {
-        double area =
-            Section.trackAreaMm2(c.widthMm(), artwork.stackup().copper().get(c.layer() - 1));
-        double ohm = Section.ohm(c.path().lengthMm(), area, Copper.REFERENCE_C);
+        double ohm =
+            Tracks.ohm(c, artwork.stackup().copper().get(c.layer() - 1), Copper.REFERENCE_C);
         double share = Math.abs(currents.ofConductor(c.id()));
         group.add(new Layer(c.layer(), c.id(), share, 1.0 / some.size(), ohm));
       }

@@ -8,9 +8,11 @@ import etchloom.electric.resistance.Currents;
 import etchloom.electric.resistance.Edge;
 import etchloom.electric.resistance.Network;
 import etchloom.electric.resistance.Section;
+import etchloom.electric.resistance.Tracks;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Map;
+import java.util.Optional;
 import java.util.TreeMap;
 
 /**
@@ -27,14 +29,21 @@ final class PairParts {
    * @param layer from 1; 0 for barrels
    * @param coil from 1; 0 for rim and barrels
    * @param sizeMm a track's width, or a hole's diameter
+   * @param tapered the track whose width changes; empty where it is the same all along
    */
-  record Group(String phase, int layer, int coil, double sizeMm) implements Comparable<Group> {
+  record Group(String phase, int layer, int coil, double sizeMm, Optional<Conductor> tapered)
+      implements Comparable<Group> {
+    private int track() {
+      return tapered.map(Conductor::id).orElse(-1);
+    }
+
     @Override
     public int compareTo(Group o) {
       int byLayer = Integer.compare(layer, o.layer);
       int byCoil = byLayer != 0 ? byLayer : Integer.compare(coil, o.coil);
       int bySize = byCoil != 0 ? byCoil : Double.compare(sizeMm, o.sizeMm);
-      return bySize != 0 ? bySize : phase.compareTo(o.phase);
+      int byTrack = bySize != 0 ? bySize : Integer.compare(track(), o.track());
+      return byTrack != 0 ? byTrack : phase.compareTo(o.phase);
     }
   }
 
@@ -86,11 +95,16 @@ final class PairParts {
   private static Group group(Artwork artwork, Edge edge) {
     if (edge.barrel()) {
       double hole = artwork.joints().get(edge.from().joint()).hole().orElseThrow();
-      return new Group("", 0, 0, hole);
+      return new Group("", 0, 0, hole, Optional.empty());
     }
     Conductor c = artwork.conductors().get(edge.conductor().getAsInt());
     boolean coil = c.what().coil() > 0;
-    return new Group(coil ? c.what().phase() : "", c.layer(), c.what().coil(), c.widthMm());
+    return new Group(
+        coil ? c.what().phase() : "",
+        c.layer(),
+        c.what().coil(),
+        c.widthMm(),
+        Optional.of(c).filter(Conductor::tapered));
   }
 
   List<Group> groups() {
@@ -156,7 +170,11 @@ final class PairParts {
       double p = stackup.platingMm();
       return Section.barrelAreaMm2(g.sizeMm(), p) / Section.barrelAreaMm2(g.sizeMm(), p * plating);
     }
-    double cut = stackup.copper().get(g.layer() - 1).undercutMm();
+    Stackup.Copper layer = stackup.copper().get(g.layer() - 1);
+    if (g.tapered().isPresent()) {
+      return Tracks.factor(g.tapered().get(), layer, track) / copper;
+    }
+    double cut = layer.undercutMm();
     return (g.sizeMm() - cut) / (g.sizeMm() * track - cut) / copper;
   }
 }
