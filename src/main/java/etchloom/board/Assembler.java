@@ -25,6 +25,7 @@ import java.util.ArrayList;
 import java.util.List;
 import java.util.Locale;
 import java.util.Optional;
+import java.util.OptionalDouble;
 
 /** The one way from a spec to the artwork: winding, coils, rim, board. */
 public final class Assembler {
@@ -57,6 +58,12 @@ public final class Assembler {
     return a.problems.any()
         ? Staged.failed(a.problems.list())
         : Staged.of(out.orElseThrow(), a.problems.list());
+  }
+
+  /** The widest even track in which the coils still have room for so many turns, if any wider. */
+  public static OptionalDouble widestTrackMm(Spec spec, FabRules fab, int turns) {
+    CoilSize size = new Assembler(spec, fab, Positions.unknown(""), false).coilSize();
+    return Coils.widestTrackMm(size, turns);
   }
 
   private Optional<Assembly> assemble() {

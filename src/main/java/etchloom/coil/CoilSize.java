@@ -35,6 +35,30 @@ public record CoilSize(
     double holeGapMm,
     double rimTrackMm) {
 
+  /** The same with another track, all along, and a corner that it allows. */
+  CoilSize withTrackMm(double mm) {
+    double least = (mm + spaceMm) / 2;
+    return new CoilSize(
+        outline,
+        coils,
+        layers,
+        parallelLayers,
+        innerRadiusMm,
+        outerRadiusMm,
+        widthMm,
+        mm,
+        spaceMm,
+        false,
+        cornerMm.isPresent()
+            ? OptionalDouble.of(Math.max(cornerMm.getAsDouble(), least))
+            : cornerMm,
+        padMm,
+        holeMm,
+        viaCount,
+        holeGapMm,
+        rimTrackMm);
+  }
+
   public double pitchMm() {
     return trackMm + spaceMm;
   }

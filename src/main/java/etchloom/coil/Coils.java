@@ -1,11 +1,14 @@
 package etchloom.coil;
 
 import java.util.Optional;
+import java.util.OptionalDouble;
 
 /** Coils of any outline. */
 public final class Coils {
   /** More turns than any board holds; bounds the search. */
   private static final int MOST_TURNS = 2000;
+
+  private static final double TRACK_STEP_MM = 0.01;
 
   private Coils() {}
 
@@ -26,6 +29,25 @@ public final class Coils {
       }
     }
     return low;
+  }
+
+  /**
+   * The widest track, even all along, in which a coil still has room for its turns, in steps of a
+   * hundredth of a millimetre; empty where that is no wider than its own.
+   */
+  public static OptionalDouble widestTrackMm(CoilSize size, int turns) {
+    int low = (int) Math.floor(size.trackMm() / TRACK_STEP_MM + 1e-9);
+    int high = (int) Math.ceil((size.outerRadiusMm() - size.innerRadiusMm()) / TRACK_STEP_MM);
+    int own = low;
+    while (high - low > 1) {
+      int mid = (low + high) / 2;
+      if (draw(size.withTrackMm(mid * TRACK_STEP_MM), turns).isPresent()) {
+        low = mid;
+      } else {
+        high = mid;
+      }
+    }
+    return low > own ? OptionalDouble.of(low * TRACK_STEP_MM) : OptionalDouble.empty();
   }
 
   /** How much a coil is too wide for its sector; a wedge never is. */

@@ -44,6 +44,15 @@ enum Basis {
       "m/2 times pole pairs times flux linkage, current in phase with the back-EMF (i_d = 0)",
       "amplitude-invariant dq transform",
       "mean torque; for one phase it pulsates between nought and twice the mean"),
+  TAPER(
+      "Tracks that widen",
+      "the same turns drawn anew in even tracks; same formulas",
+      "the same spec drawn without taper, and again with the widest even track, in hundredths of a"
+          + " millimetre, in which its turns still fit; each with its own resistance, torque and"
+          + " eddy loss by the formulas of this page",
+      "the drawn copper",
+      "a widening track is a row of even pieces; the spreading of the current at their steps is"
+          + " left out, some ten-thousandths of a square each"),
   LOSS(
       "Losses",
       "I2R hot, eddy loss of a strip; copper only: no iron, bearings, drive",

@@ -61,10 +61,15 @@ final class CopperArea {
   private double areaMm2() {
     double sum = 0;
     for (Conductor c : artwork.conductorsOn(layer)) {
-      sum += c.widthMm() * c.path().lengthMm();
       List<Segment> pieces = c.path().segments();
-      for (int i = 1; i < pieces.size(); i++) {
-        sum += corner(c.widthMm(), pieces.get(i - 1).tangent(1), pieces.get(i).tangent(0));
+      for (int i = 0; i < pieces.size(); i++) {
+        double w = c.widthMm(i);
+        sum += w * pieces.get(i).lengthMm();
+        if (i > 0 && c.widthMm(i - 1) != w) {
+          sum += step(c.widthMm(i - 1), w);
+        } else if (i > 0) {
+          sum += corner(w, pieces.get(i - 1).tangent(1), pieces.get(i).tangent(0));
+        }
       }
     }
     for (Joint j : artwork.joints()) {
@@ -113,6 +118,13 @@ final class CopperArea {
     }
     double width = tracks.stream().mapToDouble(Conductor::widthMm).max().orElse(0);
     return Math.max(pad, width) / 2;
+  }
+
+  /** The wider of two stretches in line has a round end over the narrower, and beside it. */
+  private static double step(double a, double b) {
+    double r = Math.max(a, b) / 2;
+    double h = Math.min(a, b) / 2;
+    return r * r * Math.acos(h / r) - h * Math.sqrt(r * r - h * h);
   }
 
   /** A corner by θ gains a sector outside and loses a kite inside. */

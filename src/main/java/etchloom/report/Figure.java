@@ -30,6 +30,7 @@ record Figure(
     INDUCTANCE("Inductance"),
     EMF("Back-EMF"),
     TORQUE("Torque"),
+    TAPER("Tracks that widen, against even ones"),
     LOSS("Losses"),
     THERMAL("Temperature"),
     DRIVE("Drive"),

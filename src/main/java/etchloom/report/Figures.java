@@ -42,6 +42,7 @@ final class Figures {
     f.resistance();
     f.inductance();
     f.field();
+    f.taper();
     f.heat();
     f.drive();
     f.generator();
@@ -125,6 +126,40 @@ final class Figures {
     add(t, b, "torque.newtonMetrePerAmperePeak", "for each ampere peak", k, FIELD);
     add(t, b, "torque.newtonMetrePerAmpereRms", "for each ampere rms", k, FIELD);
     add(t, b, "torque.motorConstant", "motor constant", Form.MOTOR_CONSTANT, FIELD);
+  }
+
+  private static boolean tapers(Results r) {
+    return r.taper().isPresent();
+  }
+
+  private static boolean couldBeWider(Results r) {
+    return r.taper().isPresent() && r.taper().get().wider().isPresent();
+  }
+
+  private void taper() {
+    Group g = Group.TAPER;
+    Basis b = Basis.TAPER;
+    List<SpecKey> none = List.of();
+    Form percent = Form.PERCENT;
+    String change = "Percent";
+    add(g, b, "taper.widestMm", "widest track", Form.MILLIMETRE, none, Figures::tapers);
+    add(g, b, "taper.resistance" + change, "resistance", percent, none, Figures::tapers);
+    add(g, b, "taper.torque" + change, "torque for each ampere", percent, FIELD, Figures::tapers);
+    add(g, b, "taper.motorConstant" + change, "motor constant", percent, FIELD, Figures::tapers);
+    variant("taper.plain.", "even track", Figures::tapers);
+    variant("taper.wider.", "wider even track", Figures::couldBeWider);
+  }
+
+  private void variant(String stem, String name, Predicate<Results> applies) {
+    Group g = Group.TAPER;
+    Basis b = Basis.TAPER;
+    List<SpecKey> none = List.of();
+    Form k = Form.MOTOR_CONSTANT;
+    add(g, b, stem + "trackMm", name, Form.MILLIMETRE, none, applies);
+    add(g, b, stem + "terminalOhm", name + ", terminals", Form.OHM, none, applies);
+    add(g, b, stem + "motorConstant", name + ", motor const.", k, FIELD, applies);
+    List<SpecKey> eddy = field(SpecKey.SPEED);
+    add(g, b, stem + "eddyWatt", name + ", eddy loss", Form.WATT, eddy, applies);
   }
 
   private void heat() {

@@ -4,6 +4,7 @@ import etchloom.units.Numbers;
 
 /** How a figure is shown to people. */
 enum Form {
+  MILLIMETRE("mm"),
   OHM("ohm"),
   HENRY("H"),
   WEBER("Wb"),
@@ -47,6 +48,7 @@ enum Form {
     double v = n.doubleValue();
     return switch (this) {
       case RPM -> Numbers.trimmed(v, 0) + " rpm";
+      case MILLIMETRE -> Numbers.trimmed(v, 3) + " mm";
       case PERCENT -> Numbers.fixed(v, 2) + " %";
       case RATIO -> Numbers.fixed(v, 4);
       case CELSIUS -> Numbers.trimmed(v, 1) + " C";

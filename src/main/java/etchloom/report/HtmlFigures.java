@@ -97,7 +97,7 @@ final class HtmlFigures {
     layers();
     groups(Group.RESISTANCE, Group.INDUCTANCE, Group.EMF);
     machine.emf();
-    groups(Group.TORQUE, Group.GENERATOR, Group.SPREAD);
+    groups(Group.TORQUE, Group.TAPER, Group.GENERATOR, Group.SPREAD);
   }
 
   private void layers() {

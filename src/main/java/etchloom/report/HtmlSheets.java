@@ -70,6 +70,9 @@ final class HtmlSheets {
   void basis() {
     h.open("dl", "class=\"basis\"");
     for (Basis b : Basis.values()) {
+      if (b == Basis.TAPER && r.taper().isEmpty()) {
+        continue;
+      }
       h.open("div", "id=\"" + b.anchor() + "\"").element("dt", b.title());
       line("Method", b.method());
       line("Source", b.source());

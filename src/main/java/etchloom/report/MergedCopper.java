@@ -35,7 +35,9 @@ final class MergedCopper {
   static double areaMm2(Artwork artwork, int layer) {
     List<Geometry> all = new ArrayList<>();
     for (Conductor c : artwork.conductorsOn(layer)) {
-      all.add(track(c.path(), c.widthMm()));
+      for (Conductor.Stretch s : c.stretches()) {
+        all.add(track(s.path(), s.widthMm()));
+      }
     }
     for (Joint j : artwork.padsOn(layer)) {
       Geometry middle = GEOMETRY.createPoint(coordinate(j.at()));

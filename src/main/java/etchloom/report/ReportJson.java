@@ -56,6 +56,7 @@ public final class ReportJson {
             .put("winding", WindingTree.of(r))
             .put("geometry", GeometryTree.of(r))
             .put("resistance", ResistanceTree.of(r));
+    r.taper().ifPresent(t -> out.put("taper", TaperTree.of(t)));
     r.inductance().ifPresent(l -> out.put("inductance", MachineTree.inductance(l)));
     r.machine().ifPresent(m -> machine(out, m, r.winding().marks()));
     out.put("verdict", verdict(r));

@@ -3,6 +3,7 @@ package etchloom.report;
 import etchloom.artwork.Artwork;
 import etchloom.electric.inductance.InductanceFigures;
 import etchloom.electric.machine.MachineFigures;
+import etchloom.electric.machine.TaperFigures;
 import etchloom.electric.resistance.ResistanceFigures;
 import etchloom.proof.ProofReport;
 import etchloom.rules.RuleReport;
@@ -20,6 +21,7 @@ import java.util.Optional;
  * @param artwork before rounding to the grid
  * @param inductance empty where it was not worked out
  * @param machine what the machine does; empty where it was not worked out
+ * @param taper what tracks that widen gain; empty where they do not
  * @param proof what the written files were found to say; empty where none were written
  */
 public record Results(
@@ -32,6 +34,7 @@ public record Results(
     ResistanceFigures resistance,
     Optional<InductanceFigures> inductance,
     Optional<MachineFigures> machine,
+    Optional<TaperFigures> taper,
     Optional<ProofReport> proof) {
 
   /** What every run has. */
@@ -53,25 +56,42 @@ public record Results(
         resistance,
         Optional.empty(),
         Optional.empty(),
+        Optional.empty(),
         Optional.empty());
   }
 
   /** The same with the winding's inductances and what the machine does. */
   public Results withElectrics(InductanceFigures henries, MachineFigures figures) {
-    return with(Optional.of(henries), Optional.of(figures), proof);
+    return with(Optional.of(henries), Optional.of(figures), taper, proof);
+  }
+
+  /** The same with what its tracks gain by widening. */
+  public Results withTaper(Optional<TaperFigures> gain) {
+    return with(inductance, machine, gain, proof);
   }
 
   /** The same with what reading the written files back has shown. */
   public Results withProof(ProofReport report) {
-    return with(inductance, machine, Optional.of(report));
+    return with(inductance, machine, taper, Optional.of(report));
   }
 
   private Results with(
       Optional<InductanceFigures> henries,
       Optional<MachineFigures> figures,
+      Optional<TaperFigures> gain,
       Optional<ProofReport> report) {
     return new Results(
-        toolVersion, spec, fab, artwork, winding, rules, resistance, henries, figures, report);
+        toolVersion,
+        spec,
+        fab,
+        artwork,
+        winding,
+        rules,
+        resistance,
+        henries,
+        figures,
+        gain,
+        report);
   }
 
   /** Plated holes less terminals. */

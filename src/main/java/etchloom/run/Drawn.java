@@ -20,6 +20,7 @@ public record Drawn(
             assembly.winding(),
             rules,
             electrics.resistance())
-        .withElectrics(electrics.inductance(), electrics.machine());
+        .withElectrics(electrics.inductance(), electrics.machine())
+        .withTaper(electrics.taper());
   }
 }

@@ -8,17 +8,22 @@ import etchloom.electric.inductance.InductanceFigures;
 import etchloom.electric.machine.InductanceValues;
 import etchloom.electric.machine.Machine;
 import etchloom.electric.machine.MachineFigures;
+import etchloom.electric.machine.TaperFigures;
 import etchloom.electric.machine.circuit.Circuit;
 import etchloom.electric.resistance.Resistance;
 import etchloom.electric.resistance.ResistanceFigures;
 import etchloom.rules.RuleContext;
 import etchloom.spec.FabRules;
 import etchloom.spec.Spec;
+import java.util.Optional;
 import java.util.OptionalDouble;
 
 /** What the drawn copper does. */
 public record Electrics(
-    ResistanceFigures resistance, InductanceFigures inductance, MachineFigures machine) {
+    ResistanceFigures resistance,
+    InductanceFigures inductance,
+    MachineFigures machine,
+    Optional<TaperFigures> taper) {
 
   static Electrics of(Assembly assembly, Spec spec, FabRules fab) {
     ResistanceFigures ohms = Resistance.of(assembly.artwork(), fab.tolerance());
@@ -35,7 +40,8 @@ public record Electrics(
             henries.terminalHenry());
     MachineFigures machine =
         Machine.of(assembly.artwork(), spec, fab, assembly.winding(), ohms, values);
-    return new Electrics(ohms, henries, machine);
+    return new Electrics(
+        ohms, henries, machine, TaperGain.of(assembly.artwork(), spec, fab, ohms, machine, values));
   }
 
   /** The rotor's iron, as far as the spec tells where it is. */

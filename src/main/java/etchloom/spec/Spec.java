@@ -98,7 +98,42 @@ public record Spec(
       double spaceMm,
       OptionalDouble cornerMm,
       boolean parallelLayers,
-      boolean taper) {}
+      boolean taper) {
+
+    /** The same with so many turns in tracks of one width; corners no sharper than they allow. */
+    private Coil even(double widthMm, int count) {
+      double least = (widthMm + spaceMm) / 2;
+      return new Coil(
+          outline,
+          innerRadiusMm,
+          outerRadiusMm,
+          this.widthMm,
+          OptionalInt.of(count),
+          widthMm,
+          spaceMm,
+          cornerMm.isPresent()
+              ? OptionalDouble.of(Math.max(cornerMm.getAsDouble(), least))
+              : cornerMm,
+          parallelLayers,
+          false);
+    }
+  }
+
+  /** The same board with so many turns in tracks of one width, without taper. */
+  public Spec withEvenTrack(double trackMm, int turns) {
+    return new Spec(
+        title,
+        slug,
+        revision,
+        rotor,
+        winding,
+        coil.even(trackMm, turns),
+        rim,
+        via,
+        board,
+        fab,
+        duty);
+  }
 
   public record Rim(double trackMm) {}
 
