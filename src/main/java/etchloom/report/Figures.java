@@ -141,13 +141,21 @@ final class Figures {
     Basis b = Basis.TAPER;
     List<SpecKey> none = List.of();
     Form percent = Form.PERCENT;
-    String change = "Percent";
+    String change = "ChangePercent";
     add(g, b, "taper.widestMm", "widest track", Form.MILLIMETRE, none, Figures::tapers);
     add(g, b, "taper.resistance" + change, "resistance", percent, none, Figures::tapers);
     add(g, b, "taper.torque" + change, "torque for each ampere", percent, FIELD, Figures::tapers);
     add(g, b, "taper.motorConstant" + change, "motor constant", percent, FIELD, Figures::tapers);
-    variant("taper.plain.", "even track", Figures::tapers);
-    variant("taper.wider.", "wider even track", Figures::couldBeWider);
+    variant("taper.plain", "even track", Figures::tapers);
+    add(
+        g,
+        b,
+        "taper.widerTrackMm",
+        "wider even track",
+        Form.MILLIMETRE,
+        none,
+        Figures::couldBeWider);
+    variant("taper.wider", "wider even track", Figures::couldBeWider);
   }
 
   private void variant(String stem, String name, Predicate<Results> applies) {
@@ -155,11 +163,10 @@ final class Figures {
     Basis b = Basis.TAPER;
     List<SpecKey> none = List.of();
     Form k = Form.MOTOR_CONSTANT;
-    add(g, b, stem + "trackMm", name, Form.MILLIMETRE, none, applies);
-    add(g, b, stem + "terminalOhm", name + ", terminals", Form.OHM, none, applies);
-    add(g, b, stem + "motorConstant", name + ", motor const.", k, FIELD, applies);
+    add(g, b, stem + "TerminalOhm", name + ", terminals", Form.OHM, none, applies);
+    add(g, b, stem + "MotorConstant", name + ", motor const.", k, FIELD, applies);
     List<SpecKey> eddy = field(SpecKey.SPEED);
-    add(g, b, stem + "eddyWatt", name + ", eddy loss", Form.WATT, eddy, applies);
+    add(g, b, stem + "EddyWatt", name + ", eddy loss", Form.WATT, eddy, applies);
   }
 
   private void heat() {

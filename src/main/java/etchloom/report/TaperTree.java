@@ -11,21 +11,27 @@ final class TaperTree {
         new JsonTree()
             .put("widestMm", f.widestMm())
             .put("widths", f.widths())
-            .put("resistancePercent", f.resistancePercent())
-            .put("torquePercent", f.torquePercent())
-            .put("motorConstantPercent", f.motorConstantPercent())
-            .put("plain", variant(f.plain()));
-    f.wider().ifPresent(w -> out.put("wider", variant(w)));
+            .put("resistanceChangePercent", f.resistancePercent())
+            .put("torqueChangePercent", f.torquePercent())
+            .put("motorConstantChangePercent", f.motorConstantPercent());
+    variant(out, "plain", f.plain());
+    f.wider()
+        .ifPresent(
+            w -> {
+              out.put("widerTrackMm", w.trackMm());
+              variant(out, "wider", w);
+            });
     return out;
   }
 
-  private static JsonTree variant(TaperFigures.Variant v) {
-    JsonTree out = new JsonTree().put("trackMm", v.trackMm()).put("terminalOhm", v.terminalOhm());
+  /** Keys that end like no others, so that their ends name them alone. */
+  private static void variant(JsonTree out, String name, TaperFigures.Variant v) {
+    out.put(name + "TerminalOhm", v.terminalOhm());
     v.torque()
         .ifPresent(
             t ->
-                out.put("newtonMetrePerAmperePeak", t.newtonMetrePerAmperePeak())
-                    .put("motorConstant", t.motorConstant()));
-    return out.put("eddyWatt", v.eddyWatt());
+                out.put(name + "NewtonMetrePerAmperePeak", t.newtonMetrePerAmperePeak())
+                    .put(name + "MotorConstant", t.motorConstant()));
+    out.put(name + "EddyWatt", v.eddyWatt());
   }
 }

@@ -5,7 +5,9 @@ import static org.junit.jupiter.api.Assertions.assertTrue;
 
 import etchloom.artwork.Artwork;
 import etchloom.artwork.Conductor;
+import etchloom.artwork.Feature;
 import etchloom.artwork.Phase;
+import etchloom.geometry.Line;
 import etchloom.spec.Positions;
 import etchloom.spec.Spec;
 import etchloom.testing.SampledGap;
@@ -32,7 +34,24 @@ class ShapesTest {
       OptionalInt turns,
       OptionalDouble cornerMm,
       boolean parallel,
-      int vias) {
+      int vias,
+      boolean taper) {
+
+    /** The same with so many turns whose sides widen. */
+    Shape tapering(int count) {
+      return new Shape(
+          outline,
+          coils,
+          layers,
+          innerMm,
+          outerMm,
+          widthMm,
+          OptionalInt.of(count),
+          cornerMm,
+          parallel,
+          vias,
+          true);
+    }
 
     Spec spec() {
       Spec s =
@@ -69,7 +88,7 @@ class ShapesTest {
               c.spaceMm(),
               cornerMm,
               parallel,
-              false),
+              taper),
           s.rim(),
           new Spec.Via(0.3, 0.6, vias),
           s.board(),
@@ -98,7 +117,8 @@ class ShapesTest {
         OptionalInt.empty(),
         corner > 0 ? OptionalDouble.of(corner) : OptionalDouble.empty(),
         parallel,
-        vias);
+        vias,
+        false);
   }
 
   static Stream<Shape> shapes() {
@@ -109,6 +129,12 @@ class ShapesTest {
         shape(wedge, 9, 4, 12, 30, 0, 0, false, 2),
         shape(wedge, 9, 8, 12, 34, 0, 0, true, 3),
         shape(wedge, 6, 16, 16, 40, 0, 0, true, 1),
+        shape(wedge, 9, 2, 6, 22, 0, 0, false, 1).tapering(6),
+        shape(wedge, 9, 4, 12, 30, 0, 0, false, 2).tapering(7),
+        shape(wedge, 9, 8, 12, 34, 0, 0, true, 3).tapering(5),
+        shape(wedge, 6, 16, 16, 40, 0, 0, true, 1).tapering(9),
+        shape(wedge, 6, 6, 16, 40, 0, 2.5, false, 1).tapering(3), // round corners
+        shape(wedge, 9, 2, 12, 30, 0, 0, false, 1).tapering(1),
         shape(round, 9, 2, 15, 29, 0, 0, false, 1),
         shape(round, 9, 4, 17, 33, 0, 0, false, 2),
         shape(round, 6, 16, 20, 50, 0, 0, false, 1),
@@ -148,8 +174,8 @@ class ShapesTest {
       for (int k = 2; k < all.size() - 2; k++) {
         for (int i = 0; i <= 20; i++) {
           double r = all.get(k).at(i / 20.0).norm();
-          most = Math.max(most, r + c.widthMm() / 2);
-          least = Math.min(least, r - c.widthMm() / 2);
+          most = Math.max(most, r + c.widthMm(k) / 2);
+          least = Math.min(least, r - c.widthMm(k) / 2);
         }
       }
     }
@@ -176,6 +202,19 @@ class ShapesTest {
         }
         area += c.path().end().cross(c.path().start()) / 2;
         assertTrue(area > 0 && s.forward(), "L" + c.layer());
+      }
+    }
+  }
+
+  @ParameterizedTest
+  @MethodSource("shapes")
+  void onlyTheSidesOfATaperingWedgeWiden(Shape shape) {
+    for (Conductor c : drawn(shape).conductors()) {
+      boolean spiral = c.what().kind() == Feature.Kind.SPIRAL;
+      assertEquals(shape.taper() && spiral, c.tapered(), c.what().describe(-1));
+      for (int k = 0; k < c.path().segments().size(); k++) {
+        boolean straight = c.path().segments().get(k) instanceof Line;
+        assertTrue(straight || c.widthMm(k) == c.widthMm());
       }
     }
   }

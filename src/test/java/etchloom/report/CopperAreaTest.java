@@ -1,11 +1,14 @@
 package etchloom.report;
 
 import static org.junit.jupiter.api.Assertions.assertEquals;
+import static org.junit.jupiter.api.Assertions.assertTrue;
 
 import etchloom.artwork.Artwork;
 import etchloom.geometry.Point;
 import etchloom.rules.Finding;
 import etchloom.rules.RuleReport;
+import etchloom.spec.Spec;
+import etchloom.testing.Specs;
 import etchloom.testing.ToyBoards;
 import java.util.List;
 import org.junit.jupiter.api.Test;
@@ -31,6 +34,20 @@ class CopperAreaTest {
     for (int layer = 1; layer <= art.layers(); layer++) {
       double merged = MergedCopper.areaMm2(art, layer);
       assertEquals(merged, areas.get(layer - 1), 2e-3 * merged, "L" + layer);
+    }
+  }
+
+  /** Steps of a widening track, and a bend where it begins to widen. */
+  @Test
+  void tracksThatWiden_agreeWithMergedPolygons() {
+    Spec wheel = Specs.spec(Specs.wheel(2));
+    Artwork art = Samples.bare(Specs.turning(wheel, 6, true)).artwork();
+    List<Double> areas = CopperArea.of(art, KEPT);
+    List<Double> even = CopperArea.of(Samples.bare(Specs.turning(wheel, 6, false)).artwork(), KEPT);
+    for (int layer = 1; layer <= art.layers(); layer++) {
+      double merged = MergedCopper.areaMm2(art, layer);
+      assertEquals(merged, areas.get(layer - 1), 2e-4 * merged, "L" + layer);
+      assertTrue(areas.get(layer - 1) > 1.2 * even.get(layer - 1));
     }
   }
 

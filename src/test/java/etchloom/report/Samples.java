@@ -46,7 +46,12 @@ final class Samples {
 
   /** A board whose spec has neither magnet nor duty. */
   static Results bare(Specs.Shape shape) {
-    return of(Specs.spec(shape), Specs.fab());
+    return bare(Specs.spec(shape));
+  }
+
+  /** The same of a whole spec. */
+  static Results bare(Spec spec) {
+    return of(spec, Specs.fab());
   }
 
   private static Results of(Spec spec, etchloom.spec.FabRules fab) {

@@ -94,9 +94,9 @@ class CommandLineValuesTest {
         "coil=3 on the command line: error[wrong-shape]: coil: a group of keys"
             + " belongs here, not one value");
     refused(
-        read("coil.taper=on"),
-        "coil.taper=on on the command line: error[not-built-yet]:"
-            + " coil.taper: not built yet; so far only `taper: off` is");
+        read("coil.taper=yes"),
+        "coil.taper=yes on the command line: error[unknown-word]:"
+            + " coil.taper: 'yes' was found; allowed is off or on");
     String deep = "a.b.c.d.e.f.g.h.i.j.k.l.m.n.o.p.q=1";
     refused(
         read(deep),

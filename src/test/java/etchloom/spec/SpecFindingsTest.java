@@ -39,6 +39,9 @@ class SpecFindingsTest {
     String open = Found.with(WHEEL, "connection: star", "connection: open\n  parallel-paths: 1");
     String off = Found.with(open, "turns: fill", "turns: 12\n  taper: off\n  layers: series");
     assertEquals(List.of(), Found.in(read(off)));
+    String on = Found.with(off, "taper: off", "taper: on");
+    assertEquals(List.of(), Found.in(read(on)));
+    assertTrue(read(on).value().orElseThrow().spec().coil().taper());
     String out = Found.with(WHEEL, "bore: 14 mm", "bore: 14 mm\n  star-point: terminal");
     assertEquals(List.of(), Found.in(read(out)));
   }

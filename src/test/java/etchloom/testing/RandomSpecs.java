@@ -62,10 +62,12 @@ public final class RandomSpecs {
           new int[] {6, 18, 16});
 
   private final Random random;
+  private final Random tapering;
   private final StringBuilder out = new StringBuilder();
 
   private RandomSpecs(long seed) {
     random = new Random(seed);
+    tapering = new Random(~seed);
   }
 
   public static String yaml(long seed) {
@@ -109,6 +111,7 @@ public final class RandomSpecs {
     line("  turns: " + (1 + random.nextInt(4)));
     line("  track: " + mm(between(0.13, 0.35)));
     line("  space: " + mm(between(0.13, 0.3)));
+    taper(2);
     line("via: {hole: 0.3 mm, pad: 0.6 mm}");
     line("board:");
     line("  layers: " + pick(List.of(2, 2, 4)));
@@ -167,6 +170,7 @@ public final class RandomSpecs {
     if (random.nextInt(4) == 0) {
       line("  corner: " + mm(between(0.5, 2.5) * (track + space)));
     }
+    taper(2);
     line("rim: {track: " + mm(track * between(1, 2.5)) + "}");
     line("via: {hole: " + mm(hole) + ", pad: " + mm(pad) + "}");
     line("board:");
@@ -240,6 +244,9 @@ public final class RandomSpecs {
     if (!outline.equals("round") && random.nextInt(4) == 0) {
       line("  corner: " + mm(between(0.5, 2.5) * (track + space)));
     }
+    if (outline.equals("wedge")) {
+      taper(1);
+    }
     line("rim: {track: " + mm(track * between(1, 2)) + "}");
     line("via: {hole: " + mm(hole) + ", pad: " + mm(pad) + ", count: " + vias + "}");
     line("board:");
@@ -253,6 +260,13 @@ public final class RandomSpecs {
             + random.nextInt(360)
             + " deg, pitch: 3.5 mm, hole: 0.9 mm, pad: 1.8 mm}");
     line("fab: " + (layers > 6 ? "fine" : "standard"));
+  }
+
+  /** Sides that widen, in one of so many; drawn apart, so that all else stays as it was. */
+  private void taper(int of) {
+    if (tapering.nextInt(of + 1) == 0) {
+      line("  taper: on");
+    }
   }
 
   private void line(String text) {

@@ -16,7 +16,7 @@ import java.util.Map;
  */
 public final class SampledGap {
   private static final double STEP_MM = 0.05;
-  private static final double CELL_MM = 1.2;
+  private static final double LEAST_CELL_MM = 1.2;
 
   private SampledGap() {}
 
@@ -31,25 +31,31 @@ public final class SampledGap {
     for (Conductor c : art.conductorsOn(layer)) {
       double at = 0;
       double whole = c.path().lengthMm();
-      for (Segment s : c.path().segments()) {
+      for (int k = 0; k < c.path().segments().size(); k++) {
+        Segment s = c.path().segments().get(k);
+        double half = c.widthMm(k) / 2;
         int n = (int) Math.ceil(s.lengthMm() / STEP_MM);
         for (int i = 0; i <= n; i++) {
           double t = i / (double) n;
-          samples.add(new Sample(s.at(t), c.widthMm() / 2, c.id(), at + t * s.lengthMm(), whole));
+          samples.add(new Sample(s.at(t), half, c.id(), at + t * s.lengthMm(), whole));
         }
         at += s.lengthMm();
       }
     }
+    double widest =
+        art.conductorsOn(layer).stream().mapToDouble(Conductor::widestMm).max().orElse(0);
+    double cell = Math.max(LEAST_CELL_MM, widest + spaceMm);
     Map<Long, List<Sample>> cells = new HashMap<>();
-    samples.forEach(s -> cells.computeIfAbsent(key(s.at(), 0, 0), k -> new ArrayList<>()).add(s));
+    samples.forEach(
+        s -> cells.computeIfAbsent(key(s.at(), cell, 0, 0), k -> new ArrayList<>()).add(s));
     Map<Long, List<Joint>> pads = new HashMap<>();
     art.padsOn(layer)
-        .forEach(j -> pads.computeIfAbsent(key(j.at(), 0, 0), k -> new ArrayList<>()).add(j));
+        .forEach(j -> pads.computeIfAbsent(key(j.at(), cell, 0, 0), k -> new ArrayList<>()).add(j));
     Gap best = new Gap(Double.POSITIVE_INFINITY, Point.ORIGIN, "");
     for (Sample s : samples) {
       for (int dx = -1; dx <= 1; dx++) {
         for (int dy = -1; dy <= 1; dy++) {
-          for (Sample o : cells.getOrDefault(key(s.at(), dx, dy), List.of())) {
+          for (Sample o : cells.getOrDefault(key(s.at(), cell, dx, dy), List.of())) {
             if (Math.abs(s.at().x() - o.at().x()) - s.half() - o.half() > best.mm()) {
               continue;
             }
@@ -62,7 +68,7 @@ public final class SampledGap {
       }
       for (int dx = -1; dx <= 1; dx++) {
         for (int dy = -1; dy <= 1; dy++) {
-          for (Joint j : pads.getOrDefault(key(s.at(), dx, dy), List.of())) {
+          for (Joint j : pads.getOrDefault(key(s.at(), cell, dx, dy), List.of())) {
             double gap = s.at().distanceTo(j.at()) - s.half() - j.padMm() / 2;
             if (gap < best.mm() && !joined(art, s, j, spaceMm)) {
               best = new Gap(gap, s.at(), name(art, s) + " / " + j.what());
@@ -122,9 +128,9 @@ public final class SampledGap {
             });
   }
 
-  private static long key(Point p, int dx, int dy) {
-    long x = (long) Math.floor(p.x() / CELL_MM) + dx;
-    long y = (long) Math.floor(p.y() / CELL_MM) + dy;
+  private static long key(Point p, double cell, int dx, int dy) {
+    long x = (long) Math.floor(p.x() / cell) + dx;
+    long y = (long) Math.floor(p.y() / cell) + dy;
     return (x << 32) ^ (y & 0xffffffffL);
   }
 }

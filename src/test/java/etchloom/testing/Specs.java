@@ -130,6 +130,33 @@ public final class Specs {
         Optional.empty());
   }
 
+  /** The same with so many turns, and sides that widen or do not. */
+  public static Spec turning(Spec s, int turns, boolean taper) {
+    Spec.Coil c = s.coil();
+    return new Spec(
+        s.title(),
+        s.slug(),
+        s.revision(),
+        s.rotor(),
+        s.winding(),
+        new Spec.Coil(
+            c.outline(),
+            c.innerRadiusMm(),
+            c.outerRadiusMm(),
+            c.widthMm(),
+            OptionalInt.of(turns),
+            c.trackMm(),
+            c.spaceMm(),
+            c.cornerMm(),
+            c.parallelLayers(),
+            taper),
+        s.rim(),
+        s.via(),
+        s.board(),
+        s.fab(),
+        s.duty());
+  }
+
   /** Common-practice values of a plain fab, made for tests. */
   public static FabRules fab() {
     return new FabRules(
