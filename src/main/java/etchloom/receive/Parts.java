@@ -71,7 +71,7 @@ record Parts(double[] track, double[] barrel, double[][] apart) {
       track[pair] += lost;
       Conductor own = artwork.conductors().get(edge.conductor().getAsInt());
       Stackup.Copper copper = artwork.stackup().copper().get(own.layer() - 1);
-      double byTrack = tolerance.track() * Tracks.sensitivity(own, copper);
+      double byTrack = tolerance.track() * Tracks.sensitivity(Tracks.widths(own), copper);
       double sigma = Tolerances.LOCAL / 3 * Math.hypot(byTrack, tolerance.copper());
       int group = own.what().coil() * artwork.layers() + own.layer();
       groups.computeIfAbsent(group, g -> new double[1])[0] += lost / c.ohm() * sigma;

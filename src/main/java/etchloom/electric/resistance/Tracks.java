@@ -2,6 +2,9 @@ package etchloom.electric.resistance;
 
 import etchloom.artwork.Conductor;
 import etchloom.artwork.Stackup;
+import java.util.List;
+import java.util.SortedMap;
+import java.util.TreeMap;
 
 /**
  * Resistance of whole tracks: their stretches of one width in series.
@@ -20,37 +23,48 @@ public final class Tracks {
 
   static double ohm(Conductor c, Stackup.Copper layer, Variation v, double tempC) {
     double sum = 0;
-    for (Conductor.Stretch s : c.stretches()) {
-      double area = v.trackAreaMm2(s.widthMm(), layer);
-      sum += Section.ohm(s.path().lengthMm(), area, tempC);
+    for (Width w : widths(c)) {
+      sum += Section.ohm(w.lengthMm(), v.trackAreaMm2(w.widthMm(), layer), tempC);
     }
     return sum;
   }
 
-  /** What a track's resistance becomes, as a ratio, when all its widths take a factor. */
-  public static double factor(Conductor c, Stackup.Copper layer, double track) {
-    double cut = layer.undercutMm();
+  /** So much of a track has one width. */
+  public record Width(double widthMm, double lengthMm) {}
+
+  /** A track's widths, the least first. */
+  public static List<Width> widths(Conductor c) {
     if (!c.tapered()) {
-      return (c.widthMm() - cut) / (c.widthMm() * track - cut);
+      return List.of(new Width(c.widthMm(), c.path().lengthMm()));
     }
+    SortedMap<Double, Double> lengths = new TreeMap<>();
+    for (int k = 0; k < c.widthsMm().size(); k++) {
+      lengths.merge(c.widthMm(k), c.path().segments().get(k).lengthMm(), Double::sum);
+    }
+    return lengths.entrySet().stream().map(e -> new Width(e.getKey(), e.getValue())).toList();
+  }
+
+  /** What a track's resistance becomes, as a ratio, when all its widths take a factor. */
+  public static double factor(List<Width> widths, Stackup.Copper layer, double track) {
+    double cut = layer.undercutMm();
     double drawn = 0;
     double made = 0;
-    for (Conductor.Stretch s : c.stretches()) {
-      drawn += s.path().lengthMm() / (s.widthMm() - cut);
-      made += s.path().lengthMm() / (s.widthMm() * track - cut);
+    for (Width w : widths) {
+      drawn += w.lengthMm() / (w.widthMm() - cut);
+      made += w.lengthMm() / (w.widthMm() * track - cut);
     }
     return made / drawn;
   }
 
   /** Relative change of a track's resistance over that of its widths, to first order, positive. */
-  public static double sensitivity(Conductor c, Stackup.Copper layer) {
+  public static double sensitivity(List<Width> widths, Stackup.Copper layer) {
     double cut = layer.undercutMm();
     double ohm = 0;
     double moved = 0;
-    for (Conductor.Stretch s : c.stretches()) {
-      double part = s.path().lengthMm() / (s.widthMm() - cut);
+    for (Width w : widths) {
+      double part = w.lengthMm() / (w.widthMm() - cut);
       ohm += part;
-      moved += part * s.widthMm() / (s.widthMm() - cut);
+      moved += part * w.widthMm() / (w.widthMm() - cut);
     }
     return moved / ohm;
   }

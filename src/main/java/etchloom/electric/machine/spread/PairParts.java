@@ -49,11 +49,13 @@ final class PairParts {
 
   private final Stackup stackup;
   private final List<Group> groups;
+  private final List<List<Tracks.Width>> widths;
   private final double[][] ohm;
 
   private PairParts(Stackup stackup, List<Group> groups, double[][] ohm) {
     this.stackup = stackup;
     this.groups = groups;
+    widths = groups.stream().map(g -> g.tapered().map(Tracks::widths).orElse(List.of())).toList();
     this.ohm = ohm;
   }
 
@@ -172,7 +174,7 @@ final class PairParts {
     }
     Stackup.Copper layer = stackup.copper().get(g.layer() - 1);
     if (g.tapered().isPresent()) {
-      return Tracks.factor(g.tapered().get(), layer, track) / copper;
+      return Tracks.factor(widths.get(group), layer, track) / copper;
     }
     double cut = layer.undercutMm();
     return (g.sizeMm() - cut) / (g.sizeMm() * track - cut) / copper;
