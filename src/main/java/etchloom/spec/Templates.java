@@ -22,7 +22,8 @@ public final class Templates {
           "sample-shaker",
           "blind-drive",
           "tide-meter",
-          "test-bench");
+          "test-bench",
+          "record-player");
   private static final List<String> FAB_NAMES = List.of("economy", "standard", "fine");
 
   /** The starting specs, in the order in which they are listed. */

@@ -15,6 +15,7 @@ import etchloom.electric.field.RadialField;
 import etchloom.electric.machine.emf.Coupling;
 import etchloom.geometry.Line;
 import etchloom.geometry.Path;
+import etchloom.geometry.PathBuilder;
 import etchloom.geometry.Point;
 import java.util.List;
 import java.util.Optional;
@@ -53,6 +54,26 @@ class EddyLossTest {
     public void radialAmplitudes(double radiusMm, double heightMm, double[] out) {
       java.util.Arrays.fill(out, 0);
     }
+  }
+
+  private static Artwork with(Artwork a, Conductor c) {
+    return new Artwork(
+        a.title(),
+        a.slug(),
+        a.revision(),
+        false,
+        a.stackup(),
+        a.profile(),
+        a.joints(),
+        List.of(c),
+        a.mountingHoles(),
+        a.maskTop(),
+        a.maskBottom(),
+        a.legend(),
+        a.coils(),
+        a.phases(),
+        1,
+        0);
   }
 
   private static Artwork track(double padMm) {
@@ -96,6 +117,23 @@ class EddyLossTest {
   void oneMetreOfTrack() {
     double w = 2 * Math.PI * 1000 / 5;
     assertEquals(0.032457181, loss(track(0), 0.6).watt(w, 20), 1e-6 * 0.0325);
+  }
+
+  /** Half the length twice as wide: a strip's loss goes with the cube of its width. */
+  @Test
+  void widerStretches() {
+    Artwork plain = track(0);
+    Conductor c = plain.conductors().get(0);
+    Path path =
+        new PathBuilder(c.path().start())
+            .lineTo(new Point(1000, -250))
+            .lineTo(new Point(1000, 250))
+            .lineTo(c.path().end())
+            .build();
+    Conductor wide = new Conductor(0, 1, 0.3, List.of(0.3, 0.6, 0.3), path, 0, 1, "", c.what());
+    double w = 2 * Math.PI * 1000 / 5;
+    double even = loss(plain, 0.6).watt(w, 20);
+    assertEquals(4.5 * even, loss(with(plain, wide), 0.6).watt(w, 20), 1e-9);
   }
 
   /** Orders add up with the square of their frequency; warm copper loses less. */
