@@ -32,6 +32,9 @@ final class WedgeFan {
   /** A piece's length over its width, at least: round ends then touch the next piece only. */
   private static final double LONG = 1.15;
 
+  /** How often the fan begins a little farther out, where it would begin in a corner. */
+  private static final int SHIFTS = 64;
+
   /** The sharpest bend of all, rad; boards of few turns and large bores would exceed it. */
   private static final double SHARPEST_RAD = 1.5;
 
@@ -71,14 +74,40 @@ final class WedgeFan {
     double start = (channel + n * p * Math.cos(a)) / Math.sin(a);
     // Not before the last turn has left its inner fillet.
     start = Math.max(start, turns.innerTangent(n - 1) + size.trackMm());
-    Point from = inside(a, start, n * p);
-    double room = turns.outerArc(n - 1) - from.x();
-    if (!(room > size.trackMm()) || !(from.y() >= channel - 1e-9)) {
-      return Optional.empty();
+    for (int shift = 0; shift < SHIFTS; shift++) {
+      double last = start + shift * p / 8;
+      Point from = inside(a, last, n * p);
+      double room = turns.outerArc(n - 1) - from.x();
+      if (!(room > size.trackMm())) {
+        return Optional.empty();
+      }
+      double bend = Math.min(SHARPEST_RAD, a + Math.atan2(from.y() - channel, room));
+      WedgeFan fan = new WedgeFan(size, turns, last, share * bend);
+      if (fan.corners()) {
+        return fan.width.length > 1 ? Optional.of(fan) : Optional.empty();
+      }
     }
-    double bend = Math.min(SHARPEST_RAD, a + Math.atan2(from.y() - channel, room));
-    WedgeFan fan = new WedgeFan(size, turns, start, share * bend);
-    return fan.width.length > 1 ? Optional.of(fan) : Optional.empty();
+    return Optional.empty();
+  }
+
+  /** Whether every corner keeps its space to the next turn outside it. */
+  private boolean corners() {
+    int last = kink.length - 1;
+    boolean all = true;
+    for (int i = 0; i <= last; i++) {
+      all &= corner(i, turns.outerArc(i), turns.fillet(i));
+      all &= i == last || corner(i, turns.outerArc(i + 1), turns.fillet(i + 1));
+    }
+    for (int k = 0; k < size.eyes(); k++) {
+      all &= corner(last, turns.eyeRadius(k), turns.exitFillet());
+    }
+    return all;
+  }
+
+  /** A corner too near to where its side bends is on neither the one side of it nor the other. */
+  private boolean corner(int turn, double arc, double r) {
+    return !bends(turn, WedgeTurns.outerTangent(turns.side(turn), arc, r), r)
+        || tangent(turn, arc, r) >= r * Math.tan(stepRad / 4);
   }
 
   /** The point {@code along} a ray from the shaft and {@code in} to its right. */
@@ -106,20 +135,37 @@ final class WedgeFan {
   }
 
   /**
-   * Whether a side that would reach so far without taper, along its ray, gets to where it bends.
+   * Whether a side that without taper would reach so far, along its ray, gets to where it bends. A
+   * fillet of radius r that ends before still keeps clear of the gap's middle line, bent too.
    */
-  boolean bends(int turn, double plainTangent) {
-    return plainTangent > kink[turn];
+  boolean bends(int turn, double plainTangent, double r) {
+    return plainTangent > kink[turn] - r * Math.tan(turn * stepRad / 2);
+  }
+
+  /** How far from its bend a side meets its fillet; negative or NaN where it does not. */
+  private double tangent(int turn, double arc, double r) {
+    Point u = Point.polar(1, rayRad(turn));
+    Point c = bend(turn);
+    double in = c.x() * u.y() - c.y() * u.x();
+    return WedgeTurns.outerTangent(in, arc, r) - c.dot(u);
+  }
+
+  private double rayRad(int turn) {
+    return size.halfSpanRad() - (turn + 0.5) * stepRad;
+  }
+
+  private Point bend(int turn) {
+    return inside(size.halfSpanRad(), kink[turn], turns.side(turn));
   }
 
   /** A turn's side up to its fillet of radius {@code r} under an arc of radius {@code arc}. */
   Flank flank(int turn, double arc, double r) {
-    double ray = size.halfSpanRad() - (turn + 0.5) * stepRad;
+    double ray = rayRad(turn);
     Point u = Point.polar(1, ray);
-    Point c = inside(size.halfSpanRad(), kink[turn], turns.side(turn));
+    Point c = bend(turn);
     double in = c.x() * u.y() - c.y() * u.x();
     double from = c.dot(u);
-    double tangent = WedgeTurns.outerTangent(in, arc, r) - from;
+    double tangent = tangent(turn, arc, r);
     List<Point> at = new ArrayList<>(List.of(c));
     List<Double> widths = new ArrayList<>(List.of(width[0]));
     int last = width.length - 1;

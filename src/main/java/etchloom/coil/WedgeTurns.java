@@ -197,7 +197,7 @@ final class WedgeTurns {
   Flank flank(int turn, double arc, double r) {
     double d = side(turn);
     double along = outerTangent(d, arc, r);
-    if (fan.isPresent() && fan.get().bends(turn, along)) {
+    if (fan.isPresent() && fan.get().bends(turn, along, r)) {
       return fan.get().flank(turn, arc, r);
     }
     return new Flank(cornerAngle(d, arc, r), List.of(left(along, d)), List.of(size.trackMm()));
