@@ -10,10 +10,8 @@ import etchloom.electric.machine.Machine;
 import etchloom.electric.machine.MachineFigures;
 import etchloom.electric.machine.TaperFigures;
 import etchloom.electric.machine.circuit.Circuit;
-import etchloom.electric.resistance.Resistance;
 import etchloom.electric.resistance.ResistanceFigures;
 import etchloom.rules.RuleContext;
-import etchloom.spec.FabRules;
 import etchloom.spec.Spec;
 import java.util.Optional;
 import java.util.OptionalDouble;
@@ -25,8 +23,9 @@ public record Electrics(
     MachineFigures machine,
     Optional<TaperFigures> taper) {
 
-  static Electrics of(Assembly assembly, Spec spec, FabRules fab) {
-    ResistanceFigures ohms = Resistance.of(assembly.artwork(), fab.tolerance());
+  static Electrics of(Laid laid) {
+    Assembly assembly = laid.assembly();
+    Spec spec = laid.spec();
     InductanceFigures henries =
         Inductance.of(
             assembly.artwork(),
@@ -39,9 +38,9 @@ public record Electrics(
             henries.synchronousHenry(),
             henries.terminalHenry());
     MachineFigures machine =
-        Machine.of(assembly.artwork(), spec, fab, assembly.winding(), ohms, values);
-    return new Electrics(
-        ohms, henries, machine, TaperGain.of(assembly.artwork(), spec, fab, ohms, machine, values));
+        Machine.of(
+            assembly.artwork(), spec, laid.fab(), assembly.winding(), laid.resistance(), values);
+    return new Electrics(laid.resistance(), henries, machine, TaperGain.of(laid, machine, values));
   }
 
   /** The rotor's iron, as far as the spec tells where it is. */

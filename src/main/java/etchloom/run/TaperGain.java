@@ -33,13 +33,10 @@ final class TaperGain {
    * @param inductance the board's own; the variants' does not touch what is compared
    * @return empty where the spec asks for no taper
    */
-  static Optional<TaperFigures> of(
-      Artwork artwork,
-      Spec spec,
-      FabRules fab,
-      ResistanceFigures ohms,
-      MachineFigures machine,
-      InductanceValues inductance) {
+  static Optional<TaperFigures> of(Laid laid, MachineFigures machine, InductanceValues inductance) {
+    Artwork artwork = laid.assembly().artwork();
+    Spec spec = laid.spec();
+    FabRules fab = laid.fab();
     if (!spec.coil().taper()) {
       return Optional.empty();
     }
@@ -54,7 +51,7 @@ final class TaperGain {
                 new TaperFigures(
                     spiral.widestMm(),
                     (int) Math.max(1, spiral.widthsMm().stream().distinct().count()),
-                    variant(track, ohms, machine),
+                    variant(track, laid.resistance(), machine),
                     plain,
                     most.isPresent() ? gain.even(most.getAsDouble(), turns) : Optional.empty()));
   }
