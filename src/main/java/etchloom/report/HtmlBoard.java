@@ -63,13 +63,15 @@ final class HtmlBoard {
                 + " to "
                 + OrderLines.mm(s.coil().outerRadiusMm())));
     rows.add(List.of("Turns of a coil on each layer", "" + r.artwork().turnsPerLayer()));
-    rows.add(List.of("Track, space", track(s)));
+    rows.add(List.of("Track, space", track(r)));
     rows.add(List.of("Vias", "" + r.vias()));
     h.table("Sizes", List.of("What", "Value"), rows, 1);
   }
 
-  private static String track(Spec s) {
-    return OrderLines.mm(s.coil().trackMm()) + ", " + OrderLines.mm(s.coil().spaceMm());
+  private static String track(Results r) {
+    Spec.Coil c = r.spec().coil();
+    String widest = r.taper().map(t -> " to " + OrderLines.mm(t.widestMm())).orElse("");
+    return OrderLines.mm(c.trackMm()) + widest + ", " + OrderLines.mm(c.spaceMm());
   }
 
   private static void winding(Html h, Results r) {

@@ -60,6 +60,7 @@ public final class Summary {
         Words.count(r.artwork().turnsPerLayer(), "turn")
             + " a layer, track "
             + OrderLines.mm(spec.coil().trackMm())
+            + r.taper().map(t -> " to " + OrderLines.mm(t.widestMm())).orElse("")
             + ", space "
             + OrderLines.mm(spec.coil().spaceMm())
             + ", "
