@@ -35,7 +35,7 @@ import org.junit.jupiter.api.io.TempDir;
 class MixedSpecsTest {
   private static final Optional<Integer> ASKED =
       Optional.ofNullable(Integer.getInteger("etchloom.seeds"));
-  private static final int SEEDS = ASKED.orElse(90);
+  private static final int SEEDS = ASKED.orElse(120);
   private static final int PROVE_EVERY = ASKED.isPresent() ? 1 : 2;
 
   @TempDir Path folder;
