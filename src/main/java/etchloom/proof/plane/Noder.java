@@ -147,7 +147,7 @@ final class Noder {
       testJoined(i, j, aa || ab, aa || ba);
       return;
     }
-    if (hot && (pass(i, j) | pass(j, i))) {
+    if (hot && (pass(i, j) || pass(j, i))) {
       return; // the pieces are tested again
     }
     int ja = side(i, ax[j], ay[j]);
@@ -185,9 +185,11 @@ final class Noder {
     }
   }
 
-  /** Cuts an edge where it passes an end of the other in less than a pixel. */
+  /**
+   * Cuts an edge where it passes an end of the other in less than a pixel; one cut a round will do.
+   */
   private boolean pass(int i, int j) {
-    return pass(i, ax[j], ay[j]) | pass(i, bx[j], by[j]);
+    return pass(i, ax[j], ay[j]) || pass(i, bx[j], by[j]);
   }
 
   private boolean pass(int i, int x, int y) {
