@@ -74,7 +74,8 @@ public final class App implements Runnable {
     return ExitCode.BAD_INPUT;
   }
 
-  private static int failed(Exception e, Console console) {
+  /** Says what went wrong, and gives the exit code for it. */
+  static int failed(Exception e, Console console) {
     if (e instanceof BadInput b) {
       console.err().print(DiagnosticText.text(b.diagnostics()));
       return ExitCode.BAD_INPUT;

@@ -6,6 +6,7 @@ import etchloom.write.Publisher;
 import java.nio.file.Path;
 import java.util.Optional;
 import java.util.concurrent.Callable;
+import java.util.function.BiConsumer;
 import picocli.CommandLine.Command;
 import picocli.CommandLine.Mixin;
 import picocli.CommandLine.Option;
@@ -35,6 +36,13 @@ final class DrawCommand implements Callable<Integer> {
       description = "write even where rules are broken; the files then say DRAFT")
   private boolean force;
 
+  @Option(
+      names = "--watch",
+      description =
+          "draw again whenever the spec or its rules change; shows the page at an address"
+              + " of this machine; Ctrl-C ends it")
+  private boolean watch;
+
   @Mixin private CommonOptions options;
 
   DrawCommand(Console console) {
@@ -43,6 +51,20 @@ final class DrawCommand implements Callable<Integer> {
 
   @Override
   public Integer call() {
+    if (watch && options.json()) {
+      throw BadInput.of("draw", "usage", "--watch and --json exclude each other");
+    }
+    return watch
+        ? WatchRun.run(spec, options.fab(), this::draw, console)
+        : draw(console, (f, s) -> {});
+  }
+
+  /**
+   * Draws once.
+   *
+   * @param written is given the folder and the set, where one was published
+   */
+  private int draw(Console console, BiConsumer<Path, SetFiles> written) {
     InputFiles.Inputs in = InputFiles.read(spec, options.fab());
     Attempt attempt = Attempt.of(in, false);
     attempt.tell(console);
@@ -57,6 +79,7 @@ final class DrawCommand implements Callable<Integer> {
     Path target = target(in);
     SetFiles set = SetFiles.of(attempt, OrderSheet.created(console));
     publish(target, set);
+    written.accept(target, set);
     if (options.json()) {
       console.print(set.files().get("report.json"));
     } else if (!options.quiet()) {
