@@ -40,7 +40,9 @@ class WatchTest {
       Page first = watch.page("/", b -> b.contains("<h1>Dosing pump drive</h1>"));
       String written = Files.readString(set.resolve("report.html"));
       assertFalse(written.contains("reload"), "the file on the disk has nothing of the server");
-      assertEquals(written.length(), withoutTheServersOwn(first.body()).length(), 100);
+      String policy = "<meta http-equiv=\"Content-Security-Policy\".*?/>\n";
+      String script = "<script src=\"/-/reload.js\".*?</script>\n";
+      assertEquals(written.replaceFirst(policy, ""), first.body().replaceFirst(script, ""));
       for (Map.Entry<String, byte[]> f : files(set).entrySet()) {
         Page page = Page.get(watch.address(), "/" + f.getKey());
         assertEquals(200, page.status(), f.getKey());
@@ -97,7 +99,7 @@ class WatchTest {
       Files.writeString(rules, "ring: nonsense\n" + fab);
       assertTrue(watch.outcome(2).startsWith("not drawn"), watch.out());
       watch.page("/", b -> b.contains("own.yaml:"));
-      String strict = fab.replaceFirst("(?m)^( +via: )\\S+ mm", "$14 mm");
+      String strict = fab.replace("ring: {via: 0.13 mm", "ring: {via: 4 mm");
       assertFalse(strict.equals(fab), "no such rule in\n" + fab);
       Files.writeString(rules, strict);
       assertTrue(watch.outcome(3).startsWith("not drawn"), watch.out());
@@ -160,7 +162,7 @@ class WatchTest {
       InetAddress loopback = InetAddress.getByAddress(new byte[] {127, 0, 0, 1});
       InetSocketAddress at = new InetSocketAddress(loopback, port);
       assertEquals(200, Page.get(at, "/").status());
-      process.destroy();
+      process.toHandle().destroy(); // the process's own method would close its output too
       assertTrue(process.waitFor(20, TimeUnit.SECONDS), "still running");
       assertEquals(null, out.readLine(), "nothing more is said");
       assertThrows(IOException.class, () -> Page.get(at, "/"));
@@ -171,10 +173,6 @@ class WatchTest {
     } finally {
       process.destroyForcibly();
     }
-  }
-
-  private static String withoutTheServersOwn(String page) {
-    return page.replaceFirst("<script src=\"/-/reload.js\".*?</script>\n", "");
   }
 
   private static void same(Map<String, byte[]> one, Map<String, byte[]> other) {
