@@ -45,7 +45,7 @@ final class ReceiveCommand implements Callable<Integer> {
   @Option(
       names = "-o",
       paramLabel = "DIR",
-      description = "folder for receive.csv, receive.json and receive.html; none if left out")
+      description = "folder for the result as csv, json and html; not written if left out")
   private String folder;
 
   @Mixin private CommonOptions options;

@@ -42,7 +42,7 @@ public final class FolderSummary {
     if (!terminals.isEmpty()) {
       page.item("at 20 C", String.join(", ", terminals));
     }
-    Summary.rules(page, rules);
+    Summary.rules(page, rules, rules.notes());
     proof.notes().forEach(n -> page.item("note", n));
     page.blank();
     int broken = rules.findings().size() + proof.findings().size();
