@@ -62,7 +62,10 @@ public final class App implements Runnable {
   }
 
   private static void headings(CommandLine line) {
-    line.getCommandSpec().usageMessage().parameterListHeading("%n").optionListHeading("%nOptions:%n");
+    line.getCommandSpec()
+        .usageMessage()
+        .parameterListHeading("%n")
+        .optionListHeading("%nOptions:%n");
   }
 
   @Override
