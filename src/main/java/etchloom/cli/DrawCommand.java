@@ -4,8 +4,10 @@ import etchloom.report.Summary;
 import etchloom.write.PublishFailure;
 import etchloom.write.Publisher;
 import java.nio.file.Path;
+import java.time.Instant;
 import java.util.Optional;
 import java.util.concurrent.Callable;
+import java.util.concurrent.ForkJoinPool;
 import java.util.function.BiConsumer;
 import picocli.CommandLine.Command;
 import picocli.CommandLine.Mixin;
@@ -55,8 +57,17 @@ final class DrawCommand implements Callable<Integer> {
       throw BadInput.of("draw", "usage", "--watch and --json exclude each other");
     }
     return watch
-        ? WatchRun.run(spec, options.fab(), this::draw, console)
-        : draw(console, (f, s) -> {});
+        ? WatchRun.run(spec, options.fab(), this::drawInPool, console)
+        : drawInPool(console, (f, s) -> {});
+  }
+
+  private int drawInPool(Console console, BiConsumer<Path, SetFiles> written) {
+    ForkJoinPool pool = new ForkJoinPool(Runtime.getRuntime().availableProcessors());
+    try {
+      return pool.submit(() -> draw(console, written)).join();
+    } finally {
+      pool.shutdownNow();
+    }
   }
 
   /**
@@ -66,18 +77,19 @@ final class DrawCommand implements Callable<Integer> {
    */
   private int draw(Console console, BiConsumer<Path, SetFiles> written) {
     InputFiles.Inputs in = InputFiles.read(spec, options.fab());
-    Attempt attempt = Attempt.of(in, false);
-    attempt.tell(console);
-    boolean passed = attempt.passed();
+    Optional<Instant> created = OrderSheet.created(console);
+    Making making = Making.of(in, false, created);
+    making.attempt().tell(console);
+    boolean passed = making.attempt().passed();
     if (!passed && !force) {
       console.err().println("nothing was written; --force writes a set marked DRAFT");
       return ExitCode.REFUSED;
     }
     if (!passed) {
-      attempt = Attempt.of(in, true);
+      making = Making.of(in, true, created);
     }
     Path target = target(in);
-    SetFiles set = SetFiles.of(attempt, OrderSheet.created(console));
+    SetFiles set = making.whole();
     publish(target, set);
     written.accept(target, set);
     if (options.json()) {

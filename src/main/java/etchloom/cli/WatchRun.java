@@ -9,11 +9,10 @@ import java.io.OutputStream;
 import java.io.PrintStream;
 import java.nio.charset.StandardCharsets;
 import java.nio.file.Path;
-import java.util.ArrayList;
-import java.util.List;
 import java.util.Optional;
 import java.util.concurrent.CountDownLatch;
 import java.util.concurrent.TimeUnit;
+import java.util.concurrent.atomic.AtomicReference;
 import java.util.function.BiConsumer;
 
 /** {@code draw --watch}: draws again and again, and shows what came of it on a page. */
@@ -91,36 +90,36 @@ final class WatchRun {
     }
   }
 
+  private record Written(Path folder, SetFiles set) {}
+
   /** What a user is told goes to the terminal and, where nothing was drawn, to the page. */
   private void draw() {
     ByteArrayOutputStream told = new ByteArrayOutputStream();
-    boolean drawn;
+    Optional<Written> written;
     try (PrintStream err = new PrintStream(told, true, StandardCharsets.UTF_8)) {
-      drawn = draw(err);
+      written = draw(err);
     }
     String text = told.toString(StandardCharsets.UTF_8);
     console.err().print(text);
-    if (!drawn) {
+    if (written.isEmpty()) {
       page.trouble(text);
       console.out().println("not drawn; the page says why, the files are as they were");
+      return;
     }
+    SetFiles set = written.get().set();
+    page.show(set.files());
+    String what = set.results().rules().passed() ? "drawn: " : "drawn as DRAFT: ";
+    console.out().println(what + written.get().folder() + ", " + set.files().size() + " files");
   }
 
-  private boolean draw(PrintStream err) {
-    List<SetFiles> written = new ArrayList<>();
+  private Optional<Written> draw(PrintStream err) {
+    AtomicReference<Written> written = new AtomicReference<>();
     try (PrintStream nowhere = new PrintStream(OutputStream.nullOutputStream())) {
       Console own = new Console(nowhere, err, console.environment(), false);
-      draw.once(
-          own,
-          (folder, set) -> {
-            written.add(set);
-            page.show(set.files());
-            String what = set.results().rules().passed() ? "drawn: " : "drawn as DRAFT: ";
-            console.out().println(what + folder + ", " + set.files().size() + " files");
-          });
+      draw.once(own, (folder, set) -> written.set(new Written(folder, set)));
     } catch (RuntimeException e) {
       App.failed(e, new Console(err, err, console.environment(), false));
     }
-    return !written.isEmpty();
+    return Optional.ofNullable(written.get());
   }
 }

@@ -2,6 +2,8 @@ package etchloom.report;
 
 import etchloom.artwork.Artwork;
 import etchloom.artwork.Stackup;
+import etchloom.electric.resistance.ResistanceFigures;
+import etchloom.spec.FabRules;
 import etchloom.spec.Spec;
 import etchloom.units.Numbers;
 import java.util.ArrayList;
@@ -86,8 +88,9 @@ public final class OrderLines {
   }
 
   /** The acceptance limits, one a line; empty where the tolerances could etch a track away. */
-  public static List<String> resistance(Results r) {
-    List<PairLimits> pairs = PairLimits.lines(r);
+  public static List<String> resistance(
+      Artwork art, FabRules.Tolerance tolerance, ResistanceFigures figures) {
+    List<PairLimits> pairs = PairLimits.lines(art, tolerance, figures);
     if (pairs.isEmpty()) {
       return List.of();
     }
@@ -95,7 +98,7 @@ public final class OrderLines {
         "resistance "
             + String.join(", ", pairs.stream().map(PairLimits::pair).toList())
             + " at 20 C: "
-            + ohm(r.resistance().meanTerminalOhm())
+            + ohm(figures.meanTerminalOhm())
             + ", limits "
             + PairLimits.span(pairs));
   }

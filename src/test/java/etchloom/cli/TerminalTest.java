@@ -56,14 +56,19 @@ class TerminalTest {
 
   @ParameterizedTest
   @MethodSource("templates")
-  void aTemplatesSummaryAndReportFit(String name) throws IOException {
+  void aTemplatesSummaryFits_withNotesInShort(String name) throws IOException {
     String spec = template(name).toString();
     Run check = Run.of("check", spec);
     fits(check.out());
     assertTrue(check.out().contains("\nMAY BE MADE: "), check.out());
     assertTrue(check.out().contains("note          voltage: "), check.out());
     assertFalse(check.out().contains("IPC-2221"), "the explanation is for the report");
-    Run report = Run.of("report", spec);
+  }
+
+  @ParameterizedTest
+  @ValueSource(strings = {"dosing-pump", "reaction-wheel", "rover-wheel"})
+  void aReportFits_withAllNotes(String name) throws IOException {
+    Run report = Run.of("report", template(name).toString());
     fits(report.out());
     assertTrue(report.out().contains("IPC-2221 table 6-1"), report.out());
   }
@@ -118,10 +123,10 @@ class TerminalTest {
             "board.thickness=1.6mm",
             "coil.inner-radius=6mm",
             "coil.outer-radius=17mm",
-            "rim.width=3mm");
+            "rim.track=0.5mm");
     fits(survey.out());
     String head = survey.out().lines().findFirst().orElseThrow();
-    assertTrue(head.startsWith("variant  turns   track"), head);
+    assertTrue(head.startsWith("variant  turns  coil.track    space"), "rim.track too: " + head);
     assertTrue(head.contains("motorConstant"), "what was asked for stays: " + head);
     assertTrue(survey.out().contains("error[turns]"), survey.out());
   }
