@@ -24,6 +24,15 @@ record Attempt(InputFiles.Inputs inputs, Drawn drawn, List<Diagnostic> warnings)
     return judged(in, laid(in, draft));
   }
 
+  /** As above, telling a person who looks how long it takes. */
+  static Attempt watched(InputFiles.Inputs in, Console console, boolean quiet) {
+    try (DrawPace pace = new DrawPace(console, quiet, false)) {
+      Staged<Laid> laid = laid(in, false);
+      pace.laid(laid.value().orElseThrow());
+      return judged(in, laid);
+    }
+  }
+
   /**
    * The board as drawn, not judged yet.
    *

@@ -59,7 +59,8 @@ final class CheckCommand implements Callable<Integer> {
     if (circuits != null || !layers.isEmpty()) {
       throw BadInput.of(what, "usage", "--circuits and --layer are for folders and zip files");
     }
-    Attempt attempt = Attempt.of(InputFiles.read(what, options.fab()), false);
+    Attempt attempt =
+        Attempt.watched(InputFiles.read(what, options.fab()), console, options.quiet());
     attempt.tell(console);
     if (options.json()) {
       console.print(ReportJson.writeCheck(attempt.results()));

@@ -63,8 +63,8 @@ final class DrawCommand implements Callable<Integer> {
 
   private int drawInPool(Console console, BiConsumer<Path, SetFiles> written) {
     ForkJoinPool pool = new ForkJoinPool(Runtime.getRuntime().availableProcessors());
-    try {
-      return pool.submit(() -> draw(console, written)).join();
+    try (DrawPace pace = new DrawPace(console, options.quiet(), true)) {
+      return pool.submit(() -> draw(console, written, pace)).join();
     } finally {
       pool.shutdownNow();
     }
@@ -75,10 +75,11 @@ final class DrawCommand implements Callable<Integer> {
    *
    * @param written is given the folder and the set, where one was published
    */
-  private int draw(Console console, BiConsumer<Path, SetFiles> written) {
+  private int draw(Console console, BiConsumer<Path, SetFiles> written, DrawPace pace) {
     InputFiles.Inputs in = InputFiles.read(spec, options.fab());
     Optional<Instant> created = OrderSheet.created(console);
-    Making making = Making.of(in, false, created);
+    Making making = Making.of(in, false, created, pace);
+    pace.clear();
     making.attempt().tell(console);
     boolean passed = making.attempt().passed();
     if (!passed && !force) {
@@ -86,11 +87,12 @@ final class DrawCommand implements Callable<Integer> {
       return ExitCode.REFUSED;
     }
     if (!passed) {
-      making = Making.of(in, true, created);
+      making = Making.of(in, true, created, pace);
     }
     Path target = target(in);
     SetFiles set = making.whole();
     publish(target, set);
+    pace.close();
     written.accept(target, set);
     if (options.json()) {
       console.print(set.files().get("report.json"));

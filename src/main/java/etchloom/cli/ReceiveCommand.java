@@ -60,7 +60,7 @@ final class ReceiveCommand implements Callable<Integer> {
     byte[] bytes =
         InputFiles.bytes(
             InputFiles.path(readings), readings, "readings file", ReadingsReader.MAX_BYTES);
-    Attempt attempt = Attempt.of(in, false);
+    Attempt attempt = Attempt.watched(in, console, options.quiet());
     Drawn drawn = attempt.drawn();
     Staged<Readings> staged = ReadingsReader.read(readings, bytes, Model.marks(drawn));
     Readings read = staged.value().orElseThrow(() -> new BadInput(staged.diagnostics()));
