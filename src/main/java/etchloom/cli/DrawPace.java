@@ -19,6 +19,7 @@ final class DrawPace implements AutoCloseable {
   private final boolean withFiles;
   private double figures;
   private double files;
+  private double done;
 
   DrawPace(Console console, boolean quiet, boolean withFiles) {
     pace = new Pace(console, quiet, withFiles ? "drawing" : "working it out");
@@ -32,25 +33,27 @@ final class DrawPace implements AutoCloseable {
             .sum();
     figures = FIGURES + FIGURES_EACH * segments;
     files = withFiles ? FILES + FILES_EACH * segments : 0;
+    done = 0;
     tell();
   }
 
-  /** The figures are there; what of the files took as long is done as well. */
-  synchronized void judged() {
-    files = Math.max(0, files - figures);
-    figures = 0;
+  /**
+   * @param share of the work on the figures
+   */
+  synchronized void figures(double share) {
+    done = Math.max(done, share * figures);
     tell();
   }
 
   /** The files are written and proved. */
-  synchronized void filed() {
-    figures = Math.max(0, figures - files);
-    files = 0;
+  synchronized void files() {
+    done = Math.max(done, files);
     tell();
   }
 
+  /** Figures and files began together: who is as far as this says how far both are. */
   private void tell() {
-    pace.left(Math.max(figures, files) + (withFiles ? REPORT : 0));
+    pace.left(Math.max(figures, files) + (withFiles ? REPORT : 0) - done);
   }
 
   void clear() {

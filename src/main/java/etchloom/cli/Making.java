@@ -21,14 +21,13 @@ record Making(Attempt attempt, ForkJoinTask<LayerFiles> layers) {
     Laid board = laid.value().orElseThrow();
     pace.laid(board);
     ForkJoinTask<LayerFiles> layers = ForkJoinTask.adapt(() -> files(board, created, pace)).fork();
-    Attempt attempt = Attempt.judged(in, laid);
-    pace.judged();
+    Attempt attempt = Attempt.judged(in, laid, pace);
     return new Making(attempt, layers);
   }
 
   private static LayerFiles files(Laid board, Optional<Instant> created, DrawPace pace) {
     LayerFiles files = LayerFiles.of(board, created);
-    pace.filed();
+    pace.files();
     return files;
   }
 
