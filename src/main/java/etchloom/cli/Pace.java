@@ -2,9 +2,8 @@ package etchloom.cli;
 
 import etchloom.report.Text;
 import java.io.PrintStream;
-import java.util.concurrent.Executors;
-import java.util.concurrent.ScheduledExecutorService;
-import java.util.concurrent.TimeUnit;
+import java.util.Timer;
+import java.util.TimerTask;
 import java.util.function.LongSupplier;
 
 /**
@@ -23,12 +22,13 @@ final class Pace implements AutoCloseable {
   private final String doing;
   private final LongSupplier nanoTime;
   private final long began;
-  private final ScheduledExecutorService ticks;
+  private final Timer ticks;
   private long marked;
   private double left;
   private double usualDone;
   private double tookForIt;
   private boolean shown;
+  private boolean closed;
 
   Pace(Console console, boolean quiet, String doing) {
     this(console, quiet, doing, System::nanoTime);
@@ -40,19 +40,18 @@ final class Pace implements AutoCloseable {
     this.nanoTime = nanoTime;
     began = nanoTime.getAsLong();
     marked = began;
-    ticks =
-        console.terminal() && !quiet
-            ? Executors.newSingleThreadScheduledExecutor(Pace::thread)
-            : null;
+    ticks = console.terminal() && !quiet ? new Timer("pace", true) : null;
     if (ticks != null) {
-      ticks.scheduleAtFixedRate(this::tick, 2 * TICK_MS, TICK_MS, TimeUnit.MILLISECONDS);
+      ticks.schedule(
+          new TimerTask() {
+            @Override
+            public void run() {
+              tick();
+            }
+          },
+          2 * TICK_MS,
+          TICK_MS);
     }
-  }
-
-  private static Thread thread(Runnable r) {
-    Thread t = new Thread(r, "pace");
-    t.setDaemon(true);
-    return t;
   }
 
   /**
@@ -85,7 +84,7 @@ final class Pace implements AutoCloseable {
 
   private synchronized void tick() {
     String line = line();
-    if (!line.isEmpty()) {
+    if (!line.isEmpty() && !closed) {
       err.print("\r" + Text.left(line, COLUMNS));
       err.flush();
       shown = true;
@@ -102,9 +101,10 @@ final class Pace implements AutoCloseable {
   }
 
   @Override
-  public void close() {
+  public synchronized void close() {
+    closed = true;
     if (ticks != null) {
-      ticks.shutdownNow();
+      ticks.cancel();
     }
     clear();
   }
