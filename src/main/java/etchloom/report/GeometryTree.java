@@ -18,6 +18,7 @@ final class GeometryTree {
         .put("spaceMm", spec.coil().spaceMm())
         .putObjects("coilLayers", coilLayers(r.resistance()))
         .putObjects("copperLayers", copperLayers(r))
+        .putObjects("coils", coils(r))
         .put("vias", r.vias())
         .put("boardDiameterMm", spec.board().diameterMm());
   }
@@ -28,6 +29,17 @@ final class GeometryTree {
             c ->
                 new JsonTree()
                     .put("layer", "L" + c.layer())
+                    .put("lengthMm", c.lengthMm())
+                    .put("ohm", c.ohm()))
+        .toList();
+  }
+
+  private static List<JsonTree> coils(Results r) {
+    return r.resistance().coils().stream()
+        .map(
+            c ->
+                new JsonTree()
+                    .put("coil", c.number())
                     .put("lengthMm", c.lengthMm())
                     .put("ohm", c.ohm()))
         .toList();

@@ -5,6 +5,7 @@ import etchloom.artwork.Coil;
 import etchloom.artwork.Conductor;
 import etchloom.artwork.Joint;
 import etchloom.electric.resistance.ResistanceFigures.CoilLayer;
+import etchloom.electric.resistance.ResistanceFigures.CoilOhm;
 import etchloom.electric.resistance.ResistanceFigures.CopperLayer;
 import etchloom.electric.resistance.ResistanceFigures.Limits;
 import etchloom.electric.resistance.ResistanceFigures.PhaseOhm;
@@ -29,6 +30,7 @@ public final class Resistance {
   public static ResistanceFigures of(Artwork artwork, FabRules.Tolerance tolerance) {
     double tempC = Copper.REFERENCE_C;
     Coil coil = artwork.coils().get(0);
+    List<CoilOhm> coils = artwork.coils().stream().map(c -> coil(artwork, c)).toList();
     List<TerminalOhm> terminals = terminals(artwork, Variation.NONE);
     if (terminals.isEmpty()) {
       throw new IllegalStateException("no two terminals are joined");
@@ -36,7 +38,8 @@ public final class Resistance {
     return new ResistanceFigures(
         coil.conductors().stream().map(id -> coilLayer(artwork, id)).toList(),
         copperLayers(artwork),
-        Chains.coil(artwork, coil, tempC).ohm(),
+        coils,
+        coils.get(0).ohm(),
         artwork.phases().stream()
             .map(p -> new PhaseOhm(p.mark(), Chains.phase(artwork, p, tempC).ohm()))
             .toList(),
@@ -44,6 +47,15 @@ public final class Resistance {
         imbalancePercent(ResistanceFigures.lineToLine(terminals)),
         worst(artwork, tolerance),
         rss(artwork, tolerance, terminals));
+  }
+
+  private static CoilOhm coil(Artwork artwork, Coil coil) {
+    double mm = 0;
+    for (int id : coil.copper()) {
+      mm += artwork.conductors().get(id).path().lengthMm();
+    }
+    double ohm = Chains.coil(artwork, coil, Copper.REFERENCE_C).ohm();
+    return new CoilOhm(coil.number(), mm, ohm);
   }
 
   private static CoilLayer coilLayer(Artwork artwork, int id) {

@@ -8,6 +8,7 @@ import java.util.Optional;
  *
  * @param coilLayers the first coil's spirals, L1 first
  * @param copperLayers all tracks of each layer, L1 first
+ * @param coils every coil, by number
  * @param coilOhm the first coil from start to finish, its vias included
  * @param phases each phase from its entry to its exit (see {@link Chains})
  * @param terminals each pair of terminals that copper joins, in the order of the marks
@@ -19,6 +20,7 @@ import java.util.Optional;
 public record ResistanceFigures(
     List<CoilLayer> coilLayers,
     List<CopperLayer> copperLayers,
+    List<CoilOhm> coils,
     double coilOhm,
     List<PhaseOhm> phases,
     List<TerminalOhm> terminals,
@@ -28,6 +30,7 @@ public record ResistanceFigures(
   public ResistanceFigures {
     coilLayers = List.copyOf(coilLayers);
     copperLayers = List.copyOf(copperLayers);
+    coils = List.copyOf(coils);
     phases = List.copyOf(phases);
     terminals = List.copyOf(terminals);
   }
@@ -35,6 +38,13 @@ public record ResistanceFigures(
   public record CoilLayer(int layer, double lengthMm, double ohm) {}
 
   public record CopperLayer(int layer, double trackLengthMm) {}
+
+  /**
+   * One coil from its start to its finish.
+   *
+   * @param lengthMm of all its tracks
+   */
+  public record CoilOhm(int number, double lengthMm, double ohm) {}
 
   public record PhaseOhm(String mark, double ohm) {}
 
