@@ -34,6 +34,17 @@ final class MachineTree {
         .put("rpmPerVolt", f.rpmPerVolt())
         .putObjects("harmonics", f.harmonics().stream().map(MachineTree::harmonic).toList())
         .putObjects("waveform", f.waveform().stream().map(s -> sample(s, marks)).toList())
+        .putObjects(
+            "phases",
+            f.phases().stream()
+                .map(
+                    p ->
+                        new JsonTree()
+                            .put("phase", p.mark())
+                            .put("axisDegrees", Math.toDegrees(p.axisRad()))
+                            .put("restDegrees", Math.toDegrees(p.restRad()))
+                            .put("peakVoltSecondPerRadian", p.peakVoltSecondPerRadian()))
+                .toList())
         .put("deltaCirculatingAmpere", f.deltaCirculatingAmpere());
   }
 

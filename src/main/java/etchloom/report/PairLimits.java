@@ -1,11 +1,7 @@
 package etchloom.report;
 
-import etchloom.electric.resistance.Resistance;
 import etchloom.electric.resistance.ResistanceFigures;
 import etchloom.electric.resistance.ResistanceFigures.TerminalOhm;
-import etchloom.electric.resistance.Variation;
-import etchloom.spec.FabRules;
-import java.util.ArrayList;
 import java.util.List;
 
 /**
@@ -17,20 +13,9 @@ record PairLimits(String pair, double expected, double least, double greatest) {
 
   /** All pairs, the star point's too; none where the tolerances could etch a track away. */
   static List<PairLimits> of(Results r) {
-    if (r.resistance().worst().isEmpty()) {
-      return List.of();
-    }
-    FabRules.Tolerance t = r.fab().tolerance();
-    Variation fat = new Variation(1 + t.track(), 1 + t.copper(), 1 + t.plating());
-    Variation thin = new Variation(1 - t.track(), 1 - t.copper(), 1 - t.plating());
-    List<TerminalOhm> low = Resistance.terminals(r.artwork(), fat);
-    List<TerminalOhm> high = Resistance.terminals(r.artwork(), thin);
-    List<PairLimits> out = new ArrayList<>();
-    for (int i = 0; i < r.resistance().terminals().size(); i++) {
-      TerminalOhm nominal = r.resistance().terminals().get(i);
-      out.add(new PairLimits(nominal.key(), nominal.ohm(), low.get(i).ohm(), high.get(i).ohm()));
-    }
-    return out;
+    return r.resistance().pairs().stream()
+        .map(p -> new PairLimits(p.key(), p.expectedOhm(), p.leastOhm(), p.greatestOhm()))
+        .toList();
   }
 
   /** The same without the star point's pairs. */

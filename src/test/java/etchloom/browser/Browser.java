@@ -24,7 +24,7 @@ import org.openqa.selenium.logging.LogEntry;
 import org.openqa.selenium.logging.LogType;
 import org.openqa.selenium.logging.LoggingPreferences;
 
-/** One headless Chromium for all tests of this run; it ends with the run. */
+/** One headless Chromium for all tests of this run; {@link NeedsBrowser} ends it with the run. */
 public final class Browser {
   private static final List<String> BROWSERS =
       List.of("/usr/bin/chromium", "/usr/bin/chromium-browser", "/usr/bin/google-chrome");
@@ -59,9 +59,16 @@ public final class Browser {
   public static synchronized Browser get() {
     if (only == null) {
       only = new Browser(start());
-      Runtime.getRuntime().addShutdownHook(new Thread(only.driver::quit));
     }
     return only;
+  }
+
+  /** Ends it, if it was started. */
+  public static synchronized void end() {
+    if (only != null) {
+      only.driver.quit();
+      only = null;
+    }
   }
 
   private static ChromeDriver start() {

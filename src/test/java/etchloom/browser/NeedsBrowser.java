@@ -4,6 +4,7 @@ import java.lang.annotation.ElementType;
 import java.lang.annotation.Retention;
 import java.lang.annotation.RetentionPolicy;
 import java.lang.annotation.Target;
+import org.junit.jupiter.api.extension.BeforeAllCallback;
 import org.junit.jupiter.api.extension.ConditionEvaluationResult;
 import org.junit.jupiter.api.extension.ExecutionCondition;
 import org.junit.jupiter.api.extension.ExtendWith;
@@ -20,8 +21,19 @@ import org.junit.jupiter.api.extension.ExtensionContext;
 public @interface NeedsBrowser {
   String REQUIRED = "ETCHLOOM_BROWSER_REQUIRED";
 
-  /** Whether the tests can run at all. */
-  final class Present implements ExecutionCondition {
+  /** Whether the tests can run at all, and that the browser ends when all have run. */
+  final class Present implements ExecutionCondition, BeforeAllCallback {
+    private static final ExtensionContext.Namespace HERE =
+        ExtensionContext.Namespace.create(Present.class);
+
+    @Override
+    public void beforeAll(ExtensionContext context) {
+      context
+          .getRoot()
+          .getStore(HERE)
+          .getOrComputeIfAbsent("end", k -> (AutoCloseable) Browser::end);
+    }
+
     @Override
     public ConditionEvaluationResult evaluateExecutionCondition(ExtensionContext context) {
       return Browser.missing()

@@ -14,6 +14,7 @@ import java.util.Optional;
  * @param terminals each pair of terminals that copper joins, in the order of the marks
  * @param imbalancePercent largest less smallest over the mean, of the terminal pairs without a star
  *     point
+ * @param pairs each pair's own limits, as in {@code worst}; empty where that is
  * @param worst limits where every tolerance is at its end; empty where a track could be etched away
  * @param rss limits where the tolerances' single effects add up as root of the sum of squares
  */
@@ -25,6 +26,7 @@ public record ResistanceFigures(
     List<PhaseOhm> phases,
     List<TerminalOhm> terminals,
     double imbalancePercent,
+    List<PairOhm> pairs,
     Optional<Limits> worst,
     Optional<Limits> rss) {
   public ResistanceFigures {
@@ -33,6 +35,7 @@ public record ResistanceFigures(
     coils = List.copyOf(coils);
     phases = List.copyOf(phases);
     terminals = List.copyOf(terminals);
+    pairs = List.copyOf(pairs);
   }
 
   public record CoilLayer(int layer, double lengthMm, double ohm) {}
@@ -54,6 +57,9 @@ public record ResistanceFigures(
       return from + "-" + to;
     }
   }
+
+  /** What a pair of terminals has, and may have with every tolerance at its end, Ω. */
+  public record PairOhm(String key, double expectedOhm, double leastOhm, double greatestOhm) {}
 
   /** The smallest and the largest value of any pair of terminals, Ω. */
   public record Limits(double minTerminalOhm, double maxTerminalOhm) {}
