@@ -8,6 +8,12 @@ import java.util.List;
 
 /** Findings at their place on the board's picture, each linked to its row in a table, and back. */
 final class BoardMarks {
+  /** Of the names beside the places, pixels: line, letter, and how far up the lowest stands. */
+  private static final int LINE = 14;
+
+  private static final int LETTER = 8;
+  private static final int LOWEST = 5;
+
   private BoardMarks() {}
 
   /**
@@ -42,14 +48,15 @@ final class BoardMarks {
   }
 
   /**
-   * In the picture's coordinates, mm, y down.
+   * In the picture's coordinates, mm, y down; rings and letters in screen pixels.
    *
-   * @param size of the ring round the place, mm
+   * @param pixelMm how large a pixel is until the page's script knows better, mm
    */
-  static void draw(StringBuilder b, List<Mark> marks, double size) {
-    b.append("<g id=\"marks\" font-family=\"sans-serif\" font-size=\"");
-    b.append(n(1.5 * size)).append("\">\n");
-    for (Mark m : marks) {
+  static void draw(StringBuilder b, List<Mark> marks, double pixelMm) {
+    b.append("<g id=\"marks\" font-family=\"sans-serif\" font-size=\"13\">\n");
+    List<Integer> heights = heights(marks, pixelMm);
+    for (int i = 0; i < marks.size(); i++) {
+      Mark m = marks.get(i);
       String word = m.broken() ? "Broken: " : "Tightest place: ";
       String text =
           word
@@ -65,12 +72,44 @@ final class BoardMarks {
       b.append("\" aria-label=\"").append(Html.escaped(text)).append("\" data-x=\"");
       b.append(n(m.f().at().x())).append("\" data-y=\"").append(n(-m.f().at().y()));
       b.append("\" transform=\"translate(").append(n(m.f().at().x())).append(' ');
-      b.append(n(-m.f().at().y())).append(")\"><title>").append(Html.escaped(text));
-      b.append("</title><circle r=\"").append(n(size)).append("\"/><text x=\"");
-      b.append(n(1.3 * size)).append("\" y=\"").append(n(-0.9 * size)).append("\">");
+      b.append(n(-m.f().at().y()))
+          .append(") scale(")
+          .append(n(pixelMm))
+          .append(")\"><title>")
+          .append(Html.escaped(text));
+      b.append("</title><circle r=\"6\"/><text x=\"8\" y=\"");
+      b.append(-heights.get(i)).append("\">");
       b.append(Html.escaped(m.name())).append("</text></a>\n");
     }
     b.append("</g>\n");
+  }
+
+  /** Where each name stands, y up from its place: the lowest place clear of the names before. */
+  private static List<Integer> heights(List<Mark> marks, double pixelMm) {
+    List<Integer> out = new ArrayList<>();
+    for (int i = 0; i < marks.size(); i++) {
+      int up = LOWEST;
+      while (covered(marks, out, i, up, pixelMm)) {
+        up += LINE;
+      }
+      out.add(up);
+    }
+    return out;
+  }
+
+  private static boolean covered(
+      List<Mark> marks, List<Integer> heights, int i, int up, double pixelMm) {
+    Mark m = marks.get(i);
+    for (int k = 0; k < i; k++) {
+      Mark other = marks.get(k);
+      double dx = (other.f().at().x() - m.f().at().x()) / pixelMm;
+      double dy = (other.f().at().y() - m.f().at().y()) / pixelMm + heights.get(k) - up;
+      int wide = LETTER * (dx > 0 ? m.name() : other.name()).length();
+      if (Math.abs(dy) < LINE && Math.abs(dx) < wide) {
+        return true;
+      }
+    }
+    return false;
   }
 
   private static String n(double v) {

@@ -72,7 +72,7 @@ final class BoardView {
     b.append(svg, 0, open).append("<g aria-hidden=\"true\">").append(svg, open, close);
     b.append("</g>\n");
     coils(b);
-    BoardMarks.draw(b, BoardMarks.of(r), 0.008 * r.spec().board().diameterMm());
+    BoardMarks.draw(b, BoardMarks.of(r), r.spec().board().diameterMm() / 600);
     return b.append(svg, close, svg.length()).toString();
   }
 

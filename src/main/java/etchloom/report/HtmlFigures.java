@@ -173,7 +173,7 @@ final class HtmlFigures {
     if (rows.isEmpty()) {
       return;
     }
-    h.open("div", "class=\"scroll\"").open("table").element("caption", title);
+    h.open("div", "class=\"scroll\"").open("table").element("caption", Words.symbols(title));
     h.open("thead").open("tr").element("th", "Figure", "scope=\"col\"");
     h.element("th", "Value", "scope=\"col\"", "class=\"n\"");
     h.element("th", "Basis", "scope=\"col\"").close("tr").close("thead").open("tbody");

@@ -81,39 +81,41 @@ final class HtmlPlots {
   void harmonics(EmfFigures f) {
     String first = "emf.phasePeakVoltSecondPerRadian";
     double one = f.phasePeakVoltSecondPerRadian();
-    Scale scale = Scale.of(one, "V s/rad");
+    if (one == 0) {
+      return;
+    }
     Plot plot =
         new Plot(
             "plot-harmonics",
-            "Harmonics of a phase's back-EMF.",
-            "Harmonics of a phase's back-EMF, peak, at 1 rad/s.",
+            "Harmonics of a phase's back-EMF above the first, as shares of the first.",
+            "Harmonics of a phase's back-EMF above the first, as shares of the first.",
             "order",
-            "peak at 1 rad/s, " + scale.unit(),
-            scale.factor());
+            "of the first, %",
+            1);
     Table t =
         new Table(
             "Harmonics of the back-EMF",
             plot.tableId(),
             2,
-            List.of("Order", "Peak, a phase", "Of the first"));
+            List.of("Order", "Of the first", "Peak, a phase, at 1 rad/s"));
     for (int i = 0; i < f.harmonics().size(); i++) {
       EmfFigures.Harmonic x = f.harmonics().get(i);
       double v = x.phasePeakVoltSecondPerRadian();
       String list = "emf.harmonics";
       String key = at(list, i, "phasePeakVoltSecondPerRadian");
+      String share = Numbers.fixed(100 * v / one, 2) + " %";
       t.row(
           Cell.exact("" + x.order(), at(list, i, "order"), x.order()),
-          Cell.exact(Form.EMF.show(v), key, v),
-          one == 0
-              ? Cell.of("")
-              : Cell.of(Numbers.fixed(100 * v / one, 2) + " %", key).shareOf(first));
+          (x.order() == 1 ? Cell.of(share, key) : Cell.exact(share, key, 100 * v / one))
+              .shareOf(first),
+          Cell.of(Form.EMF.show(v), key));
     }
     plot.write(h, Kind.BARS, new Marks(), t);
   }
 
   void spread(SpreadFigures f) {
     if (f.boards().isEmpty() || r.resistance().worst().isEmpty()) {
-      none("how the resistance spreads: a tolerance could etch a track away");
+      none("the resistance's spread: a tolerance could etch a track away");
       return;
     }
     Plot plot =

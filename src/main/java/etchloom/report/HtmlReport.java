@@ -48,7 +48,11 @@ public final class HtmlReport {
   private void page(Optional<String> picture) {
     String title = r.artwork().title() + ", revision " + r.artwork().revision();
     List<String> scripts =
-        List.of(PageParts.plotLibrary(), PageParts.plotScript(), PageParts.boardScript());
+        List.of(
+            PageParts.pageScript(),
+            PageParts.boardScript(),
+            PageParts.plotLibrary(),
+            PageParts.plotScript());
     HtmlHead.write(h, title, List.of(PageParts.plotStyle(), PageParts.style()), scripts);
     h.open("body");
     h.element("a", "Skip to the verdict", "class=\"skip\"", "href=\"#s1\"");

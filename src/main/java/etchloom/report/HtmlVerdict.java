@@ -23,7 +23,7 @@ final class HtmlVerdict {
 
   private static void box(Html h, String kind, String word, String text) {
     h.open("div", "class=\"verdict " + kind + "\"");
-    h.element("strong", word).text(": " + text + ".").close("div");
+    h.element("strong", word).text(": " + Words.symbols(text) + ".").close("div");
   }
 
   private static void broken(Html h, Results r) {

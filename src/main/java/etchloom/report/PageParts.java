@@ -33,6 +33,10 @@ final class PageParts {
     return script(read("plots.js"));
   }
 
+  static String pageScript() {
+    return script(read("page.js"));
+  }
+
   static String boardScript() {
     return script(read("board.js"));
   }

@@ -33,7 +33,7 @@
     svg.setAttribute("viewBox", at.x + " " + at.y + " " + at.w + " " + at.w);
     view.classList.toggle("zoomed", zoom() > 1.001);
     svg.querySelectorAll("#marks .mark").forEach((m) => {
-      m.setAttribute("transform", "translate(" + m.dataset.x + " " + m.dataset.y + ") scale(" + 1 / zoom() + ")");
+      m.setAttribute("transform", "translate(" + m.dataset.x + " " + m.dataset.y + ") scale(" + at.w / (svg.clientWidth || 600) + ")");
     });
     scaleBar();
   }
@@ -232,7 +232,7 @@
 
   view.tabIndex = 0;
   board.querySelectorAll(".tools button").forEach((b) => { b.disabled = false; });
-  new ResizeObserver(scaleBar).observe(view);
+  new ResizeObserver(show).observe(view);
   addEventListener("beforeprint", () => svg.setAttribute("viewBox", whole0));
   addEventListener("afterprint", show);
   const whole0 = svg.getAttribute("viewBox");

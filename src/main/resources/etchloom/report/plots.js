@@ -9,7 +9,7 @@
 
   const css = (name) => getComputedStyle(document.documentElement).getPropertyValue(name).trim();
   const exact = (cell) => (cell.dataset.v === undefined ? null : Number(cell.dataset.v));
-  const short = (v) => (v === null || v === undefined ? "none" : String(Number(v.toPrecision(4))));
+  const short = (v) => (v === null || v === undefined ? "\u2013" : String(Number(v.toPrecision(4))));
 
   /** Columns of the table, the first one as x: {x, lines: [{name, y}]}. */
   function read(place) {
@@ -58,6 +58,8 @@
       c.strokeStyle = css("--ink");
       c.fillStyle = css("--ink");
       c.lineWidth = px;
+      c.textAlign = "left";
+      c.textBaseline = "alphabetic";
       c.font = 12 * px + "px " + FACE;
       let down = 0;
       for (const [axis, value, name] of list) {
@@ -131,6 +133,7 @@
           dash: bars ? [] : DASHES[i % DASHES.length].map((d) => d * k),
           width: (bars ? 1 : 2) * k,
           paths: bars ? uPlot.paths.bars({ size: [place.dataset.kind === "bins" ? 1 : 0.5, Infinity], align: 0 }) : undefined,
+          pxAlign: 0,
           points: { show: false },
           value: (u, v) => short(v),
         }))),
