@@ -96,7 +96,7 @@
   });
 
   // Wheel: a scroll of the page that comes by is left alone, and so is one that could not zoom.
-  let passing = 0;
+  let passing = -Infinity;
   addEventListener("wheel", (e) => { if (!view.contains(e.target)) passing = e.timeStamp; }, { passive: true });
   view.addEventListener("wheel", (e) => {
     if (!e.ctrlKey && e.timeStamp - passing < 300) {
