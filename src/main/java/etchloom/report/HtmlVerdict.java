@@ -12,9 +12,9 @@ final class HtmlVerdict {
   static void add(Html h, Results r, Map<String, Object> figures) {
     List<String> words = Verdicts.words(r);
     box(h, r.rules().passed() ? "yes" : "no", words.get(0), words.get(1));
-    broken(h, r);
     Verdicts.ripple(r, figures).ifPresent(w -> box(h, "no", w.get(0), w.get(1)));
     duty(h, r);
+    broken(h, r);
     r.proof().ifPresent(p -> proof(h, p));
     h.open("p", "class=\"quiet\"");
     h.text("Gaps are measured on the drawing as it stands, turn against turn; ");
@@ -47,7 +47,7 @@ final class HtmlVerdict {
       t.row(
           mark.rowId(),
           List.of(
-              Cell.of((i + 1) + " " + f.rule()),
+              Cell.of((i + 1) + "\u00a0" + f.rule()),
               FindingText.cell(stem, f, true, true),
               FindingText.cell(stem, f, false, true),
               mark.placed() ? place.to("#" + mark.id()) : place,

@@ -203,6 +203,10 @@ class HtmlReportTest {
           assertTrue(ratio >= 4.5, ink + " on " + ground + ": " + ratio);
         }
       }
+      for (int i = 1; i <= 6; i++) {
+        // 1.4.11: 3 to 1 for what is drawn
+        assertTrue(contrast(t.get("p" + i), t.get("paper")) >= 3, "line " + i);
+      }
       assertTrue(contrast("#1b201e", t.get("sheet")) >= 4.5);
     }
   }
