@@ -7,6 +7,9 @@ import java.io.StringWriter;
 import java.nio.charset.StandardCharsets;
 import java.nio.file.Files;
 import java.nio.file.Path;
+import java.util.LinkedHashMap;
+import java.util.Map;
+import java.util.function.Supplier;
 import picocli.CommandLine;
 import picocli.CommandLine.Command;
 import picocli.CommandLine.Model.CommandSpec;
@@ -40,12 +43,15 @@ public final class App implements Runnable {
   /** Runs one command line and gives its exit code; never throws, never exits. */
   public static int run(String[] args, Console console) {
     CommandLine line = new CommandLine(new App());
-    line.addSubcommand("new", new NewCommand(console));
-    line.addSubcommand("draw", new DrawCommand(console));
-    line.addSubcommand("check", new CheckCommand(console));
-    line.addSubcommand("report", new ReportCommand(console));
-    line.addSubcommand("survey", new SurveyCommand(console));
-    line.addSubcommand("receive", new ReceiveCommand(console));
+    boolean named = args.length > 0 && commands(console).containsKey(args[0]);
+    commands(console)
+        .forEach(
+            (name, command) -> {
+              // Looking into a command's options takes time; only the one asked for is needed.
+              if (!named || name.equals(args[0])) {
+                line.addSubcommand(name, command.get());
+              }
+            });
     PrintWriter out = new PrintWriter(console.out(), true, StandardCharsets.UTF_8);
     PrintWriter err = new PrintWriter(console.err(), true, StandardCharsets.UTF_8);
     line.setOut(out).setErr(err);
@@ -57,6 +63,17 @@ public final class App implements Runnable {
     out.flush();
     err.flush();
     return code;
+  }
+
+  private static Map<String, Supplier<Object>> commands(Console console) {
+    Map<String, Supplier<Object>> all = new LinkedHashMap<>();
+    all.put("new", () -> new NewCommand(console));
+    all.put("draw", () -> new DrawCommand(console));
+    all.put("check", () -> new CheckCommand(console));
+    all.put("report", () -> new ReportCommand(console));
+    all.put("survey", () -> new SurveyCommand(console));
+    all.put("receive", () -> new ReceiveCommand(console));
+    return all;
   }
 
   @Override

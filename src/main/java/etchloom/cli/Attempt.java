@@ -5,6 +5,7 @@ import etchloom.diagnostic.Staged;
 import etchloom.report.FindingText;
 import etchloom.report.Results;
 import etchloom.run.Drawn;
+import etchloom.run.Laid;
 import etchloom.run.Pipeline;
 import java.util.ArrayList;
 import java.util.List;
@@ -20,10 +21,26 @@ record Attempt(InputFiles.Inputs inputs, Drawn drawn, List<Diagnostic> warnings)
    * @throws BadInput where the spec cannot be drawn
    */
   static Attempt of(InputFiles.Inputs in, boolean draft) {
-    Staged<Drawn> staged = Pipeline.run(in.file().spec(), in.fab(), in.file().positions(), draft);
-    Drawn drawn = staged.value().orElseThrow(() -> new BadInput(staged.diagnostics()));
+    return judged(in, laid(in, draft));
+  }
+
+  /**
+   * The board as drawn, not judged yet.
+   *
+   * @throws BadInput where the spec cannot be drawn
+   */
+  static Staged<Laid> laid(InputFiles.Inputs in, boolean draft) {
+    Staged<Laid> staged = Pipeline.lay(in.file().spec(), in.fab(), in.file().positions(), draft);
+    if (staged.value().isEmpty()) {
+      throw new BadInput(staged.diagnostics());
+    }
+    return staged;
+  }
+
+  static Attempt judged(InputFiles.Inputs in, Staged<Laid> laid) {
+    Drawn drawn = Pipeline.judge(laid.value().orElseThrow());
     List<Diagnostic> warnings = new ArrayList<>(in.warnings());
-    warnings.addAll(staged.diagnostics());
+    warnings.addAll(laid.diagnostics());
     return new Attempt(in, drawn, warnings);
   }
 

@@ -4,8 +4,10 @@ import etchloom.report.Summary;
 import etchloom.write.PublishFailure;
 import etchloom.write.Publisher;
 import java.nio.file.Path;
+import java.time.Instant;
 import java.util.Optional;
 import java.util.concurrent.Callable;
+import java.util.concurrent.ForkJoinPool;
 import picocli.CommandLine.Command;
 import picocli.CommandLine.Mixin;
 import picocli.CommandLine.Option;
@@ -43,19 +45,29 @@ final class DrawCommand implements Callable<Integer> {
 
   @Override
   public Integer call() {
+    ForkJoinPool pool = new ForkJoinPool(Runtime.getRuntime().availableProcessors());
+    try {
+      return pool.submit(this::draw).join();
+    } finally {
+      pool.shutdownNow();
+    }
+  }
+
+  private Integer draw() {
     InputFiles.Inputs in = InputFiles.read(spec, options.fab());
-    Attempt attempt = Attempt.of(in, false);
-    attempt.tell(console);
-    boolean passed = attempt.passed();
+    Optional<Instant> created = OrderSheet.created(console);
+    Making making = Making.of(in, false, created);
+    making.attempt().tell(console);
+    boolean passed = making.attempt().passed();
     if (!passed && !force) {
       console.err().println("nothing was written; --force writes a set marked DRAFT");
       return ExitCode.REFUSED;
     }
     if (!passed) {
-      attempt = Attempt.of(in, true);
+      making = Making.of(in, true, created);
     }
     Path target = target(in);
-    SetFiles set = SetFiles.of(attempt, OrderSheet.created(console));
+    SetFiles set = making.whole();
     publish(target, set);
     if (options.json()) {
       console.print(set.files().get("report.json"));

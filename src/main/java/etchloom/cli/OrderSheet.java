@@ -1,7 +1,7 @@
 package etchloom.cli;
 
 import etchloom.report.OrderLines;
-import etchloom.report.Results;
+import etchloom.run.Laid;
 import etchloom.spec.Spec;
 import etchloom.write.OrderInfo;
 import java.time.DateTimeException;
@@ -17,8 +17,8 @@ final class OrderSheet {
 
   private OrderSheet() {}
 
-  static OrderInfo of(Results r, Optional<Instant> created) {
-    Spec spec = r.spec();
+  static OrderInfo of(Laid laid, Optional<Instant> created) {
+    Spec spec = laid.spec();
     Spec.Board board = spec.board();
     double outerTrack = Math.min(spec.coil().trackMm(), spec.rim().trackMm());
     OrderInfo.Drawn drawn =
@@ -26,18 +26,18 @@ final class OrderSheet {
     OrderInfo.Drawn inner =
         new OrderInfo.Drawn(spec.coil().trackMm(), spec.coil().spaceMm(), OptionalDouble.empty());
     return new OrderInfo(
-        r.toolVersion(),
+        Version.TEXT,
         created,
         board.thicknessMm(),
         board.finish(),
         board.mask(),
         board.laminateTgC(),
         HOLE_TOLERANCE,
-        r.fab().title(),
+        laid.fab().title(),
         drawn,
         board.layers() > 2 ? Optional.of(inner) : Optional.empty(),
         circuits(spec.winding()),
-        OrderLines.resistance(r));
+        OrderLines.resistance(laid.resistance()));
   }
 
   private static String circuits(Spec.Winding w) {

@@ -1,18 +1,14 @@
 package etchloom.cli;
 
-import etchloom.artwork.Artwork;
-import etchloom.proof.ProofExpectation;
-import etchloom.proof.ProofReport;
-import etchloom.proof.Prover;
 import etchloom.report.HtmlReport;
 import etchloom.report.ReportJson;
 import etchloom.report.Results;
-import etchloom.write.LayerSet;
 import etchloom.write.Manifest;
 import java.nio.charset.StandardCharsets;
 import java.time.Instant;
 import java.util.Optional;
 import java.util.SortedMap;
+import java.util.TreeMap;
 
 /**
  * Everything that {@code draw} writes, as names and bytes; nothing touches the disk.
@@ -22,20 +18,20 @@ import java.util.SortedMap;
 record SetFiles(SortedMap<String, byte[]> files, Results results) {
 
   /**
-   * Writes the set and reads it back.
-   *
    * @throws FailedProof where the bytes are not the winding that was asked for
    */
   static SetFiles of(Attempt attempt, Optional<Instant> created) {
-    Artwork art = attempt.drawn().assembly().artwork().onGrid();
-    Results before = attempt.results();
-    SortedMap<String, byte[]> files = LayerSet.write(art, OrderSheet.of(before, created));
-    ProofReport proof = Prover.prove(files, ProofExpectation.of(art));
-    if (!proof.passed()) {
-      throw new FailedProof(proof);
-    }
-    Results results = before.withProof(proof);
-    String picture = new String(files.get(art.slug() + ".svg"), StandardCharsets.UTF_8);
+    return of(attempt, LayerFiles.of(attempt.drawn().laid(), created));
+  }
+
+  /**
+   * @param layers of this very attempt
+   */
+  static SetFiles of(Attempt attempt, LayerFiles layers) {
+    Results results = attempt.results().withProof(layers.proof());
+    SortedMap<String, byte[]> files = new TreeMap<>(layers.files());
+    String picture =
+        new String(files.get(results.artwork().slug() + ".svg"), StandardCharsets.UTF_8);
     files.put("report.json", ReportJson.write(results));
     files.put("report.html", HtmlReport.write(results, Optional.of(picture)));
     files.put("spec.yaml", InputsAsUsed.spec(attempt.inputs()));

@@ -2,6 +2,7 @@ package etchloom.diagnostic;
 
 import java.util.List;
 import java.util.Optional;
+import java.util.function.Function;
 
 /**
  * What a stage gives back: its value, and all that it has to say about the input. There is no value
@@ -26,5 +27,10 @@ public record Staged<T>(Optional<T> value, List<Diagnostic> diagnostics) {
 
   public static <T> Staged<T> failed(List<Diagnostic> diagnostics) {
     return new Staged<>(Optional.empty(), diagnostics);
+  }
+
+  /** What the next step, which finds no fault with the input, makes of the value. */
+  public <U> Staged<U> map(Function<T, U> next) {
+    return new Staged<>(value.map(next), diagnostics);
   }
 }

@@ -21,79 +21,98 @@ import java.util.Locale;
 import java.util.Map;
 import java.util.Optional;
 import java.util.OptionalDouble;
-import java.util.Set;
+import java.util.function.Function;
+import java.util.stream.IntStream;
 
 /** Holds the drawings, DXF and SVG, against the Gerber and drill files. */
 final class PictureProof {
   /** The picture is rounded to micrometres, which moves the middle of a half circle by ten. */
   private static final PieceMatch.Tolerance PICTURE = new PieceMatch.Tolerance(0.0015, 0.02);
 
+  private static final String PROFILE = "PROFILE";
+
   private final SetFiles set;
   private final List<Hole> holes;
   private final Findings out;
+
+  /** What the Gerber and drill files draw, by the drawing's names of layers. */
+  private final Map<String, List<DrawnPiece>> drawn;
 
   PictureProof(SetFiles set, List<Hole> holes, Findings out) {
     this.set = set;
     this.holes = holes;
     this.out = out;
+    drawn = drawn();
   }
 
   /** Centre lines, pads, holes and sheets of the drawing. */
   void drawing(DxfFile dxf) {
-    Set<String> known = drawn().keySet();
+    Map<String, List<DrawnPiece>> byLayer = new LinkedHashMap<>();
+    drawn.keySet().forEach(k -> byLayer.put(k, new ArrayList<>()));
     for (DxfFile.Entity x : dxf.entities()) {
-      if (!known.contains(x.layer())) {
+      List<DrawnPiece> found = byLayer.get(x.layer());
+      if (found == null) {
         String message =
             "something is drawn on a layer " + x.layer() + ", which is none of the set";
         out.add(
             new ProofFinding(
                 ProofNames.DXF, dxf.fileName(), x.line(), "", Optional.empty(), message));
+      } else if (x instanceof DxfFile.Polyline p) {
+        boolean edge = x.layer().equals(PROFILE);
+        DrawnPiece.add(p.path(), edge ? 0 : p.widthMm(), p.line(), found);
+      } else if (x instanceof DxfFile.Circle c) {
+        found.add(DrawnPiece.disc(c.centre(), 2 * c.radiusMm(), c.line()));
       }
     }
-    for (Map.Entry<String, List<DrawnPiece>> e : drawn().entrySet()) {
-      boolean edge = e.getKey().equals("PROFILE");
-      List<DrawnPiece> found = new ArrayList<>();
-      for (DxfFile.Entity x : dxf.entities()) {
-        if (x.layer().equals(e.getKey())) {
-          if (x instanceof DxfFile.Polyline p) {
-            DrawnPiece.add(p.path(), edge ? 0 : p.widthMm(), p.line(), found);
-          } else if (x instanceof DxfFile.Circle c) {
-            found.add(DrawnPiece.disc(c.centre(), 2 * c.radiusMm(), c.line()));
-          }
-        }
-      }
-      compare(
-          ProofNames.DXF,
-          dxf.fileName(),
-          e.getKey(),
-          found,
-          e.getValue(),
-          PieceMatch.Tolerance.GRID);
-    }
+    each(
+        layer ->
+            compare(
+                ProofNames.DXF,
+                dxf.fileName(),
+                layer,
+                byLayer.get(layer),
+                drawn.get(layer),
+                PieceMatch.Tolerance.GRID));
   }
 
   /** The layers of the picture; the board itself is an area there, and is judged by its edge. */
   void picture(SvgFile svg) {
-    for (Map.Entry<String, List<DrawnPiece>> e : drawn().entrySet()) {
-      boolean edge = e.getKey().equals("PROFILE");
-      String id =
-          e.getKey().toLowerCase(Locale.ROOT).replace('_', '-').replace("copper-l", "copper-L");
-      List<DrawnPiece> found = new ArrayList<>();
-      for (DrawnObject o : svg.objects(id)) {
-        o.match(
-            s -> add(s, found),
-            f -> false,
-            r -> {
-              r.contours().forEach(c -> area(c, edge, r.line(), found));
-              return true;
-            });
-      }
-      if (edge) {
-        // The board is one area here, and the cuts that lead to its holes are no edges.
-        found.retainAll(matched(found, e.getValue()));
-      }
-      compare(ProofNames.SVG, svg.fileName(), e.getKey(), found, e.getValue(), PICTURE);
+    each(
+        layer ->
+            compare(
+                ProofNames.SVG,
+                svg.fileName(),
+                layer,
+                pictured(svg, layer),
+                drawn.get(layer),
+                PICTURE));
+  }
+
+  private List<DrawnPiece> pictured(SvgFile svg, String layer) {
+    boolean edge = layer.equals(PROFILE);
+    String id = layer.toLowerCase(Locale.ROOT).replace('_', '-').replace("copper-l", "copper-L");
+    List<DrawnPiece> found = new ArrayList<>();
+    for (DrawnObject o : svg.objects(id)) {
+      o.match(
+          s -> add(s, found),
+          f -> false,
+          r -> {
+            r.contours().forEach(c -> area(c, edge, r.line(), found));
+            return true;
+          });
     }
+    if (edge) {
+      // The board is one area here, and the cuts that lead to its holes are no edges.
+      found.retainAll(matched(found, drawn.get(layer)));
+    }
+    return found;
+  }
+
+  /** Judges the layers side by side; what is found comes in their order. */
+  private void each(Function<String, List<ProofFinding>> judge) {
+    drawn.keySet().stream().toList().parallelStream()
+        .map(judge)
+        .forEachOrdered(found -> found.forEach(out::add));
   }
 
   private static List<DrawnPiece> matched(List<DrawnPiece> some, List<DrawnPiece> wanted) {
@@ -130,7 +149,6 @@ final class PictureProof {
     return Optional.of(DrawnPiece.disc(centre, 2 * radius, line));
   }
 
-  /** What the Gerber and drill files draw, by the drawing's names of layers. */
   private Map<String, List<DrawnPiece>> drawn() {
     Map<String, List<DrawnPiece>> all = new LinkedHashMap<>();
     set.copper().forEach((l, i) -> put(all, "COPPER_L" + l, i));
@@ -148,7 +166,7 @@ final class PictureProof {
                             DrawnPiece.add(s.path(), 0, s.line(), edge);
                           }
                         }));
-    all.put("PROFILE", edge);
+    all.put(PROFILE, edge);
     all.put("DRILL_PLATED", discs(true));
     all.put("DRILL_NONPLATED", discs(false));
     return all;
@@ -165,7 +183,7 @@ final class PictureProof {
         .toList();
   }
 
-  private void compare(
+  private static List<ProofFinding> compare(
       String name,
       String file,
       String layer,
@@ -174,29 +192,41 @@ final class PictureProof {
       PieceMatch.Tolerance tolerance) {
     PieceMatch m = PieceMatch.match(found, wanted, tolerance);
     String of = layer.startsWith("COPPER_") ? layer.substring(7) : "";
+    List<ProofFinding> all = new ArrayList<>();
     for (DrawnPiece p : m.onlyFirst()) {
-      add(name, file, p.tag(), of, p, layer + " draws this, the Gerber and drill files do not");
+      String message = layer + " draws this, the Gerber and drill files do not";
+      all.add(new ProofFinding(name, file, p.tag(), of, middle(p), message));
     }
     for (DrawnPiece p : m.onlySecond()) {
-      add(name, file, 0, of, p, layer + " lacks what the Gerber and drill files draw here");
+      String message = layer + " lacks what the Gerber and drill files draw here";
+      all.add(new ProofFinding(name, file, 0, of, middle(p), message));
     }
+    return all;
   }
 
-  private void add(String name, String file, int line, String layer, DrawnPiece p, String message) {
-    out.add(new ProofFinding(name, file, line, layer, Optional.of(p.shape().at(0.5)), message));
+  private static Optional<Point> middle(DrawnPiece p) {
+    return Optional.of(p.shape().at(0.5));
   }
 
   /** The closed outlines of the copper; gives the area that only one of the two shows. */
   OptionalDouble outlines(DxfFile dxf, Connectivity net) {
-    double sum = 0;
+    List<List<Path>> rings = new ArrayList<>();
     for (int l = 1; l <= net.layers(); l++) {
-      List<Path> rings = new ArrayList<>();
+      rings.add(new ArrayList<>());
       for (DxfFile.Entity x : dxf.entities()) {
         if (x.layer().equals("COPPER_L" + l)) {
-          ring(dxf, l, x, rings);
+          ring(dxf, l, x, rings.get(l - 1));
         }
       }
-      OutlineMatch m = OutlineMatch.of(net.copper(l), rings);
+    }
+    List<OutlineMatch> matches =
+        IntStream.rangeClosed(1, net.layers())
+            .parallel()
+            .mapToObj(l -> OutlineMatch.of(net.copper(l), rings.get(l - 1)))
+            .toList();
+    double sum = 0;
+    for (int l = 1; l <= net.layers(); l++) {
+      OutlineMatch m = matches.get(l - 1);
       sum += m.areaDifferenceMm2();
       for (Patch p : m.patches()) {
         String size = String.format(Locale.ROOT, "%.4f mm2", p.areaMm2());

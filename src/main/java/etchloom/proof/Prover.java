@@ -113,9 +113,10 @@ public final class Prover {
   }
 
   private ProofReport copper(List<Hole> holes) {
-    CopperBuilder builder = new CopperBuilder();
-    List<Figure> figures = new ArrayList<>();
-    set.copper().values().forEach(i -> figures.add(builder.build(i.objects())));
+    List<Figure> figures =
+        set.copper().values().parallelStream()
+            .map(i -> new CopperBuilder().build(i.objects()))
+            .toList();
     Connectivity net = new Connectivity(figures, holes);
     List<LayerGroups> groups = new ArrayList<>();
     for (int l = 1; l <= expected.layers(); l++) {
@@ -147,13 +148,9 @@ public final class Prover {
 
   /** Layers whose file draws the design to the last piece. */
   private SortedSet<Integer> asDesigned(List<LayerGroups> groups) {
-    TreeSet<Integer> found = new TreeSet<>();
-    for (LayerGroups g : groups) {
-      if (draws(g.layer, g)) {
-        found.add(g.layer);
-      }
-    }
-    return found;
+    List<Integer> found =
+        groups.parallelStream().filter(g -> draws(g.layer, g)).map(g -> g.layer).toList();
+    return new TreeSet<>(found);
   }
 
   /** Layers whose file draws another layer of the design to the last piece. */

@@ -17,7 +17,6 @@ import etchloom.proof.read.SvgReader;
 import etchloom.proof.read.UnreadableFile;
 import java.util.ArrayList;
 import java.util.List;
-import java.util.Map;
 import java.util.Optional;
 import java.util.SortedMap;
 import java.util.TreeMap;
@@ -42,40 +41,68 @@ final class SetFiles {
 
   SetFiles(SortedMap<String, byte[]> files, Findings out) {
     this.out = out;
-    for (Map.Entry<String, byte[]> e : files.entrySet()) {
-      try {
-        read(e.getKey(), e.getValue());
-      } catch (UnreadableFile u) {
-        out.add(
-            new ProofFinding(
-                ProofNames.UNREADABLE, u.file(), u.line(), "", Optional.empty(), u.reason()));
+    List<Runnable> takes =
+        List.copyOf(files.entrySet()).parallelStream()
+            .map(e -> read(e.getKey(), e.getValue()))
+            .toList();
+    takes.forEach(Runnable::run);
+  }
+
+  /** Reads one file, on whatever thread, and gives what takes it in. */
+  private Runnable read(String name, byte[] bytes) {
+    try {
+      if (name.endsWith(".gbr")) {
+        LayerImage image = GerberReader.read(name, bytes);
+        return () -> gerber(image);
+      } else if (name.endsWith(".xnc")) {
+        DrillFile drill = DrillReader.read(name, bytes);
+        return () -> nc(drill);
+      } else if (name.endsWith(".gbrjob")) {
+        JobFile read = JobReader.read(name, bytes);
+        return () -> job(read);
+      } else if (name.endsWith(".ipc")) {
+        NetlistFile read = NetlistReader.read(name, bytes);
+        return () -> netlist(read);
+      } else if (name.endsWith(".dxf")) {
+        DxfFile read = DxfReader.read(name, bytes);
+        return () -> dxf(read);
+      } else if (name.endsWith(".svg")) {
+        SvgFile read = SvgReader.read(name, bytes);
+        return () -> picture = Optional.of(read);
       }
+      return () -> {};
+    } catch (UnreadableFile u) {
+      return () -> unreadable(u);
     }
   }
 
-  private void read(String name, byte[] bytes) throws UnreadableFile {
-    if (name.endsWith(".gbr")) {
-      gerber(GerberReader.read(name, bytes));
-    } else if (name.endsWith(".xnc")) {
-      DrillFile drill = DrillReader.read(name, bytes);
-      ncDrills.add(drill);
-      warn(drill.warnings());
-    } else if (name.endsWith(".gbrjob")) {
-      job = Optional.of(JobReader.read(name, bytes));
-      warn(job.get().warnings());
-    } else if (name.endsWith(".ipc")) {
-      netlist = Optional.of(NetlistReader.read(name, bytes));
-      warn(netlist.get().warnings());
-    } else if (name.endsWith(".dxf")) {
-      DxfFile dxf = DxfReader.read(name, bytes);
-      warn(dxf.warnings());
-      if (name.endsWith("-outlines.dxf")) {
-        outlines = Optional.of(dxf);
-      } else {
-        drawing = Optional.of(dxf);
-      }
-    } else if (name.endsWith(".svg")) {
-      picture = Optional.of(SvgReader.read(name, bytes));
+  private void unreadable(UnreadableFile u) {
+    out.add(
+        new ProofFinding(
+            ProofNames.UNREADABLE, u.file(), u.line(), "", Optional.empty(), u.reason()));
+  }
+
+  private void nc(DrillFile read) {
+    ncDrills.add(read);
+    warn(read.warnings());
+  }
+
+  private void job(JobFile read) {
+    job = Optional.of(read);
+    warn(read.warnings());
+  }
+
+  private void netlist(NetlistFile read) {
+    netlist = Optional.of(read);
+    warn(read.warnings());
+  }
+
+  private void dxf(DxfFile read) {
+    warn(read.warnings());
+    if (read.fileName().endsWith("-outlines.dxf")) {
+      outlines = Optional.of(read);
+    } else {
+      drawing = Optional.of(read);
     }
   }
 
@@ -87,7 +114,7 @@ final class SetFiles {
     }
   }
 
-  private void gerber(LayerImage image) throws UnreadableFile {
+  private void gerber(LayerImage image) {
     warn(image.warnings());
     List<String> function = image.fileAttribute(".FileFunction");
     String kind = function.isEmpty() ? "" : function.get(0);
@@ -98,7 +125,7 @@ final class SetFiles {
         duplicate(image, before, "copper L" + layer);
       }
     } else if (kind.equals("Plated") || kind.equals("NonPlated")) {
-      gerberDrills.add(GerberDrill.of(image));
+      gerberDrill(image);
     } else {
       String full =
           kind.equals("Profile") ? kind : kind + (function.size() > 1 ? "," + function.get(1) : "");
@@ -106,6 +133,14 @@ final class SetFiles {
       if (before != null) {
         duplicate(image, before, full);
       }
+    }
+  }
+
+  private void gerberDrill(LayerImage image) {
+    try {
+      gerberDrills.add(GerberDrill.of(image));
+    } catch (UnreadableFile u) {
+      unreadable(u);
     }
   }
 

@@ -17,16 +17,22 @@ import java.util.Map;
  * <p>A track of lines and arcs tangent to each other covers width times length; a corner, what its
  * outer sector adds and its inner kite takes. At a joint the tracks' ends lie in the pad, and the
  * part of each that does is counted with the pad alone: exact for tracks that leave the pad
- * straight and apart from each other, else good to a small share of the pad. Where the rule check
- * found copper touching, or a track is too short to leave its pads, the layer is merged as polygons
- * ({@link MergedCopper}), which is slow.
+ * straight, else good to a small share of the pad. Where tracks of a joint lie over each other
+ * outside the pad, that is taken off ({@link JointOverlap}). Where the rule check found copper
+ * touching, or a track is too short to leave its pads, the layer is merged as polygons ({@link
+ * MergedCopper}), which is slow.
  */
 final class CopperArea {
+  /** Pads that only touch do not lie over each other, rounded to the grid or not. */
+  private static final double TOUCH_MM = 1e-5;
+
   private final Artwork artwork;
   private final Map<Integer, List<Conductor>> ends = new HashMap<>();
+  private final Map<List<Long>, Double> overlaps;
   private final int layer;
 
-  private CopperArea(Artwork artwork, int layer) {
+  private CopperArea(Artwork artwork, int layer, Map<List<Long>, Double> overlaps) {
+    this.overlaps = overlaps;
     this.artwork = artwork;
     this.layer = layer;
     for (Conductor c : artwork.conductorsOn(layer)) {
@@ -38,13 +44,14 @@ final class CopperArea {
   /** One entry a layer, L1 first, mm². */
   static List<Double> of(Artwork artwork, RuleReport rules) {
     List<Double> out = new ArrayList<>();
+    Map<List<Long>, Double> overlaps = new HashMap<>();
     for (int layer = 1; layer <= artwork.layers(); layer++) {
       String name = "L" + layer;
       boolean touching =
           rules.findings().stream()
               .anyMatch(
                   f -> f.rule().equals("space") && f.layer().equals(name) && f.measured() <= 0);
-      CopperArea a = new CopperArea(artwork, layer);
+      CopperArea a = new CopperArea(artwork, layer, overlaps);
       out.add(touching || a.crowded() ? MergedCopper.areaMm2(artwork, layer) : a.areaMm2());
     }
     return out;
@@ -55,7 +62,8 @@ final class CopperArea {
         .anyMatch(
             c ->
                 c.fromJoint() == c.toJoint()
-                    || c.path().lengthMm() < discMm(c.fromJoint()) + discMm(c.toJoint()));
+                    || c.path().lengthMm() + TOUCH_MM
+                        < discMm(c.fromJoint()) + discMm(c.toJoint()));
   }
 
   private double areaMm2() {
@@ -87,7 +95,7 @@ final class CopperArea {
       double h = c.widthMm() / 2;
       sum -= h * Math.sqrt(r * r - h * h) + r * r * Math.asin(h / r);
     }
-    return sum;
+    return sum - new JointOverlap(overlaps, artwork, id, r, tracks).areaMm2();
   }
 
   /** Two tracks that meet without a pad make a corner, like two pieces of one track. */
@@ -99,7 +107,7 @@ final class CopperArea {
     return corner(tracks.get(0).widthMm(), in, outward(tracks.get(1), id));
   }
 
-  private static Point outward(Conductor c, int joint) {
+  static Point outward(Conductor c, int joint) {
     List<Segment> s = c.path().segments();
     return c.fromJoint() == joint ? s.get(0).tangent(0) : s.get(s.size() - 1).tangent(1).times(-1);
   }

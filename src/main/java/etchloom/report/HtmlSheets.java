@@ -40,7 +40,7 @@ final class HtmlSheets {
       h.element("th", head.get(i), "scope=\"col\"", i > 0 && i < 4 ? "class=\"n\"" : "class=\"t\"");
     }
     h.close("tr").close("thead").open("tbody");
-    List<PairLimits> limits = PairLimits.of(r);
+    List<PairLimits> limits = PairLimits.of(r.resistance());
     for (int i = 0; i < r.resistance().terminals().size(); i++) {
       pair(i, limits);
     }

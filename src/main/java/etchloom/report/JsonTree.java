@@ -20,16 +20,24 @@ import java.util.OptionalDouble;
  * object without keys leaves none either.
  */
 public final class JsonTree {
+  /**
+   * A machine's mathematical library may round the last digits of a sine otherwise than another's;
+   * no figure is known to so many digits, and files drawn on two machines are to be the same.
+   */
+  static final int DIGITS = 10;
+
   private final Map<String, Object> entries = new LinkedHashMap<>();
 
   /**
+   * Kept to {@link #DIGITS} significant digits.
+   *
    * @throws IllegalArgumentException if the number is not finite
    */
   public JsonTree put(String key, double value) {
     if (!Double.isFinite(value)) {
       throw new IllegalArgumentException(key + " is not finite: " + value);
     }
-    return set(key, value);
+    return set(key, Numbers.rounded(value, DIGITS));
   }
 
   public JsonTree put(String key, long value) {

@@ -35,31 +35,44 @@ final class MergedCopper {
   static double areaMm2(Artwork artwork, int layer) {
     List<Geometry> all = new ArrayList<>();
     for (Conductor c : artwork.conductorsOn(layer)) {
-      all.add(track(c.path(), c.widthMm()));
+      all.add(track(c.path(), c.widthMm(), CHORD_ERROR_MM, QUADRANT));
     }
     for (Joint j : artwork.padsOn(layer)) {
-      Geometry middle = GEOMETRY.createPoint(coordinate(j.at()));
-      all.add(middle.buffer(EQUAL_AREA * j.padMm() / 2, QUADRANT));
+      all.add(disc(j.at(), EQUAL_AREA * j.padMm() / 2, QUADRANT));
     }
     return UnaryUnionOp.union(all, GEOMETRY).getArea();
   }
 
-  private static Geometry track(Path path, double width) {
+  /**
+   * A disc as a polygon with its corners on the circle.
+   *
+   * @param quadrant sides to a quarter turn
+   */
+  static Geometry disc(Point at, double radiusMm, int quadrant) {
+    return point(at).buffer(radiusMm, quadrant);
+  }
+
+  static Geometry point(Point at) {
+    return GEOMETRY.createPoint(coordinate(at));
+  }
+
+  /** A track with round ends; its centre line's chords have their corners on the arcs. */
+  static Geometry track(Path path, double width, double chordErrorMm, int quadrant) {
     List<Coordinate> points = new ArrayList<>();
     for (Segment s : path.segments()) {
-      int n = s.match(line -> 1, MergedCopper::chords);
+      int n = s.match(line -> 1, a -> chords(a, chordErrorMm));
       for (int i = points.isEmpty() ? 0 : 1; i <= n; i++) {
         points.add(coordinate(s.at(i / (double) n)));
       }
     }
-    BufferParameters how = new BufferParameters(QUADRANT);
+    BufferParameters how = new BufferParameters(quadrant);
     how.setSimplifyFactor(1e-4); // the default leaves out corners of up to 1 % of the width
     return BufferOp.bufferOp(
         GEOMETRY.createLineString(points.toArray(new Coordinate[0])), width / 2, how);
   }
 
-  private static int chords(Arc a) {
-    double ratio = Math.min(1, CHORD_ERROR_MM / a.radiusMm());
+  private static int chords(Arc a, double errorMm) {
+    double ratio = Math.min(1, errorMm / a.radiusMm());
     return (int) Math.ceil(a.lengthMm() / a.radiusMm() / (2 * Math.acos(1 - ratio)));
   }
 

@@ -2,6 +2,7 @@ package etchloom.report;
 
 import etchloom.artwork.Artwork;
 import etchloom.artwork.Stackup;
+import etchloom.electric.resistance.ResistanceFigures;
 import etchloom.spec.Spec;
 import etchloom.units.Numbers;
 import java.util.ArrayList;
@@ -86,8 +87,8 @@ public final class OrderLines {
   }
 
   /** The acceptance limits, one a line; empty where the tolerances could etch a track away. */
-  public static List<String> resistance(Results r) {
-    List<PairLimits> pairs = PairLimits.lines(r);
+  public static List<String> resistance(ResistanceFigures figures) {
+    List<PairLimits> pairs = PairLimits.lines(figures);
     if (pairs.isEmpty()) {
       return List.of();
     }
@@ -95,7 +96,7 @@ public final class OrderLines {
         "resistance "
             + String.join(", ", pairs.stream().map(PairLimits::pair).toList())
             + " at 20 C: "
-            + ohm(r.resistance().meanTerminalOhm())
+            + ohm(figures.meanTerminalOhm())
             + ", limits "
             + PairLimits.span(pairs));
   }

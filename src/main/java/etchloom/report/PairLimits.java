@@ -12,19 +12,17 @@ import java.util.List;
 record PairLimits(String pair, double expected, double least, double greatest) {
 
   /** All pairs, the star point's too; none where the tolerances could etch a track away. */
-  static List<PairLimits> of(Results r) {
-    return r.resistance().pairs().stream()
+  static List<PairLimits> of(ResistanceFigures figures) {
+    return figures.pairs().stream()
         .map(p -> new PairLimits(p.key(), p.expectedOhm(), p.leastOhm(), p.greatestOhm()))
         .toList();
   }
 
   /** The same without the star point's pairs. */
-  static List<PairLimits> lines(Results r) {
+  static List<PairLimits> lines(ResistanceFigures figures) {
     List<String> keys =
-        ResistanceFigures.lineToLine(r.resistance().terminals()).stream()
-            .map(TerminalOhm::key)
-            .toList();
-    return of(r).stream().filter(p -> keys.contains(p.pair())).toList();
+        ResistanceFigures.lineToLine(figures.terminals()).stream().map(TerminalOhm::key).toList();
+    return of(figures).stream().filter(p -> keys.contains(p.pair())).toList();
   }
 
   /** {@code 32.97 ohm to 61.95 ohm}: from the least to the greatest of some pairs. */

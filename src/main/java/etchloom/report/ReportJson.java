@@ -10,8 +10,8 @@ import java.util.Map;
 /**
  * The report for programs. Its keys are bound by the spec page; what is not known has no key.
  *
- * <p>Numbers hold 15 significant digits, so they agree with the figures to 1e-14. Layers are named
- * {@code L1} to {@code Ln}.
+ * <p>Numbers hold {@link JsonTree#DIGITS} significant digits. Layers are named {@code L1} to {@code
+ * Ln}.
  */
 public final class ReportJson {
   private ReportJson() {}

@@ -9,10 +9,8 @@ import etchloom.electric.machine.InductanceValues;
 import etchloom.electric.machine.Machine;
 import etchloom.electric.machine.MachineFigures;
 import etchloom.electric.machine.circuit.Circuit;
-import etchloom.electric.resistance.Resistance;
 import etchloom.electric.resistance.ResistanceFigures;
 import etchloom.rules.RuleContext;
-import etchloom.spec.FabRules;
 import etchloom.spec.Spec;
 import java.util.OptionalDouble;
 
@@ -20,8 +18,9 @@ import java.util.OptionalDouble;
 public record Electrics(
     ResistanceFigures resistance, InductanceFigures inductance, MachineFigures machine) {
 
-  static Electrics of(Assembly assembly, Spec spec, FabRules fab) {
-    ResistanceFigures ohms = Resistance.of(assembly.artwork(), fab.tolerance());
+  static Electrics of(Laid laid) {
+    Assembly assembly = laid.assembly();
+    Spec spec = laid.spec();
     InductanceFigures henries =
         Inductance.of(
             assembly.artwork(),
@@ -34,8 +33,9 @@ public record Electrics(
             henries.synchronousHenry(),
             henries.terminalHenry());
     MachineFigures machine =
-        Machine.of(assembly.artwork(), spec, fab, assembly.winding(), ohms, values);
-    return new Electrics(ohms, henries, machine);
+        Machine.of(
+            assembly.artwork(), spec, laid.fab(), assembly.winding(), laid.resistance(), values);
+    return new Electrics(laid.resistance(), henries, machine);
   }
 
   /** The rotor's iron, as far as the spec tells where it is. */

@@ -1,8 +1,8 @@
 package etchloom.run;
 
 import etchloom.board.Assembler;
-import etchloom.board.Assembly;
 import etchloom.diagnostic.Staged;
+import etchloom.electric.resistance.Resistance;
 import etchloom.rules.RuleCheck;
 import etchloom.rules.RuleReport;
 import etchloom.spec.FabRules;
@@ -19,13 +19,21 @@ public final class Pipeline {
    * @return no value where the spec cannot be drawn; broken rules are in the value's report
    */
   public static Staged<Drawn> run(Spec spec, FabRules fab, Positions positions, boolean draft) {
-    Staged<Assembly> staged = Assembler.assemble(spec, fab, positions, draft);
-    if (staged.value().isEmpty()) {
-      return Staged.failed(staged.diagnostics());
-    }
-    Assembly assembly = staged.value().get();
-    Electrics electrics = Electrics.of(assembly, spec, fab);
-    RuleReport rules = RuleCheck.check(assembly.artwork(), spec, fab, electrics.rules(spec));
-    return Staged.of(new Drawn(spec, fab, assembly, electrics, rules), staged.diagnostics());
+    return lay(spec, fab, positions, draft).map(Pipeline::judge);
+  }
+
+  /** The way's first half: the board is drawn. Parameters as for {@link #run}. */
+  public static Staged<Laid> lay(Spec spec, FabRules fab, Positions positions, boolean draft) {
+    return Assembler.assemble(spec, fab, positions, draft)
+        .map(board -> new Laid(spec, fab, board, Resistance.of(board.artwork(), fab.tolerance())));
+  }
+
+  /** The second half: what the drawn copper does, and whether it may be made. */
+  public static Drawn judge(Laid laid) {
+    Electrics electrics = Electrics.of(laid);
+    RuleReport rules =
+        RuleCheck.check(
+            laid.assembly().artwork(), laid.spec(), laid.fab(), electrics.rules(laid.spec()));
+    return new Drawn(laid, electrics, rules);
   }
 }

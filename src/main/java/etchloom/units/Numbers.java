@@ -47,6 +47,11 @@ public final class Numbers {
     return stripped(exact(value).round(ALL_DIGITS));
   }
 
+  /** The number nearest to it that has so many significant digits; zero stays zero. */
+  public static double rounded(double value, int digits) {
+    return exact(value).round(new MathContext(digits, RoundingMode.HALF_EVEN)).doubleValue();
+  }
+
   /**
    * With the prefix that brings it between 1 and 1000, a space and the unit: {@code
    * engineering(4e-4, "H", 3)} is {@code 400 uH}. Prefixes p to G; beyond them the number grows or

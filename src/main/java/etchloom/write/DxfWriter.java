@@ -11,6 +11,7 @@ import etchloom.geometry.Point;
 import etchloom.write.outline.Outline;
 import java.util.ArrayList;
 import java.util.List;
+import java.util.stream.IntStream;
 
 /** The artwork as DXF: once as centre lines with a width, once as closed outlines of the copper. */
 final class DxfWriter {
@@ -86,8 +87,13 @@ final class DxfWriter {
    */
   static byte[] outlines(Artwork art) {
     DxfWriter w = new DxfWriter(art, false);
+    List<List<Path>> outlines =
+        IntStream.rangeClosed(1, art.layers())
+            .parallel()
+            .mapToObj(layer -> Outline.of(art, layer))
+            .toList();
     for (int layer = 1; layer <= art.layers(); layer++) {
-      for (Path p : Outline.of(art, layer)) {
+      for (Path p : outlines.get(layer - 1)) {
         w.dxf.polyline(copper(layer), bulges(p), true, 0);
       }
     }

@@ -3,6 +3,7 @@ package etchloom.write;
 import etchloom.artwork.Artwork;
 import java.util.SortedMap;
 import java.util.TreeMap;
+import java.util.concurrent.ForkJoinTask;
 
 /** Everything the artwork alone decides, as file names and bytes; nothing touches the disk. */
 public final class LayerSet {
@@ -18,16 +19,20 @@ public final class LayerSet {
    */
   public static SortedMap<String, byte[]> write(Artwork art, OrderInfo info) {
     FileNames names = new FileNames(art.slug());
+    ForkJoinTask<byte[]> outlines = ForkJoinTask.adapt(() -> DxfWriter.outlines(art)).fork();
+    ForkJoinTask<byte[]> lines = ForkJoinTask.adapt(() -> DxfWriter.lines(art)).fork();
+    ForkJoinTask<byte[]> picture = ForkJoinTask.adapt(() -> SvgWriter.write(art)).fork();
     SortedMap<String, byte[]> out = new TreeMap<>();
     new GerberLayers(art, info).write(out);
     XncWriter.write(art, out);
     out.put(names.netlist(), IpcWriter.write(art));
-    out.put(names.dxf(), DxfWriter.lines(art));
-    out.put(names.outlines(), DxfWriter.outlines(art));
-    out.put(names.picture(), SvgWriter.write(art));
     out.put(names.notes(), NotesWriter.write(art, info));
     out.put(names.job(), JobWriter.whole(art, info));
-    out.put(names.fabZip(), FabZip.write(art, info, out));
+    byte[] zip = FabZip.write(art, info, out);
+    out.put(names.fabZip(), zip);
+    out.put(names.picture(), picture.join());
+    out.put(names.dxf(), lines.join());
+    out.put(names.outlines(), outlines.join());
     return out;
   }
 }

@@ -47,9 +47,7 @@ class ResistanceOfFilesTest {
         report.stream().map(TerminalOhm::key).toList(),
         files.pairs().stream().map(p -> p.from() + "-" + p.to()).toList());
     for (int i = 0; i < report.size(); i++) {
-      // In rows of vias the track between two pads runs under them: the files show it as copper.
-      double share = name.equals("test-bench") ? 2e-4 : 1e-6;
-      assertEquals(report.get(i).ohm(), files.pairs().get(i).ohm(), share * report.get(i).ohm());
+      assertEquals(report.get(i).ohm(), files.pairs().get(i).ohm(), 1e-6 * report.get(i).ohm());
     }
     assertEquals(0, files.error());
   }

@@ -11,12 +11,15 @@ import etchloom.rules.RuleReport;
 import etchloom.spec.Spec;
 import etchloom.testing.Specs;
 import java.io.IOException;
+import java.nio.charset.StandardCharsets;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Locale;
 import java.util.Map;
 import java.util.Set;
 import java.util.TreeSet;
+import java.util.regex.Matcher;
+import java.util.regex.Pattern;
 import org.junit.jupiter.api.Test;
 
 /** The keys and numbers of the report, read back by a JSON parser. */
@@ -139,7 +142,21 @@ class ReportJsonTest {
   }
 
   private static void same(double expected, Object actual) {
-    assertEquals(expected, ((Number) actual).doubleValue(), 1e-13 * Math.abs(expected));
+    // ten significant digits: half of the last one is 5e-10 of the smallest leading digit
+    assertEquals(expected, ((Number) actual).doubleValue(), 5e-10 * Math.abs(expected));
+  }
+
+  @Test
+  void noNumberHasMoreThanTenDigits() throws IOException {
+    String text = new String(ReportJson.write(SMALL), StandardCharsets.US_ASCII);
+    Matcher number = Pattern.compile("[:\\[,]\\s*-?([0-9.]+)").matcher(text);
+    int longest = 0;
+    while (number.find()) {
+      String digits = number.group(1).replace(".", "").replaceFirst("^0+", "");
+      assertTrue(digits.length() <= 10, number.group());
+      longest = Math.max(longest, digits.length());
+    }
+    assertEquals(10, longest);
   }
 
   @Test
@@ -188,7 +205,7 @@ class ReportJsonTest {
   @Test
   void figures_haveTheFilesPaths() {
     Map<String, Object> flat = ReportJson.figures(SMALL);
-    assertEquals(SMALL.resistance().phases().get(0).ohm(), flat.get("resistance.phaseOhm.U"));
+    same(SMALL.resistance().phases().get(0).ohm(), flat.get("resistance.phaseOhm.U"));
     assertEquals("star", flat.get("winding.connection"));
     assertEquals(true, flat.get("verdict.made"));
     assertFalse(flat.keySet().stream().anyMatch(k -> k.contains("sequence")));

@@ -103,13 +103,13 @@ class ReportKeysTest {
   void numbersAreTheRecords() {
     Map<String, Object> flat = ReportJson.figures(STAR);
     MachineFigures m = STAR.machine().orElseThrow();
-    assertEquals(m.emf().orElseThrow().rpmPerVolt(), flat.get("emf.rpmPerVolt"));
-    assertEquals(
+    same(m.emf().orElseThrow().rpmPerVolt(), flat.get("emf.rpmPerVolt"));
+    same(
         m.torque().orElseThrow().newtonMetrePerAmpereRms(),
         flat.get("torque.newtonMetrePerAmpereRms"));
-    assertEquals(m.loss().rippleWatt().orElseThrow(), flat.get("loss.rippleWatt"));
-    assertEquals(m.thermal().hotC(), flat.get("resistance.hotC"));
-    assertEquals(
+    same(m.loss().rippleWatt().orElseThrow(), flat.get("loss.rippleWatt"));
+    same(m.thermal().hotC(), flat.get("resistance.hotC"));
+    same(
         STAR.inductance().orElseThrow().synchronousHenry(),
         flat.get("inductance.synchronousHenry"));
     // m/2 pole pairs times flux linkage, texts on field-oriented control; amplitude-invariant
@@ -117,6 +117,11 @@ class ReportKeysTest {
         1.5 * 4 * (double) flat.get("emf.fluxLinkageWeber"),
         (double) flat.get("torque.newtonMetrePerAmperePeak"),
         1e-9);
+  }
+
+  /** Ten significant digits. */
+  private static void same(double expected, Object actual) {
+    assertEquals(expected, (double) actual, 5e-10 * Math.abs(expected));
   }
 
   @Test

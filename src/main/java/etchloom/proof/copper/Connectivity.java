@@ -91,6 +91,9 @@ public final class Connectivity {
 
   private static int[] islandsTouched(Hole hole, Figure f) {
     double r = hole.diameterMm() / 2 * RingPen.NM;
+    if (hole.slot().isEmpty()) {
+      return f.islandsWithin(Place.nm(hole.at().x()), Place.nm(hole.at().y()), r);
+    }
     return hole.samples().stream()
         .flatMapToInt(p -> Arrays.stream(f.islandsWithin(Place.nm(p.x()), Place.nm(p.y()), r)))
         .distinct()

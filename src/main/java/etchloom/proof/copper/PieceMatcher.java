@@ -4,8 +4,6 @@ import etchloom.geometry.Distance;
 import etchloom.geometry.Point;
 import etchloom.geometry.Segment;
 import java.util.ArrayList;
-import java.util.Arrays;
-import java.util.Comparator;
 import java.util.List;
 
 /** Finds pieces of two drawings that are the same; see {@link PieceMatch}. */
@@ -22,8 +20,8 @@ final class PieceMatcher {
   }
 
   PieceMatch match(List<DrawnPiece> first, List<DrawnPiece> second) {
-    DrawnPiece[] a = sorted(first);
-    DrawnPiece[] b = sorted(second);
+    PiecesAcross a = new PiecesAcross(first);
+    PiecesAcross b = new PiecesAcross(second);
     List<DrawnPiece> leftA = without(a, b);
     List<DrawnPiece> leftB = without(b, a);
     boolean[] doneA = new boolean[leftA.size()];
@@ -43,28 +41,21 @@ final class PieceMatcher {
     return out;
   }
 
-  private static DrawnPiece[] sorted(List<DrawnPiece> pieces) {
-    DrawnPiece[] out = pieces.toArray(new DrawnPiece[0]);
-    Arrays.sort(out, Comparator.comparingDouble(p -> p.lowEnd().x()));
-    return out;
-  }
-
-  private List<DrawnPiece> without(DrawnPiece[] a, DrawnPiece[] b) {
+  private List<DrawnPiece> without(PiecesAcross a, PiecesAcross b) {
     List<DrawnPiece> out = new ArrayList<>();
     int from = 0;
-    for (DrawnPiece p : a) {
-      double x = p.lowEnd().x();
-      while (from < b.length && b[from].lowEnd().x() < x - tolerance.endMm()) {
+    for (int i = 0; i < a.size(); i++) {
+      double low = a.x(i) - tolerance.endMm() - PiecesAcross.STEP_MM;
+      double high = a.x(i) + tolerance.endMm() + PiecesAcross.STEP_MM;
+      while (from < b.size() && b.x(from) < low) {
         from++;
       }
       boolean found = false;
-      for (int k = from;
-          k < b.length && b[k].lowEnd().x() <= x + tolerance.endMm() && !found;
-          k++) {
-        found = same(p, b[k]);
+      for (int k = from; k < b.size() && b.x(k) <= high && !found; k++) {
+        found = same(a.piece(i), b.piece(k));
       }
       if (!found) {
-        out.add(p);
+        out.add(a.piece(i));
       }
     }
     return out;

@@ -28,6 +28,13 @@ import java.util.TreeMap;
  */
 final class CentreLines {
   private static final double TOUCH_MM = 1e-6;
+
+  /**
+   * Two strokes meet where they overlap by more than this: round ends that only graze each other,
+   * as rounded to the grid, meet in a neck of a micrometre that carries nothing.
+   */
+  private static final double GRAZE_MM = 1e-5;
+
   private static final double MAX_SWEEP = ShapeTree.MAX_SWEEP_RAD - 1e-3;
 
   /** A stroke touches itself only where the way along it is longer than so many widths. */
@@ -149,9 +156,10 @@ final class CentreLines {
             TOUCH_MM,
             (i, j, limit) -> {
               Nearest n = Distance.between(shapes.get(i), shapes.get(j));
-              if (n.distanceMm() - fats[i] - fats[j] <= TOUCH_MM) {
-                int[] a = owner.get(i);
-                int[] b = owner.get(j);
+              int[] a = owner.get(i);
+              int[] b = owner.get(j);
+              boolean strokes = a[1] >= 0 && b[1] >= 0;
+              if (n.distanceMm() - fats[i] - fats[j] <= (strokes ? -GRAZE_MM : TOUCH_MM)) {
                 out.add(new Contact(a[0], a[1], b[0], b[1], n));
               }
               return limit;

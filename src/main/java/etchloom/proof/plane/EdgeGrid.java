@@ -16,6 +16,7 @@ final class EdgeGrid {
   private final int[] bx;
   private final int[] by;
   private final double cell;
+  private final double perCell;
   private final long x0;
   private final long y0;
   private final int columns;
@@ -47,6 +48,7 @@ final class EdgeGrid {
     double w = n == 0 ? 1 : maxX - x0 + 2.0 * MARGIN_NM;
     double h = n == 0 ? 1 : maxY - y0 + 2.0 * MARGIN_NM;
     cell = Math.max(Math.max(run / (1.5 * n + 1), Math.sqrt(w * h / (2.0 * n + 1))), 1000);
+    perCell = 1 / cell;
     columns = (int) (w / cell) + 1;
     rows = (int) (h / cell) + 1;
     start = new int[columns * rows + 1];
@@ -54,21 +56,29 @@ final class EdgeGrid {
   }
 
   private int[] fill(int n) {
+    int[] cells = new int[4 * n];
+    int[] counts = new int[n];
+    int all = 0;
     for (int i = 0; i < n; i++) {
       int k = cover(i);
+      if (all + k > cells.length) {
+        cells = Arrays.copyOf(cells, Math.max(2 * cells.length, all + k));
+      }
       for (int c = 0; c < k; c++) {
+        cells[all++] = cover[c];
         start[cover[c] + 1]++;
       }
+      counts[i] = k;
     }
     for (int c = 0; c < columns * rows; c++) {
       start[c + 1] += start[c];
     }
     int[] next = Arrays.copyOf(start, start.length);
-    int[] out = new int[start[columns * rows]];
+    int[] out = new int[all];
+    int k = 0;
     for (int i = 0; i < n; i++) {
-      int k = cover(i);
-      for (int c = 0; c < k; c++) {
-        out[next[cover[c]]++] = i;
+      for (int end = k + counts[i]; k < end; k++) {
+        out[next[cells[k]]++] = i;
       }
     }
     return out;
@@ -145,11 +155,15 @@ final class EdgeGrid {
   }
 
   private int row(double y) {
-    return (int) Math.max(0, Math.min(rows - 1.0, Math.floor((y - y0) / cell)));
+    return place((y - y0) * perCell, rows);
   }
 
   private int column(double x) {
-    return (int) Math.max(0, Math.min(columns - 1.0, Math.floor((x - x0) / cell)));
+    return place((x - x0) * perCell, columns);
+  }
+
+  private static int place(double at, int count) {
+    return at <= 0 ? 0 : at >= count - 1 ? count - 1 : (int) at;
   }
 
   /**

@@ -2,7 +2,6 @@ package etchloom.proof.plane;
 
 import java.util.Arrays;
 import java.util.function.IntPredicate;
-import java.util.stream.IntStream;
 
 /**
  * A plane figure as its boundary: directed edges with the figure on their left, joined to rings.
@@ -156,12 +155,14 @@ public final class Figure {
 
   /** The islands that a disc touches or covers part of, in ascending order. */
   public int[] islandsWithin(int x, int y, double radius) {
-    IntStream near = Arrays.stream(edgesWithin(x, y, radius)).map(e -> island(ringOf[e]));
+    int[] near = edgesWithin(x, y, radius);
+    int[] some = Arrays.copyOf(near, near.length + 1);
+    for (int k = 0; k < near.length; k++) {
+      some[k] = island(ringOf[near[k]]);
+    }
     int here = islandAt(x, y);
-    return (here < 0 ? near : IntStream.concat(near, IntStream.of(here)))
-        .sorted()
-        .distinct()
-        .toArray();
+    some[near.length] = here;
+    return distinct(some, here < 0 ? near.length : near.length + 1);
   }
 
   /** The edges that a disc touches, in ascending order. */
@@ -171,17 +172,33 @@ public final class Figure {
     }
     EdgeGrid g = grid();
     int n = g.coverBox(x - radius, y - radius, x + radius, y + radius);
-    IntStream.Builder out = IntStream.builder();
+    int[] found = new int[16];
+    int count = 0;
     for (int c = 0; c < n; c++) {
       int cell = g.covered(c);
       for (int k = g.from(cell); k < g.to(cell); k++) {
         int e = g.entry(k);
         if (Distance.pointToEdge(this, e, x, y) <= radius) {
-          out.add(e);
+          if (count == found.length) {
+            found = Arrays.copyOf(found, 2 * count);
+          }
+          found[count++] = e;
         }
       }
     }
-    return out.build().sorted().distinct().toArray();
+    return distinct(found, count);
+  }
+
+  /** The first of some numbers, ascending, each once. */
+  private static int[] distinct(int[] some, int count) {
+    Arrays.sort(some, 0, count);
+    int n = 0;
+    for (int k = 0; k < count; k++) {
+      if (n == 0 || some[n - 1] != some[k]) {
+        some[n++] = some[k];
+      }
+    }
+    return Arrays.copyOf(some, n);
   }
 
   /** The edge met first on the way to the left, or -1. */

@@ -112,6 +112,23 @@ class FileResistanceTest {
     assertEquals(PER_SQUARE * (6 + 4.95) / 0.2, ohm(r), 1e-12);
   }
 
+  /** The round ends of the wide tracks meet in one point, to the grid's step, over the bar. */
+  @Test
+  void roundEndsThatGraze_leaveTheBarBetweenThem() {
+    Point a = new Point(-5, 0);
+    Point b = new Point(6, 0);
+    double bar = 0.999999;
+    FileResistance.Ohms r =
+        ohms(
+            0,
+            List.of(),
+            List.of(a, b),
+            stroke(1, true, line(-5, 0, 0, 0)),
+            stroke(0.8, true, line(0, 0, bar, 0)),
+            stroke(1, true, line(bar, 0, 6, 0)));
+    assertEquals(PER_SQUARE * (5 + bar / 0.8 + 6 - bar), ohm(r), 1e-12);
+  }
+
   @Test
   void twoWays_shareTheCurrent_andCopperDrawnTwiceCountsOnce() {
     Point a = new Point(0, 0);

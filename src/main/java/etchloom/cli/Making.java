@@ -1,0 +1,33 @@
+package etchloom.cli;
+
+import etchloom.diagnostic.Staged;
+import etchloom.run.Laid;
+import java.time.Instant;
+import java.util.Optional;
+import java.util.concurrent.ForkJoinTask;
+
+/**
+ * A board being made: its files are written and proved on another processor while its figures are
+ * worked out. To be used from within a pool of the fork/join kind.
+ */
+record Making(Attempt attempt, ForkJoinTask<LayerFiles> layers) {
+
+  /**
+   * @param draft whether the board is to be marked as one that breaks rules
+   * @throws BadInput where the spec cannot be drawn
+   */
+  static Making of(InputFiles.Inputs in, boolean draft, Optional<Instant> created) {
+    Staged<Laid> laid = Attempt.laid(in, draft);
+    Laid board = laid.value().orElseThrow();
+    ForkJoinTask<LayerFiles> layers =
+        ForkJoinTask.adapt(() -> LayerFiles.of(board, created)).fork();
+    return new Making(Attempt.judged(in, laid), layers);
+  }
+
+  /**
+   * @throws FailedProof where the bytes are not the winding that was asked for
+   */
+  SetFiles whole() {
+    return SetFiles.of(attempt, layers.join());
+  }
+}
