@@ -47,14 +47,22 @@ public final class HtmlReport {
 
   private void page(Optional<String> picture) {
     String title = r.artwork().title() + ", revision " + r.artwork().revision();
-    HtmlHead.write(h, title, false);
+    List<String> scripts =
+        List.of(
+            PageParts.pageScript(),
+            PageParts.boardScript(),
+            PageParts.plotLibrary(),
+            PageParts.plotScript());
+    HtmlHead.write(h, title, List.of(PageParts.plotStyle(), PageParts.style()), scripts);
     h.open("body");
     h.element("a", "Skip to the verdict", "class=\"skip\"", "href=\"#s1\"");
     head();
     contents();
     h.open("main");
     sections(picture);
-    h.close("main").close("body").close("html");
+    h.close("main");
+    scripts.forEach(s -> h.open("script").raw(s).close("script"));
+    h.close("body").close("html");
   }
 
   private void head() {

@@ -70,6 +70,11 @@ public final class JsonTree {
     return set(key, List.copyOf(values));
   }
 
+  /** As {@link #putObjects}, but no key for an empty list. */
+  JsonTree putSome(String key, List<JsonTree> values) {
+    return values.isEmpty() ? this : putObjects(key, values);
+  }
+
   public JsonTree putTexts(String key, List<String> values) {
     return set(key, List.copyOf(values));
   }

@@ -90,7 +90,7 @@ public final class Summary {
     page.row("resistance at 20 C", "", "", "");
     page.cells("phase", f.phases(), Summary::phase);
     page.cells("terminals", f.terminals(), Summary::terminals);
-    List<PairLimits> limits = PairLimits.lines(r);
+    List<PairLimits> limits = PairLimits.lines(r.resistance());
     page.item(
         "limits",
         limits.isEmpty()
