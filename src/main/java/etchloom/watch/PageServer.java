@@ -33,6 +33,7 @@ public final class PageServer implements AutoCloseable {
   private final ExecutorService threads;
   private final List<String> hosts;
   private final byte[] script;
+  private final byte[] style;
   private volatile Showing showing;
   private int shown;
 
@@ -42,12 +43,20 @@ public final class PageServer implements AutoCloseable {
     int port = server.getAddress().getPort();
     hosts = List.of("127.0.0.1:" + port, "localhost:" + port);
     showing = new Showing(version(), Optional.empty(), Optional.empty());
-    try (InputStream in = PageServer.class.getResourceAsStream("reload.js")) {
-      script = in.readAllBytes();
-    }
+    script = resource("reload.js");
+    style = resource("watch.css");
     server.setExecutor(threads);
     server.createContext("/", this::answer);
     server.start();
+  }
+
+  private static byte[] resource(String name) throws IOException {
+    try (InputStream in = PageServer.class.getResourceAsStream(name)) {
+      if (in == null) {
+        throw new IllegalStateException(name + " is missing from the program");
+      }
+      return in.readAllBytes();
+    }
   }
 
   /**
@@ -132,6 +141,8 @@ public final class PageServer implements AutoCloseable {
       plain(e, 200, now.version());
     } else if (name.equals(ServedCopy.SCRIPT)) {
       send(e, 200, "text/javascript; charset=utf-8", script);
+    } else if (name.equals(ServedCopy.STYLE)) {
+      send(e, 200, "text/css; charset=utf-8", style);
     } else if (now.file(name).isPresent()) {
       send(e, 200, type(name), now.file(name).get());
     } else {

@@ -1,6 +1,10 @@
 package etchloom.watch;
 
 import java.nio.charset.StandardCharsets;
+import java.util.ArrayList;
+import java.util.LinkedHashMap;
+import java.util.List;
+import java.util.Map;
 
 /**
  * A page as it is served: with the script that reloads it, and a policy that lets this script ask
@@ -11,6 +15,7 @@ import java.nio.charset.StandardCharsets;
  */
 record ServedCopy(byte[] html, String policy) {
   static final String SCRIPT = "-/reload.js";
+  static final String STYLE = "-/watch.css";
   static final String VERSION = "-/version";
 
   private static final String META = "<meta http-equiv=\"Content-Security-Policy\" content=\"";
@@ -29,6 +34,8 @@ record ServedCopy(byte[] html, String policy) {
       policy = html.substring(meta + META.length(), end);
       html.delete(meta, end + META_END.length());
     }
+    int head = html.indexOf("</head>");
+    html.insert(Math.max(head, 0), "<link rel=\"stylesheet\" href=\"/" + STYLE + "\"/>\n");
     String script = "<script src=\"/" + SCRIPT + "\" data-version=\"" + version + "\"></script>\n";
     int last = html.lastIndexOf("</body>");
     html.insert(last < 0 ? html.length() : last, script);
@@ -39,21 +46,20 @@ record ServedCopy(byte[] html, String policy) {
     return new ServedCopy(html.toString().getBytes(StandardCharsets.UTF_8), wider(policy));
   }
 
+  /** The policy, and besides: script and style of this server, and asking it. */
   private static String wider(String policy) {
-    StringBuilder out = new StringBuilder();
-    boolean scripts = false;
+    Map<String, String> directives = new LinkedHashMap<>();
     for (String directive : policy.split(";")) {
-      String d = directive.strip();
-      if (d.startsWith("script-src ")) {
-        d = d.equals("script-src 'none'") ? "script-src 'self'" : d + " 'self'";
-        scripts = true;
-      }
-      if (!d.startsWith("connect-src ")) {
-        out.append(d).append("; ");
-      }
+      String[] parts = directive.strip().split(" ", 2);
+      directives.put(parts[0], parts.length > 1 ? parts[1] : "");
     }
-    return out
-        + (scripts ? "" : "script-src 'self'; ")
-        + "connect-src 'self'; frame-ancestors 'none'";
+    for (String more : List.of("script-src", "style-src", "connect-src")) {
+      String before = directives.getOrDefault(more, "'none'");
+      directives.put(more, before.equals("'none'") ? "'self'" : before + " 'self'");
+    }
+    directives.put("frame-ancestors", "'none'");
+    List<String> out = new ArrayList<>();
+    directives.forEach((name, sources) -> out.add((name + " " + sources).strip()));
+    return String.join("; ", out);
   }
 }

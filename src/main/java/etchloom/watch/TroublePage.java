@@ -15,7 +15,7 @@ final class TroublePage {
     Html h = new Html();
     HtmlHead.write(h, "Not drawn", false);
     h.open("body").open("main").element("h1", "Not drawn");
-    h.open("pre", "tabindex=\"0\"", "style=\"white-space: pre-wrap\"");
+    h.open("pre", "class=\"trouble\"", "tabindex=\"0\"");
     trouble
         .lines()
         .forEach(l -> h.text(l.replace("\t", "    ")).raw("\n")); // both of mark and line: in line
@@ -33,7 +33,7 @@ final class TroublePage {
 
   /** What stands on top of the last board's page while the spec is not drawn. */
   static String notice() {
-    return "<p role=\"status\" style=\"border: 2px solid; padding: 0.5em\"><strong>Not the spec as it"
-        + " stands:</strong> the last board that was drawn. <a href=\"/\">What is wrong now</a></p>\n";
+    return "<p role=\"status\" class=\"watch-notice\"><strong>Not the spec as it stands:</strong> the last board"
+        + " that was drawn. <a href=\"/\">What is wrong now</a></p>\n";
   }
 }

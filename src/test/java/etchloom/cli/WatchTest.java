@@ -42,7 +42,10 @@ class WatchTest {
       assertFalse(written.contains("reload"), "the file on the disk has nothing of the server");
       String policy = "<meta http-equiv=\"Content-Security-Policy\".*?/>\n";
       String script = "<script src=\"/-/reload.js\".*?</script>\n";
-      assertEquals(written.replaceFirst(policy, ""), first.body().replaceFirst(script, ""));
+      String style = "<link rel=\"stylesheet\" href=\"/-/watch.css\"/>\n";
+      assertEquals(
+          written.replaceFirst(policy, ""),
+          first.body().replaceFirst(script, "").replaceFirst(style, ""));
       for (Map.Entry<String, byte[]> f : files(set).entrySet()) {
         Page page = Page.get(watch.address(), "/" + f.getKey());
         assertEquals(200, page.status(), f.getKey());

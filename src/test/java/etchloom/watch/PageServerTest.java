@@ -67,10 +67,12 @@ class PageServerTest {
     assertTrue(
         page.head()
             .contains(
-                "content-security-policy: default-src 'none'; style-src 'unsafe-inline';"
+                "content-security-policy: default-src 'none'; style-src 'unsafe-inline' 'self';"
                     + " script-src 'unsafe-inline' 'self'; connect-src 'self';"
-                    + " frame-ancestors 'none'"),
+                    + " frame-ancestors 'none'\r\n"),
         page.head());
+    assertTrue(page.body().contains("<link rel=\"stylesheet\" href=\"/-/watch.css\"/>\n</head>"));
+    assertTrue(Page.get(at, "/-/watch.css").head().contains("content-type: text/css"));
     assertTrue(Page.get(at, "/-/reload.js").body().contains("location.reload()"));
   }
 
@@ -95,11 +97,12 @@ class PageServerTest {
         page.body());
     assertTrue(page.body().contains("href=\"/report.html\""), page.body());
     Page last = Page.get(at, "/report.html");
-    assertTrue(last.body().contains("<body><p role=\"status\""), last.body());
+    assertTrue(
+        last.body().contains("<body><p role=\"status\" class=\"watch-notice\""), last.body());
     assertEquals("<svg/>", Page.get(at, "/wheel.svg").body());
     server.show(
         new TreeMap<>(java.util.Map.of("report.html", REPORT.getBytes(StandardCharsets.UTF_8))));
-    assertFalse(Page.get(at, "/report.html").body().contains("role=\"status\""));
+    assertFalse(Page.get(at, "/report.html").body().contains("watch-notice\""));
     assertEquals(404, Page.get(at, "/wheel.svg").status(), "no longer in the set");
   }
 
