@@ -1,6 +1,5 @@
 package etchloom.cli;
 
-import com.sun.management.OperatingSystemMXBean;
 import etchloom.artwork.Artwork;
 import etchloom.board.Assembler;
 import etchloom.board.Assembly;
@@ -19,6 +18,7 @@ import etchloom.write.LayerSet;
 import java.lang.management.ManagementFactory;
 import java.nio.charset.StandardCharsets;
 import java.util.ArrayList;
+import java.util.Arrays;
 import java.util.List;
 import java.util.Locale;
 import java.util.Optional;
@@ -26,26 +26,32 @@ import java.util.SortedMap;
 
 /**
  * Prints the time of drawing, of the rule check, of writing and of the proof against the number of
- * drawn pieces, for ever larger boards like the filter wheel's with 8 layers of 0.1 mm tracks, and
- * the exponent from each to the next. Run its main method with the sizes wanted, {@code 1 2 4 8 10}
- * by default; the last holds about 200,000 pieces. It is the time of all processors together, the
- * least of three.
+ * drawn pieces, and the exponent from each to the next, for boards like the filter wheel's, four
+ * times as large and with 0.1 mm tracks: first ever more turns, then more layers. Arguments are
+ * boards as SIZE:LAYERS:TURNS; the last by default holds about 200,000 pieces. All work is done on
+ * one thread; it is that thread's processor time, the least of three, after some rounds for the
+ * compiler. Note that a larger board has more pieces and longer arcs: its copper takes more chords.
  */
 final class BoardGrowth {
   private static final int ROUNDS = 3;
+  private static final List<String> BOARDS =
+      List.of("4:8:17", "4:8:34", "4:8:68", "4:8:136", "4:16:136", "5:16:170");
 
   private BoardGrowth() {}
 
   private record Times(int pieces, double[] ms) {}
 
   public static void main(String[] args) {
-    List<String> sizes = args.length > 0 ? List.of(args) : List.of("1", "2", "4", "8", "10");
-    times(1);
+    List<String> boards = args.length > 0 ? List.of(args) : BOARDS;
+    System.setProperty("java.util.concurrent.ForkJoinPool.common.parallelism", "0");
+    for (int i = 0; i < 4; i++) {
+      times("1:4:17");
+    }
     System.out.printf(
         "%9s %22s %22s %22s %22s%n", "pieces", "geometry", "rules", "writing", "proof");
     Times last = null;
-    for (String size : sizes) {
-      Times now = times(Integer.parseInt(size));
+    for (String board : boards) {
+      Times now = times(board);
       StringBuilder line = new StringBuilder(String.format(Locale.ROOT, "%9d", now.pieces));
       for (int k = 0; k < now.ms.length; k++) {
         String growth =
@@ -62,23 +68,23 @@ final class BoardGrowth {
     }
   }
 
-  private static Times times(int size) {
-    SpecFile file = spec(size);
+  private static Times times(String board) {
+    SpecFile file = spec(board.split(":"));
     FabRules fab = FabReader.builtIn("standard");
     double[] least = new double[4];
-    java.util.Arrays.fill(least, Double.POSITIVE_INFINITY);
+    Arrays.fill(least, Double.POSITIVE_INFINITY);
     int pieces = 0;
     for (int round = 0; round < ROUNDS; round++) {
       List<Double> at = new ArrayList<>();
       at.add(processorMs());
-      Assembly board =
+      Assembly drawn =
           Assembler.assemble(file.spec(), fab, file.positions(), false).value().orElseThrow();
       at.add(processorMs());
-      Artwork art = board.artwork().onGrid();
+      Artwork art = drawn.artwork().onGrid();
       Laid laid =
-          new Laid(file.spec(), fab, board, Resistance.of(board.artwork(), fab.tolerance()));
+          new Laid(file.spec(), fab, drawn, Resistance.of(drawn.artwork(), fab.tolerance()));
       double before = processorMs();
-      RuleCheck.check(board.artwork(), file.spec(), fab, RuleContext.NONE);
+      RuleCheck.check(drawn.artwork(), file.spec(), fab, RuleContext.NONE);
       at.add(at.get(1) + processorMs() - before);
       before = processorMs();
       SortedMap<String, byte[]> files = LayerSet.write(art, OrderSheet.of(laid, Optional.empty()));
@@ -98,7 +104,8 @@ final class BoardGrowth {
     return new Times(pieces, least);
   }
 
-  private static SpecFile spec(int size) {
+  private static SpecFile spec(String[] board) {
+    int size = Integer.parseInt(board[0]);
     String text =
         new String(Templates.bytes("filter-wheel"), StandardCharsets.UTF_8)
             .replace("inner-radius: 12 mm", "inner-radius: " + 12 * size + " mm")
@@ -107,15 +114,15 @@ final class BoardGrowth {
             .replace("circle: 78 mm", "circle: " + (60 * size + 18) + " mm")
             .replace("track: 0.2 mm", "track: 0.1 mm")
             .replace("space: 0.2 mm", "space: 0.1 mm")
-            .replace("layers: 4", "layers: 8")
-            .replace("thickness: 1.2 mm", "thickness: 1.6 mm");
+            .replace("turns: fill", "turns: " + board[2])
+            .replace("layers: 4", "layers: " + board[1])
+            .replace("thickness: 1.2 mm", "thickness: 3.2 mm");
     return SpecReader.read("growth.yaml", text.getBytes(StandardCharsets.UTF_8))
         .value()
         .orElseThrow();
   }
 
   private static double processorMs() {
-    return ManagementFactory.getPlatformMXBean(OperatingSystemMXBean.class).getProcessCpuTime()
-        / 1e6;
+    return ManagementFactory.getThreadMXBean().getCurrentThreadCpuTime() / 1e6;
   }
 }
