@@ -38,7 +38,11 @@ public @interface NeedsBrowser {
     public ConditionEvaluationResult evaluateExecutionCondition(ExtensionContext context) {
       return Browser.missing()
           .filter(m -> System.getenv(REQUIRED) == null)
-          .map(ConditionEvaluationResult::disabled)
+          .map(
+              m -> {
+                System.err.println(context.getDisplayName() + " skipped: " + m);
+                return ConditionEvaluationResult.disabled(m);
+              })
           .orElse(ConditionEvaluationResult.enabled("left to Browser, which fails without one"));
     }
   }
