@@ -20,7 +20,17 @@ final class BoardMarks {
    * @param name stands beside the place
    * @param placed whether it has a place at all
    */
-  record Mark(String id, String rowId, String name, boolean broken, boolean placed, Finding f) {}
+  record Mark(String id, String rowId, String name, boolean broken, boolean placed, Finding f) {
+    /** The place in words, linked to the mark where there is a picture that has it. */
+    Cell place(String words, boolean pictured) {
+      return placed && pictured ? Cell.of(words).to("#" + id) : Cell.of(words);
+    }
+  }
+
+  /** What a table's caption says of its rows' places. */
+  static String caption(String rows, boolean pictured) {
+    return pictured ? rows + "; those with a place are marked on the board" : rows;
+  }
 
   static Mark broken(int i, Finding f) {
     return new Mark("mark-b" + i, "broken-" + i, "" + (i + 1), true, placed(f), f);

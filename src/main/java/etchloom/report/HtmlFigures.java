@@ -24,13 +24,18 @@ final class HtmlFigures {
 
   private final Html h;
   private final Results r;
+  private final boolean pictured;
   private final Map<String, Object> figures;
   private final Map<Group, List<Shown>> shown;
   private final HtmlPlots plots;
   private final HtmlMachine machine;
 
-  HtmlFigures(Html h, Results r, Map<String, Object> figures) {
+  /**
+   * @param pictured whether the page shows the board
+   */
+  HtmlFigures(Html h, Results r, Map<String, Object> figures, boolean pictured) {
     this.h = h;
+    this.pictured = pictured;
     this.r = r;
     this.figures = figures;
     shown = Figures.shown(figures);
@@ -41,7 +46,7 @@ final class HtmlFigures {
   void deciding() {
     Table t =
         new Table(
-            "The tightest place of every rule; those with a place are marked on the board",
+            BoardMarks.caption("The tightest place of every rule", pictured),
             2,
             "Rule",
             "Measured",
@@ -53,7 +58,6 @@ final class HtmlFigures {
       Finding f = r.rules().minima().get(i);
       boolean broken = FindingText.broken(r.rules(), f.rule());
       BoardMarks.Mark mark = BoardMarks.tightest(i, f);
-      Cell place = Cell.of(FindingText.shortPlace(f));
       t.row(
           mark.rowId(),
           List.of(
@@ -61,7 +65,7 @@ final class HtmlFigures {
               FindingText.cell("check.minima[" + i + "]", f, true, broken),
               FindingText.cell("check.minima[" + i + "]", f, false, broken),
               Cell.of(broken ? "BROKEN" : "kept"),
-              mark.placed() ? place.to("#" + mark.id()) : place,
+              mark.place(FindingText.shortPlace(f), pictured),
               Cell.of(f.what())));
     }
     t.write(h);

@@ -59,6 +59,8 @@ public final class HtmlReport {
     head();
     contents();
     h.open("main");
+    h.open("noscript").element("p", "Scripts are off: no plots, but their tables say the same.");
+    h.close("noscript");
     sections(picture);
     h.close("main");
     scripts.forEach(s -> h.open("script").raw(s).close("script"));
@@ -90,11 +92,12 @@ public final class HtmlReport {
   }
 
   private void sections(Optional<String> picture) {
-    HtmlFigures electrical = new HtmlFigures(h, r, figures);
+    boolean pictured = picture.isPresent();
+    HtmlFigures electrical = new HtmlFigures(h, r, figures, pictured);
     HtmlSheets sheets = new HtmlSheets(h, r);
     List<Runnable> bodies =
         List.of(
-            () -> HtmlVerdict.add(h, r, figures),
+            () -> HtmlVerdict.add(h, r, figures, pictured),
             () -> HtmlBoard.add(h, r, picture),
             electrical::deciding,
             electrical::electrical,

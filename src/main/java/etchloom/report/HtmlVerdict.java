@@ -9,12 +9,15 @@ import java.util.Map;
 final class HtmlVerdict {
   private HtmlVerdict() {}
 
-  static void add(Html h, Results r, Map<String, Object> figures) {
+  /**
+   * @param pictured whether the page shows the board
+   */
+  static void add(Html h, Results r, Map<String, Object> figures, boolean pictured) {
     List<String> words = Verdicts.words(r);
     box(h, r.rules().passed() ? "yes" : "no", words.get(0), words.get(1));
     Verdicts.ripple(r, figures).ifPresent(w -> box(h, "no", w.get(0), w.get(1)));
     duty(h, r);
-    broken(h, r);
+    broken(h, r, pictured);
     r.proof().ifPresent(p -> proof(h, p));
     h.open("p", "class=\"quiet\"");
     h.text("Gaps are measured on the drawing as it stands, turn against turn; ");
@@ -26,13 +29,13 @@ final class HtmlVerdict {
     h.element("strong", word).text(": " + Words.symbols(text) + ".").close("div");
   }
 
-  private static void broken(Html h, Results r) {
+  private static void broken(Html h, Results r, boolean pictured) {
     if (r.rules().passed()) {
       return;
     }
     Table t =
         new Table(
-            "Broken rules; those with a place are marked on the board",
+            BoardMarks.caption("Broken rules", pictured),
             2,
             "Rule",
             "Measured",
@@ -43,14 +46,13 @@ final class HtmlVerdict {
       Finding f = r.rules().findings().get(i);
       String stem = "check.findings[" + i + "]";
       BoardMarks.Mark mark = BoardMarks.broken(i, f);
-      Cell place = Cell.of(FindingText.place(f));
       t.row(
           mark.rowId(),
           List.of(
               Cell.of((i + 1) + "\u00a0" + f.rule()),
               FindingText.cell(stem, f, true, true),
               FindingText.cell(stem, f, false, true),
-              mark.placed() ? place.to("#" + mark.id()) : place,
+              mark.place(FindingText.place(f), pictured),
               Cell.of(f.what())));
     }
     t.write(h);

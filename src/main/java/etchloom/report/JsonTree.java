@@ -40,6 +40,11 @@ public final class JsonTree {
     return set(key, Numbers.rounded(value, DIGITS));
   }
 
+  /** A number as the file has it. */
+  static String number(double value) {
+    return Numbers.plain(Numbers.rounded(value, DIGITS));
+  }
+
   public JsonTree put(String key, long value) {
     return set(key, value);
   }

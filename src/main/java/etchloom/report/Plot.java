@@ -46,7 +46,7 @@ record Plot(String id, String label, String caption, String x, String y, double 
     }
 
     private Marks add(String axis, double at, String name) {
-      all.add("[\"" + axis + "\"," + Numbers.plain(at) + ",\"" + name + "\"]");
+      all.add("[\"" + axis + "\"," + JsonTree.number(at) + ",\"" + name + "\"]");
       return this;
     }
   }

@@ -1,6 +1,5 @@
 package etchloom.report;
 
-import etchloom.units.Numbers;
 import java.util.ArrayList;
 import java.util.List;
 
@@ -91,7 +90,7 @@ final class Table {
     if (!cell.over().isEmpty()) {
       out.add("data-over=\"" + Html.escaped(cell.over()) + "\"");
     }
-    cell.exact().ifPresent(v -> out.add("data-v=\"" + Numbers.plain(v) + "\""));
+    cell.exact().ifPresent(v -> out.add("data-v=\"" + JsonTree.number(v) + "\""));
     return out.toArray(String[]::new);
   }
 

@@ -43,7 +43,7 @@ class ReportNumbersTest {
       fault(json, (String) c.get(0), (String) c.get(1), (String) c.get(2), (String) c.get(3))
           .forEach(wrong::add);
     }
-    assertEquals(List.of(), wrong);
+    assertEquals(List.of(), wrong.stream().limit(10).toList(), wrong.size() + " are wrong");
     assertTrue(cells.size() > 600, cells.size() + " numbers");
     Object without =
         b.run(
@@ -74,7 +74,8 @@ class ReportNumbersTest {
     if (!exact.isEmpty()) {
       double v = Double.parseDouble(exact);
       double wanted = value * factor * (over.isEmpty() ? 1 : 100);
-      if (Math.abs(v - wanted) > 1e-13 * Math.abs(wanted)) {
+      // A share is of unrounded numbers, each of which the file has to ten digits.
+      if (Math.abs(v - wanted) > (over.isEmpty() ? 0 : 1e-9) * Math.abs(wanted)) {
         out.add(key + ": " + exact + " for a plot, " + wanted);
       }
     }

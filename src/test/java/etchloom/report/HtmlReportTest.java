@@ -158,8 +158,10 @@ class HtmlReportTest {
   @Test
   void hugePicture_isLeftOut() throws Exception {
     String huge = "<svg>" + "x".repeat(HtmlReport.LARGEST_PICTURE) + "</svg>";
-    byte[] page = HtmlReport.write(SMALL, Optional.of(huge));
+    byte[] page = HtmlReport.write(Samples.with(SMALL, Samples.broken()), Optional.of(huge));
     assertTrue(page.length < 3_000_000);
+    assertFalse(
+        new String(page, StandardCharsets.UTF_8).contains("href=\"#mark-"), "leads nowhere");
     assertEquals(0, elements(parsed(new String(page, StandardCharsets.UTF_8)), "svg").size());
   }
 
