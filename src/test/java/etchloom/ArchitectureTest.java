@@ -59,6 +59,7 @@ class ArchitectureTest {
                   "geometry", "spec", "winding", "coil", "rim", "artwork", "diagnostic", "units")),
           Map.entry("write", List.of("artwork", "geometry", "units")),
           Map.entry("proof", List.of("artwork", "geometry", "units", "diagnostic")),
+          Map.entry("watch", List.of("report")),
           Map.entry("survey", WITH_RUN),
           Map.entry("receive", WITH_RUN),
           Map.entry(

@@ -20,22 +20,22 @@ import picocli.CommandLine.Spec;
     name = "etchloom",
     mixinStandardHelpOptions = true,
     version = "etchloom " + Version.TEXT,
-    description = {
-      "Draws printed-circuit stators: reads one YAML spec, writes the copper, drill, mask, legend"
-          + " and netlist files a board fab needs, checks them against the fab's rules, and reports"
-          + " the electrical properties of the copper it drew.",
-      ""
-    },
+    description =
+        "Draws printed-circuit stators: reads one YAML spec, writes the copper, drill, mask, legend"
+            + " and netlist files a board fab needs, checks them against the fab's rules, and"
+            + " reports the electrical properties of the copper it drew.",
     synopsisHeading = "Usage: ",
     commandListHeading = "%nCommands:%n",
-    optionListHeading = "%nOptions:%n",
     footer = {
       "",
       "Start:   etchloom new filter-wheel wheel.yaml",
       "         etchloom draw wheel.yaml",
       "",
-      "Exit: 0 done, every rule kept; 1 done, and the answer is no; 2 wrong input; 3 cannot read"
-          + " or write; 70 a fault in the program."
+      "Exit:    0  done, every rule kept",
+      "         1  done, and the answer is no",
+      "         2  wrong input",
+      "         3  cannot read or write",
+      "        70  a fault in the program"
     })
 public final class App implements Runnable {
   @Spec private CommandSpec spec;
@@ -55,6 +55,8 @@ public final class App implements Runnable {
     PrintWriter out = new PrintWriter(console.out(), true, StandardCharsets.UTF_8);
     PrintWriter err = new PrintWriter(console.err(), true, StandardCharsets.UTF_8);
     line.setOut(out).setErr(err);
+    headings(line);
+    line.getSubcommands().values().forEach(App::headings);
     line.setUsageHelpWidth(80).setUsageHelpAutoWidth(false);
     line.setColorScheme(CommandLine.Help.defaultColorScheme(CommandLine.Help.Ansi.OFF));
     line.setParameterExceptionHandler(App::misused);
@@ -63,6 +65,13 @@ public final class App implements Runnable {
     out.flush();
     err.flush();
     return code;
+  }
+
+  private static void headings(CommandLine line) {
+    line.getCommandSpec()
+        .usageMessage()
+        .parameterListHeading("%n")
+        .optionListHeading("%nOptions:%n");
   }
 
   private static Map<String, Supplier<Object>> commands(Console console) {
@@ -91,7 +100,8 @@ public final class App implements Runnable {
     return ExitCode.BAD_INPUT;
   }
 
-  private static int failed(Exception e, Console console) {
+  /** Says what went wrong, and gives the exit code for it. */
+  static int failed(Exception e, Console console) {
     if (e instanceof BadInput b) {
       console.err().print(DiagnosticText.text(b.diagnostics()));
       return ExitCode.BAD_INPUT;

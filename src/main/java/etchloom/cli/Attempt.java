@@ -21,7 +21,17 @@ record Attempt(InputFiles.Inputs inputs, Drawn drawn, List<Diagnostic> warnings)
    * @throws BadInput where the spec cannot be drawn
    */
   static Attempt of(InputFiles.Inputs in, boolean draft) {
-    return judged(in, laid(in, draft));
+    Staged<Laid> laid = laid(in, draft);
+    return with(in, laid, Pipeline.judge(laid.value().orElseThrow()));
+  }
+
+  /** As above, telling a person who looks how long it takes. */
+  static Attempt watched(InputFiles.Inputs in, Console console, boolean quiet) {
+    try (DrawPace pace = new DrawPace(console, quiet, false)) {
+      Staged<Laid> laid = laid(in, false);
+      pace.laid(laid.value().orElseThrow());
+      return judged(in, laid, pace);
+    }
   }
 
   /**
@@ -37,8 +47,13 @@ record Attempt(InputFiles.Inputs inputs, Drawn drawn, List<Diagnostic> warnings)
     return staged;
   }
 
-  static Attempt judged(InputFiles.Inputs in, Staged<Laid> laid) {
-    Drawn drawn = Pipeline.judge(laid.value().orElseThrow());
+  static Attempt judged(InputFiles.Inputs in, Staged<Laid> laid, DrawPace pace) {
+    Drawn drawn = Pipeline.judge(laid.value().orElseThrow(), pace::figures);
+    pace.figures(1);
+    return with(in, laid, drawn);
+  }
+
+  private static Attempt with(InputFiles.Inputs in, Staged<Laid> laid, Drawn drawn) {
     List<Diagnostic> warnings = new ArrayList<>(in.warnings());
     warnings.addAll(laid.diagnostics());
     return new Attempt(in, drawn, warnings);

@@ -38,10 +38,9 @@ final class CheckCommand implements Callable<Integer> {
   @Option(
       names = "--layer",
       paramLabel = "ROLE=FILE",
-      description = {
-        "DIR: what a file is that does not say it itself. Roles: L1 L2 ... drill plated nonplated",
-        "profile mask-top mask-bottom legend-top legend-bottom netlist job"
-      })
+      description =
+          "DIR: what a file is that does not say so itself: L1, L2 ..., profile, drill, plated,"
+              + " nonplated, mask-top, mask-bottom, legend-top, legend-bottom, netlist or job")
   private List<String> layers = new ArrayList<>();
 
   @Mixin private CommonOptions options;
@@ -60,7 +59,8 @@ final class CheckCommand implements Callable<Integer> {
     if (circuits != null || !layers.isEmpty()) {
       throw BadInput.of(what, "usage", "--circuits and --layer are for folders and zip files");
     }
-    Attempt attempt = Attempt.of(InputFiles.read(what, options.fab()), false);
+    Attempt attempt =
+        Attempt.watched(InputFiles.read(what, options.fab()), console, options.quiet());
     attempt.tell(console);
     if (options.json()) {
       console.print(ReportJson.writeCheck(attempt.results()));

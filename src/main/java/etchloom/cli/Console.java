@@ -20,10 +20,12 @@ public record Console(
   }
 
   /**
-   * Whether results may be coloured: only on a terminal, and never where NO_COLOR asks for none.
+   * Whether results may be coloured: only on a terminal that can, and never where NO_COLOR asks for
+   * none.
    */
   boolean colour() {
-    return terminal && variable("NO_COLOR").isEmpty();
+    boolean can = !variable("TERM").orElse("").equals("dumb");
+    return terminal && can && variable("NO_COLOR").isEmpty();
   }
 
   /** Says what is odd about the input, though it will do. */

@@ -8,6 +8,7 @@ import java.time.Instant;
 import java.util.Optional;
 import java.util.concurrent.Callable;
 import java.util.concurrent.ForkJoinPool;
+import java.util.function.BiConsumer;
 import picocli.CommandLine.Command;
 import picocli.CommandLine.Mixin;
 import picocli.CommandLine.Option;
@@ -37,6 +38,13 @@ final class DrawCommand implements Callable<Integer> {
       description = "write even where rules are broken; the files then say DRAFT")
   private boolean force;
 
+  @Option(
+      names = "--watch",
+      description =
+          "draw again whenever the spec or its rules change; shows the page at an address"
+              + " of this machine; Ctrl-C ends it")
+  private boolean watch;
+
   @Mixin private CommonOptions options;
 
   DrawCommand(Console console) {
@@ -45,18 +53,33 @@ final class DrawCommand implements Callable<Integer> {
 
   @Override
   public Integer call() {
+    if (watch && options.json()) {
+      throw BadInput.of("draw", "usage", "--watch and --json exclude each other");
+    }
+    return watch
+        ? WatchRun.run(spec, options.fab(), this::drawInPool, console)
+        : drawInPool(console, (f, s) -> {});
+  }
+
+  private int drawInPool(Console console, BiConsumer<Path, SetFiles> written) {
     ForkJoinPool pool = new ForkJoinPool(Runtime.getRuntime().availableProcessors());
-    try {
-      return pool.submit(this::draw).join();
+    try (DrawPace pace = new DrawPace(console, options.quiet(), true)) {
+      return pool.submit(() -> draw(console, written, pace)).join();
     } finally {
       pool.shutdownNow();
     }
   }
 
-  private Integer draw() {
+  /**
+   * Draws once.
+   *
+   * @param written is given the folder and the set, where one was published
+   */
+  private int draw(Console console, BiConsumer<Path, SetFiles> written, DrawPace pace) {
     InputFiles.Inputs in = InputFiles.read(spec, options.fab());
     Optional<Instant> created = OrderSheet.created(console);
-    Making making = Making.of(in, false, created);
+    Making making = Making.of(in, false, created, pace);
+    pace.clear();
     making.attempt().tell(console);
     boolean passed = making.attempt().passed();
     if (!passed && !force) {
@@ -64,11 +87,13 @@ final class DrawCommand implements Callable<Integer> {
       return ExitCode.REFUSED;
     }
     if (!passed) {
-      making = Making.of(in, true, created);
+      making = Making.of(in, true, created, pace);
     }
     Path target = target(in);
     SetFiles set = making.whole();
     publish(target, set);
+    pace.close();
+    written.accept(target, set);
     if (options.json()) {
       console.print(set.files().get("report.json"));
     } else if (!options.quiet()) {

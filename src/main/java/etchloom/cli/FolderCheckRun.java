@@ -4,6 +4,7 @@ import etchloom.diagnostic.Diagnostic;
 import etchloom.proof.FolderCheck;
 import etchloom.proof.FolderCheck.FolderReport;
 import etchloom.proof.read.FolderReader;
+import etchloom.proof.read.SetFolder;
 import etchloom.proof.read.UnreadableFile;
 import etchloom.report.FindingText;
 import etchloom.report.FolderSummary;
@@ -33,13 +34,17 @@ final class FolderCheckRun {
       Path path, List<String> layers, OptionalInt circuits, CommonOptions o, Console console) {
     FabRules fab = InputFiles.fab(o.fab().orElse(USUAL_FAB));
     FolderReport found;
-    try {
+    try (Pace pace = new Pace(console, o.quiet(), "checking")) {
+      SetFolder folder = FolderReader.read(path);
+      double usual = usualSeconds(folder);
+      pace.left(usual);
       found =
           FolderCheck.check(
-              FolderReader.read(path),
+              folder,
               layers,
               circuits,
-              (n, copper) -> FolderRules.shop(fab, n, copper));
+              (n, copper) -> FolderRules.shop(fab, n, copper),
+              share -> pace.left((1 - share) * usual));
     } catch (UnreadableFile e) {
       throw new BadInput(List.of(Diagnostic.error(e.code(), e.where(), "", e.reason())));
     } catch (IOException e) {
@@ -62,6 +67,11 @@ final class FolderCheckRun {
                   path.toString(), fab.title(), rules, found.proof(), terminals, console.colour()));
     }
     return rules.passed() && found.proof().passed() ? ExitCode.DONE : ExitCode.REFUSED;
+  }
+
+  /** On a machine with two processors, by measurement; {@link Pace} compares. */
+  private static double usualSeconds(SetFolder folder) {
+    return folder.files().values().stream().mapToLong(f -> f.length).sum() * 1e-6;
   }
 
   /** A finding's text without its name, which stands before it already. */

@@ -64,8 +64,7 @@ final class InputFiles {
           text(fabBytes),
           staged.diagnostics());
     }
-    Path base = Optional.ofNullable(path.toAbsolutePath().getParent()).orElse(path);
-    Path fabPath = fabOption.isPresent() ? path(fab) : base.resolve(path(fab));
+    Path fabPath = fabOption.isPresent() ? path(fab) : beside(path, fab);
     byte[] fabBytes = bytes(fabPath, fabPath.toString(), "rules file");
     Staged<FabRules> rules = FabReader.read(fabPath.toString(), fabBytes);
     return new Inputs(
@@ -76,6 +75,26 @@ final class InputFiles {
         rules.value().orElseThrow(() -> new BadInput(rules.diagnostics())),
         text(fabBytes),
         staged.diagnostics());
+  }
+
+  /** A path in a spec starts where the spec lies. */
+  private static Path beside(Path spec, String fab) {
+    return Optional.ofNullable(spec.toAbsolutePath().getParent()).orElse(spec).resolve(path(fab));
+  }
+
+  /**
+   * The rules file that a spec's bytes call for; empty where it is a built-in class, and where the
+   * spec cannot be understood.
+   */
+  static Optional<Path> rulesFile(Path spec, byte[] bytes, Optional<String> fabOption) {
+    if (fabOption.isPresent()) {
+      return fabOption.filter(InputFiles::isPath).map(InputFiles::path);
+    }
+    return SpecReader.read(spec.toString(), bytes)
+        .value()
+        .map(f -> f.spec().fab())
+        .filter(InputFiles::isPath)
+        .map(f -> beside(spec, f));
   }
 
   /**

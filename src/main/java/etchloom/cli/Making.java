@@ -16,12 +16,19 @@ record Making(Attempt attempt, ForkJoinTask<LayerFiles> layers) {
    * @param draft whether the board is to be marked as one that breaks rules
    * @throws BadInput where the spec cannot be drawn
    */
-  static Making of(InputFiles.Inputs in, boolean draft, Optional<Instant> created) {
+  static Making of(InputFiles.Inputs in, boolean draft, Optional<Instant> created, DrawPace pace) {
     Staged<Laid> laid = Attempt.laid(in, draft);
     Laid board = laid.value().orElseThrow();
-    ForkJoinTask<LayerFiles> layers =
-        ForkJoinTask.adapt(() -> LayerFiles.of(board, created)).fork();
-    return new Making(Attempt.judged(in, laid), layers);
+    pace.laid(board);
+    ForkJoinTask<LayerFiles> layers = ForkJoinTask.adapt(() -> files(board, created, pace)).fork();
+    Attempt attempt = Attempt.judged(in, laid, pace);
+    return new Making(attempt, layers);
+  }
+
+  private static LayerFiles files(Laid board, Optional<Instant> created, DrawPace pace) {
+    LayerFiles files = LayerFiles.of(board, created);
+    pace.files();
+    return files;
   }
 
   /**

@@ -37,8 +37,7 @@ final class OrderSheet {
         drawn,
         board.layers() > 2 ? Optional.of(inner) : Optional.empty(),
         circuits(spec.winding()),
-        OrderLines.resistance(
-            laid.assembly().artwork(), laid.fab().tolerance(), laid.resistance()));
+        OrderLines.resistance(laid.resistance()));
   }
 
   private static String circuits(Spec.Winding w) {

@@ -1,11 +1,15 @@
 package etchloom.cli;
 
+import etchloom.report.Text;
 import etchloom.survey.Progress;
 import java.io.PrintStream;
 
 /** How far a survey is, and how long it will take: on a terminal in one line, else now and then. */
 final class ProgressLine implements Progress {
   private static final long SECOND = 1_000_000_000L;
+
+  /** One less than a terminal has, so that no line is begun. */
+  private static final int COLUMNS = 79;
 
   private final PrintStream err;
   private final boolean terminal;
@@ -32,7 +36,7 @@ final class ProgressLine implements Progress {
     String line = done + " of " + todo + left(spent / done * (todo - done));
     line = best.isEmpty() ? line : line + "; " + best;
     if (terminal) {
-      err.print("\r" + line + "\u001b[K" + (done == todo ? "\n" : ""));
+      err.print("\r" + Text.left(Text.cut(line, COLUMNS), COLUMNS) + (done == todo ? "\n" : ""));
       err.flush();
       open = done < todo;
     } else {
@@ -45,8 +49,11 @@ final class ProgressLine implements Progress {
     if (s < 1) {
       return "";
     }
-    String time = s < 120 ? s + " s" : s < 7200 ? s / 60 + " min" : s / 3600 + " h";
-    return ", " + time + " left";
+    return ", " + time(s) + " left";
+  }
+
+  static String time(long s) {
+    return s < 120 ? s + " s" : s < 7200 ? s / 60 + " min" : s / 3600 + " h";
   }
 
   @Override

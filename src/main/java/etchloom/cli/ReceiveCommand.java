@@ -45,7 +45,7 @@ final class ReceiveCommand implements Callable<Integer> {
   @Option(
       names = "-o",
       paramLabel = "DIR",
-      description = "folder for receive.csv, receive.json and receive.html; none if left out")
+      description = "folder for the result as csv, json and html; not written if left out")
   private String folder;
 
   @Mixin private CommonOptions options;
@@ -60,7 +60,7 @@ final class ReceiveCommand implements Callable<Integer> {
     byte[] bytes =
         InputFiles.bytes(
             InputFiles.path(readings), readings, "readings file", ReadingsReader.MAX_BYTES);
-    Attempt attempt = Attempt.of(in, false);
+    Attempt attempt = Attempt.watched(in, console, options.quiet());
     Drawn drawn = attempt.drawn();
     Staged<Readings> staged = ReadingsReader.read(readings, bytes, Model.marks(drawn));
     Readings read = staged.value().orElseThrow(() -> new BadInput(staged.diagnostics()));

@@ -28,7 +28,8 @@ final class ReportCommand implements Callable<Integer> {
 
   @Override
   public Integer call() {
-    Attempt attempt = Attempt.of(InputFiles.read(spec, options.fab()), false);
+    Attempt attempt =
+        Attempt.watched(InputFiles.read(spec, options.fab()), console, options.quiet());
     attempt.tell(console);
     if (options.json()) {
       console.print(ReportJson.write(attempt.results()));

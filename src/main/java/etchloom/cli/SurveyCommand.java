@@ -36,13 +36,13 @@ import picocli.CommandLine.Parameters;
     synopsisHeading = "Usage: ",
     footer = {
       "",
-      "survey wheel.yaml --vary coil.track=0.15mm..0.3mm/6 board.layers=2,4",
-      "survey wheel.yaml --seek motorConstant --within coil.turns=5..25",
+      "VALUES  a,b,c or whole numbers 4..13 or equal steps 0.15mm..0.3mm/5",
+      "KEY     of --keep, --rank and --seek: a path in report.json, or the end of",
+      "        one; with :low or :high behind it, which way is best",
       "",
-      "VALUES: a,b,c or whole numbers 4..13 or equal steps 0.15mm..0.3mm/5.",
-      "KEY of --keep, --rank, --seek: a path in report.json, or the end of one;",
-      "with :low or :high behind it, which way is best. The same command goes on",
-      "where it was interrupted."
+      "The same command goes on where it was interrupted. Examples:",
+      "  etchloom survey wheel.yaml --vary coil.track=0.15mm..0.3mm/6 board.layers=2,4",
+      "  etchloom survey wheel.yaml --seek motorConstant --within coil.turns=5..25"
     })
 final class SurveyCommand implements Callable<Integer> {
   private final Console console;
@@ -60,7 +60,7 @@ final class SurveyCommand implements Callable<Integer> {
   @Option(
       names = "--keep",
       paramLabel = "EXPR",
-      description = "only variants of which this holds: \"terminalOhm < 5 and copperC < 90\"")
+      description = "only variants of which this holds, such as \"terminalOhm < 5\"")
   private String keep = "";
 
   @Option(names = "--rank", paramLabel = "KEY", description = "best first by this figure")

@@ -140,7 +140,7 @@ public record CoilSize(
     return trackMm / 2 + spaceMm + padMm / 2;
   }
 
-  /** The tightest fillet: at a hairpin of it the gap between the two sides is the space. */
+  /** The tightest fillet: the gap inside it ends as a half disc just as wide as the space. */
   public double leastCornerMm() {
     return pitchMm() / 2;
   }

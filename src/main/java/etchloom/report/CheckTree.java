@@ -5,9 +5,9 @@ import etchloom.rules.RuleReport;
 import java.util.List;
 
 /**
- * {@code check} of the report. Findings that are no lengths carry {@code measured}, {@code
- * required} and {@code unit} in place of the keys in mm; {@code notes} says, among others, where a
- * rule is broken at more places than are listed.
+ * {@code check} of the report; {@code minima} holds the tightest place of every rule. Findings that
+ * are no lengths carry {@code measured}, {@code required} and {@code unit} in place of the keys in
+ * mm; {@code notes} says, among others, where a rule is broken at more places than are listed.
  */
 final class CheckTree {
   /** The report's key for each rule whose minimum it tells. */
@@ -37,6 +37,7 @@ final class CheckTree {
     return new JsonTree()
         .put("passed", r.passed())
         .put("minimum", minimum)
+        .putObjects("minima", r.minima().stream().map(CheckTree::finding).toList())
         .putObjects("findings", r.findings().stream().map(CheckTree::finding).toList())
         .putTexts("notes", List.copyOf(r.notes()));
   }

@@ -191,6 +191,8 @@ final class Figures {
     add(g, b, "thermal.copperC", "copper", Form.CELSIUS, current);
     add(g, b, "thermal.stable", "settles", Form.YES_NO, current);
     add(g, b, "thermal.maxContinuousAmpereRms", "most current, rms", Form.AMPERE, duty);
+    String settles = "thermal.settlesUpToAmpereRms";
+    add(g, b, settles, "current above which it never settles, rms", Form.AMPERE, duty);
     add(g, b, "thermal.chartAmpere", "chart current, narrowest track", Form.AMPERE, duty);
   }
 

@@ -81,6 +81,18 @@ public final class FindingText {
     return (f.layer() + " " + point).trim();
   }
 
+  /**
+   * What was measured or what it must be, with its key.
+   *
+   * @param stem of the finding in {@code report.json}
+   */
+  static Cell cell(String stem, Finding f, boolean measured, boolean broken) {
+    String key =
+        stem + (measured ? ".measured" : ".required") + (f.unit().equals("mm") ? "Mm" : "");
+    String bound = measured ? "" : upperBound(f, broken) ? "at most " : "at least ";
+    return Cell.of(bound + value(measured ? f.measured() : f.required(), f, broken), key);
+  }
+
   /** Whether a rule is among the broken ones. */
   static boolean broken(RuleReport r, String rule) {
     return r.findings().stream().anyMatch(f -> f.rule().equals(rule));

@@ -40,9 +40,9 @@ public final class FolderSummary {
             + ", "
             + Words.count(proof.shorts(), "short"));
     if (!terminals.isEmpty()) {
-      page.item("at 20 C", String.join(", ", terminals));
+      page.cells("at 20 C", terminals, t -> t);
     }
-    Summary.rules(page, rules);
+    Summary.rules(page, rules, rules.notes());
     proof.notes().forEach(n -> page.item("note", n));
     page.blank();
     int broken = rules.findings().size() + proof.findings().size();

@@ -1,10 +1,11 @@
 package etchloom.report;
 
+import etchloom.artwork.Coil;
 import etchloom.artwork.Stackup;
+import etchloom.electric.resistance.ResistanceFigures;
 import etchloom.spec.Spec;
 import etchloom.units.Numbers;
 import etchloom.winding.PhaseCoil;
-import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
 
@@ -13,25 +14,15 @@ final class HtmlBoard {
   private HtmlBoard() {}
 
   static void add(Html h, Results r, Optional<String> picture) {
-    h.open("figure");
     Optional<String> svg = picture.flatMap(HtmlBoard::inline);
     if (svg.isPresent()) {
-      String label = "The board seen from L1, all copper layers";
-      h.open("div", "class=\"sheet\"", "role=\"img\"", "aria-label=\"" + label + "\"");
-      h.raw(svg.get()).close("div");
+      new BoardView(h, r, svg.get()).write();
+    } else {
+      h.element("p", "No picture here: it is in the set's SVG file.");
     }
-    h.element(
-        "figcaption",
-        svg.isPresent()
-            ? "The board seen from L1, the face that looks at the rotor. The set holds the same"
-                + " picture as a file."
-            : "No picture here: it is in the set's SVG file.");
-    h.close("figure");
     sizes(h, r);
     winding(h, r);
-    h.open("figure").open("div", "class=\"sheet stack\"");
-    h.raw(StackSvg.draw(r.artwork().stackup())).close("div");
-    h.element("figcaption", "Cross-section, not to scale. The same in words:").close("figure");
+    coils(h, r);
     stack(h, r.artwork().stackup());
   }
 
@@ -43,52 +34,41 @@ final class HtmlBoard {
 
   private static void sizes(Html h, Results r) {
     Spec s = r.spec();
-    List<List<String>> rows = new ArrayList<>();
-    String bore = s.board().boreMm() > 0 ? OrderLines.mm(s.board().boreMm()) : "none";
-    rows.add(List.of("Board diameter", OrderLines.mm(s.board().diameterMm())));
-    rows.add(List.of("Bore", bore));
+    Table t = new Table("Sizes", 1, "What", "Value");
+    t.row(Cell.of("Board diameter"), mm(s.board().diameterMm(), "geometry.boardDiameterMm"));
+    t.row(
+        Cell.of("Bore"),
+        s.board().boreMm() > 0 ? mm(s.board().boreMm(), "geometry.boreMm") : Cell.of("none"));
     s.board()
         .tab()
         .ifPresent(
-            t ->
-                rows.add(
-                    List.of(
-                        "Tab, width and length",
-                        OrderLines.mm(t.widthMm()) + ", " + OrderLines.mm(t.lengthMm()))));
-    rows.add(List.of("Thickness over the copper", OrderLines.mm(s.board().thicknessMm())));
-    rows.add(
-        List.of(
-            "Coil copper, radius",
-            OrderLines.mm(s.coil().innerRadiusMm())
-                + " to "
-                + OrderLines.mm(s.coil().outerRadiusMm())));
-    rows.add(List.of("Turns of a coil on each layer", "" + r.artwork().turnsPerLayer()));
-    rows.add(List.of("Track, space", track(r)));
-    rows.add(List.of("Vias", "" + r.vias()));
-    h.table("Sizes", List.of("What", "Value"), rows, 1);
+            tab -> {
+              t.row(Cell.of("Tab, width"), mm(tab.widthMm(), "geometry.tabWidthMm"));
+              t.row(Cell.of("Tab, standing out by"), mm(tab.lengthMm(), "geometry.tabLengthMm"));
+            });
+    t.row(
+        Cell.of("Thickness over the copper"), mm(s.board().thicknessMm(), "geometry.thicknessMm"));
+    t.row(
+        Cell.of("Coil copper, inner radius"),
+        mm(s.coil().innerRadiusMm(), "geometry.coilInnerRadiusMm"));
+    t.row(
+        Cell.of("Coil copper, outer radius"),
+        mm(s.coil().outerRadiusMm(), "geometry.coilOuterRadiusMm"));
+    t.row(
+        Cell.of("Turns of a coil on each layer"),
+        Cell.of("" + r.artwork().turnsPerLayer(), "geometry.turnsPerLayer"));
+    t.row(Cell.of("Track"), mm(s.coil().trackMm(), "geometry.trackMm"));
+    r.taper().ifPresent(x -> t.row(Cell.of("Track, widest"), mm(x.widestMm(), "taper.widestMm")));
+    t.row(Cell.of("Space"), mm(s.coil().spaceMm(), "geometry.spaceMm"));
+    t.row(Cell.of("Vias"), Cell.of("" + r.vias(), "geometry.vias"));
+    t.write(h);
   }
 
-  private static String track(Results r) {
-    Spec.Coil c = r.spec().coil();
-    String widest = r.taper().map(t -> " to " + OrderLines.mm(t.widestMm())).orElse("");
-    return OrderLines.mm(c.trackMm()) + widest + ", " + OrderLines.mm(c.spaceMm());
+  private static Cell mm(double v, String key) {
+    return Cell.of(OrderLines.mm(v), key);
   }
 
   private static void winding(Html h, Results r) {
-    List<List<String>> rows = new ArrayList<>();
-    for (int p = 0; p < r.winding().phases(); p++) {
-      int phase = p;
-      List<String> coils =
-          r.winding().sequence().stream()
-              .filter(c -> c.phase() == phase)
-              .map(HtmlBoard::coil)
-              .toList();
-      rows.add(
-          List.of(
-              "Phase " + r.winding().marks().get(p),
-              Numbers.fixed(Math.toDegrees(r.winding().axisRad().get(p)), 2) + "\u00b0",
-              String.join(", ", coils)));
-    }
     String name =
         "Winding: "
             + WindingTree.word(r.spec().winding().connection())
@@ -101,7 +81,47 @@ final class HtmlBoard {
             + r.winding().poles()
             + " poles, winding factor "
             + Numbers.fixed(r.winding().windingFactor(), 4);
-    h.table(name, List.of("Phase", "Axis, mechanical", "Coils, \u2212 reversed"), rows, 1);
+    Table t = new Table(name, 1, "Phase", "Axis, mechanical", "Coils, \u2212 reversed");
+    for (int p = 0; p < r.winding().phases(); p++) {
+      int phase = p;
+      List<String> coils =
+          r.winding().sequence().stream()
+              .filter(c -> c.phase() == phase)
+              .map(HtmlBoard::coil)
+              .toList();
+      String mark = r.winding().marks().get(p);
+      double axis = Math.toDegrees(r.winding().axisRad().get(p));
+      t.row(
+          Cell.of("Phase " + mark),
+          Cell.of(Numbers.fixed(axis, 2) + "\u00b0", "winding.axisDegrees." + mark),
+          Cell.of(String.join(", ", coils)));
+    }
+    t.write(h);
+  }
+
+  /** The picture's script reads these rows. */
+  private static void coils(Html h, Results r) {
+    Table t =
+        new Table(
+            "Coils, each alone, at 20 \u00b0C",
+            "coils-table",
+            4,
+            List.of("Coil", "Stands at", "Turns on each layer", "Length", "Resistance", "Phase"));
+    for (int i = 0; i < r.artwork().coils().size(); i++) {
+      Coil c = r.artwork().coils().get(i);
+      ResistanceFigures.CoilOhm o = r.resistance().coils().get(i);
+      String stem = "geometry.coils[" + i + "].";
+      t.row(
+          Cell.of("Coil " + c.number(), stem + "coil"),
+          Cell.of(Numbers.fixed(Math.toDegrees(c.axisRad()), 2) + "\u00b0", stem + "axisDegrees"),
+          Cell.of("" + r.artwork().turnsPerLayer(), "geometry.turnsPerLayer"),
+          Cell.of(Numbers.fixed(o.lengthMm(), 1) + " mm", stem + "lengthMm"),
+          Cell.of(OrderLines.ohm(o.ohm()), stem + "ohm"),
+          Cell.of(c.phase() + (c.sign() < 0 ? ", reversed" : "")));
+    }
+    h.open("details").element("summary", "Every coil in words");
+    t.write(h);
+    h.close("details");
   }
 
   private static String coil(PhaseCoil c) {
@@ -109,18 +129,19 @@ final class HtmlBoard {
   }
 
   private static void stack(Html h, Stackup s) {
-    List<List<String>> rows = new ArrayList<>();
+    Table t = new Table("Stack from L1 down", 1, "Layer", "Thickness", "Note");
     for (int i = 0; i < s.layers(); i++) {
       Stackup.Copper c = s.copper().get(i);
-      rows.add(
-          List.of(
-              "Copper L" + (i + 1),
-              OrderLines.um(c.thicknessMm()),
-              "ordered as " + Numbers.trimmed(c.ounces(), 2) + " oz, finished"));
+      String stem = "geometry.stack[" + i + "].";
+      t.row(
+          Cell.of("Copper L" + (i + 1)),
+          Cell.of(OrderLines.um(c.thicknessMm()), stem + "copperMm"),
+          Cell.of("ordered as " + Numbers.trimmed(c.ounces(), 2) + " oz, finished"));
       if (i < s.layers() - 1) {
-        rows.add(List.of("Dielectric", OrderLines.mm(s.dielectricMm().get(i)), ""));
+        t.row(
+            Cell.of("Dielectric"), mm(s.dielectricMm().get(i), stem + "dielectricMm"), Cell.of(""));
       }
     }
-    h.table("Stack from L1 down", List.of("Layer", "Thickness", "Note"), rows, 1);
+    t.write(h);
   }
 }

@@ -5,7 +5,6 @@ import etchloom.report.Figure.Group;
 import etchloom.report.Figure.Shown;
 import etchloom.rules.Finding;
 import etchloom.units.Numbers;
-import java.util.ArrayList;
 import java.util.List;
 import java.util.Map;
 
@@ -25,37 +24,51 @@ final class HtmlFigures {
 
   private final Html h;
   private final Results r;
+  private final boolean pictured;
   private final Map<String, Object> figures;
   private final Map<Group, List<Shown>> shown;
+  private final HtmlPlots plots;
   private final HtmlMachine machine;
 
-  HtmlFigures(Html h, Results r, Map<String, Object> figures) {
+  /**
+   * @param pictured whether the page shows the board
+   */
+  HtmlFigures(Html h, Results r, Map<String, Object> figures, boolean pictured) {
     this.h = h;
+    this.pictured = pictured;
     this.r = r;
     this.figures = figures;
     shown = Figures.shown(figures);
-    machine = new HtmlMachine(h, r);
+    plots = new HtmlPlots(h, r);
+    machine = new HtmlMachine(h, r, plots);
   }
 
   void deciding() {
-    List<List<String>> rows = new ArrayList<>();
-    for (Finding f : r.rules().minima()) {
+    Table t =
+        new Table(
+            BoardMarks.caption("The tightest place of every rule", pictured),
+            2,
+            "Rule",
+            "Measured",
+            "Must be",
+            "Verdict",
+            "Place",
+            "What");
+    for (int i = 0; i < r.rules().minima().size(); i++) {
+      Finding f = r.rules().minima().get(i);
       boolean broken = FindingText.broken(r.rules(), f.rule());
-      rows.add(
+      BoardMarks.Mark mark = BoardMarks.tightest(i, f);
+      t.row(
+          mark.rowId(),
           List.of(
-              f.rule(),
-              FindingText.value(f.measured(), f, broken),
-              (FindingText.upperBound(f, broken) ? "at most " : "at least ")
-                  + FindingText.value(f.required(), f, broken),
-              broken ? "BROKEN" : "kept",
-              FindingText.shortPlace(f),
-              f.what()));
+              Cell.of(f.rule()),
+              FindingText.cell("check.minima[" + i + "]", f, true, broken),
+              FindingText.cell("check.minima[" + i + "]", f, false, broken),
+              Cell.of(broken ? "BROKEN" : "kept"),
+              mark.place(FindingText.shortPlace(f), pictured),
+              Cell.of(f.what())));
     }
-    h.table(
-        "The tightest place of every rule",
-        List.of("Rule", "Measured", "Must be", "Verdict", "Place", "What"),
-        rows,
-        2);
+    t.write(h);
     notes();
     List<Shown> few =
         shown.values().stream()
@@ -98,37 +111,46 @@ final class HtmlFigures {
     groups(Group.RESISTANCE, Group.INDUCTANCE, Group.EMF);
     machine.emf();
     groups(Group.TORQUE, Group.TAPER, Group.GENERATOR, Group.SPREAD);
+    r.machine().ifPresent(m -> plots.spread(m.spread()));
   }
 
   private void layers() {
     List<Double> areas = CopperArea.of(r.artwork(), r.rules());
-    List<List<String>> rows = new ArrayList<>();
+    Table t =
+        new Table(
+            "Copper by layer",
+            4,
+            "Layer",
+            "One coil, length",
+            "One coil, resistance",
+            "All tracks",
+            "Area");
     for (int i = 0; i < r.artwork().layers(); i++) {
       ResistanceFigures.CoilLayer c = r.resistance().coilLayers().get(i);
-      rows.add(
-          List.of(
-              "L" + (i + 1),
-              Numbers.fixed(c.lengthMm(), 1) + " mm",
-              OrderLines.ohm(c.ohm()),
-              Numbers.fixed(r.resistance().copperLayers().get(i).trackLengthMm(), 0) + " mm",
-              Numbers.fixed(areas.get(i), 1) + " mm\u00b2"));
+      String coil = "geometry.coilLayers[" + i + "].";
+      String copper = "geometry.copperLayers[" + i + "].";
+      double tracks = r.resistance().copperLayers().get(i).trackLengthMm();
+      t.row(
+          Cell.of("L" + (i + 1)),
+          Cell.of(Numbers.fixed(c.lengthMm(), 1) + " mm", coil + "lengthMm"),
+          Cell.of(OrderLines.ohm(c.ohm()), coil + "ohm"),
+          Cell.of(Numbers.fixed(tracks, 0) + " mm", copper + "trackLengthMm"),
+          Cell.of(Numbers.fixed(areas.get(i), 1) + " mm\u00b2", copper + "areaMm2"));
     }
-    h.table(
-        "Copper by layer",
-        List.of("Layer", "One coil, length", "One coil, resistance", "All tracks", "Area"),
-        rows,
-        4);
+    t.write(h);
   }
 
   void thermal() {
     groups(Group.LOSS, Group.THERMAL);
     none(Group.LOSS, Group.THERMAL);
+    r.machine().ifPresent(m -> plots.losses(m.loss()));
+    r.machine().ifPresent(m -> plots.temperature(m.thermal()));
   }
 
   void drive() {
     groups(Group.DRIVE);
     machine.axes();
-    machine.torqueSpeed();
+    r.machine().ifPresent(m -> plots.torqueSpeed(m.drive().torqueSpeed()));
     none(Group.DRIVE);
   }
 
@@ -155,13 +177,18 @@ final class HtmlFigures {
     if (rows.isEmpty()) {
       return;
     }
-    h.open("div", "class=\"scroll\"").open("table").element("caption", title);
+    h.open("div", "class=\"scroll\"").open("table").element("caption", Words.symbols(title));
     h.open("thead").open("tr").element("th", "Figure", "scope=\"col\"");
     h.element("th", "Value", "scope=\"col\"", "class=\"n\"");
     h.element("th", "Basis", "scope=\"col\"").close("tr").close("thead").open("tbody");
     for (Shown s : rows) {
       h.open("tr").element("th", Words.capital(s.label()), "scope=\"row\"");
-      h.element("td", Words.symbols(s.value()), "class=\"n\"").open("td");
+      h.element(
+          "td",
+          Words.symbols(s.value()),
+          "class=\"n\"",
+          "data-key=\"" + Html.escaped(s.path()) + "\"");
+      h.open("td");
       h.element("a", s.basis().title(), "href=\"#" + s.basis().anchor() + "\"");
       h.close("td").close("tr");
     }

@@ -47,14 +47,24 @@ public final class HtmlReport {
 
   private void page(Optional<String> picture) {
     String title = r.artwork().title() + ", revision " + r.artwork().revision();
-    HtmlHead.write(h, title, false);
+    List<String> scripts =
+        List.of(
+            PageParts.pageScript(),
+            PageParts.boardScript(),
+            PageParts.plotLibrary(),
+            PageParts.plotScript());
+    HtmlHead.write(h, title, List.of(PageParts.plotStyle(), PageParts.style()), scripts);
     h.open("body");
     h.element("a", "Skip to the verdict", "class=\"skip\"", "href=\"#s1\"");
     head();
     contents();
     h.open("main");
+    h.open("noscript").element("p", "Scripts are off: no plots, but their tables say the same.");
+    h.close("noscript");
     sections(picture);
-    h.close("main").close("body").close("html");
+    h.close("main");
+    scripts.forEach(s -> h.open("script").raw(s).close("script"));
+    h.close("body").close("html");
   }
 
   private void head() {
@@ -82,11 +92,12 @@ public final class HtmlReport {
   }
 
   private void sections(Optional<String> picture) {
-    HtmlFigures electrical = new HtmlFigures(h, r, figures);
+    boolean pictured = picture.isPresent();
+    HtmlFigures electrical = new HtmlFigures(h, r, figures, pictured);
     HtmlSheets sheets = new HtmlSheets(h, r);
     List<Runnable> bodies =
         List.of(
-            () -> HtmlVerdict.add(h, r, figures),
+            () -> HtmlVerdict.add(h, r, figures, pictured),
             () -> HtmlBoard.add(h, r, picture),
             electrical::deciding,
             electrical::electrical,

@@ -3,7 +3,6 @@ package etchloom.report;
 import etchloom.electric.resistance.ResistanceFigures.TerminalOhm;
 import java.util.ArrayList;
 import java.util.List;
-import java.util.Optional;
 
 /** The sheets one prints: for the fab, for the bench, and what every figure rests on. */
 final class HtmlSheets {
@@ -34,17 +33,16 @@ final class HtmlSheets {
     h.close("p");
     List<String> head = new ArrayList<>(List.of("Pair", "Expected, 20 \u00b0C"));
     head.addAll(List.of("At least", "At most", "Measured", "T, \u00b0C", "At 20 \u00b0C"));
-    h.open("div", "class=\"scroll\"").open("table");
+    h.open("div", "class=\"scroll\"").open("table", "class=\"form\"");
     h.element("caption", "Resistance between terminals, worst case of the fab's tolerance");
     h.open("thead").open("tr");
     for (int i = 0; i < head.size(); i++) {
       h.element("th", head.get(i), "scope=\"col\"", i > 0 && i < 4 ? "class=\"n\"" : "class=\"t\"");
     }
     h.close("tr").close("thead").open("tbody");
-    List<PairLimits> limits = PairLimits.of(r);
+    List<PairLimits> limits = PairLimits.of(r.resistance());
     for (int i = 0; i < r.resistance().terminals().size(); i++) {
-      TerminalOhm t = r.resistance().terminals().get(i);
-      pair(t, limits.isEmpty() ? Optional.empty() : Optional.of(limits.get(i)));
+      pair(i, limits);
     }
     h.close("tbody").close("table").close("div");
     h.open("p");
@@ -54,17 +52,28 @@ final class HtmlSheets {
     h.close("p");
   }
 
-  private void pair(TerminalOhm t, Optional<PairLimits> limits) {
-    String least = limits.map(l -> OrderLines.ohm(l.least())).orElse("-");
-    String most = limits.map(l -> OrderLines.ohm(l.greatest())).orElse("-");
+  private void pair(int i, List<PairLimits> limits) {
+    TerminalOhm t = r.resistance().terminals().get(i);
     h.open("tr").element("th", t.key(), "scope=\"row\"");
-    h.element("td", Words.symbols(OrderLines.ohm(t.ohm())), "class=\"n\"");
-    h.element("td", Words.symbols(least), "class=\"n\"")
-        .element("td", Words.symbols(most), "class=\"n\"");
-    for (int i = 0; i < 3; i++) {
+    ohm(t.ohm(), "resistance.terminalOhm." + t.key());
+    if (limits.isEmpty()) {
+      h.element("td", "-", "class=\"n\"").element("td", "-", "class=\"n\"");
+    } else {
+      ohm(limits.get(i).least(), "resistance.pairs[" + i + "].leastOhm");
+      ohm(limits.get(i).greatest(), "resistance.pairs[" + i + "].greatestOhm");
+    }
+    for (int blank = 0; blank < 3; blank++) {
       h.open("td", "class=\"fill\"").close("td");
     }
     h.close("tr");
+  }
+
+  private void ohm(double v, String key) {
+    h.element(
+        "td",
+        Words.symbols(OrderLines.ohm(v)),
+        "class=\"n\"",
+        "data-key=\"" + Html.escaped(key) + "\"");
   }
 
   void basis() {

@@ -2,7 +2,6 @@ package etchloom.report;
 
 import etchloom.proof.ProofReport;
 import etchloom.rules.Finding;
-import java.util.ArrayList;
 import java.util.List;
 import java.util.Map;
 
@@ -10,12 +9,15 @@ import java.util.Map;
 final class HtmlVerdict {
   private HtmlVerdict() {}
 
-  static void add(Html h, Results r, Map<String, Object> figures) {
+  /**
+   * @param pictured whether the page shows the board
+   */
+  static void add(Html h, Results r, Map<String, Object> figures, boolean pictured) {
     List<String> words = Verdicts.words(r);
     box(h, r.rules().passed() ? "yes" : "no", words.get(0), words.get(1));
-    broken(h, r);
     Verdicts.ripple(r, figures).ifPresent(w -> box(h, "no", w.get(0), w.get(1)));
     duty(h, r);
+    broken(h, r, pictured);
     r.proof().ifPresent(p -> proof(h, p));
     h.open("p", "class=\"quiet\"");
     h.text("Gaps are measured on the drawing as it stands, turn against turn; ");
@@ -24,25 +26,36 @@ final class HtmlVerdict {
 
   private static void box(Html h, String kind, String word, String text) {
     h.open("div", "class=\"verdict " + kind + "\"");
-    h.element("strong", word).text(": " + text + ".").close("div");
+    h.element("strong", word).text(": " + Words.symbols(text) + ".").close("div");
   }
 
-  private static void broken(Html h, Results r) {
+  private static void broken(Html h, Results r, boolean pictured) {
     if (r.rules().passed()) {
       return;
     }
-    List<List<String>> rows = new ArrayList<>();
-    for (Finding f : r.rules().findings()) {
-      rows.add(
+    Table t =
+        new Table(
+            BoardMarks.caption("Broken rules", pictured),
+            2,
+            "Rule",
+            "Measured",
+            "Must be",
+            "Place",
+            "What");
+    for (int i = 0; i < r.rules().findings().size(); i++) {
+      Finding f = r.rules().findings().get(i);
+      String stem = "check.findings[" + i + "]";
+      BoardMarks.Mark mark = BoardMarks.broken(i, f);
+      t.row(
+          mark.rowId(),
           List.of(
-              f.rule(),
-              FindingText.value(f.measured(), f, true),
-              (FindingText.upperBound(f, true) ? "at most " : "at least ")
-                  + FindingText.value(f.required(), f, true),
-              FindingText.place(f),
-              f.what()));
+              Cell.of((i + 1) + "\u00a0" + f.rule()),
+              FindingText.cell(stem, f, true, true),
+              FindingText.cell(stem, f, false, true),
+              mark.place(FindingText.place(f), pictured),
+              Cell.of(f.what())));
     }
-    h.table("Broken rules", List.of("Rule", "Measured", "Must be", "Place", "What"), rows, 2);
+    t.write(h);
   }
 
   private static void proof(Html h, ProofReport p) {
@@ -53,13 +66,17 @@ final class HtmlVerdict {
         Verdicts.proof(p)
             + ". The written files were read back and their copper rebuilt and held against the"
             + " design, so that a short between turns shows");
-    List<List<String>> rows = new ArrayList<>();
+    Table t = new Table("Copper as read back", 2, "Layer", "Islands", "Gaps closed in by copper");
     p.islands()
         .forEach(
             (layer, n) ->
-                rows.add(List.of("L" + layer, "" + n, "" + p.loops().getOrDefault(layer, 0))));
-    h.table(
-        "Copper as read back", List.of("Layer", "Islands", "Gaps closed in by copper"), rows, 2);
+                t.row(
+                    Cell.of("L" + layer),
+                    Cell.of("" + n, "proof.islands.L" + layer),
+                    p.loops().containsKey(layer)
+                        ? Cell.of("" + p.loops().get(layer), "proof.loops.L" + layer)
+                        : Cell.of("0")));
+    t.write(h);
     p.notes().forEach(n -> h.element("p", n));
   }
 
@@ -69,14 +86,18 @@ final class HtmlVerdict {
     if (a.rows().isEmpty()) {
       return;
     }
-    List<List<String>> rows =
-        a.rows().stream()
-            .map(x -> List.of(x.what(), x.needed(), x.got(), x.answer(), x.limitedBy()))
-            .toList();
-    h.table(
-        "The duty, demand by demand",
-        List.of("Demand", "Needed", "Got", "Met", "Limited by"),
-        rows,
-        2);
+    Table t =
+        new Table("The duty, demand by demand", 2, "Demand", "Needed", "Got", "Met", "Limited by");
+    for (int i = 0; i < a.rows().size(); i++) {
+      DutyAnswer.Row x = a.rows().get(i);
+      String stem = "verdict.duty[" + i + "].";
+      t.row(
+          Cell.of(x.what()),
+          Cell.of(x.needed(), stem + "needed"),
+          Cell.of(x.got(), stem + "got"),
+          Cell.of(x.answer()),
+          Cell.of(x.limitedBy()));
+    }
+    t.write(h);
   }
 }

@@ -40,6 +40,11 @@ public final class JsonTree {
     return set(key, Numbers.rounded(value, DIGITS));
   }
 
+  /** A number as the file has it. */
+  static String number(double value) {
+    return Numbers.plain(Numbers.rounded(value, DIGITS));
+  }
+
   public JsonTree put(String key, long value) {
     return set(key, value);
   }
@@ -68,6 +73,11 @@ public final class JsonTree {
 
   public JsonTree putObjects(String key, List<JsonTree> values) {
     return set(key, List.copyOf(values));
+  }
+
+  /** As {@link #putObjects}, but no key for an empty list. */
+  JsonTree putSome(String key, List<JsonTree> values) {
+    return values.isEmpty() ? this : putObjects(key, values);
   }
 
   public JsonTree putTexts(String key, List<String> values) {

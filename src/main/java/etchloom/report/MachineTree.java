@@ -34,6 +34,17 @@ final class MachineTree {
         .put("rpmPerVolt", f.rpmPerVolt())
         .putObjects("harmonics", f.harmonics().stream().map(MachineTree::harmonic).toList())
         .putObjects("waveform", f.waveform().stream().map(s -> sample(s, marks)).toList())
+        .putObjects(
+            "phases",
+            f.phases().stream()
+                .map(
+                    p ->
+                        new JsonTree()
+                            .put("phase", p.mark())
+                            .put("axisDegrees", Math.toDegrees(p.axisRad()))
+                            .put("restDegrees", Math.toDegrees(p.restRad()))
+                            .put("peakVoltSecondPerRadian", p.peakVoltSecondPerRadian()))
+                .toList())
         .put("deltaCirculatingAmpere", f.deltaCirculatingAmpere());
   }
 
@@ -81,7 +92,18 @@ final class MachineTree {
         .put("copperWatt", f.copperWatt())
         .put("eddyWatt", f.eddyWatt())
         .put("rippleWatt", f.rippleWatt())
-        .put("circulatingWatt", f.circulatingWatt());
+        .put("circulatingWatt", f.circulatingWatt())
+        .putSome("bySpeed", f.bySpeed().stream().map(MachineTree::atSpeed).toList());
+  }
+
+  private static JsonTree atSpeed(LossFigures.AtSpeed a) {
+    return new JsonTree()
+        .put("rpm", a.rpm())
+        .put("copperWatt", a.copperWatt())
+        .put("eddyWatt", a.eddyWatt())
+        .put("rippleWatt", a.rippleWatt())
+        .put("circulatingWatt", a.circulatingWatt())
+        .put("totalWatt", a.totalWatt());
   }
 
   static JsonTree thermal(ThermalFigures f) {
@@ -90,7 +112,14 @@ final class MachineTree {
             .put("copperC", f.copperC())
             .put("maxContinuousAmpereRms", f.maxContinuousAmpereRms());
     f.stable().ifPresent(s -> out.put("stable", s));
-    return out.put("chartAmpere", f.chartAmpere());
+    return out.put("chartAmpere", f.chartAmpere())
+        .put("settlesUpToAmpereRms", f.settlesUpToAmpereRms())
+        .putSome(
+            "byCurrent",
+            f.byCurrent().stream()
+                .map(
+                    a -> new JsonTree().put("ampereRms", a.ampereRms()).put("copperC", a.copperC()))
+                .toList());
   }
 
   static JsonTree drive(DriveFigures f) {
@@ -133,7 +162,17 @@ final class MachineTree {
     return new JsonTree()
         .put("terminalOhmPercent", share(f.terminalOhmPercent()))
         .put("torquePercent", share(f.torquePercent()))
-        .put("imbalancePercent", share(f.imbalancePercent()));
+        .put("imbalancePercent", share(f.imbalancePercent()))
+        .putSome(
+            "boards",
+            f.boards().stream()
+                .map(
+                    b ->
+                        new JsonTree()
+                            .put("fromOhm", b.fromOhm())
+                            .put("toOhm", b.toOhm())
+                            .put("boards", b.boards()))
+                .toList());
   }
 
   private static JsonTree share(SpreadFigures.Share s) {

@@ -3,7 +3,6 @@ package etchloom.report;
 import etchloom.artwork.Artwork;
 import etchloom.artwork.Stackup;
 import etchloom.electric.resistance.ResistanceFigures;
-import etchloom.spec.FabRules;
 import etchloom.spec.Spec;
 import etchloom.units.Numbers;
 import java.util.ArrayList;
@@ -88,9 +87,8 @@ public final class OrderLines {
   }
 
   /** The acceptance limits, one a line; empty where the tolerances could etch a track away. */
-  public static List<String> resistance(
-      Artwork art, FabRules.Tolerance tolerance, ResistanceFigures figures) {
-    List<PairLimits> pairs = PairLimits.lines(art, tolerance, figures);
+  public static List<String> resistance(ResistanceFigures figures) {
+    List<PairLimits> pairs = PairLimits.lines(figures);
     if (pairs.isEmpty()) {
       return List.of();
     }

@@ -25,7 +25,7 @@ public final class ReportText {
     Summary.board(page, r);
     Figures.shown(figures).forEach((group, rows) -> group(page, group, rows));
     lacking(page, Absent.of(r, figures));
-    Summary.rules(page, r.rules());
+    Summary.rules(page, r.rules(), r.rules().notes());
     Summary.end(page, r, figures, Optional.empty());
     return page.text();
   }

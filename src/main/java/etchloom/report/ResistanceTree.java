@@ -30,6 +30,17 @@ final class ResistanceTree {
             l ->
                 out.put("rssMinTerminalOhm", l.minTerminalOhm())
                     .put("rssMaxTerminalOhm", l.maxTerminalOhm()));
+    out.putSome(
+        "pairs",
+        f.pairs().stream()
+            .map(
+                p ->
+                    new JsonTree()
+                        .put("pair", p.key())
+                        .put("expectedOhm", p.expectedOhm())
+                        .put("leastOhm", p.leastOhm())
+                        .put("greatestOhm", p.greatestOhm()))
+            .toList());
     r.spec().duty().ifPresent(d -> hot(out, f, hotC(r, d)));
     return out;
   }

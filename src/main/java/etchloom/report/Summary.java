@@ -26,7 +26,7 @@ public final class Summary {
   public static String text(Results r, Optional<String> where, boolean colour) {
     Page page = new Page(colour);
     board(page, r);
-    rules(page, r.rules());
+    rules(page, r.rules(), r.rules().brief());
     resistance(page, r);
     end(page, r, ReportJson.figures(r), where);
     return page.text();
@@ -67,7 +67,10 @@ public final class Summary {
             + Words.count(r.vias(), "via"));
   }
 
-  static void rules(Page page, RuleReport rules) {
+  /**
+   * @param notes those of the report, or those in short
+   */
+  static void rules(Page page, RuleReport rules, List<String> notes) {
     page.blank();
     page.row("rule", "measured", "required", "tightest at");
     for (Finding f : rules.minima()) {
@@ -79,7 +82,7 @@ public final class Summary {
               + FindingText.value(f.required(), f, broken),
           FindingText.shortPlace(f) + (broken ? "  BROKEN" : ""));
     }
-    rules.notes().forEach(n -> page.item("note", n));
+    notes.forEach(n -> page.item("note", n));
   }
 
   private static void resistance(Page page, Results r) {
@@ -88,7 +91,7 @@ public final class Summary {
     page.row("resistance at 20 C", "", "", "");
     page.cells("phase", f.phases(), Summary::phase);
     page.cells("terminals", f.terminals(), Summary::terminals);
-    List<PairLimits> limits = PairLimits.lines(r);
+    List<PairLimits> limits = PairLimits.lines(r.resistance());
     page.item(
         "limits",
         limits.isEmpty()

@@ -102,6 +102,7 @@ final class Verdicts {
   private final Map<RuleName, Measured> tightest = new EnumMap<>(RuleName.class);
   private final Map<RuleName, Map<Things, Measured>> broken = new EnumMap<>(RuleName.class);
   private final List<String> notes = new ArrayList<>();
+  private final List<String> brief = new ArrayList<>();
 
   /** A broken place is told once for the same two things on a layer, where it is tightest. */
   void add(Measured m) {
@@ -124,16 +125,24 @@ final class Verdicts {
     other.tightest.values().forEach(this::add);
     other.broken.values().forEach(all -> all.values().forEach(this::add));
     notes.addAll(other.notes);
+    brief.addAll(other.brief);
   }
 
   void note(String text) {
-    notes.add(text);
+    note(List.of(text), text);
+  }
+
+  /** Several notes, and what stands for them all where room is short. */
+  void note(List<String> texts, String inShort) {
+    notes.addAll(texts);
+    brief.add(inShort);
   }
 
   RuleReport report() {
     List<Finding> minima = tightest.values().stream().map(Measured::finding).toList();
     List<Finding> findings = new ArrayList<>();
     List<String> told = new ArrayList<>(notes);
+    List<String> inShort = new ArrayList<>(brief);
     for (Map.Entry<RuleName, Map<Things, Measured>> e : broken.entrySet()) {
       List<Measured> all = e.getValue().values().stream().sorted(Verdicts::byTightness).toList();
       all.stream()
@@ -142,15 +151,17 @@ final class Verdicts {
           .map(Measured::finding)
           .forEach(findings::add);
       if (all.size() > LISTED) {
-        told.add(
+        String rest =
             e.getKey().word()
                 + ": broken at "
                 + all.size()
                 + " places; the "
                 + LISTED
-                + " tightest are listed");
+                + " tightest are listed";
+        told.add(rest);
+        inShort.add(rest);
       }
     }
-    return new RuleReport(minima, findings, told);
+    return new RuleReport(minima, findings, told, inShort);
   }
 }

@@ -1,6 +1,7 @@
 package etchloom.rules;
 
 import etchloom.units.Numbers;
+import java.util.List;
 import java.util.OptionalDouble;
 
 /** What the reader must know about the rule {@code voltage}: which columns apply, and why. */
@@ -19,11 +20,19 @@ final class VoltageNotes implements Rule {
       return;
     }
     double volt = full.getAsDouble();
-    verdicts.note(source(p, volt));
-    verdicts.note(columns(board, volt));
+    List<String> why =
+        List.of(
+            source(p, volt),
+            columns(board, volt),
+            "voltage: this is spacing that lets the winding work, up to 3050 m above the sea; it is"
+                + " no safety insulation between the winding and people");
     verdicts.note(
-        "voltage: this is spacing that lets the winding work, up to 3050 m above the sea; it is no"
-            + " safety insulation between the winding and people");
+        why,
+        "voltage: "
+            + volt(volt)
+            + ", no safety insulation; "
+            + why.size()
+            + " notes in the report");
     if (volt > HARMLESS_VOLT) {
       verdicts.note(
           "voltage: "

@@ -8,6 +8,7 @@ import etchloom.rules.RuleReport;
 import etchloom.spec.FabRules;
 import etchloom.spec.Positions;
 import etchloom.spec.Spec;
+import java.util.function.DoubleConsumer;
 
 /** The one way through: from a spec and its rules to the board, its figures and its rule check. */
 public final class Pipeline {
@@ -30,7 +31,14 @@ public final class Pipeline {
 
   /** The second half: what the drawn copper does, and whether it may be made. */
   public static Drawn judge(Laid laid) {
-    Electrics electrics = Electrics.of(laid);
+    return judge(laid, share -> {});
+  }
+
+  /**
+   * @param done is told what share of the work is done, as it usually is in time on a large board
+   */
+  public static Drawn judge(Laid laid, DoubleConsumer done) {
+    Electrics electrics = Electrics.of(laid, done);
     RuleReport rules =
         RuleCheck.check(
             laid.assembly().artwork(), laid.spec(), laid.fab(), electrics.rules(laid.spec()));

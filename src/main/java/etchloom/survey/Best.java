@@ -1,15 +1,17 @@
 package etchloom.survey;
 
 import etchloom.report.JsonTree;
+import etchloom.report.Text;
+import etchloom.report.TextTable;
 import etchloom.units.Numbers;
 import java.util.ArrayList;
 import java.util.List;
-import java.util.Map;
 import java.util.Optional;
 
 /** How the best of a search got better from trial to trial. */
 final class Best {
   private static final int DIGITS = 5;
+  private static final int ROOM = TextTable.COLUMNS - 2;
 
   private final Goal goal;
   private final List<Row> steps = new ArrayList<>();
@@ -54,28 +56,45 @@ final class Best {
       return "No trial kept every rule and condition.\n";
     }
     String name = goal.ranking().name().name();
-    for (Row r : steps) {
-      out.append("  trial ").append(r.variant()).append(": ");
-      out.append(number(goal.value(r).orElseThrow()));
-      for (Map.Entry<String, String> e : r.values().entrySet()) {
-        out.append(", ").append(e.getKey()).append(' ').append(e.getValue());
-      }
-      out.append('\n');
-    }
-    out.append(name).append(": ").append(number(last()));
+    table(name).forEach(l -> out.append("  ").append(l).append('\n'));
+    StringBuilder words = new StringBuilder(name).append(": ").append(number(last()));
     if (own.isPresent()) {
-      out.append(", against ").append(number(own.get())).append(" of the spec as it stands");
-      out.append(share(last() - own.get(), Math.abs(own.get())));
+      words.append(", against ").append(number(own.get())).append(" of the spec as it stands");
+      words.append(share(last() - own.get(), Math.abs(own.get())));
     } else if (begun) {
-      out.append("; the spec as it stands breaks a rule or condition");
+      words.append("; the spec as it stands breaks a rule or condition");
     }
     Row best = steps.get(steps.size() - 1);
-    out.append("; its spec is variants/").append(best.variant()).append(".yaml\n");
+    words.append("; its spec is variants/").append(best.variant()).append(".yaml");
+    wrapped(out, words.toString());
     List<String> ends = atTheEnd(best);
     if (!ends.isEmpty()) {
-      out.append("at the end of its range: ").append(String.join(", ", ends)).append('\n');
+      wrapped(out, "at the end of its range: " + String.join(", ", ends));
     }
     return out.toString();
+  }
+
+  /** A line for each step: trial, value, and as many of the keys as there is room for. */
+  private List<String> table(String name) {
+    List<List<String>> rows = new ArrayList<>();
+    List<String> head = new ArrayList<>(List.of("trial", FigureName.brief(name)));
+    head.addAll(KeyNames.inShort(spans.stream().map(Span::key).toList()));
+    rows.add(head);
+    for (Row r : steps) {
+      String value = number(goal.value(r).orElseThrow());
+      List<String> row = new ArrayList<>(List.of(Long.toString(r.variant()), value));
+      spans.forEach(s -> row.add(Text.safe(r.values().getOrDefault(s.key(), ""))));
+      rows.add(row);
+    }
+    TextTable table = new TextTable(rows);
+    while (table.width() > ROOM) {
+      table = table.without(table.rows().get(0).size() - 1);
+    }
+    return table.lines(c -> true);
+  }
+
+  private static void wrapped(StringBuilder out, String words) {
+    Text.wrap(words, TextTable.COLUMNS).forEach(l -> out.append(l).append('\n'));
   }
 
   private static String share(double more, double of) {

@@ -1,6 +1,7 @@
 package etchloom.survey;
 
 import etchloom.report.Text;
+import etchloom.report.TextTable;
 import etchloom.units.Numbers;
 import java.util.ArrayList;
 import java.util.LinkedHashMap;
@@ -14,7 +15,12 @@ final class SurveyText {
       List.of("geometry.turnsPerLayer", "terminalOhm", "torque.motorConstant", "thermal.copperC");
 
   private static final int DIGITS = 5;
-  private static final int REASON = 60;
+
+  /** A reason is cut to what is left of the line, but not below this. */
+  private static final int REASON = 16;
+
+  /** A value may be any text. */
+  private static final int VALUE = 20;
 
   private SurveyText() {}
 
@@ -24,16 +30,18 @@ final class SurveyText {
     Map<String, FigureName> figures = figures(s, rows);
     List<List<String>> cells = new ArrayList<>();
     List<String> head = new ArrayList<>(List.of("variant"));
-    plan.axes().forEach(a -> head.add(a.key()));
+    head.addAll(KeyNames.inShort(plan.axes().stream().map(Axis::key).toList()));
     figures.keySet().forEach(f -> head.add(FigureName.brief(f)));
     head.add("rules");
     cells.add(head);
     rows.forEach(r -> cells.add(cells(plan, r, figures)));
-    table(out, cells);
+    TextTable table = fitting(new TextTable(cells), plan.axes().size(), s.listing().names().size());
+    table.lines(c -> c < table.rows().get(0).size() - 1).forEach(l -> out.append(l).append('\n'));
     if (s.kept() > rows.size()) {
       out.append("... ").append(s.kept() - rows.size()).append(" more\n");
     }
-    out.append('\n').append(counts(plan, s)).append('\n');
+    out.append('\n');
+    Text.wrap(counts(plan, s), TextTable.COLUMNS).forEach(l -> out.append(l).append('\n'));
     s.listing()
         .rank()
         .ifPresent(
@@ -59,11 +67,15 @@ final class SurveyText {
     return out;
   }
 
+  /** What was not drawn has no figures: the reason takes their place. */
   private static List<String> cells(Plan plan, Row row, Map<String, FigureName> figures) {
     List<String> out = new ArrayList<>(List.of(Long.toString(row.variant())));
-    plan.axes().forEach(a -> out.add(row.values().getOrDefault(a.key(), "")));
-    figures.values().forEach(n -> out.add(n.in(row.figures()).map(SurveyText::shown).orElse("")));
-    out.add(row.passed() ? "kept" : Text.cut(Text.safe(row.reason()), REASON));
+    plan.axes()
+        .forEach(a -> out.add(Text.cut(Text.safe(row.values().getOrDefault(a.key(), "")), VALUE)));
+    if (!row.figures().isEmpty()) {
+      figures.values().forEach(n -> out.add(n.in(row.figures()).map(SurveyText::shown).orElse("")));
+    }
+    out.add(row.passed() ? "kept" : Text.safe(row.reason()));
     return out;
   }
 
@@ -71,18 +83,22 @@ final class SurveyText {
     return value instanceof Double d ? Numbers.significant(d, DIGITS) : String.valueOf(value);
   }
 
-  private static void table(StringBuilder out, List<List<String>> cells) {
-    int n = cells.get(0).size();
-    for (List<String> row : cells) {
-      StringBuilder line = new StringBuilder();
-      for (int c = 0; c < n; c++) {
-        int at = c;
-        int width = cells.stream().mapToInt(r -> Text.columns(r.get(at))).max().orElse(0);
-        String cell = row.get(c);
-        line.append(c == n - 1 ? Text.left(cell, width) : Text.right(cell, width)).append("  ");
-      }
-      out.append(line.toString().stripTrailing()).append('\n');
+  /**
+   * Leaves out what does not fit: the usual figures from the last on, then keys, and only then what
+   * was asked for.
+   */
+  private static TextTable fitting(TextTable all, int keys, int asked) {
+    TextTable table = all;
+    int usual = all.rows().get(0).size() - 2 - keys - asked;
+    for (int left = usual + keys + asked; left > 1 && tooWide(table); left--) {
+      boolean isKey = left <= keys + asked && left > asked;
+      table = table.without(isKey ? left - asked : left);
     }
+    return table.cut(REASON);
+  }
+
+  private static boolean tooWide(TextTable table) {
+    return table.cut(REASON).width() > TextTable.COLUMNS;
   }
 
   private static String counts(Plan plan, Summary s) {

@@ -36,20 +36,23 @@ import org.junit.jupiter.api.io.TempDir;
 class RandomSpecsTest {
   private static final int SEEDS = Integer.getInteger("etchloom.seeds", 300);
 
-  /** Each so many seeds the files are written and read back too. */
+  /** The files of every drawn board are proved where more seeds are asked for, else of some. */
+  private static final boolean ALL_PROVED = Integer.getInteger("etchloom.seeds") != null;
+
+  /** Each so many seeds the whole set is written, with its report, and read back. */
   private static final int PROVED = 3;
 
   @TempDir Path folder;
 
   @Test
   void everySpecIsDrawnCleanOrRefusedByKey() throws IOException {
-    drawOrRefuse(RandomSpecs::yaml, SEEDS, SEEDS / 4, PROVED);
+    drawOrRefuse(RandomSpecs::yaml, SEEDS * 3 / 5, SEEDS * 3 / 20, PROVED);
   }
 
   /** All outlines, layers side by side, rows of vias; the written files proven for some. */
   @Test
   void everyShapeIsDrawnCleanOrRefusedByKey() throws IOException {
-    drawOrRefuse(RandomSpecs::shapes, SEEDS / 2, SEEDS / 6, 5 * PROVED);
+    drawOrRefuse(RandomSpecs::shapes, SEEDS * 3 / 10, SEEDS / 10, 5 * PROVED);
   }
 
   /**
@@ -76,8 +79,12 @@ class RandomSpecsTest {
           assertTrue(
               SetFiles.of(attempt, Optional.empty()).results().proof().orElseThrow().passed(),
               name);
+        } else if (ALL_PROVED) {
+          assertTrue(LayerFiles.of(d.laid(), Optional.empty()).proof().passed(), name);
         }
         drawn++;
+      } catch (FailedProof e) {
+        throw new AssertionError(name, e);
       } catch (BadInput e) {
         for (Diagnostic x : e.diagnostics()) {
           assertFalse(x.key().isEmpty(), () -> name + x);
@@ -96,7 +103,7 @@ class RandomSpecsTest {
    */
   @Test
   void everyWindingIsDrawnCleanAndProvedOrRefusedByKey() throws IOException {
-    int seeds = SEEDS / 3;
+    int seeds = SEEDS / 5;
     int drawn = 0;
     Map<String, Integer> refusals = new TreeMap<>();
     for (long seed = 0; seed < seeds; seed++) {
@@ -167,7 +174,7 @@ class RandomSpecsTest {
     }
   }
 
-  /** The tightest gap is the one asked for, to the nanometre. */
+  /** The tightest gap is the one asked for: never less, and between turns no more. */
   private static void theSpaceIsWhatWasAskedFor(Drawn d, String name) {
     double least =
         d.rules().minima().stream()
@@ -175,7 +182,11 @@ class RandomSpecsTest {
             .mapToDouble(Finding::measured)
             .min()
             .orElseThrow();
-    assertTrue(least >= d.spec().coil().spaceMm() - 1e-6, () -> name + " space " + least);
+    double asked = d.spec().coil().spaceMm();
+    assertTrue(least >= asked - 1e-6, () -> name + " space " + least);
+    if (d.assembly().artwork().turnsPerLayer() > 1) {
+      assertEquals(asked, least, 1e-3, name);
+    }
   }
 
   /** Connected pieces of the whole copper as a graph. */

@@ -100,7 +100,7 @@ class SeekTest {
         ((Map<?, ?>) found.get("values")).get("coil.turns"));
     assertEquals(mm(best, "coil.track"), mm(found, "coil.track"), 0.02);
     assertEquals(true, found.get("passed"));
-    assertTrue(r.out().contains("of the spec as it stands (+"), r.out());
+    assertTrue(r.out().replaceAll("\\s+", " ").contains("of the spec as it stands (+"), r.out());
   }
 
   /** Cut anywhere, in its searches or after them, it comes to the same files. */

@@ -7,19 +7,27 @@ import etchloom.artwork.Artwork;
 import etchloom.artwork.CopperBuilder;
 import etchloom.artwork.Feature;
 import etchloom.artwork.Joint;
+import etchloom.board.Assembler;
+import etchloom.board.Assembly;
 import etchloom.geometry.Line;
 import etchloom.geometry.Path;
 import etchloom.geometry.Point;
 import etchloom.rules.Finding;
 import etchloom.rules.RuleReport;
+import etchloom.spec.FabReader;
 import etchloom.spec.Spec;
+import etchloom.spec.SpecFile;
+import etchloom.spec.SpecReader;
 import etchloom.spec.Templates;
+import etchloom.testing.MixedSpecs;
 import etchloom.testing.Specs;
 import etchloom.testing.TemplateBoards;
 import etchloom.testing.ToyBoards;
 import etchloom.write.outline.Areas;
 import etchloom.write.outline.Outline;
+import java.nio.charset.StandardCharsets;
 import java.util.List;
+import java.util.Optional;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.MethodSource;
@@ -52,6 +60,30 @@ class CopperAreaTest {
       double outlines = Outline.of(art, layer).stream().mapToDouble(Areas::signedMm2).sum();
       assertEquals(outlines, areas.get(layer - 1), 2e-5 * outlines, "L" + layer);
     }
+  }
+
+  /** The limit to which the files of a set are held too; whole layers as polygons keep 1e-4. */
+  @Test
+  void randomBoards_agreeWithTheirOutlines() {
+    int boards = 0;
+    for (long seed = 30; seed < 50; seed++) {
+      String yaml = MixedSpecs.yaml(seed);
+      SpecFile f =
+          SpecReader.read("mixed", yaml.getBytes(StandardCharsets.US_ASCII)).value().orElseThrow();
+      Optional<Assembly> board =
+          Assembler.assemble(f.spec(), FabReader.builtIn(f.spec().fab()), f.positions()).value();
+      if (board.isEmpty()) {
+        continue;
+      }
+      boards++;
+      Artwork art = board.get().artwork().onGrid();
+      List<Double> areas = CopperArea.of(art, KEPT);
+      for (int layer = 1; layer <= art.layers(); layer++) {
+        double outlines = Outline.of(art, layer).stream().mapToDouble(Areas::signedMm2).sum();
+        assertEquals(outlines, areas.get(layer - 1), 2e-4 * outlines, "L" + layer + "\n" + yaml);
+      }
+    }
+    assertTrue(boards >= 8, boards + " boards");
   }
 
   /**

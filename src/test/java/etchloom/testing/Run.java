@@ -14,6 +14,15 @@ public record Run(int code, String out, String err) {
   }
 
   public static Run with(Map<String, String> environment, String... args) {
+    return run(environment, false, args);
+  }
+
+  /** As a person has it, who sees the output itself. */
+  public static Run onTerminal(Map<String, String> environment, String... args) {
+    return run(environment, true, args);
+  }
+
+  private static Run run(Map<String, String> environment, boolean terminal, String... args) {
     ByteArrayOutputStream out = new ByteArrayOutputStream();
     ByteArrayOutputStream err = new ByteArrayOutputStream();
     Console console =
@@ -21,7 +30,7 @@ public record Run(int code, String out, String err) {
             new PrintStream(out, true, StandardCharsets.UTF_8),
             new PrintStream(err, true, StandardCharsets.UTF_8),
             environment,
-            false);
+            terminal);
     int code = App.run(args, console);
     return new Run(
         code, out.toString(StandardCharsets.UTF_8), err.toString(StandardCharsets.UTF_8));

@@ -2,6 +2,7 @@ package etchloom.electric.machine;
 
 import etchloom.electric.machine.drive.Generator;
 import etchloom.electric.machine.drive.Ripple;
+import etchloom.electric.machine.drive.TorqueSpeed;
 import etchloom.electric.machine.heat.EddyLoss;
 import etchloom.electric.machine.heat.HeatBalance;
 import etchloom.electric.machine.heat.Losses;
@@ -29,6 +30,7 @@ final class HeatStage {
   private final Setting s;
   private final Optional<Linked> linked;
   private final Losses losses;
+  private final double rippleSquare;
   private final boolean currentKnown;
   private final boolean rippleKnown;
   private final ThermalFigures thermal;
@@ -38,34 +40,32 @@ final class HeatStage {
     this.linked = linked;
     OptionalDouble ripple = DriveStage.ripple(s);
     rippleKnown = ripple.isPresent();
-    Optional<DoubleUnaryOperator> current = current();
-    currentKnown = current.isPresent();
+    rippleSquare = rippleKnown ? Ripple.meanSquare(ripple.getAsDouble()) : 0;
     boolean turning = s.duty().speedRadPerSecond().isPresent();
-    losses =
-        new Losses(
-            s.circuit(),
-            current.orElse(t -> 0),
-            rippleKnown ? Ripple.meanSquare(ripple.getAsDouble()) : 0,
-            turning ? linked.map(Linked::eddy) : Optional.empty(),
-            turning ? linked.flatMap(Linked::circulating) : Optional.empty(),
-            turning ? linked.map(Linked::layersWatt).orElse(OptionalDouble.empty()) : NONE,
-            s.radPerSecond());
+    currentKnown = current(turning, s.radPerSecond()).isPresent();
+    losses = losses(turning, s.radPerSecond());
     thermal = balance();
   }
 
+  private Losses losses(boolean turning, double radPerSecond) {
+    return new Losses(
+        s.circuit(),
+        current(turning, radPerSecond).orElse(t -> 0),
+        rippleSquare,
+        turning ? linked.map(Linked::eddy) : Optional.empty(),
+        turning ? linked.flatMap(Linked::circulating) : Optional.empty(),
+        turning ? linked.map(Linked::layersWatt).orElse(OptionalDouble.empty()) : NONE,
+        radPerSecond);
+  }
+
   /** A winding's current by the copper's temperature. */
-  private Optional<DoubleUnaryOperator> current() {
+  private Optional<DoubleUnaryOperator> current(boolean turning, double radPerSecond) {
     Spec.Duty duty = s.duty();
-    if (duty.generator() && linked.isPresent() && duty.loadOhm().isPresent()) {
-      if (duty.speedRadPerSecond().isPresent()) {
-        Generator g =
-            new Generator(
-                s.circuit(),
-                linked.get().fluxWeber(),
-                s.radPerSecond(),
-                duty.loadOhm().getAsDouble());
-        return Optional.of(g::ampereRms);
-      }
+    if (turning && duty.generator() && linked.isPresent() && duty.loadOhm().isPresent()) {
+      Generator g =
+          new Generator(
+              s.circuit(), linked.get().fluxWeber(), radPerSecond, duty.loadOhm().getAsDouble());
+      return Optional.of(g::ampereRms);
     }
     OptionalDouble stated = duty.currentAmpereRms();
     return stated.isPresent() ? Optional.of(t -> stated.getAsDouble()) : Optional.empty();
@@ -94,21 +94,24 @@ final class HeatStage {
     } else {
       s.ledger().has("thermal.copperC", s.current());
     }
+    OptionalDouble most = continuous(board, limit);
+    double chart = Math.max(most.orElse(0), duty.currentAmpereRms().orElse(0));
     return new ThermalFigures(
         copper,
-        continuous(board, limit),
+        most,
         stable,
         TrackChart.narrowest(s.artwork(), limit - duty.ambientC()),
         copper.orElse(limit),
+        HeatCurves.reaching(board, losses, HeatBalance.MELTING_C),
+        HeatCurves.byCurrent(board, losses, chart),
         area);
   }
 
   /** What current the balance leaves room for at the copper's limit. */
   private OptionalDouble continuous(HeatBalance board, double limit) {
-    double left = board.leavingWatt(limit) - losses.otherWatt(limit);
-    if (left > 0) {
-      double ohm = s.circuit().phases() * s.circuit().windingOhm(limit);
-      return OptionalDouble.of(Math.sqrt(left / ohm));
+    OptionalDouble most = HeatCurves.reaching(board, losses, limit);
+    if (most.isPresent()) {
+      return most;
     }
     s.ledger()
         .caution(
@@ -166,7 +169,29 @@ final class HeatStage {
             losses.circulating().isPresent() || losses.layersWatt().isPresent(),
             losses.circulatingWatt(t)),
         eddy ? byOrder(losses.eddy().get(), t) : List.of(),
-        eddy ? byLayer(losses.eddy().get(), t) : List.of());
+        eddy ? byLayer(losses.eddy().get(), t) : List.of(),
+        linked.isPresent()
+            ? HeatCurves.bySpeed(w -> losses(true, w), topRadPerSecond(), t, known())
+            : List.of());
+  }
+
+  private HeatCurves.Known known() {
+    return new HeatCurves.Known(
+        current(true, 0).isPresent(),
+        rippleKnown,
+        linked.flatMap(Linked::circulating).isPresent()
+            || linked.map(Linked::layersWatt).orElse(NONE).isPresent());
+  }
+
+  /** Up to where losses are told: the no-load speed, or a half more than the duty's; 0 if none. */
+  private double topRadPerSecond() {
+    OptionalDouble bus = s.duty().generator() ? NONE : s.duty().busVolt();
+    double free =
+        bus.isPresent()
+            ? TorqueSpeed.noLoadRadPerSecond(
+                s.circuit(), linked.get().fluxWeber(), bus.getAsDouble())
+            : 0;
+    return bus.isPresent() ? Math.max(free, s.radPerSecond()) : 1.5 * s.radPerSecond();
   }
 
   private static OptionalDouble when(boolean known, double value) {

@@ -13,6 +13,7 @@ import java.util.OptionalDouble;
  * @param circulatingWatt round a delta
  * @param eddyByOrder the field's odd orders that matter
  * @param eddyByLayer L1 first
+ * @param bySpeed the same losses at other speeds; empty where none of them depends on it
  */
 public record LossFigures(
     double atC,
@@ -21,11 +22,22 @@ public record LossFigures(
     OptionalDouble rippleWatt,
     OptionalDouble circulatingWatt,
     List<Part> eddyByOrder,
-    List<Part> eddyByLayer) {
+    List<Part> eddyByLayer,
+    List<AtSpeed> bySpeed) {
   public LossFigures {
     eddyByOrder = List.copyOf(eddyByOrder);
     eddyByLayer = List.copyOf(eddyByLayer);
+    bySpeed = List.copyOf(bySpeed);
   }
+
+  /** Losses at one speed, W, as in the whole; {@code totalWatt} of those known. */
+  public record AtSpeed(
+      double rpm,
+      OptionalDouble copperWatt,
+      double eddyWatt,
+      OptionalDouble rippleWatt,
+      OptionalDouble circulatingWatt,
+      double totalWatt) {}
 
   /**
    * @param number an order or a layer

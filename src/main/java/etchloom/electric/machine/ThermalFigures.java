@@ -1,5 +1,6 @@
 package etchloom.electric.machine;
 
+import java.util.List;
 import java.util.Optional;
 import java.util.OptionalDouble;
 
@@ -12,6 +13,9 @@ import java.util.OptionalDouble;
  * @param stable whether there is a balance at all; empty without a current
  * @param chartAmpere IPC-2221 for one narrowest track alone at the same rise
  * @param hotC the temperature that hot figures hold for: copperC, else the limit
+ * @param settlesUpToAmpereRms of one winding: above it no temperature below copper's melting point
+ *     carries the loss away; empty where the other losses alone see to that
+ * @param byCurrent where the copper settles by the current, the other losses at the duty's speed
  * @param surfaceM2 both faces from the bore to the outermost ring
  */
 public record ThermalFigures(
@@ -20,4 +24,16 @@ public record ThermalFigures(
     Optional<Boolean> stable,
     double chartAmpere,
     double hotC,
-    double surfaceM2) {}
+    OptionalDouble settlesUpToAmpereRms,
+    List<AtCurrent> byCurrent,
+    double surfaceM2) {
+  public ThermalFigures {
+    byCurrent = List.copyOf(byCurrent);
+  }
+
+  /**
+   * @param ampereRms of one winding
+   * @param copperC empty where it never settles
+   */
+  public record AtCurrent(double ampereRms, OptionalDouble copperC) {}
+}

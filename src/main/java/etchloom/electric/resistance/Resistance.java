@@ -6,8 +6,10 @@ import etchloom.artwork.Conductor;
 import etchloom.artwork.Joint;
 import etchloom.artwork.Stackup;
 import etchloom.electric.resistance.ResistanceFigures.CoilLayer;
+import etchloom.electric.resistance.ResistanceFigures.CoilOhm;
 import etchloom.electric.resistance.ResistanceFigures.CopperLayer;
 import etchloom.electric.resistance.ResistanceFigures.Limits;
+import etchloom.electric.resistance.ResistanceFigures.PairOhm;
 import etchloom.electric.resistance.ResistanceFigures.PhaseOhm;
 import etchloom.electric.resistance.ResistanceFigures.TerminalOhm;
 import etchloom.spec.FabRules;
@@ -30,21 +32,34 @@ public final class Resistance {
   public static ResistanceFigures of(Artwork artwork, FabRules.Tolerance tolerance) {
     double tempC = Copper.REFERENCE_C;
     Coil coil = artwork.coils().get(0);
+    List<CoilOhm> coils = artwork.coils().stream().map(c -> coil(artwork, c)).toList();
     List<TerminalOhm> terminals = terminals(artwork, Variation.NONE);
     if (terminals.isEmpty()) {
       throw new IllegalStateException("no two terminals are joined");
     }
+    List<PairOhm> pairs = pairs(artwork, tolerance, terminals);
     return new ResistanceFigures(
         coil.conductors().stream().map(id -> coilLayer(artwork, id)).toList(),
         copperLayers(artwork),
-        Chains.coil(artwork, coil, tempC).ohm(),
+        coils,
+        coils.get(0).ohm(),
         artwork.phases().stream()
             .map(p -> new PhaseOhm(p.mark(), Chains.phase(artwork, p, tempC).ohm()))
             .toList(),
         terminals,
         imbalancePercent(ResistanceFigures.lineToLine(terminals)),
-        worst(artwork, tolerance),
+        pairs,
+        worst(pairs),
         rss(artwork, tolerance, terminals));
+  }
+
+  private static CoilOhm coil(Artwork artwork, Coil coil) {
+    double mm = 0;
+    for (int id : coil.copper()) {
+      mm += artwork.conductors().get(id).path().lengthMm();
+    }
+    double ohm = Chains.coil(artwork, coil, Copper.REFERENCE_C).ohm();
+    return new CoilOhm(coil.number(), mm, ohm);
   }
 
   private static CoilLayer coilLayer(Artwork artwork, int id) {
@@ -101,13 +116,31 @@ public final class Resistance {
         .allMatch(c -> v.leaves(c.widthMm(), artwork.stackup().copper().get(c.layer() - 1)));
   }
 
-  private static Optional<Limits> worst(Artwork artwork, FabRules.Tolerance t) {
+  /** Each pair by itself: one with the star point has half of the others' resistance. */
+  private static List<PairOhm> pairs(
+      Artwork artwork, FabRules.Tolerance t, List<TerminalOhm> nominal) {
     Variation thin = new Variation(1 - t.track(), 1 - t.copper(), 1 - t.plating());
     if (!possible(artwork, thin)) {
-      return Optional.empty();
+      return List.of();
     }
     Variation fat = new Variation(1 + t.track(), 1 + t.copper(), 1 + t.plating());
-    return Optional.of(new Limits(min(terminals(artwork, fat)), max(terminals(artwork, thin))));
+    List<TerminalOhm> low = terminals(artwork, fat);
+    List<TerminalOhm> high = terminals(artwork, thin);
+    List<PairOhm> out = new ArrayList<>();
+    for (int i = 0; i < nominal.size(); i++) {
+      TerminalOhm n = nominal.get(i);
+      out.add(new PairOhm(n.key(), n.ohm(), low.get(i).ohm(), high.get(i).ohm()));
+    }
+    return out;
+  }
+
+  private static Optional<Limits> worst(List<PairOhm> pairs) {
+    return pairs.isEmpty()
+        ? Optional.empty()
+        : Optional.of(
+            new Limits(
+                pairs.stream().mapToDouble(PairOhm::leastOhm).min().orElseThrow(),
+                pairs.stream().mapToDouble(PairOhm::greatestOhm).max().orElseThrow()));
   }
 
   /**

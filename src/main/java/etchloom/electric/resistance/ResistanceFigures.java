@@ -8,33 +8,46 @@ import java.util.Optional;
  *
  * @param coilLayers the first coil's spirals, L1 first
  * @param copperLayers all tracks of each layer, L1 first
+ * @param coils every coil, by number
  * @param coilOhm the first coil from start to finish, its vias included
  * @param phases each phase from its entry to its exit (see {@link Chains})
  * @param terminals each pair of terminals that copper joins, in the order of the marks
  * @param imbalancePercent largest less smallest over the mean, of the terminal pairs without a star
  *     point
+ * @param pairs each pair's own limits, as in {@code worst}; empty where that is
  * @param worst limits where every tolerance is at its end; empty where a track could be etched away
  * @param rss limits where the tolerances' single effects add up as root of the sum of squares
  */
 public record ResistanceFigures(
     List<CoilLayer> coilLayers,
     List<CopperLayer> copperLayers,
+    List<CoilOhm> coils,
     double coilOhm,
     List<PhaseOhm> phases,
     List<TerminalOhm> terminals,
     double imbalancePercent,
+    List<PairOhm> pairs,
     Optional<Limits> worst,
     Optional<Limits> rss) {
   public ResistanceFigures {
     coilLayers = List.copyOf(coilLayers);
     copperLayers = List.copyOf(copperLayers);
+    coils = List.copyOf(coils);
     phases = List.copyOf(phases);
     terminals = List.copyOf(terminals);
+    pairs = List.copyOf(pairs);
   }
 
   public record CoilLayer(int layer, double lengthMm, double ohm) {}
 
   public record CopperLayer(int layer, double trackLengthMm) {}
+
+  /**
+   * One coil from its start to its finish.
+   *
+   * @param lengthMm of all its tracks
+   */
+  public record CoilOhm(int number, double lengthMm, double ohm) {}
 
   public record PhaseOhm(String mark, double ohm) {}
 
@@ -44,6 +57,9 @@ public record ResistanceFigures(
       return from + "-" + to;
     }
   }
+
+  /** What a pair of terminals has, and may have with every tolerance at its end, Ω. */
+  public record PairOhm(String key, double expectedOhm, double leastOhm, double greatestOhm) {}
 
   /** The smallest and the largest value of any pair of terminals, Ω. */
   public record Limits(double minTerminalOhm, double maxTerminalOhm) {}

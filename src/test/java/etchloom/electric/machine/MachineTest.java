@@ -141,6 +141,60 @@ class MachineTest {
     near(90, again.figures().thermal().copperC().getAsDouble(), 1e-4);
   }
 
+  /** The chart of temperatures is the balance again: what leaves is what the current makes. */
+  @Test
+  void temperaturesByCurrent_holdTheBalance() {
+    ThermalFigures t = inStar.thermal();
+    LossFigures loss = inStar.loss();
+    double hot = 1 + 0.00393 * (loss.atC() - 20); // IEC 60028
+    double cold = loss.copperWatt().getAsDouble() / (0.25 * 0.25) / hot;
+    double ripple = loss.rippleWatt().orElse(0) / hot;
+    double eddy = loss.eddyWatt().getAsDouble() * hot;
+    assertTrue(t.byCurrent().size() > 15, "points");
+    assertEquals(0, t.byCurrent().get(0).ampereRms());
+    for (ThermalFigures.AtCurrent a : t.byCurrent()) {
+      double c = a.copperC().getAsDouble();
+      double k = 1 + 0.00393 * (c - 20);
+      double i = a.ampereRms();
+      double made = (cold * i * i + ripple) * k + eddy / k;
+      near(12 * t.surfaceM2() * (c - 20), made, 1e-3);
+    }
+    double last = t.byCurrent().get(t.byCurrent().size() - 1).ampereRms();
+    assertTrue(last >= 1.25 * t.maxContinuousAmpereRms().getAsDouble());
+  }
+
+  /** Just below the current above which it never settles it does, just above it does not. */
+  @Test
+  void settlesUpToTheCurrentStated() {
+    double most = inStar.thermal().settlesUpToAmpereRms().getAsDouble();
+    for (double k : new double[] {0.999, 1.001}) {
+      TestMachine again =
+          TestMachine.of(
+              "filter-wheel", plus(FEW, "current: 0.25 A", "current: " + k * most + " A"));
+      assertEquals(k < 1, again.figures().thermal().copperC().isPresent(), "times " + k);
+    }
+  }
+
+  /** At the duty's speed the chart's losses are the losses; eddy loss grows with its square. */
+  @Test
+  void lossesBySpeed_agreeWithTheDuty() {
+    LossFigures f = inStar.loss();
+    assertTrue(f.bySpeed().size() > 15, "points");
+    LossFigures.AtSpeed first = f.bySpeed().get(0);
+    assertEquals(0, first.rpm());
+    assertEquals(0, first.eddyWatt());
+    double rpm = 200; // duty.speed of the template
+    double perSquare = f.eddyWatt().getAsDouble() / (rpm * rpm);
+    for (LossFigures.AtSpeed a : f.bySpeed()) {
+      assertEquals(perSquare * a.rpm() * a.rpm(), a.eddyWatt(), 1e-9 * (1 + a.eddyWatt()));
+      near(f.copperWatt().getAsDouble(), a.copperWatt().getAsDouble(), 1e-12);
+      near(f.rippleWatt().getAsDouble(), a.rippleWatt().getAsDouble(), 1e-12);
+      assertTrue(a.circulatingWatt().isEmpty());
+      double sum = a.copperWatt().getAsDouble() + a.eddyWatt() + a.rippleWatt().getAsDouble();
+      near(sum, a.totalWatt(), 1e-12);
+    }
+  }
+
   /** Ten times the current has no balance: said by name, and never a number. */
   @Test
   void tooMuchCurrent_noTemperature() {

@@ -55,6 +55,9 @@ class ResistanceTest {
     double barrel = Section.ohm(1.6 - 0.035, Math.PI * 0.02 * 0.32, 20);
     double layer = 704 / 58e3 / (0.15 * 0.035);
     assertEquals(2 * layer + barrel, f.coilOhm(), 1e-12);
+    assertEquals(12, f.coils().size());
+    f.coils().forEach(c -> assertEquals(2 * layer + barrel, c.ohm(), 1e-12, "coil " + c.number()));
+    f.coils().forEach(c -> assertEquals(2 * 704, c.lengthMm(), 1e-9, "coil " + c.number()));
     assertEquals(8 * layer + 7 * barrel, f.phases().get(2).ohm(), 1e-11);
   }
 

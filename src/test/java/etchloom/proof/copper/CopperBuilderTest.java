@@ -3,6 +3,7 @@ package etchloom.proof.copper;
 import static org.junit.jupiter.api.Assertions.assertEquals;
 
 import etchloom.geometry.Arc;
+import etchloom.geometry.Grid;
 import etchloom.geometry.Line;
 import etchloom.geometry.Path;
 import etchloom.geometry.Point;
@@ -216,6 +217,43 @@ class CopperBuilderTest {
             1);
     // box plus swept sides: area + |dx|·h + |dy|·w
     assertEquals(1 + 3 + 4.0, BUILDER.build(List.of(s)).areaMm2(), 1e-9);
+  }
+
+  /**
+   * Two bars in one line, as wide as the pad between them, which leave each other by a nanometre:
+   * of the three edges along one side each crossing that is rounded makes another one beside it.
+   */
+  @Test
+  void barsInLine_areNotZipped() {
+    Point middle = new Point(-4.651001, 23.820161);
+    row(new Point(-3.799088, 23.986501), middle, new Point(-5.502914, 23.653821), 0.682);
+  }
+
+  @Test
+  void rowsOfThreeVias_atAnyAngle() {
+    Random random = new Random(857);
+    for (int k = 0; k < 400; k++) {
+      double turn = 2 * Math.PI * random.nextDouble();
+      Point first = Point.polar(10 + 30 * random.nextDouble(), 2 * Math.PI * random.nextDouble());
+      Point on = Point.polar(0.85, turn);
+      Point middle = Grid.snap(first.plus(on));
+      row(Grid.snap(first), middle, Grid.snap(first.plus(on.times(2))), 0.6);
+    }
+  }
+
+  private static void row(Point first, Point middle, Point last, double pad) {
+    Figure f =
+        BUILDER.build(
+            List.of(
+                stroke(pad, true, new Line(first, middle)),
+                stroke(pad, true, new Line(middle, last)),
+                flash(middle, new ApertureShape.Circle(pad, 0), true)));
+    double area = pad * (first.distanceTo(middle) + middle.distanceTo(last));
+    area += Math.PI * pad * pad / 4;
+    assertEquals(1, f.islands());
+    assertEquals(1, f.rings());
+    // beside the bars corners of the pad's polygon show, by less than 1 um over its rim
+    assertEquals(area, f.areaMm2(), CopperBuilder.CHORD_ERROR_MM * Math.PI * pad);
   }
 
   /** Random polylines with sharp corners and crossings against buffers of JTS with fine caps. */

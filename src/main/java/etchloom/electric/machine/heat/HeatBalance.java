@@ -18,7 +18,7 @@ import java.util.function.DoubleUnaryOperator;
  */
 public record HeatBalance(double areaM2, double wattPerSquareMetreKelvin, double ambientC) {
   /** Melting point of copper, °C (recalled): no board comes near it, so no balance ends there. */
-  static final double MELTING_C = 1085;
+  public static final double MELTING_C = 1085;
 
   /** The copper's two faces, m². */
   public static double surfaceM2(Artwork artwork) {

@@ -148,6 +148,15 @@ final class PairParts {
     return most;
   }
 
+  /** Mean of all pairs, Ω, each group's part taken times a factor. */
+  double mean(double[] factor) {
+    double sum = 0;
+    for (int p = 0; p < pairs(); p++) {
+      sum += ohm(p, factor);
+    }
+    return sum / pairs();
+  }
+
   /** Largest less smallest pair over their mean, each group's part taken times a factor. */
   double imbalance(double[] factor) {
     double least = Double.POSITIVE_INFINITY;

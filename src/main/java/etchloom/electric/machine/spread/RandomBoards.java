@@ -1,6 +1,9 @@
 package etchloom.electric.machine.spread;
 
+import etchloom.units.RoundStep;
+import java.util.ArrayList;
 import java.util.Arrays;
+import java.util.List;
 import java.util.Random;
 
 /** Seeded random boards: the same figures on every run and machine. */
@@ -9,9 +12,11 @@ final class RandomBoards {
 
   private static final long SEED = 20210409;
   private static final double KEPT = 0.95;
+  private static final int BINS = 25;
 
   private final double[] terminal = new double[BOARDS];
   private final double[] imbalance = new double[BOARDS];
+  private final double[] mean = new double[BOARDS];
   private final double[] torque = new double[BOARDS];
 
   /**
@@ -38,6 +43,7 @@ final class RandomBoards {
         for (int g = 0; g < factor.length; g++) {
           factor[g] = factor(pairs, g, tol, track, copper, plating, random);
         }
+        mean[board] = pairs.mean(factor);
         terminal[board] = pairs.farthest(factor);
         imbalance[board] = pairs.imbalance(factor);
       }
@@ -67,6 +73,26 @@ final class RandomBoards {
 
   double terminal() {
     return kept(terminal);
+  }
+
+  /** Boards by their mean resistance between terminals, in bins of a round width. */
+  List<SpreadFigures.Bin> bins() {
+    double least = Arrays.stream(mean).min().orElseThrow();
+    double most = Arrays.stream(mean).max().orElseThrow();
+    if (!(most > least)) {
+      return List.of(new SpreadFigures.Bin(least, most, BOARDS));
+    }
+    double width = RoundStep.atLeast((most - least) / BINS);
+    long first = (long) Math.floor(least / width);
+    int[] count = new int[(int) ((long) Math.floor(most / width) - first) + 1];
+    for (double ohm : mean) {
+      count[(int) ((long) Math.floor(ohm / width) - first)]++;
+    }
+    List<SpreadFigures.Bin> out = new ArrayList<>();
+    for (int i = 0; i < count.length; i++) {
+      out.add(new SpreadFigures.Bin((first + i) * width, (first + i + 1) * width, count[i]));
+    }
+    return out;
   }
 
   double imbalance() {

@@ -5,6 +5,7 @@ import etchloom.artwork.Conductor;
 import etchloom.artwork.Stackup;
 import etchloom.electric.machine.spread.SpreadFigures.Share;
 import etchloom.spec.FabRules;
+import java.util.List;
 import java.util.Optional;
 import java.util.function.IntToDoubleFunction;
 
@@ -41,7 +42,8 @@ public final class Spread {
     return new SpreadFigures(
         kept ? s.terminal(boards.terminal()) : Share.ABSENT,
         torquePerMm.isPresent() ? s.torque(perCopper, boards.torque()) : Share.ABSENT,
-        kept ? s.imbalance(boards.imbalance()) : Share.ABSENT);
+        kept ? s.imbalance(boards.imbalance()) : Share.ABSENT,
+        kept ? boards.bins() : List.of());
   }
 
   /** Whether every track has copper left at the thin end of all tolerances. */

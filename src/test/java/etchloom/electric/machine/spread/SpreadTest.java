@@ -53,6 +53,32 @@ class SpreadTest {
     assertEquals(want, figures.terminalOhmPercent().monteCarlo95().getAsDouble(), 0.12 * want);
   }
 
+  /**
+   * The bins hold every board; their mean is near the nominal pair's, and as many boards lie within
+   * the share of 95 of 100 as that says.
+   */
+  @Test
+  void binsHoldEveryBoard() {
+    List<SpreadFigures.Bin> bins = figures.boards();
+    assertEquals(1000, bins.stream().mapToInt(SpreadFigures.Bin::boards).sum());
+    double sum = 0;
+    for (int i = 0; i < bins.size(); i++) {
+      SpreadFigures.Bin b = bins.get(i);
+      assertTrue(b.toOhm() > b.fromOhm());
+      assertTrue(i == 0 || b.fromOhm() == bins.get(i - 1).toOhm(), "no gap before " + b);
+      sum += b.boards() * (b.fromOhm() + b.toOhm()) / 2;
+    }
+    double nominal = wheel.resistance().meanTerminalOhm();
+    assertEquals(nominal, sum / 1000, 0.02 * nominal);
+    double share = figures.terminalOhmPercent().monteCarlo95().getAsDouble() / 100;
+    int within =
+        bins.stream()
+            .filter(b -> b.fromOhm() > nominal * (1 - share) && b.toOhm() < nominal * (1 + share))
+            .mapToInt(SpreadFigures.Bin::boards)
+            .sum();
+    assertTrue(within > 850 && within <= 1000, within + " boards");
+  }
+
   @Test
   void orderOfTheThree() {
     for (SpreadFigures.Share s :
