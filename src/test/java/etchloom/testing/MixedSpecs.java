@@ -39,10 +39,12 @@ public final class MixedSpecs {
           new int[] {6, 24, 20});
 
   private final Random random;
+  private final Random tapering;
   private final StringBuilder out = new StringBuilder();
 
   private MixedSpecs(long seed) {
     random = new Random(7_368_787 * seed + 11);
+    tapering = new Random(~seed);
   }
 
   public static String yaml(long seed) {
@@ -129,6 +131,9 @@ public final class MixedSpecs {
     line("  layers: " + pick(List.of("series", "parallel")));
     if (!outline.equals("round") && random.nextInt(4) == 0) {
       line("  corner: " + mm(between(0.5, 2.5) * (track + space)));
+    }
+    if (outline.equals("wedge") && tapering.nextBoolean()) {
+      line("  taper: on");
     }
     line("rim: {track: " + mm(track * between(1, 3)) + "}");
     return outer;
