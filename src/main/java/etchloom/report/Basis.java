@@ -52,7 +52,7 @@ enum Basis {
           + " eddy loss by the formulas of this page",
       "the drawn copper",
       "a widening track is a row of even pieces; the spreading of the current at their steps is"
-          + " left out, some ten-thousandths of a square each"),
+          + " left out, some thousandths of a square each"),
   LOSS(
       "Losses",
       "I2R hot, eddy loss of a strip; copper only: no iron, bearings, drive",

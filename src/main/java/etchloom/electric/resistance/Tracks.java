@@ -9,9 +9,10 @@ import java.util.TreeMap;
 /**
  * Resistance of whole tracks: their stretches of one width in series.
  *
- * <p>At a step the current has to spread from the narrower width to the wider, which is left out:
- * over the ratio a of two widths it adds {@code (ln((1+a)²/4a) + ...)/π} squares, to first order
- * {@code (a−1)²/4π}, for steps of a twentieth two ten-thousandths of a square each.
+ * <p>At a step the current has to spread from the narrower width to the wider. That is left out,
+ * and so is the wider stretch's round end, which helps it: a sharp step of ratio a adds about
+ * {@code (a−1)² (1/2 + ln(2/(a−1))) / π} squares, the first term of its conformal map (recalled),
+ * three thousandths for a step of a twentieth, where a stretch is a square long and more.
  */
 public final class Tracks {
   private Tracks() {}
