@@ -115,7 +115,7 @@ final class HtmlFigures {
   }
 
   private void layers() {
-    List<Double> areas = CopperArea.of(r.artwork(), r.rules());
+    List<Double> areas = r.copperAreaMm2();
     Table t =
         new Table(
             "Copper by layer",
