@@ -211,7 +211,7 @@ final class Figures {
         g,
         b,
         "drive.rippleAmperePeakToPeak",
-        "PWM ripple, peak to peak",
+        "PWM ripple of a line, peak to peak",
         Form.AMPERE,
         pwm,
         Figures::drives);

@@ -18,7 +18,7 @@ final class HtmlFigures {
           "torque.newtonMetrePerAmpereRms", "torque for each ampere rms",
           "emf.rpmPerVolt", "speed for each volt, line peak",
           "drive.speedLimitRpm", "no-load speed at the bus",
-          "drive.rippleAmperePeakToPeak", "PWM ripple, peak to peak",
+          "drive.rippleAmperePeakToPeak", "PWM ripple of a line, peak to peak",
           "thermal.copperC", "copper at the duty",
           "thermal.maxContinuousAmpereRms", "most continuous current, rms",
           "generator.powerWatt", "power into the load");
