@@ -144,7 +144,7 @@ final class HeatStage {
                   + Numbers.fixed(c, 0)
                   + " C; a laminate of Tg "
                   + Numbers.fixed(glass, 0)
-                  + " C is best kept 20 K below it");
+                  + " C is best kept 25 K below it");
     }
   }
 
