@@ -14,7 +14,7 @@ import etchloom.spec.Spec.Connection;
  * of two such stars, and for a delta by its star of L/3 and R/3; 8 for open windings on full
  * bridges with unipolar pulses; 4 for two phases whose star point is on a third leg; 5(√5 − 1) for
  * a star of five, whose wave has more than two levels: there both ends, τ ≫ T and τ ≪ T, are met
- * and what is between them nearly. The tests replay all of them pulse by pulse.
+ * and what is between them up to 8 % high. The tests replay all of them pulse by pulse.
  *
  * <p>L is what the pulses meet, {@link Circuit#rippleHenry()}: the synchronous inductance in a star
  * or delta of three, of two stars each by itself; elsewhere the pulses of the phases are not in

@@ -62,9 +62,11 @@ class RippleTest {
           }
         }
         Ripple r = new Ripple(circuit(how, phases, ohm, 1), 1, 1);
-        double share = phases == 5 && ohm > 1e-3 ? 0.05 : 5e-3;
         String which = phases + " phases, R T/L " + ohm;
-        assertEquals(worst, r.amperePeakToPeak(COLD), share * worst, which);
+        double stated = r.amperePeakToPeak(COLD);
+        assertTrue(stated > 0.995 * worst, which + ": " + stated + " for " + worst);
+        double high = phases == 5 && ohm > 0.1 && ohm < 10 ? 1.08 : 1.005;
+        assertTrue(stated < high * worst, which + ": " + stated + " for " + worst);
       }
     }
   }
