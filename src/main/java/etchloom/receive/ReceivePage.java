@@ -13,7 +13,7 @@ public final class ReceivePage {
   /** UTF-8. */
   public static byte[] write(Outcome o) {
     Html h = new Html();
-    HtmlHead.write(h, "Delivery of " + o.title() + ", revision " + o.revision(), false);
+    HtmlHead.write(h, "Delivery of " + o.title() + ", revision " + o.revision());
     h.open("body").open("header").element("h1", "Delivery of " + o.title());
     h.element("p", "Revision " + o.revision() + ", Etchloom " + o.toolVersion(), "class=\"quiet\"");
     h.close("header").open("main");
