@@ -42,7 +42,8 @@ function show(v) {
   if (typeof v !== "number") return String(v);
   if (v === 0 || Number.isInteger(v)) return String(v);
   const size = Math.abs(v);
-  return size < 1e-3 || size >= 1e6 ? v.toExponential(3) : String(+v.toPrecision(5));
+  const short = +v.toPrecision(5);
+  return size < 1e-3 || size >= 1e6 ? short.toExponential() : String(short);
 }
 
 function axis(name) {
@@ -108,7 +109,7 @@ function draw() {
   const best = front(x, y);
   now = { x, y, best };
   if (rows.length) {
-    const h = scale(rows.map(x.of), LEFT, wide - RIGHT, wide < 600 ? 3 : 6);
+    const h = scale(rows.map(x.of), LEFT, wide - RIGHT, wide < 600 ? 4 : 6);
     const v = scale(rows.map(y.of), high - BOTTOM, TOP, wide < 600 ? 4 : 6);
     for (const t of h.ticks) {
       plot.append(make("line", { class: "grid", x1: h.at(t), x2: h.at(t), y1: TOP, y2: high - BOTTOM }));
