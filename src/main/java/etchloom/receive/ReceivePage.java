@@ -6,6 +6,7 @@ import etchloom.units.Numbers;
 import java.nio.charset.StandardCharsets;
 import java.util.ArrayList;
 import java.util.List;
+import java.util.stream.IntStream;
 
 /** The result as one HTML page that asks for nothing from outside. */
 public final class ReceivePage {
@@ -24,7 +25,7 @@ public final class ReceivePage {
     h.text(Shown.counts(o) + ".").close("div");
     Shown.spread(o.batch()).ifPresent(s -> h.element("p", s + "."));
     h.element("p", ACCEPTED);
-    h.reachableTable("Boards", Shown.HEAD, o.boards().stream().map(Shown::row).toList(), 0);
+    h.reachableTable("Boards", Shown.HEAD, o.boards().stream().map(ReceivePage::row).toList(), 0);
     causes(h, o);
     h.element("h2", "Every pair, at the temperature it was measured at");
     List<List<String>> pairs = new ArrayList<>();
@@ -44,6 +45,14 @@ public final class ReceivePage {
           + " that the fab's tolerances allow, and whose pairs depart from the drawing by no more"
           + " unlike shares than those of good boards; fewer than one good board in a thousand is"
           + " rejected for that.";
+
+  /** A number and its unit stay in one line. */
+  private static List<String> row(Verdict v) {
+    List<String> row = Shown.row(v);
+    return IntStream.range(0, row.size())
+        .mapToObj(c -> c >= 2 && c <= 5 ? row.get(c).replace(' ', '\u00a0') : row.get(c))
+        .toList();
+  }
 
   private static List<String> row(Verdict v, PairVerdict p) {
     return List.of(

@@ -37,8 +37,7 @@ class ReceivePageTest {
             + "7,W1,U1,11.65,24.5\n8,U1,V1,8.71,24.5\n8,V1,W1,11.58,24.5\n8,W1,U1,8.74,24.5\n"
             + "N,U1,V1,OL,24.5\nN,V1,W1,11.60,24.5\nN,W1,U1,OL,24.5\n".replace("N,", NAME + ","));
     Path out = folder.resolve("out");
-    Run r =
-        Run.of("receive", "templates/dosing-pump.yaml", rows.toString(), "-o", out.toString());
+    Run r = Run.of("receive", "templates/dosing-pump.yaml", rows.toString(), "-o", out.toString());
     assertEquals(1, r.code(), r.err());
     page = out.resolve("receive.html").toUri();
   }
@@ -63,8 +62,10 @@ class ReceivePageTest {
     String text = b.find("main").getText();
     assertTrue(text.contains("3 boards, 2 rejected"), text);
     assertTrue(text.contains("shorted-layers") && text.contains("open-phase"), text);
-    assertEquals(9, b.findAll("table:last-of-type tbody")
-        .get(1).findElements(By.tagName("tr")).size(), "three pairs of each board");
+    assertEquals(
+        9,
+        b.findAll("table:last-of-type tbody").get(1).findElements(By.tagName("tr")).size(),
+        "three pairs of each board");
   }
 
   @ParameterizedTest
