@@ -79,7 +79,7 @@ final class GeometryTree {
   }
 
   private static List<JsonTree> copperLayers(Results r) {
-    List<Double> areas = CopperArea.of(r.artwork(), r.rules());
+    List<Double> areas = r.copperAreaMm2();
     List<JsonTree> out = new ArrayList<>();
     for (ResistanceFigures.CopperLayer c : r.resistance().copperLayers()) {
       out.add(

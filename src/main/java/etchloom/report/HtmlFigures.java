@@ -10,17 +10,18 @@ import java.util.Map;
 
 /** The figures as tables, each with a link to its basis. */
 final class HtmlFigures {
-  private static final List<String> DECIDING =
-      List.of(
-          "resistance.minTerminalOhm",
-          "resistance.maxTerminalOhm",
-          "torque.newtonMetrePerAmpereRms",
-          "emf.rpmPerVolt",
-          "drive.speedLimitRpm",
-          "drive.rippleAmperePeakToPeak",
-          "thermal.copperC",
-          "thermal.maxContinuousAmpereRms",
-          "generator.powerWatt");
+  /** By their names away from the tables that they stand in further on. */
+  private static final Map<String, String> DECIDING =
+      Map.of(
+          "resistance.minTerminalOhm", "resistance between terminals, least of a good board",
+          "resistance.maxTerminalOhm", "resistance between terminals, greatest of a good board",
+          "torque.newtonMetrePerAmpereRms", "torque for each ampere rms of a winding",
+          "emf.rpmPerVolt", "speed for each volt, line peak",
+          "drive.speedLimitRpm", "no-load speed at the bus",
+          "drive.rippleAmperePeakToPeak", "PWM ripple of a line, peak to peak",
+          "thermal.copperC", "copper at the duty",
+          "thermal.maxContinuousAmpereRms", "most continuous current, rms",
+          "generator.powerWatt", "power into the load");
 
   private final Html h;
   private final Results r;
@@ -73,7 +74,8 @@ final class HtmlFigures {
     List<Shown> few =
         shown.values().stream()
             .flatMap(List::stream)
-            .filter(s -> DECIDING.contains(s.path()))
+            .filter(s -> DECIDING.containsKey(s.path()))
+            .map(s -> new Shown(s.path(), DECIDING.get(s.path()), s.value(), s.basis()))
             .toList();
     table("Of the machine", few);
     absent();
@@ -115,7 +117,7 @@ final class HtmlFigures {
   }
 
   private void layers() {
-    List<Double> areas = CopperArea.of(r.artwork(), r.rules());
+    List<Double> areas = r.copperAreaMm2();
     Table t =
         new Table(
             "Copper by layer",

@@ -10,6 +10,7 @@ import etchloom.rules.RuleReport;
 import etchloom.spec.FabRules;
 import etchloom.spec.Spec;
 import etchloom.winding.Winding;
+import java.util.List;
 import java.util.Optional;
 
 /**
@@ -19,6 +20,7 @@ import java.util.Optional;
  * @param toolVersion as in {@code 0.1.0}
  * @param fab the rules the board was held against
  * @param artwork before rounding to the grid
+ * @param copperAreaMm2 of each layer, L1 first
  * @param inductance empty where it was not worked out
  * @param machine what the machine does; empty where it was not worked out
  * @param taper what tracks that widen gain; empty where they do not
@@ -32,6 +34,7 @@ public record Results(
     Winding winding,
     RuleReport rules,
     ResistanceFigures resistance,
+    List<Double> copperAreaMm2,
     Optional<InductanceFigures> inductance,
     Optional<MachineFigures> machine,
     Optional<TaperFigures> taper,
@@ -54,6 +57,7 @@ public record Results(
         winding,
         rules,
         resistance,
+        CopperArea.of(artwork, rules),
         Optional.empty(),
         Optional.empty(),
         Optional.empty(),
@@ -88,6 +92,7 @@ public record Results(
         winding,
         rules,
         resistance,
+        copperAreaMm2,
         henries,
         figures,
         gain,

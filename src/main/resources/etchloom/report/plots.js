@@ -73,7 +73,8 @@
         c.stroke();
         const wide = c.measureText(name).width;
         const left = upright ? (at + 4 * px + wide > box.left + box.width ? at - 4 * px - wide : at + 4 * px) : box.left + 6 * px;
-        const top = upright ? box.top + (14 + 15 * down++) * px : at - 4 * px;
+        const above = at - 4 * px < box.top + 12 * px ? at + 14 * px : at - 4 * px;
+        const top = upright ? box.top + (14 + 15 * down++) * px : above;
         c.setLineDash([]);
         c.strokeStyle = css("--paper");
         c.lineWidth = 4 * px;

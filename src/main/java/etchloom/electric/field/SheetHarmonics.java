@@ -32,7 +32,10 @@ final class SheetHarmonics {
   private final int polePairs;
   private final double[] breaks;
   private final RingKernel kernel;
-  private final double[] kernelOut;
+  private final double[][] kernelOut;
+  private final int[] kernelCount;
+  private final double[] rings;
+  private final double[] weights;
 
   private double r;
   private double d;
@@ -46,8 +49,12 @@ final class SheetHarmonics {
     this.shape = shape;
     this.polePairs = polePairs;
     breaks = shape.breaksMm();
-    kernel = new RingKernel(polePairs, orders);
-    kernelOut = new double[orders];
+    int n = RULE.size();
+    kernel = new RingKernel(polePairs, orders, n);
+    kernelOut = new double[n][orders];
+    kernelCount = new int[n];
+    rings = new double[n];
+    weights = new double[n];
   }
 
   /**
@@ -106,31 +113,38 @@ final class SheetHarmonics {
     for (int i = 0; i < RULE.size(); i++) {
       double t = t0 + half * (1 + RULE.node(i));
       double stretch = (high - low) * 0.5 * Math.PI * Math.sin(Math.PI * t);
-      ring(radius(t), half * RULE.weight(i) * stretch);
+      rings[i] = radius(t);
+      weights[i] = half * RULE.weight(i) * stretch;
+    }
+    if (radial) {
+      kernel.fillRadial(r, rings, d, kernelOut, kernelCount);
+    } else {
+      kernel.fill(r, rings, d, kernelOut, kernelCount);
+    }
+    for (int i = 0; i < RULE.size(); i++) {
+      ring(rings[i], weights[i] * scale * rings[i], kernelCount[i], kernelOut[i]);
     }
   }
 
   /** One ring: charge of order ν is 4/(νπ) (sin νPb − sin νPa) between the outline's angles. */
-  private void ring(double s, double weight) {
-    int n = radial ? kernel.fillRadial(r, s, d, kernelOut) : kernel.fill(r, s, d, kernelOut);
+  private void ring(double s, double w, int n, double[] values) {
     if (n == 0) {
       return;
     }
-    double w = weight * scale * s;
-    series(shape.toRad(s), w, n);
+    series(shape.toRad(s), w, n, values);
     double from = shape.fromRad(s);
     if (from > 0) {
-      series(from, -w, n);
+      series(from, -w, n, values);
     }
   }
 
-  private void series(double angle, double w, int n) {
+  private void series(double angle, double w, int n, double[] values) {
     double x = polePairs * angle;
     double twice = 2 * Math.cos(2 * x);
     double now = Math.sin(x);
     double before = -now;
     for (int i = 0; i < n; i++) {
-      out[i] += w * now / (2 * i + 1) * kernelOut[i];
+      out[i] += w * now / (2 * i + 1) * values[i];
       double next = twice * now - before;
       before = now;
       now = next;

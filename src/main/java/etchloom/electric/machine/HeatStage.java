@@ -23,7 +23,7 @@ final class HeatStage {
   private static final double FAINT = 1e-4;
 
   /** A laminate held for long should stay so far below its glass transition (common practice). */
-  private static final double BELOW_GLASS_K = 20;
+  private static final double BELOW_GLASS_K = 25;
 
   private static final OptionalDouble NONE = OptionalDouble.empty();
 
@@ -144,7 +144,7 @@ final class HeatStage {
                   + Numbers.fixed(c, 0)
                   + " C; a laminate of Tg "
                   + Numbers.fixed(glass, 0)
-                  + " C is best kept 20 K below it");
+                  + " C is best kept 25 K below it");
     }
   }
 

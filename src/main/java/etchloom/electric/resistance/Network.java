@@ -179,15 +179,36 @@ public final class Network {
     return Optional.of(new Currents(edges, ampere, artwork.conductors().size(), 1 / siemens));
   }
 
+  /** What some of the nodes see of the network: equal between any two of them, and small. */
+  Network onto(List<Node> some) {
+    List<Node> kept = some.stream().filter(index::containsKey).toList();
+    Reduction reduction = reduced(kept.stream().mapToInt(index::get).toArray());
+    List<Edge> between = new ArrayList<>();
+    Map<Node, Integer> few = new TreeMap<>();
+    for (Node a : kept) {
+      for (Node b : few.keySet()) {
+        double siemens = reduction.siemens(index.get(a), index.get(b));
+        if (siemens > 0) {
+          between.add(new Edge(b, a, 1 / siemens, OptionalInt.empty()));
+        }
+      }
+      few.put(a, few.size());
+    }
+    return new Network(artwork, few, between);
+  }
+
   private Reduction reduced(Node from, Node to) {
     if (from.equals(to)) {
       throw new IllegalArgumentException("a resistance needs two nodes, got " + from + " twice");
     }
+    return reduced(index.get(from), index.get(to));
+  }
+
+  private Reduction reduced(int... keep) {
     return new Reduction(
         index.size(),
         edges.stream().map(e -> new int[] {index.get(e.from()), index.get(e.to())}).toList(),
         edges.stream().map(Edge::ohm).toList(),
-        index.get(from),
-        index.get(to));
+        keep);
   }
 }

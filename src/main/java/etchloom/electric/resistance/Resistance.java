@@ -83,8 +83,10 @@ public final class Resistance {
 
   /** Every pair of terminals that copper joins, at 20 °C. */
   public static List<TerminalOhm> terminals(Artwork artwork, Variation variation) {
-    Network network = Network.of(artwork, variation, Copper.REFERENCE_C);
     List<Joint> all = artwork.terminals();
+    Network network =
+        Network.of(artwork, variation, Copper.REFERENCE_C)
+            .onto(all.stream().map(Network::terminalNode).toList());
     List<TerminalOhm> out = new ArrayList<>();
     for (int i = 0; i < all.size(); i++) {
       for (int j = i + 1; j < all.size(); j++) {

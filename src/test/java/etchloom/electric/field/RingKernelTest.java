@@ -17,12 +17,29 @@ class RingKernelTest {
     return sum * 2 * Math.PI / points;
   }
 
+  /** Beside another ring, far off, whose recurrence is the shorter one. */
+  private static int fill(int polePairs, int orders, double[] place, double[] out) {
+    double[][] all = {new double[orders], out};
+    int[] count = new int[2];
+    double[] rings = {10 * place[1], place[1]};
+    new RingKernel(polePairs, orders, 2).fill(place[0], rings, place[2], all, count);
+    return count[1];
+  }
+
+  private static int fillRadial(int polePairs, int orders, double[] place, double[] out) {
+    double[][] all = {out, new double[orders]};
+    int[] count = new int[2];
+    double[] rings = {place[1], 10 * place[1]};
+    new RingKernel(polePairs, orders, 2).fillRadial(place[0], rings, place[2], all, count);
+    return count[0];
+  }
+
   @Test
   void agreesWithQuadrature() {
     double[][] places = {{20, 20.1, 0.8}, {12, 26, 0.8}, {20, 20, 6}, {25, 15, -3}, {3, 21, 1}};
     for (double[] p : places) {
       double[] out = new double[6];
-      int n = new RingKernel(6, 6).fill(p[0], p[1], p[2], out);
+      int n = fill(6, 6, p, out);
       double whole = Math.abs(quadrature(p[0], p[1], p[2], 0));
       for (int i = 0; i < n; i++) {
         double want = quadrature(p[0], p[1], p[2], 6 * (2 * i + 1));
@@ -34,7 +51,7 @@ class RingKernelTest {
   @Test
   void highOrdersCloseBy() {
     double[] out = new double[40];
-    assertEquals(40, new RingKernel(8, 40).fill(20, 20.02, 0.2, out));
+    assertEquals(40, fill(8, 40, new double[] {20, 20.02, 0.2}, out));
     double want = quadrature(20, 20.02, 0.2, 8 * 79);
     assertEquals(want, out[39], 1e-8 * Math.abs(want));
   }
@@ -45,7 +62,7 @@ class RingKernelTest {
     double[][] places = {{20, 20.1, 0.8}, {12, 26, 0.8}, {20, 20, 6}, {25, 15, -3}, {21, 19, 1}};
     for (double[] p : places) {
       double[] out = new double[4];
-      int n = new RingKernel(6, 4).fillRadial(p[0], p[1], p[2], out);
+      int n = fillRadial(6, 4, p, out);
       for (int i = 0; i < n; i++) {
         double want = radial(p[0], p[1], p[2], 6 * (2 * i + 1));
         double scale = Math.abs(radial(p[0], p[1], p[2], 0));
