@@ -50,7 +50,11 @@ public final class ReceivePage {
   private static List<String> row(Verdict v) {
     List<String> row = Shown.row(v);
     return IntStream.range(0, row.size())
-        .mapToObj(c -> c >= 2 && c <= 5 ? row.get(c).replace(" um", " \u00b5m").replace(' ', '\u00a0') : row.get(c))
+        .mapToObj(
+            c ->
+                c >= 2 && c <= 5
+                    ? row.get(c).replace(" um", " \u00b5m").replace(' ', '\u00a0')
+                    : row.get(c))
         .toList();
   }
 
