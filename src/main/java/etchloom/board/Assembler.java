@@ -191,7 +191,8 @@ public final class Assembler {
           "coil.outer-radius",
           "the coil has no room for a single turn around its "
               + coilVias(size)
-              + "; a larger coil.outer-radius, a smaller via.pad, "
+              + "; a larger coil.outer-radius, a "
+              + (size.trackMm() > size.padMm() ? "narrower coil.track, " : "smaller via.pad, ")
               + (size.viaCount() > 1 ? "a smaller via.count, " : "")
               + "fewer board.layers or fewer winding.coils would do");
       return Optional.empty();
@@ -219,6 +220,7 @@ public final class Assembler {
         coil.nodes(),
         coil.layers(),
         coil.nodeRadiusMm(),
+        coil.jointMm(),
         coil.nodeAngleRad(0),
         spec.rim().trackMm(),
         spec.coil().spaceMm(),

@@ -83,6 +83,11 @@ public record CoilSize(
     return pairs() * viaCount;
   }
 
+  /** The widest round copper at a joint: its pad, or the end of a track that is wider. */
+  public double jointMm() {
+    return Math.max(padMm, trackMm);
+  }
+
   /** Distance of the vias of one joint at the rim. */
   public double viaPitchMm() {
     return Math.max(padMm + spaceMm, holeMm + holeGapMm);
@@ -131,13 +136,21 @@ public record CoilSize(
 
   /** Distance between neighbouring eye vias along the axis; a track may end between two pads. */
   public double eyePitchMm() {
-    double copper = (padMm + Math.max(padMm, trackMm)) / 2 + spaceMm;
+    double copper = (padMm + jointMm()) / 2 + spaceMm;
     return Math.max(copper, holeMm + holeGapMm);
   }
 
   /** Distance a pad's centre must keep from a track's centre line. */
   public double padClearanceMm() {
     return trackMm / 2 + spaceMm + padMm / 2;
+  }
+
+  /**
+   * Distance an eye via's centre must keep from a track's centre line: the track that ends there
+   * may be wider than the pad.
+   */
+  double eyeClearanceMm() {
+    return trackMm / 2 + spaceMm + jointMm() / 2;
   }
 
   /** The tightest fillet: the gap inside it ends as a half disc just as wide as the space. */

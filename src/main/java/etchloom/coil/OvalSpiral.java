@@ -184,9 +184,11 @@ final class OvalSpiral {
   private boolean clearOfEyes(List<Segment> all) {
     for (int j = 0; j < size.eyes(); j++) {
       Point at = new Point(eyeMm(size, turns, j), 0);
-      int until = at.equals(end) ? exitFrom : all.size();
+      boolean own = at.equals(end);
+      int until = own ? exitFrom : all.size();
+      double least = own ? size.eyeClearanceMm() : size.padClearanceMm();
       for (int k = 0; k < until; k++) {
-        if (!clear(all.get(k), new Line(at, at), size.padClearanceMm())) {
+        if (!clear(all.get(k), new Line(at, at), least)) {
           return false;
         }
       }

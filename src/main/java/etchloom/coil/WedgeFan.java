@@ -70,7 +70,7 @@ final class WedgeFan {
     double a = size.halfSpanRad();
     double p = size.pitchMm();
     double r = turns.fillet(n - 1);
-    double channel = Math.max((size.padMm() + size.spaceMm()) / 2, r - p / 2);
+    double channel = Math.max((size.jointMm() + size.spaceMm()) / 2, r - p / 2);
     double start = (channel + n * p * Math.cos(a)) / Math.sin(a);
     // Not before the last turn has left its inner fillet.
     start = Math.max(start, turns.innerTangent(n - 1) + size.trackMm());

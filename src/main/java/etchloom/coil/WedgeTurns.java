@@ -86,7 +86,7 @@ final class WedgeTurns {
 
   /** The last turn must leave room for its eye vias, and for the way in to the innermost one. */
   private boolean eyeFits(int last, double r) {
-    double clear = size.padClearanceMm();
+    double clear = size.eyeClearanceMm();
     double m = Math.max(r, clear);
     double least = (side(last) + m) / sinHalf - m + clear;
     if (hasInnerArc(last, r)) {
@@ -139,7 +139,7 @@ final class WedgeTurns {
   }
 
   private double eyeRadius(int last, int j) {
-    return outerArc(last) - size.padClearanceMm() - j * size.eyePitchMm();
+    return outerArc(last) - size.eyeClearanceMm() - j * size.eyePitchMm();
   }
 
   /** Fillet with which the last right side turns in to its eye via. */

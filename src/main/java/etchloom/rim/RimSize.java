@@ -9,6 +9,7 @@ import java.util.Optional;
  * @param coils on the board
  * @param nodes of one coil
  * @param nodeRadiusMm of all nodes
+ * @param nodeMm widest round copper at a node: its pad, or the end of a coil's track
  * @param firstNodeRad angle of a coil's first node from its axis; the last lies opposite
  * @param viaCount vias side by side at every joint
  * @param viaPitchMm distance between them
@@ -20,6 +21,7 @@ public record RimSize(
     int nodes,
     int layers,
     double nodeRadiusMm,
+    double nodeMm,
     double firstNodeRad,
     double trackMm,
     double spaceMm,
@@ -54,7 +56,7 @@ public record RimSize(
   }
 
   double firstRingMm() {
-    return aboutRow(nodeRadiusMm + padMm / 2 + spaceMm + wideMm() / 2);
+    return aboutRow(nodeRadiusMm + nodeMm / 2 + spaceMm + wideMm() / 2);
   }
 
   /** Radius of a ring, from 0 innermost. */
