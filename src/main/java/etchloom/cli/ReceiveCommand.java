@@ -31,7 +31,11 @@ import picocli.CommandLine.Parameters;
       "",
       "READINGS begins with the row board,from,to,ohm,celsius; then comes a row for",
       "each measurement. OL stands where nothing connects; the board name lead gives",
-      "the leads' own resistance."
+      "the leads' own resistance.",
+      "",
+      "A pair outside what the fab's tolerances allow rejects its board, and so do",
+      "pairs more unlike than those of good boards: fewer than one good board in a",
+      "thousand is rejected for that."
     })
 final class ReceiveCommand implements Callable<Integer> {
   private final Console console;

@@ -55,8 +55,9 @@ enum Basis {
           + " left out, some thousandths of a square each"),
   LOSS(
       "Losses",
-      "I2R hot, eddy loss of a strip; copper only: no iron, bearings, drive",
-      "I2R at the copper's temperature; eddy loss of a strip in an alternating field,"
+      "I2R hot, with the PWM's ripple; eddy loss of a strip; no iron, bearings, drive",
+      "I2R of the current asked at the copper's temperature; PWM ripple at the modulation that"
+          + " speed and current need, at its worst where they are not known; eddy loss of a strip in an alternating field,"
           + " (pi f B w)2/(6 rho) for each volume, summed over the copper and the field's harmonics",
       "texts on eddy currents in thin strips",
       "no loss in iron, magnets, bearings, air or drive"),
@@ -69,8 +70,8 @@ enum Basis {
   DRIVE(
       "Drive values",
       "equivalent star, pole cancelled, centred PWM; ideal switches",
-      "star equivalent between terminals; gains by cancelling the winding's pole; ripple as worst"
-          + " case of centred modulation",
+      "star equivalent between terminals; gains by cancelling the winding's pole; ripple in a"
+          + " line as worst case of centred modulation, R and L in steady state, copper hot",
       "texts on field-oriented control",
       "ideal switches and sensors; tune on the machine before trusting them"),
   GENERATOR(

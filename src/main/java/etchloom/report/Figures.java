@@ -110,8 +110,14 @@ final class Figures {
     Group t = Group.TORQUE;
     Basis b = Basis.EMF;
     add(e, b, "emf.fluxLinkageWeber", "flux linkage of a phase, peak", Form.WEBER, FIELD);
-    add(e, b, "emf.phasePeakVoltSecondPerRadian", "of a phase, peak", Form.EMF, FIELD);
-    add(e, b, "emf.terminalPeakVoltSecondPerRadian", "between terminals, peak", Form.EMF, FIELD);
+    add(e, b, "emf.phasePeakVoltSecondPerRadian", "of a phase, fundamental, peak", Form.EMF, FIELD);
+    add(
+        e,
+        b,
+        "emf.terminalPeakVoltSecondPerRadian",
+        "between terminals, fundamental, peak",
+        Form.EMF,
+        FIELD);
     add(e, b, "emf.rpmPerVolt", "speed for each volt, line peak", Form.RPM_PER_VOLT, FIELD);
     add(
         e,
@@ -123,8 +129,8 @@ final class Figures {
         Figures::delta);
     b = Basis.TORQUE;
     Form k = Form.TORQUE_PER_AMPERE;
-    add(t, b, "torque.newtonMetrePerAmperePeak", "for each ampere peak", k, FIELD);
-    add(t, b, "torque.newtonMetrePerAmpereRms", "for each ampere rms", k, FIELD);
+    add(t, b, "torque.newtonMetrePerAmperePeak", "for each ampere peak of a winding", k, FIELD);
+    add(t, b, "torque.newtonMetrePerAmpereRms", "for each ampere rms of a winding", k, FIELD);
     add(t, b, "torque.motorConstant", "motor constant", Form.MOTOR_CONSTANT, FIELD);
   }
 
@@ -211,7 +217,7 @@ final class Figures {
         g,
         b,
         "drive.rippleAmperePeakToPeak",
-        "PWM ripple, peak to peak",
+        "PWM ripple of a line, peak to peak",
         Form.AMPERE,
         pwm,
         Figures::drives);

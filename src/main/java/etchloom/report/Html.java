@@ -43,7 +43,19 @@ public final class Html {
 
   /** A table whose first column heads its rows; columns from the second on hold numbers. */
   public Html table(String caption, List<String> head, List<List<String>> rows, int numbers) {
-    open("div", "class=\"scroll\"").open("table").element("caption", caption);
+    return table("", caption, head, rows, numbers);
+  }
+
+  /** The same for a page without a script: keys reach the table always, so that they scroll it. */
+  public Html reachableTable(
+      String caption, List<String> head, List<List<String>> rows, int numbers) {
+    String label = " tabindex=\"0\" role=\"region\" aria-label=\"" + escaped(caption) + "\"";
+    return table(label, caption, head, rows, numbers);
+  }
+
+  private Html table(
+      String reach, String caption, List<String> head, List<List<String>> rows, int numbers) {
+    raw("<div class=\"scroll\"" + reach + ">").open("table").element("caption", caption);
     open("thead").open("tr");
     for (int c = 0; c < head.size(); c++) {
       element("th", head.get(c), cell(c, numbers, "scope=\"col\""));

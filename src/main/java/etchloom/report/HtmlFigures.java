@@ -15,10 +15,10 @@ final class HtmlFigures {
       Map.of(
           "resistance.minTerminalOhm", "resistance between terminals, least of a good board",
           "resistance.maxTerminalOhm", "resistance between terminals, greatest of a good board",
-          "torque.newtonMetrePerAmpereRms", "torque for each ampere rms",
+          "torque.newtonMetrePerAmpereRms", "torque for each ampere rms of a winding",
           "emf.rpmPerVolt", "speed for each volt, line peak",
           "drive.speedLimitRpm", "no-load speed at the bus",
-          "drive.rippleAmperePeakToPeak", "PWM ripple, peak to peak",
+          "drive.rippleAmperePeakToPeak", "PWM ripple of a line, peak to peak",
           "thermal.copperC", "copper at the duty",
           "thermal.maxContinuousAmpereRms", "most continuous current, rms",
           "generator.powerWatt", "power into the load");

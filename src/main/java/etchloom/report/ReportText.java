@@ -11,7 +11,7 @@ import java.util.Optional;
  * what is lacking with the key that brings it. It ends as {@link Summary} does.
  */
 public final class ReportText {
-  private static final int LABEL = 32;
+  private static final int LABEL = 42;
 
   private ReportText() {}
 

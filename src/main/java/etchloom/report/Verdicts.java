@@ -35,7 +35,7 @@ final class Verdicts {
     }
   }
 
-  /** Above this share of the phase current's peak, ripple counts as a fault of the drive. */
+  /** Above this share of the line current's peak, ripple counts as a fault of the drive. */
   static final double RIPPLE_AIM = 0.2;
 
   /** A warning and its text, where PWM ripple is above the aim or cannot be told from it. */
@@ -45,15 +45,17 @@ final class Verdicts {
     }
     OptionalDouble current =
         r.spec().duty().map(Spec.Duty::currentAmpereRms).orElse(OptionalDouble.empty());
-    String text = Form.AMPERE.show(ripple) + " peak to peak from the PWM";
+    String text = Form.AMPERE.show(ripple) + " peak to peak in each line from the PWM";
     if (current.isEmpty()) {
       return Optional.of(List.of("PWM RIPPLE", text + "; add duty.current to judge it"));
     }
-    double share = ripple / (Math.sqrt(2) * current.getAsDouble());
+    // Both in a line: a delta's lines carry √3 times the current of its windings.
+    double line = r.spec().winding().connection() == Spec.Connection.DELTA ? Math.sqrt(3) : 1;
+    double share = ripple / (Math.sqrt(2) * line * current.getAsDouble());
     if (share <= RIPPLE_AIM) {
       return Optional.empty();
     }
-    String part = Numbers.fixed(100 * share, 0) + " % of the current's peak, the aim is 20 %";
+    String part = Numbers.fixed(100 * share, 0) + " % of the line current's peak, the aim is 20 %";
     String choke =
         figures.get("drive.seriesInductanceForRippleHenry") instanceof Double l
             ? "; put " + Form.HENRY.show(l) + " in series with each line, or switch faster"

@@ -23,11 +23,18 @@ final class PageWriter extends RowWriter {
 
   private static final List<String> FIRST_Y =
       List.of("torque.motorConstant", "generator.powerWatt", "geometry.turnsPerLayer");
+  private static final String NO_SCRIPT =
+      "The plot and the table need scripts; survey.csv has the same numbers.";
+  private static final String HOW =
+      "Filled in copper: beaten by no other in both figures at once. Rings: rules are broken."
+          + " Choose a point or a row to find it in the other; by keyboard, the arrows go from point"
+          + " to point and Enter chooses. A variant's spec is ready for draw.";
   private static final String FIRST_X = "resistance.coilOhm";
 
   private final List<String> keys;
   private final List<String> columns;
   private final Path variants;
+  private final String script;
   private boolean first = true;
 
   PageWriter(Path dir, Plan plan, Summary summary) throws IOException {
@@ -36,22 +43,20 @@ final class PageWriter extends RowWriter {
     // a figure of the same name as a varied key has the same value
     columns = summary.columns().stream().filter(c -> !keys.contains(c)).toList();
     variants = dir.resolve("variants");
+    script = "\n" + resource("survey.js");
     Html h = new Html();
-    HtmlHead.write(h, "Survey of " + plan.title(), true);
-    h.open("style").raw(resource("survey.css")).close("style");
+    HtmlHead.write(h, "Survey of " + plan.title(), resource("survey.css"), script);
     h.open("body").open("header").element("h1", "Survey of " + plan.title());
     h.element("p", words(plan, summary), "class=\"quiet\"").close("header").open("main");
     controls(h);
-    h.raw("<svg id=\"plot\" viewBox=\"0 0 900 460\" role=\"img\" aria-label=\"scatter of the two");
-    h.raw(" figures chosen above; the same numbers stand in the table below\"></svg>\n");
-    h.element("p", "", "id=\"count\"", "role=\"status\"");
-    h.element(
-        "p",
-        "Filled in copper: beaten by no other in both figures at once. Rings: rules are broken."
-            + " Click a point or a row to find it in the other; a variant's number leads to its"
-            + " spec, ready for draw.",
-        "class=\"quiet\"");
-    h.raw("<div id=\"table\"><table id=\"rows\"><caption>Variants</caption>");
+    h.open("noscript").element("p", NO_SCRIPT).close("noscript");
+    h.raw("<svg id=\"plot\" viewBox=\"0 0 900 460\" role=\"group\" aria-label=\"scatter of the");
+    h.raw(" two figures chosen above; the same numbers stand in the table below\"></svg>\n");
+    h.element("p", "", "id=\"said\"", "role=\"status\"");
+    h.element("p", "", "id=\"count\"", "class=\"quiet\"");
+    h.element("p", HOW, "class=\"quiet\"");
+    h.raw("<div id=\"table\" tabindex=\"0\" role=\"region\" aria-label=\"Table of variants\">");
+    h.raw("<table id=\"rows\"><caption>Variants</caption>");
     h.raw("<thead id=\"head\"></thead><tbody id=\"body\"></tbody></table></div>\n");
     h.element("p", "", "id=\"more\"", "class=\"quiet\"").close("main");
     h.raw("<script type=\"application/json\" id=\"data\">");
@@ -79,7 +84,7 @@ final class PageWriter extends RowWriter {
     for (String axis : List.of("x", "y")) {
       String name = axis.equals("x") ? "Across" : "Up";
       h.open("label").text(name).raw("<select id=\"" + axis + "\"></select>").close("label");
-      h.open("label").text("best where").raw("<select id=\"" + axis + "way\">");
+      h.open("label").text(name + " is best where").raw("<select id=\"" + axis + "way\">");
       h.raw("<option value=\"high\">large</option><option value=\"low\">small</option></select>");
       h.close("label");
     }
@@ -140,7 +145,7 @@ final class PageWriter extends RowWriter {
 
   @Override
   void end() throws IOException {
-    put("\n]}</script>\n<script>\n").put(resource("survey.js")).put("</script>\n</body></html>\n");
+    put("\n]}</script>\n<script>").put(script).put("</script>\n</body></html>\n");
   }
 
   private static String resource(String name) throws IOException {

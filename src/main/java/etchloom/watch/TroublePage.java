@@ -13,7 +13,7 @@ final class TroublePage {
    */
   static String of(String trouble, String link) {
     Html h = new Html();
-    HtmlHead.write(h, "Not drawn", false);
+    HtmlHead.write(h, "Not drawn");
     h.open("body").open("main").element("h1", "Not drawn");
     h.open("pre", "class=\"trouble\"", "tabindex=\"0\"");
     trouble

@@ -53,7 +53,7 @@ class ReportTextTest {
         Verdicts.ripple(SMALL, Map.of(key, 5 * aim, "drive.seriesInductanceForRippleHenry", 120e-6))
             .orElseThrow();
     assertEquals("PWM RIPPLE TOO GREAT", words.get(0));
-    assertTrue(words.get(1).contains("100 % of the current's peak"), words.get(1));
+    assertTrue(words.get(1).contains("100 % of the line current's peak"), words.get(1));
     assertTrue(words.get(1).contains("120.0 uH in series"), words.get(1));
     assertEquals("PWM RIPPLE", Verdicts.ripple(BARE, Map.of(key, 1.0)).orElseThrow().get(0));
   }

@@ -9,9 +9,9 @@ import java.util.OptionalDouble;
  *
  * @param lineOhm of a phase of that star
  * @param lineHenry likewise, synchronous
- * @param rippleAmperePeakToPeak in a terminal, at its worst over the modulation
- * @param seriesInductanceForRippleHenry in series with each terminal, for a ripple of 20 % of the
- *     duty current's peak; 0 where it is that small already
+ * @param rippleAmperePeakToPeak in a line, at its worst over the modulation, copper hot
+ * @param seriesInductanceForRippleHenry in series with each line, for such a ripple of 20 % of the
+ *     peak of the duty's current in a line; 0 where it is that small already
  * @param proportionalGain V/A
  * @param integralGain V/(A·s)
  * @param speedLimitRpm without load, the whole bus for the back-EMF

@@ -4,7 +4,6 @@ import etchloom.electric.machine.Ledger.Given;
 import etchloom.electric.machine.circuit.Circuit;
 import etchloom.electric.machine.drive.CurrentLoop;
 import etchloom.electric.machine.drive.Generator;
-import etchloom.electric.machine.drive.Ripple;
 import etchloom.electric.machine.drive.TorqueSpeed;
 import etchloom.spec.Spec;
 import etchloom.units.Numbers;
@@ -29,16 +28,6 @@ final class DriveStage {
     this.heat = heat;
   }
 
-  /** The PWM ripple in a terminal, where bus and switching frequency are known. */
-  static OptionalDouble ripple(Setting s) {
-    Spec.Duty d = s.duty();
-    return d.busVolt().isPresent() && d.switchingHertz().isPresent()
-        ? OptionalDouble.of(
-            Ripple.amperePeakToPeak(
-                s.circuit(), d.busVolt().getAsDouble(), d.switchingHertz().getAsDouble()))
-        : OptionalDouble.empty();
-  }
-
   DriveFigures figures() {
     Circuit c = s.circuit();
     Spec.Duty d = s.duty();
@@ -57,7 +46,7 @@ final class DriveStage {
         c.lineHenry(),
         hertz,
         c.windingHenry() / c.windingOhm20(),
-        ripple(s),
+        of(s.ripple().map(r -> r.amperePeakToPeak(heat.thermal().hotC()))),
         series(),
         of(loop.map(CurrentLoop::proportionalGain)),
         of(loop.map(CurrentLoop::integralGain)),
@@ -69,15 +58,14 @@ final class DriveStage {
   }
 
   private OptionalDouble series() {
-    Spec.Duty d = s.duty();
     return s.ledger()
             .has("drive.seriesInductanceForRippleHenry", s.bus(), s.switching(), s.current())
         ? OptionalDouble.of(
-            Ripple.seriesHenry(
-                s.circuit(),
-                d.busVolt().getAsDouble(),
-                d.switchingHertz().getAsDouble(),
-                s.circuit().lineAmpere(d.currentAmpereRms().getAsDouble())))
+            s.ripple()
+                .orElseThrow()
+                .seriesHenry(
+                    s.circuit().lineAmpere(s.duty().currentAmpereRms().getAsDouble()),
+                    heat.thermal().hotC()))
         : OptionalDouble.empty();
   }
 
@@ -135,6 +123,31 @@ final class DriveStage {
             ampere.getAsDouble(),
             s.duty().busVolt().orElse(Double.POSITIVE_INFINITY),
             heat.drag()));
+  }
+
+  /**
+   * What current of one winding the bus drives, A rms, copper hot: at the duty's speed against the
+   * magnets, or, where one of them is not known, at most, at standstill.
+   */
+  OptionalDouble drivenAmpere() {
+    OptionalDouble bus = s.duty().busVolt();
+    if (bus.isEmpty()) {
+      return OptionalDouble.empty();
+    }
+    double peak =
+        new TorqueSpeed(
+                s.circuit(),
+                linked.map(Linked::fluxWeber).orElse(0.0),
+                heat.thermal().hotC(),
+                Double.POSITIVE_INFINITY,
+                bus.getAsDouble(),
+                w -> 0)
+            .amperePeakByVoltage(drivenSpeedKnown() ? s.radPerSecond() : 0);
+    return OptionalDouble.of(peak / (Math.sqrt(2) * s.circuit().lineAmpere(1)));
+  }
+
+  boolean drivenSpeedKnown() {
+    return linked.isPresent() && s.duty().speedRadPerSecond().isPresent();
   }
 
   Optional<GeneratorFigures> generator() {

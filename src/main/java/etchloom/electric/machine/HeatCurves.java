@@ -13,6 +13,9 @@ import java.util.function.DoubleFunction;
 final class HeatCurves {
   private static final int LEAST_STEPS = 20;
 
+  /** Of the range in which a current is sought: to a double's own precision. */
+  private static final int HALVINGS = 55;
+
   /** The chart of temperatures goes so far beyond the current of the duty or the limit. */
   private static final double BEYOND = 1.25;
 
@@ -22,16 +25,26 @@ final class HeatCurves {
   private HeatCurves() {}
 
   /**
-   * The current of one winding that brings the copper to a temperature, A rms, all other losses as
-   * they are; empty where those alone bring it there.
+   * The current of one winding that brings the copper to a temperature, A rms, with the ripple it
+   * comes with and all other losses as they are; empty where those alone bring it there.
    */
   static OptionalDouble reaching(HeatBalance board, Losses losses, double tempC) {
-    double left = board.leavingWatt(tempC) - losses.otherWatt(tempC);
-    if (!(left > 0)) {
+    double leaving = board.leavingWatt(tempC);
+    if (!(leaving > losses.totalWatt(0, tempC))) {
       return OptionalDouble.empty();
     }
     Circuit c = losses.circuit();
-    return OptionalDouble.of(Math.sqrt(left / (c.phases() * c.windingOhm(tempC))));
+    double low = 0;
+    double high = Math.sqrt(leaving / (c.phases() * c.windingOhm(tempC)));
+    for (int i = 0; i < HALVINGS; i++) {
+      double mid = (low + high) / 2;
+      if (losses.totalWatt(mid, tempC) < leaving) {
+        low = mid;
+      } else {
+        high = mid;
+      }
+    }
+    return OptionalDouble.of(low);
   }
 
   /**
@@ -42,11 +55,8 @@ final class HeatCurves {
   static List<ThermalFigures.AtCurrent> byCurrent(
       HeatBalance board, Losses losses, double ampereRms) {
     List<ThermalFigures.AtCurrent> out = new ArrayList<>();
-    Circuit c = losses.circuit();
     for (double i : steps(BEYOND * ampereRms)) {
-      out.add(
-          new ThermalFigures.AtCurrent(
-              i, board.solve(t -> c.phases() * i * i * c.windingOhm(t) + losses.otherWatt(t))));
+      out.add(new ThermalFigures.AtCurrent(i, board.solve(t -> losses.totalWatt(i, t))));
     }
     return out;
   }

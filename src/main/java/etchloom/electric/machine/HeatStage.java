@@ -14,6 +14,7 @@ import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
 import java.util.OptionalDouble;
+import java.util.function.DoubleBinaryOperator;
 import java.util.function.DoubleUnaryOperator;
 import java.util.function.IntToDoubleFunction;
 
@@ -23,27 +24,31 @@ final class HeatStage {
   private static final double FAINT = 1e-4;
 
   /** A laminate held for long should stay so far below its glass transition (common practice). */
-  private static final double BELOW_GLASS_K = 20;
+  private static final double BELOW_GLASS_K = 25;
 
   private static final OptionalDouble NONE = OptionalDouble.empty();
 
   private final Setting s;
   private final Optional<Linked> linked;
   private final Losses losses;
-  private final double rippleSquare;
+  private final Optional<Ripple> ripple;
   private final boolean currentKnown;
-  private final boolean rippleKnown;
   private final ThermalFigures thermal;
 
   HeatStage(Setting s, Optional<Linked> linked) {
     this.s = s;
     this.linked = linked;
-    OptionalDouble ripple = DriveStage.ripple(s);
-    rippleKnown = ripple.isPresent();
-    rippleSquare = rippleKnown ? Ripple.meanSquare(ripple.getAsDouble()) : 0;
+    ripple = s.ripple();
     boolean turning = s.duty().speedRadPerSecond().isPresent();
     currentKnown = current(turning, s.radPerSecond()).isPresent();
     losses = losses(turning, s.radPerSecond());
+    if (ripple.isPresent() && !s.duty().generator() && !modulationKnown(turning)) {
+      s.ledger()
+          .caution(
+              "ripple-loss-at-worst",
+              "the modulation is not known without magnets, duty.speed and duty.current: the"
+                  + " ripple's loss is stated as if the ripple were at its worst all the time");
+    }
     thermal = balance();
   }
 
@@ -51,11 +56,28 @@ final class HeatStage {
     return new Losses(
         s.circuit(),
         current(turning, radPerSecond).orElse(t -> 0),
-        rippleSquare,
+        rippleSquare(turning, radPerSecond),
         turning ? linked.map(Linked::eddy) : Optional.empty(),
         turning ? linked.flatMap(Linked::circulating) : Optional.empty(),
         turning ? linked.map(Linked::layersWatt).orElse(OptionalDouble.empty()) : NONE,
         radPerSecond);
+  }
+
+  private boolean modulationKnown(boolean turning) {
+    return turning && currentKnown && linked.isPresent() && !s.duty().generator();
+  }
+
+  /** What ripple adds to the line current's square, by a winding's current and the temperature. */
+  private DoubleBinaryOperator rippleSquare(boolean turning, double radPerSecond) {
+    if (ripple.isEmpty()) {
+      return (i, t) -> 0;
+    }
+    Ripple r = ripple.get();
+    if (!modulationKnown(turning)) {
+      return (i, t) -> r.worstMeanSquare(t);
+    }
+    double flux = linked.get().fluxWeber();
+    return (i, t) -> r.meanSquare(r.depth(flux, radPerSecond, i, t), t);
   }
 
   /** A winding's current by the copper's temperature. */
@@ -117,7 +139,7 @@ final class HeatStage {
         .caution(
             "no-current-left",
             "eddy, ripple and circulating losses alone take "
-                + Numbers.engineering(losses.otherWatt(limit), "W", 3)
+                + Numbers.engineering(losses.totalWatt(0, limit), "W", 3)
                 + ", more than the surface carries off at the copper's limit");
     s.ledger().absent("thermal.maxContinuousAmpereRms", "duty.cooling");
     return OptionalDouble.empty();
@@ -144,7 +166,7 @@ final class HeatStage {
                   + Numbers.fixed(c, 0)
                   + " C; a laminate of Tg "
                   + Numbers.fixed(glass, 0)
-                  + " C is best kept 20 K below it");
+                  + " C is best kept 25 K below it");
     }
   }
 
@@ -157,14 +179,14 @@ final class HeatStage {
     if (!currentKnown) {
       s.ledger().has("loss.copperWatt", s.current());
     }
-    if (!rippleKnown) {
+    if (ripple.isEmpty()) {
       s.ledger().has("loss.rippleWatt", s.bus(), s.switching());
     }
     return new LossFigures(
         t,
         when(currentKnown, losses.copperWatt(t)),
         when(eddy, losses.eddyWatt(t)),
-        when(rippleKnown, losses.rippleWatt(t)),
+        when(ripple.isPresent(), losses.rippleWatt(t)),
         when(
             losses.circulating().isPresent() || losses.layersWatt().isPresent(),
             losses.circulatingWatt(t)),
@@ -178,7 +200,7 @@ final class HeatStage {
   private HeatCurves.Known known() {
     return new HeatCurves.Known(
         current(true, 0).isPresent(),
-        rippleKnown,
+        ripple.isPresent(),
         linked.flatMap(Linked::circulating).isPresent()
             || linked.map(Linked::layersWatt).orElse(NONE).isPresent());
   }

@@ -9,7 +9,8 @@ import java.util.OptionalDouble;
  * @param atC the copper's temperature they hold for, °C
  * @param copperWatt I²R without ripple
  * @param eddyWatt in all copper
- * @param rippleWatt I²R of the PWM ripple at its worst
+ * @param rippleWatt I²R of the PWM ripple at the modulation the duty needs; at its worst where that
+ *     is not known
  * @param circulatingWatt round a delta
  * @param eddyByOrder the field's odd orders that matter
  * @param eddyByLayer L1 first

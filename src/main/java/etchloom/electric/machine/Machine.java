@@ -50,7 +50,7 @@ public final class Machine {
         linked.map(l -> HeightSensitivity.perMm(artwork, spec.rotor(), l.coupling()));
     SpreadFigures spread = Spread.of(artwork, fab.tolerance(), byHeight);
     List<Need> verdict =
-        new VerdictStage(s, driveFigures, heat.thermal(), drive.line(), generator).needs();
+        new VerdictStage(s, driveFigures, heat.thermal(), drive, generator).needs();
     RotorFigures rotor = RotorStage.figures(s, magnets);
     cautions(s, linked, spread);
     return new MachineFigures(

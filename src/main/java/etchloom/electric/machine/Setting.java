@@ -8,6 +8,7 @@ import etchloom.electric.resistance.ResistanceFigures;
 import etchloom.spec.FabRules;
 import etchloom.spec.Spec;
 import etchloom.winding.Winding;
+import java.util.Optional;
 import java.util.OptionalDouble;
 
 /** All that the stages work on. */
@@ -59,6 +60,14 @@ record Setting(
             inductance.phaseSelfHenry() + mutuals);
     Spec.Duty duty = spec.duty().orElse(NO_DUTY);
     return new Setting(artwork, spec, fab, winding, circuit, duty, new Ledger());
+  }
+
+  /** The drive's ripple, where bus and switching frequency are known. */
+  Optional<Ripple> ripple() {
+    return duty.busVolt().isPresent() && duty.switchingHertz().isPresent()
+        ? Optional.of(
+            new Ripple(circuit, duty.busVolt().getAsDouble(), duty.switchingHertz().getAsDouble()))
+        : Optional.empty();
   }
 
   Given speed() {

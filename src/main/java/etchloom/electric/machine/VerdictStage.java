@@ -3,6 +3,7 @@ package etchloom.electric.machine;
 import etchloom.electric.machine.Ledger.Given;
 import etchloom.electric.machine.drive.TorqueSpeed;
 import etchloom.spec.Spec;
+import etchloom.units.Numbers;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
@@ -15,6 +16,7 @@ final class VerdictStage {
   private final Setting s;
   private final DriveFigures drive;
   private final ThermalFigures thermal;
+  private final DriveStage stage;
   private final Optional<TorqueSpeed> line;
   private final Optional<GeneratorFigures> generator;
   private final List<Need> needs = new ArrayList<>();
@@ -23,12 +25,13 @@ final class VerdictStage {
       Setting s,
       DriveFigures drive,
       ThermalFigures thermal,
-      Optional<TorqueSpeed> line,
+      DriveStage stage,
       Optional<GeneratorFigures> generator) {
     this.s = s;
     this.drive = drive;
     this.thermal = thermal;
-    this.line = line;
+    this.stage = stage;
+    this.line = stage.line();
     this.generator = generator;
   }
 
@@ -38,6 +41,7 @@ final class VerdictStage {
     } else {
       torque();
       speed();
+      current();
     }
     copper();
     magnet();
@@ -78,6 +82,35 @@ final class VerdictStage {
       }
     }
     least("speed", "rpm", RPM * s.radPerSecond(), RPM * top, by);
+  }
+
+  /**
+   * Whether the bus drives the duty's current at the duty's speed. Without that speed or magnets
+   * only a current that it could not even drive at standstill is a fault.
+   */
+  private void current() {
+    OptionalDouble current = s.duty().currentAmpereRms();
+    OptionalDouble most = stage.drivenAmpere();
+    if (current.isEmpty() || most.isEmpty()) {
+      return;
+    }
+    double asked = current.getAsDouble();
+    double got = most.getAsDouble();
+    if (stage.drivenSpeedKnown() || got < asked) {
+      least("current", "A", asked, got, "voltage");
+    }
+    if (got < asked) {
+      s.ledger()
+          .caution(
+              "current-above-bus",
+              "the bus drives no more than "
+                  + Numbers.engineering(got, "A", 3)
+                  + " rms through a winding"
+                  + (stage.drivenSpeedKnown() ? " at the duty's speed" : " even at standstill")
+                  + ", copper hot: copper loss and temperature are stated for the "
+                  + Numbers.engineering(asked, "A", 3)
+                  + " asked");
+    }
   }
 
   /** The torque only falls with the speed. */

@@ -144,11 +144,14 @@ class MachineTest {
   /** The chart of temperatures is the balance again: what leaves is what the current makes. */
   @Test
   void temperaturesByCurrent_holdTheBalance() {
-    ThermalFigures t = inStar.thermal();
-    LossFigures loss = inStar.loss();
+    // Without PWM, whose ripple has a test of its own.
+    MachineFigures calm =
+        TestMachine.of("filter-wheel", plus(FEW, "  switching: ", "  # ")).figures();
+    ThermalFigures t = calm.thermal();
+    LossFigures loss = calm.loss();
     double hot = 1 + 0.00393 * (loss.atC() - 20); // IEC 60028
     double cold = loss.copperWatt().getAsDouble() / (0.25 * 0.25) / hot;
-    double ripple = loss.rippleWatt().orElse(0) / hot;
+    assertTrue(loss.rippleWatt().isEmpty());
     double eddy = loss.eddyWatt().getAsDouble() * hot;
     assertTrue(t.byCurrent().size() > 15, "points");
     assertEquals(0, t.byCurrent().get(0).ampereRms());
@@ -156,7 +159,7 @@ class MachineTest {
       double c = a.copperC().getAsDouble();
       double k = 1 + 0.00393 * (c - 20);
       double i = a.ampereRms();
-      double made = (cold * i * i + ripple) * k + eddy / k;
+      double made = cold * i * i * k + eddy / k;
       near(12 * t.surfaceM2() * (c - 20), made, 1e-3);
     }
     double last = t.byCurrent().get(t.byCurrent().size() - 1).ampereRms();
@@ -184,15 +187,65 @@ class MachineTest {
     assertEquals(0, first.rpm());
     assertEquals(0, first.eddyWatt());
     double rpm = 200; // duty.speed of the template
+    // Three phases of a wave that is at its peaks all the time.
+    double half = inStar.drive().rippleAmperePeakToPeak().getAsDouble() / 2;
+    double worst = 3 * half * half * inStar.drive().lineOhm() * (1 + 0.00393 * (f.atC() - 20));
     double perSquare = f.eddyWatt().getAsDouble() / (rpm * rpm);
     for (LossFigures.AtSpeed a : f.bySpeed()) {
       assertEquals(perSquare * a.rpm() * a.rpm(), a.eddyWatt(), 1e-9 * (1 + a.eddyWatt()));
       near(f.copperWatt().getAsDouble(), a.copperWatt().getAsDouble(), 1e-12);
-      near(f.rippleWatt().getAsDouble(), a.rippleWatt().getAsDouble(), 1e-12);
+      double ripple = a.rippleWatt().getAsDouble();
+      // Far below the bus's limit the ripple's loss grows with the speed.
+      double own = f.rippleWatt().getAsDouble();
+      assertTrue(a.rpm() > rpm || ripple <= own, a.rpm() + " rpm");
+      assertTrue(a.rpm() < rpm || a.rpm() > 2 * rpm || ripple >= own, a.rpm() + " rpm");
+      assertTrue(ripple > 0 && ripple <= worst, ripple + " W of at most " + worst + " W");
       assertTrue(a.circulatingWatt().isEmpty());
       double sum = a.copperWatt().getAsDouble() + a.eddyWatt() + a.rippleWatt().getAsDouble();
       near(sum, a.totalWatt(), 1e-12);
     }
+  }
+
+  /**
+   * The ripple never drives more than the bus can, and its loss follows the modulation: with hardly
+   * any speed and current it is small, and where those are not known it is at its worst, and said.
+   */
+  @Test
+  void rippleLoss_followsTheModulation() {
+    double own = inStar.loss().rippleWatt().getAsDouble();
+    String[] idle = plus(FEW, "speed: 200 rpm", "speed: 1 rpm", "current: 0.25 A", "current: 1 mA");
+    MachineFigures still = TestMachine.of("filter-wheel", idle).figures();
+    assertTrue(still.loss().rippleWatt().getAsDouble() < 0.1 * own);
+    assertFalse(codes(still).contains("ripple-loss-at-worst"));
+    MachineFigures open = TestMachine.of("filter-wheel", plus(FEW, "  speed: ", "  # ")).figures();
+    assertTrue(codes(open).contains("ripple-loss-at-worst"));
+    assertTrue(open.loss().rippleWatt().getAsDouble() > own);
+    double line = open.drive().lineOhm() * (1 + 0.00393 * (open.thermal().hotC() - 20));
+    double ripple = open.drive().rippleAmperePeakToPeak().getAsDouble();
+    assertTrue(ripple < 2 / 3.0 * 24 / line, "duty.bus of the spec over R");
+  }
+
+  /** Against the magnets the bus drives what Ohm's law leaves, and no more than at standstill. */
+  @Test
+  void verdict_currentTheBusCannotDrive() {
+    Need met = need(inStar, "current");
+    assertTrue(met.met() && met.got().getAsDouble() > 0.25);
+    MachineFigures f =
+        TestMachine.of("filter-wheel", plus(FEW, "current: 0.25 A", "current: 9 A")).figures();
+    Need current = need(f, "current");
+    assertFalse(current.met());
+    assertEquals("voltage", current.limitedBy());
+    assertTrue(codes(f).contains("current-above-bus"));
+    double ohm = f.drive().lineOhm() * (1 + 0.00393 * (f.thermal().hotC() - 20));
+    double still = 24 / Math.sqrt(3) / ohm / Math.sqrt(2);
+    double e = f.emf().orElseThrow().phasePeakVoltSecondPerRadian() * 200 * Math.PI / 30;
+    double x = 6 * 200 * Math.PI / 30 * 1.26e-3;
+    double i = Math.sqrt(2) * current.got().getAsDouble();
+    near(24 / Math.sqrt(3), Math.hypot(ohm * i + e, x * i), 1e-9);
+    String[] bare = plus(FEW, "current: 0.25 A", "current: 9 A", "  air-gap: 0.8 mm ", "  # ");
+    Need atStandstill = need(TestMachine.of("filter-wheel", bare).figures(), "current");
+    assertFalse(atStandstill.met());
+    near(still, atStandstill.got().getAsDouble(), 1e-9);
   }
 
   /** Ten times the current has no balance: said by name, and never a number. */

@@ -78,7 +78,7 @@ public record TorqueSpeed(
   }
 
   /** The largest peak in the line that the voltage allows; nought above the no-load speed. */
-  private double amperePeakByVoltage(double radPerSecond) {
+  public double amperePeakByVoltage(double radPerSecond) {
     if (busVolt == Double.POSITIVE_INFINITY) {
       return busVolt;
     }

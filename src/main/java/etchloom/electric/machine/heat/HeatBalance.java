@@ -9,9 +9,11 @@ import java.util.function.DoubleUnaryOperator;
 /**
  * The board at one temperature, its loss leaving through both faces: {@code P(T) = h A (T − Ta)}.
  *
- * <p>The loss grows with the copper's resistance, so there may be no answer. No part of it grows
- * faster than copper's own law, and where loss and cooling meet the cooling is then always the
- * steeper: there is one meeting point at most and it is stable.
+ * <p>The loss grows with the copper's resistance, so there may be no answer. But for the ripple's
+ * small share, which follows the modulation, no part of it grows faster than copper's own law, and
+ * where loss and cooling meet the cooling is then always the steeper: there is one meeting point at
+ * most. The one found is stable in any case: below it the loss is the greater, above it the
+ * cooling.
  *
  * @param areaM2 both faces from the bore to the outermost ring
  * @param wattPerSquareMetreKelvin mean surface coefficient

@@ -4,6 +4,7 @@ import etchloom.electric.machine.circuit.Circuit;
 import etchloom.electric.resistance.Copper;
 import java.util.Optional;
 import java.util.OptionalDouble;
+import java.util.function.DoubleBinaryOperator;
 import java.util.function.DoubleUnaryOperator;
 
 /**
@@ -11,14 +12,15 @@ import java.util.function.DoubleUnaryOperator;
  *
  * @param windingAmpereRms current of one winding at a temperature, without ripple; a generator's
  *     falls as its copper warms
- * @param rippleSquare what ripple adds to the square of the current's rms in a terminal, A²
+ * @param rippleSquare what ripple adds to the square of a line current's rms, A², by the winding's
+ *     current and the copper's temperature
  * @param layersWatt at 20 °C for each (rad/s)², of currents among layers side by side
  * @param radPerSecond of the shaft
  */
 public record Losses(
     Circuit circuit,
     DoubleUnaryOperator windingAmpereRms,
-    double rippleSquare,
+    DoubleBinaryOperator rippleSquare,
     Optional<EddyLoss> eddy,
     Optional<CirculatingCurrent> circulating,
     OptionalDouble layersWatt,
@@ -26,12 +28,20 @@ public record Losses(
 
   /** I²R of the wanted current, W. */
   public double copperWatt(double tempC) {
-    double i = windingAmpereRms.applyAsDouble(tempC);
-    return circuit.phases() * i * i * circuit.windingOhm(tempC);
+    return copperWatt(windingAmpereRms.applyAsDouble(tempC), tempC);
+  }
+
+  private double copperWatt(double ampereRms, double tempC) {
+    return circuit.phases() * ampereRms * ampereRms * circuit.windingOhm(tempC);
   }
 
   public double rippleWatt(double tempC) {
-    return circuit.phases() * rippleSquare * circuit.lineOhm(tempC);
+    return rippleWatt(windingAmpereRms.applyAsDouble(tempC), tempC);
+  }
+
+  private double rippleWatt(double ampereRms, double tempC) {
+    double square = rippleSquare.applyAsDouble(ampereRms, tempC);
+    return circuit.phases() * square * circuit.lineOhm(tempC);
   }
 
   public double eddyWatt(double tempC) {
@@ -43,12 +53,15 @@ public record Losses(
     return circulating.map(c -> c.watt(radPerSecond, tempC)).orElse(0.0) + layers;
   }
 
-  /** All but the wanted current's own. */
-  public double otherWatt(double tempC) {
-    return rippleWatt(tempC) + eddyWatt(tempC) + circulatingWatt(tempC);
+  /** All of them, were another current in the windings, A rms; 0 leaves all but its own. */
+  public double totalWatt(double ampereRms, double tempC) {
+    return copperWatt(ampereRms, tempC)
+        + rippleWatt(ampereRms, tempC)
+        + eddyWatt(tempC)
+        + circulatingWatt(tempC);
   }
 
   public double totalWatt(double tempC) {
-    return copperWatt(tempC) + otherWatt(tempC);
+    return totalWatt(windingAmpereRms.applyAsDouble(tempC), tempC);
   }
 }

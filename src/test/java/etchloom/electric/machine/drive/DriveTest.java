@@ -5,11 +5,10 @@ import static org.junit.jupiter.api.Assertions.assertTrue;
 
 import etchloom.electric.machine.circuit.Circuit;
 import etchloom.spec.Spec.Connection;
-import java.util.Arrays;
 import org.junit.jupiter.api.Test;
 
 /**
- * Check values DR-1 to DR-17 (textbook conventions: amplitude-invariant dq, 10 pole pairs, 2 mV·s
+ * Check values DR-1 to DR-15 (textbook conventions: amplitude-invariant dq, 10 pole pairs, 2 mV·s
  * peak a phase), and hand calculations.
  */
 class DriveTest {
@@ -52,95 +51,6 @@ class DriveTest {
     close(24 / 0.02, open);
     double delta = TorqueSpeed.noLoadRadPerSecond(circuit(Connection.DELTA), 2e-3, 24);
     close(24 / 0.02, delta);
-  }
-
-  /** DR-17; a delta's line has the ripple of L/3; open windings half of a half bridge's (DR-16). */
-  @Test
-  void ripple() {
-    assertEquals(3.33333333, Ripple.amperePeakToPeak(STAR, 24, 40e3), 1e-6);
-    Circuit delta = circuit(Connection.DELTA);
-    assertEquals(10, Ripple.amperePeakToPeak(delta, 24, 40e3), 1e-6);
-    Circuit open = circuit(Connection.OPEN);
-    assertEquals(2.5, Ripple.amperePeakToPeak(open, 24, 40e3), 1e-6);
-  }
-
-  /**
-   * Stars pulse by pulse: every leg's centred pulse, the star point at the legs' mean or on a leg
-   * of its own, currents by the voltage over an inductance of 1; the worst over depth and angle.
-   */
-  @Test
-  void rippleOfStarsReplayed() {
-    double[][] lags = {{0, 90}, {0, 120, 240}, {0, 72, 144, 216, 288}};
-    for (double[] lag : lags) {
-      double worst = 0;
-      for (int depth = 1; depth <= 40; depth++) {
-        for (int degree = 0; degree < 360; degree += 3) {
-          worst = Math.max(worst, replayed(lag, depth / 40.0, degree));
-        }
-      }
-      Circuit c = new Circuit(lag.length, Connection.STAR, 1, 1, 1, 1);
-      assertEquals(Ripple.amperePeakToPeak(c, 1, 1), worst, 2e-3 * worst);
-    }
-  }
-
-  private static double replayed(double[] lag, double depth, double degree) {
-    int m = lag.length;
-    boolean starOnLeg = m == 2;
-    double[] duty = new double[starOnLeg ? 3 : m];
-    for (int k = 0; k < m; k++) {
-      duty[k] = Math.cos(Math.toRadians(degree - lag[k]));
-    }
-    double high = Arrays.stream(duty).max().orElseThrow();
-    double low = Arrays.stream(duty).min().orElseThrow();
-    // The largest phase peak that the bus allows at any angle, times the depth.
-    double peak = depth / Circuit.greatestShare(m, Connection.STAR);
-    for (int k = 0; k < duty.length; k++) {
-      duty[k] = 0.5 + peak * (duty[k] - (high + low) / 2);
-    }
-    int steps = 2000;
-    double most = 0;
-    for (int k = 0; k < m; k++) {
-      double at = 0;
-      double min = 0;
-      double max = 0;
-      double mean = starOnLeg ? duty[m] : Arrays.stream(duty).average().orElseThrow();
-      for (int i = 0; i < steps; i++) {
-        double t = Math.abs((i + 0.5) / steps - 0.5) * 2;
-        double star = 0;
-        for (double d : duty) {
-          star += (t < d ? 1.0 : 0.0) / duty.length;
-        }
-        if (starOnLeg) {
-          star = t < duty[m] ? 1 : 0;
-        }
-        at += ((t < duty[k] ? 1 : 0) - star - (duty[k] - mean)) / steps;
-        min = Math.min(min, at);
-        max = Math.max(max, at);
-      }
-      most = Math.max(most, max - min);
-    }
-    return most;
-  }
-
-  /** With the series inductance in place the ripple is a fifth of the peak, by the same formula. */
-  @Test
-  void seriesInductance() {
-    double add = Ripple.seriesHenry(STAR, 24, 40e3, 2);
-    Circuit more = new Circuit(3, Connection.STAR, 10, 0.25, 30e-6 + add, 25e-6);
-    close(0.2 * 2 * Math.sqrt(2), Ripple.amperePeakToPeak(more, 24, 40e3));
-    assertEquals(0, Ripple.seriesHenry(STAR, 24, 40e3, 50));
-  }
-
-  /** A triangle of 1 A from peak to peak has an rms of 1/√12. */
-  @Test
-  void rippleSquare() {
-    int n = 100_000;
-    double sum = 0;
-    for (int i = 0; i < n; i++) {
-      double x = Math.abs(2 * (i + 0.5) / n - 1) - 0.5;
-      sum += x * x / n;
-    }
-    assertEquals(sum, Ripple.meanSquare(1), 1e-9);
   }
 
   /** At a point that the voltage limits, the dq equations give back the bus's peak. */

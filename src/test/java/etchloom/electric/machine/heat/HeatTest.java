@@ -48,7 +48,7 @@ class HeatTest {
   private static Losses losses(double ampere) {
     Circuit c = new Circuit(3, Connection.STAR, 6, 0.5, 1e-3, 1e-3);
     return new Losses(
-        c, t -> ampere, 0, Optional.empty(), Optional.empty(), OptionalDouble.empty(), 0);
+        c, t -> ampere, (i, t) -> 0, Optional.empty(), Optional.empty(), OptionalDouble.empty(), 0);
   }
 
   /** Ripple in a delta's line: three windings of R/3 as a star. */
@@ -59,13 +59,19 @@ class HeatTest {
     double square = 2 * 2 / 12.0;
     double inStar =
         new Losses(
-                star, t -> 0, square, Optional.empty(), Optional.empty(), OptionalDouble.empty(), 0)
+                star,
+                t -> 0,
+                (i, t) -> square,
+                Optional.empty(),
+                Optional.empty(),
+                OptionalDouble.empty(),
+                0)
             .rippleWatt(20);
     double inDelta =
         new Losses(
                 delta,
                 t -> 0,
-                square,
+                (i, t) -> square,
                 Optional.empty(),
                 Optional.empty(),
                 OptionalDouble.empty(),
