@@ -3,6 +3,7 @@ package etchloom.board;
 import etchloom.artwork.Stackup;
 import etchloom.spec.FabRules;
 import etchloom.spec.Spec;
+import etchloom.units.Numbers;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Locale;
@@ -22,9 +23,11 @@ final class StackupBuilder {
     int n = b.layers();
     List<Stackup.Copper> copper = new ArrayList<>();
     double sum = 0;
+    Stackup.Copper outer = copper(spec, fab, true, problems);
+    // Said once, however many inner layers there are.
+    Stackup.Copper inner = n > 2 ? copper(spec, fab, false, problems) : outer;
     for (int layer = 1; layer <= n; layer++) {
-      boolean outer = layer == 1 || layer == n;
-      Stackup.Copper c = copper(spec, fab, outer, problems);
+      Stackup.Copper c = layer == 1 || layer == n ? outer : inner;
       copper.add(c);
       sum += c.thicknessMm();
     }
@@ -45,8 +48,8 @@ final class StackupBuilder {
               fab.title(),
               outer ? "outer" : "inner",
               wanted.ounces().isPresent()
-                  ? wanted.ounces().getAsDouble() + " oz"
-                  : wanted.thicknessMm().orElse(0) + " mm",
+                  ? ounces(wanted.ounces().getAsDouble())
+                  : Numbers.trimmed(wanted.thicknessMm().orElse(0), 4) + " mm",
               offers(fab, outer)));
       return new Stackup.Copper(0.035, 1, 0);
     }
@@ -56,11 +59,15 @@ final class StackupBuilder {
     return new Stackup.Copper(t, r.ounces(), undercut);
   }
 
+  private static String ounces(double oz) {
+    return Numbers.trimmed(oz, 3) + " oz";
+  }
+
   private static String offers(FabRules fab, boolean outer) {
     List<String> out = new ArrayList<>();
     for (FabRules.CopperRow r : fab.copper()) {
       if (r.outer() == outer) {
-        out.add(r.ounces() + " oz");
+        out.add(ounces(r.ounces()));
       }
     }
     return out.isEmpty() ? "none" : String.join(", ", out);

@@ -1,6 +1,7 @@
 package etchloom.cli;
 
 import etchloom.diagnostic.DiagnosticText;
+import etchloom.spec.Suggest;
 import java.io.IOException;
 import java.io.PrintWriter;
 import java.io.StringWriter;
@@ -9,6 +10,7 @@ import java.nio.file.Files;
 import java.nio.file.Path;
 import java.util.LinkedHashMap;
 import java.util.Map;
+import java.util.Set;
 import java.util.function.Supplier;
 import picocli.CommandLine;
 import picocli.CommandLine.Command;
@@ -32,7 +34,8 @@ import picocli.CommandLine.Spec;
       "         etchloom draw wheel.yaml",
       "",
       "Exit:    0  done, every rule kept",
-      "         1  done, and the answer is no",
+      "         1  done, and the answer is no: broken rules, a failed check or rejected",
+      "            boards. A duty that is not met does not count; the verdict says it",
       "         2  wrong input",
       "         3  cannot read or write",
       "        70  a fault in the program"
@@ -92,12 +95,29 @@ public final class App implements Runnable {
 
   private static int misused(CommandLine.ParameterException e, String[] args) {
     PrintWriter err = e.getCommandLine().getErr();
-    err.println("error[usage]: " + e.getMessage());
-    if (e instanceof CommandLine.UnmatchedArgumentException u) {
-      u.getSuggestions().stream().findFirst().ifPresent(s -> err.println("  hint: " + s));
+    if (e instanceof CommandLine.UnmatchedArgumentException u && !u.getUnmatched().isEmpty()) {
+      unmatched(u, err);
+    } else {
+      err.println("error[usage]: " + e.getMessage());
     }
     err.println("  hint: " + e.getCommandLine().getCommandSpec().qualifiedName() + " --help");
     return ExitCode.BAD_INPUT;
+  }
+
+  private static void unmatched(CommandLine.UnmatchedArgumentException e, PrintWriter err) {
+    CommandLine at = e.getCommandLine();
+    String word = e.getUnmatched().get(0);
+    String name = word.split("=", 2)[0];
+    boolean option = word.startsWith("-");
+    Set<String> known =
+        option ? at.getCommandSpec().optionsMap().keySet() : at.getSubcommands().keySet();
+    String what =
+        option
+            ? "no such option: " + name
+            : known.isEmpty() ? "one argument too many: " + word : "no such command: " + word;
+    err.println("error[usage]: " + what.replaceAll("\\p{Cntrl}", "?"));
+    Suggest.nearest(option ? name : word, known)
+        .ifPresent(k -> err.println("  hint: did you mean `" + k + "`?"));
   }
 
   /** Says what went wrong, and gives the exit code for it. */

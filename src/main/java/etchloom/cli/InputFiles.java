@@ -130,7 +130,8 @@ final class InputFiles {
             + String.join(", ", Templates.fabNames())
             + ", and a rules file of your own is named with its path";
     if (file.isEmpty()) {
-      return BadInput.of("--fab", "unknown-fab", message);
+      String[] near = BadInput.nearest(fab, Templates.fabNames());
+      return BadInput.of("--fab", "unknown-fab", message, near);
     }
     Positions p = file.get().positions();
     return new BadInput(
@@ -166,6 +167,9 @@ final class InputFiles {
   }
 
   static String reason(IOException e) {
+    if (e instanceof NoSuchFileException) {
+      return "there is no such folder";
+    }
     if (e instanceof java.nio.file.AccessDeniedException) {
       return "no permission";
     }

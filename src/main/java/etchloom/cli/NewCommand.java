@@ -75,7 +75,10 @@ final class NewCommand implements Callable<Integer> {
     List<String> all = new ArrayList<>(Templates.names());
     all.addAll(Templates.fabNames());
     throw BadInput.of(
-        "new", "unknown-name", "there is no '" + name + "'; there are " + String.join(", ", all));
+        "new",
+        "unknown-name",
+        "there is no '" + name + "'; there are " + String.join(", ", all),
+        BadInput.nearest(name, all));
   }
 
   private void list() {

@@ -15,6 +15,7 @@ import etchloom.survey.Survey;
 import etchloom.survey.SurveyTrouble;
 import java.io.IOException;
 import java.io.UncheckedIOException;
+import java.nio.file.FileSystemException;
 import java.nio.file.Files;
 import java.nio.file.Path;
 import java.util.ArrayList;
@@ -125,9 +126,9 @@ final class SurveyCommand implements Callable<Integer> {
     } catch (SurveyTrouble e) {
       throw new DiskTrouble(e.getMessage());
     } catch (UncheckedIOException e) {
-      throw new DiskTrouble("the survey's folder: " + InputFiles.reason(e.getCause()));
+      throw trouble(e.getCause());
     } catch (IOException e) {
-      throw new DiskTrouble("the survey's folder: " + InputFiles.reason(e));
+      throw trouble(e);
     }
   }
 
@@ -135,6 +136,12 @@ final class SurveyCommand implements Callable<Integer> {
   private void takeBack(List<String> values) {
     values.stream().filter(v -> v.indexOf('=') < 0).forEach(paths::add);
     values.removeIf(v -> v.indexOf('=') < 0);
+  }
+
+  private static DiskTrouble trouble(IOException e) {
+    String file = e instanceof FileSystemException f && f.getFile() != null ? f.getFile() : "";
+    String place = file.isEmpty() ? "the survey's folder" : file;
+    return new DiskTrouble(place + ": cannot be read or written: " + InputFiles.reason(e));
   }
 
   private int surveyed() throws IOException {

@@ -48,7 +48,10 @@ public final class DiagnosticText {
     return out.toString();
   }
 
-  /** Files in the order in which they first occur, then line, then column; else as they came. */
+  /**
+   * Files in the order in which they first occur, in each errors before warnings, which may only
+   * follow from them; then line, then column; else as they came.
+   */
   public static List<Diagnostic> sorted(List<Diagnostic> diagnostics) {
     Map<String, Integer> files = new LinkedHashMap<>();
     for (Diagnostic d : diagnostics) {
@@ -57,6 +60,7 @@ public final class DiagnosticText {
     List<Diagnostic> all = new ArrayList<>(diagnostics);
     all.sort(
         Comparator.<Diagnostic>comparingInt(d -> files.get(d.where().file()))
+            .thenComparing(Diagnostic::severity)
             .thenComparingInt(d -> d.where().line())
             .thenComparingInt(d -> d.where().column()));
     return all;

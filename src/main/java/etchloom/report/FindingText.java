@@ -31,6 +31,10 @@ public final class FindingText {
   }
 
   public static String line(Finding f) {
+    if (f.rule().equals("layers")) {
+      // A count that is built or is not: neither the nearest one nor a place says more.
+      return "error[layers]: " + value(f.measured(), f, true) + " " + Text.safe(f.what());
+    }
     return "error["
         + f.rule()
         + "]: "

@@ -98,7 +98,16 @@ final class OrderRules implements Rule {
             -off,
             0,
             0,
-            Words.of("copper layers; the fab builds ", board.fab().layers())));
+            Words.of("copper layers; the fab builds ", either(board.fab().layers()))));
+  }
+
+  /** {@code 2, 4 or 6}. */
+  private static String either(List<Integer> counts) {
+    List<String> all = counts.stream().map(String::valueOf).toList();
+    int last = all.size() - 1;
+    return last < 1
+        ? String.join("", all)
+        : String.join(", ", all.subList(0, last)) + " or " + all.get(last);
   }
 
   private static void size(Board board, Verdicts verdicts) {

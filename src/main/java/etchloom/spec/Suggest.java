@@ -9,7 +9,7 @@ import java.util.Optional;
  * The nearest valid word for a misspelt one. A wrong hint is worse than none: only a word that is
  * clearly nearer than every other is offered.
  */
-final class Suggest {
+public final class Suggest {
   private Suggest() {}
 
   /** No key or word is longer; a longer text is compared with nothing. */
@@ -20,7 +20,7 @@ final class Suggest {
    * for {@code -}, count as equal; else up to one slip in three letters, two at most; else the one
    * word of which this is a part, as {@code gap} is of {@code air-gap}.
    */
-  static Optional<String> nearest(String wrong, Collection<String> words) {
+  public static Optional<String> nearest(String wrong, Collection<String> words) {
     if (wrong.isEmpty() || wrong.length() > LONGEST) {
       return Optional.empty();
     }

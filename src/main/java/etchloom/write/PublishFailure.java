@@ -61,7 +61,10 @@ public final class PublishFailure extends IOException {
       return "no permission for " + a.getFile();
     }
     if (e instanceof NoSuchFileException n) {
-      return n.getFile() + " has gone";
+      // A lock that never was: the folder takes no files.
+      Path lost = Path.of(n.getFile());
+      boolean lock = lost.getFileName().toString().endsWith("-lock");
+      return lock ? "cannot write in " + lost.getParent() : lost + " has gone";
     }
     if (e instanceof FileAlreadyExistsException x) {
       return x.getFile() + " is in the way";
