@@ -78,19 +78,22 @@ final class Pulses {
       level[j] = level(duty, (from + to) / 2);
       mean += level[j] * length[j];
     }
+    double[] gained = new double[n + 1];
+    for (int k = 0; k <= n; k++) {
+      gained[k] = -Math.expm1(-length[k] * period / 2);
+    }
     double end = 0;
     for (int j = -n - 1; j <= n; j++) {
       int k = j < 0 ? -j - 1 : j;
-      end += (level[k] - mean - end) * -Math.expm1(-length[k] * period / 2);
+      end += (level[k] - mean - end) * gained[k];
     }
     double at = end / -Math.expm1(-period);
     double sum = 0;
     for (int j = -n - 1; j <= n; j++) {
       int k = j < 0 ? -j - 1 : j;
       double goal = level[k] - mean;
-      double a = length[k] * period / 2;
-      sum += length[k] / 2 * interval(at, goal, a);
-      at += (goal - at) * -Math.expm1(-a);
+      sum += length[k] / 2 * interval(at, goal, length[k] * period / 2, gained[k]);
+      at += (goal - at) * gained[k];
     }
     return sum;
   }
@@ -110,15 +113,16 @@ final class Pulses {
 
   /**
    * Mean square of a current that goes from a value towards a goal for {@code a} time constants.
+   *
+   * @param gained share of the way that is made in that time, {@code 1 − e^−a}
    */
-  private static double interval(double from, double goal, double a) {
+  private static double interval(double from, double goal, double a, double gained) {
     if (a < SHORT) {
       double middle = from + (goal - from) * -Math.expm1(-a / 2);
-      double to = from + (goal - from) * -Math.expm1(-a);
+      double to = from + (goal - from) * gained;
       return (from * from + 4 * middle * middle + to * to) / 6;
     }
     double off = from - goal;
-    return goal * goal
-        + (2 * goal * off * -Math.expm1(-a) + off * off * -Math.expm1(-2 * a) / 2) / a;
+    return goal * goal + (2 * goal * off * gained + off * off * gained * (2 - gained) / 2) / a;
   }
 }
