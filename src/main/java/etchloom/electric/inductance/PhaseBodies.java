@@ -2,6 +2,7 @@ package etchloom.electric.inductance;
 
 import java.util.ArrayList;
 import java.util.List;
+import java.util.stream.IntStream;
 
 /**
  * The copper of a board as bodies of filaments, and how the wanted couplings follow from couplings
@@ -135,20 +136,22 @@ final class PhaseBodies {
 
   private PhaseBodies clustered(BoardCopper copper) {
     bodies = new Clusters[filaments.size()];
-    Workers.run(
-        bodies.length,
-        i -> {
-          if (turnRad.get(i) == 0) {
-            bodies[i] = new Clusters(filaments.get(i), copper.sections());
-          }
-        });
-    Workers.run(
-        bodies.length,
-        i -> {
-          if (turnRad.get(i) != 0) {
-            bodies[i] = bodies[filaments.indexOf(filaments.get(i))].turned(turnRad.get(i));
-          }
-        });
+    IntStream.range(0, bodies.length)
+        .parallel()
+        .forEach(
+            i -> {
+              if (turnRad.get(i) == 0) {
+                bodies[i] = new Clusters(filaments.get(i), copper.sections());
+              }
+            });
+    IntStream.range(0, bodies.length)
+        .parallel()
+        .forEach(
+            i -> {
+              if (turnRad.get(i) != 0) {
+                bodies[i] = bodies[filaments.indexOf(filaments.get(i))].turned(turnRad.get(i));
+              }
+            });
     return this;
   }
 

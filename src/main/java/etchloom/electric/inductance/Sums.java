@@ -2,6 +2,7 @@ package etchloom.electric.inductance;
 
 import java.util.ArrayList;
 import java.util.List;
+import java.util.stream.IntStream;
 
 /**
  * Couplings of pairs of bodies, asked for first and then worked out together on all processors.
@@ -73,14 +74,16 @@ final class Sums {
   /** One value for each coupling asked for, mm, in the order of asking. */
   double[] run() {
     double[] of = new double[parts.size()];
-    Workers.run(
-        of.length,
-        k -> {
-          Part p = parts.get(k);
-          Coupling c = jobs.get(p.job()).coupling();
-          double value = p.second() < 0 ? c.within(p.first()) : c.between(p.first(), p.second());
-          of[k] = p.weight() * value;
-        });
+    IntStream.range(0, of.length)
+        .parallel()
+        .forEach(
+            k -> {
+              Part p = parts.get(k);
+              Coupling c = jobs.get(p.job()).coupling();
+              double value =
+                  p.second() < 0 ? c.within(p.first()) : c.between(p.first(), p.second());
+              of[k] = p.weight() * value;
+            });
     double[] out = new double[jobs.size()];
     for (int k = 0; k < of.length; k++) {
       out[parts.get(k).job()] += of[k];

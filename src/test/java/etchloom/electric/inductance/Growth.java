@@ -2,6 +2,7 @@ package etchloom.electric.inductance;
 
 import java.util.List;
 import java.util.Locale;
+import java.util.stream.IntStream;
 
 /**
  * A plain benchmark, run by hand: how the time for a coil's self-inductance grows with its
@@ -77,24 +78,25 @@ final class Growth {
     Distances d = new Distances(SECTIONS, Mirror.NONE);
     int rows = 200;
     double[] part = new double[rows * rows];
-    Workers.run(
-        rows * rows,
-        k -> {
-          int i = k / rows;
-          int j = k % rows;
-          PairSum pairs = new PairSum(p, p, Mirror.NONE, d);
-          if (i == j) {
-            part[k] = pairs.within(at(i, rows, p.size), at(i + 1, rows, p.size));
-          } else if (i < j) {
-            part[k] =
-                2
-                    * pairs.block(
-                        at(i, rows, p.size),
-                        at(i + 1, rows, p.size),
-                        at(j, rows, p.size),
-                        at(j + 1, rows, p.size));
-          }
-        });
+    IntStream.range(0, rows * rows)
+        .parallel()
+        .forEach(
+            k -> {
+              int i = k / rows;
+              int j = k % rows;
+              PairSum pairs = new PairSum(p, p, Mirror.NONE, d);
+              if (i == j) {
+                part[k] = pairs.within(at(i, rows, p.size), at(i + 1, rows, p.size));
+              } else if (i < j) {
+                part[k] =
+                    2
+                        * pairs.block(
+                            at(i, rows, p.size),
+                            at(i + 1, rows, p.size),
+                            at(j, rows, p.size),
+                            at(j + 1, rows, p.size));
+              }
+            });
     double sum = 0;
     for (double v : part) {
       sum += v;
