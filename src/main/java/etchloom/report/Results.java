@@ -6,6 +6,7 @@ import etchloom.electric.machine.MachineFigures;
 import etchloom.electric.machine.TaperFigures;
 import etchloom.electric.resistance.ResistanceFigures;
 import etchloom.proof.ProofReport;
+import etchloom.report.area.CopperArea;
 import etchloom.rules.RuleReport;
 import etchloom.spec.FabRules;
 import etchloom.spec.Spec;

@@ -1,4 +1,4 @@
-package etchloom.report;
+package etchloom.report.area;
 
 import etchloom.artwork.Artwork;
 import etchloom.artwork.Conductor;

@@ -1,4 +1,4 @@
-package etchloom.report;
+package etchloom.report.area;
 
 import etchloom.artwork.Artwork;
 import etchloom.artwork.Conductor;
@@ -22,7 +22,7 @@ import java.util.Map;
  * touching, or a track is too short to leave its pads, the layer is merged as polygons ({@link
  * MergedCopper}), which is slow.
  */
-final class CopperArea {
+public final class CopperArea {
   /** Pads that only touch do not lie over each other, rounded to the grid or not. */
   private static final double TOUCH_MM = 1e-5;
 
@@ -42,7 +42,7 @@ final class CopperArea {
   }
 
   /** One entry a layer, L1 first, mm². */
-  static List<Double> of(Artwork artwork, RuleReport rules) {
+  public static List<Double> of(Artwork artwork, RuleReport rules) {
     List<Double> out = new ArrayList<>();
     Map<List<Long>, Double> overlaps = new HashMap<>();
     for (int layer = 1; layer <= artwork.layers(); layer++) {

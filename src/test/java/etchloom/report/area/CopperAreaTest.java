@@ -1,4 +1,4 @@
-package etchloom.report;
+package etchloom.report.area;
 
 import static org.junit.jupiter.api.Assertions.assertEquals;
 import static org.junit.jupiter.api.Assertions.assertTrue;
@@ -15,6 +15,7 @@ import etchloom.geometry.Point;
 import etchloom.rules.Finding;
 import etchloom.rules.RuleReport;
 import etchloom.spec.FabReader;
+import etchloom.spec.Positions;
 import etchloom.spec.Spec;
 import etchloom.spec.SpecFile;
 import etchloom.spec.SpecReader;
@@ -27,6 +28,7 @@ import etchloom.write.outline.Areas;
 import etchloom.write.outline.Outline;
 import java.nio.charset.StandardCharsets;
 import java.util.List;
+import java.util.Map;
 import java.util.Optional;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.params.ParameterizedTest;
@@ -38,12 +40,19 @@ class CopperAreaTest {
 
   @Test
   void drawnBoard_agreesWithMergedPolygons() {
-    Artwork art = Samples.template(Samples.SMALL).artwork();
+    Artwork art = TemplateBoards.onGrid("dosing-pump");
     List<Double> areas = CopperArea.of(art, KEPT);
     for (int layer = 1; layer <= art.layers(); layer++) {
       double merged = MergedCopper.areaMm2(art, layer);
       assertEquals(merged, areas.get(layer - 1), 2e-4 * merged, "L" + layer);
     }
+  }
+
+  private static Artwork drawn(Spec spec) {
+    return Assembler.assemble(spec, Specs.fab(), new Positions("", Map.of()))
+        .value()
+        .orElseThrow()
+        .artwork();
   }
 
   static List<String> templates() {
@@ -148,9 +157,9 @@ class CopperAreaTest {
   @Test
   void tracksThatWiden_agreeWithMergedPolygons() {
     Spec wheel = Specs.spec(Specs.wheel(2));
-    Artwork art = Samples.bare(Specs.turning(wheel, 6, true)).artwork();
+    Artwork art = drawn(Specs.turning(wheel, 6, true));
     List<Double> areas = CopperArea.of(art, KEPT);
-    List<Double> even = CopperArea.of(Samples.bare(Specs.turning(wheel, 6, false)).artwork(), KEPT);
+    List<Double> even = CopperArea.of(drawn(Specs.turning(wheel, 6, false)), KEPT);
     for (int layer = 1; layer <= art.layers(); layer++) {
       double merged = MergedCopper.areaMm2(art, layer);
       assertEquals(merged, areas.get(layer - 1), 2e-4 * merged, "L" + layer);
