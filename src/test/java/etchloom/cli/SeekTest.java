@@ -4,6 +4,7 @@ import static org.junit.jupiter.api.Assertions.assertEquals;
 import static org.junit.jupiter.api.Assertions.assertTrue;
 
 import com.fasterxml.jackson.jr.ob.JSON;
+import etchloom.testing.Folders;
 import etchloom.testing.Run;
 import java.io.IOException;
 import java.nio.file.Files;
@@ -121,7 +122,7 @@ class SeekTest {
         List.of("seek-1.journal", "seek-2.journal", "seek-5.journal", "survey.journal");
     for (String cut : journals) {
       Path dir = Files.createDirectories(folder.resolve("cut-" + cut));
-      for (String name : names(done)) {
+      for (String name : Folders.names(done)) {
         Files.createDirectories(dir.resolve(name).getParent());
         Files.copy(done.resolve(name), dir.resolve(name));
       }
@@ -136,19 +137,7 @@ class SeekTest {
         Files.write(dir.resolve("survey.journal"), Arrays.copyOf(main, head + 1));
       }
       assertEquals(ExitCode.DONE, survey(dir, what).code());
-      assertEquals(names(done), names(dir));
-      for (String n : names(done)) {
-        assertEquals(-1, Files.mismatch(done.resolve(n), dir.resolve(n)), n + " after " + cut);
-      }
-    }
-  }
-
-  private static List<String> names(Path dir) throws IOException {
-    try (Stream<Path> all = Files.walk(dir)) {
-      return all.filter(Files::isRegularFile)
-          .map(p -> dir.relativize(p).toString())
-          .sorted()
-          .toList();
+      Folders.assertSame(done, dir, "after " + cut);
     }
   }
 

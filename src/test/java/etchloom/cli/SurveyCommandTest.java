@@ -5,6 +5,7 @@ import static org.junit.jupiter.api.Assertions.assertFalse;
 import static org.junit.jupiter.api.Assertions.assertTrue;
 
 import com.fasterxml.jackson.jr.ob.JSON;
+import etchloom.testing.Folders;
 import etchloom.testing.Run;
 import java.io.IOException;
 import java.nio.file.Files;
@@ -183,7 +184,7 @@ class SurveyCommandTest {
       Files.delete(dir.resolve("survey.html"));
       Files.writeString(dir.resolve("variants/12.yaml"), "half a fi");
       assertEquals(ExitCode.DONE, survey(dir, VARY).code());
-      assertSame(done, dir);
+      Folders.assertSame(done, dir, "in " + dir);
     }
   }
 
@@ -199,7 +200,7 @@ class SurveyCommandTest {
     Run r =
         Run.of("survey", "--join", parts[2] + "", parts[0] + "", parts[1] + "", "-o", whole + "");
     assertEquals(ExitCode.DONE, r.code(), r.err());
-    assertSame(done, whole);
+    Folders.assertSame(done, whole, "in " + whole);
     Run missing =
         Run.of("survey", "--join", parts[2] + "", parts[0] + "", "-o", folder.resolve("x") + "");
     assertEquals(ExitCode.BAD_INPUT, missing.code());
@@ -207,22 +208,6 @@ class SurveyCommandTest {
     Run twice = Run.of("survey", "--join", parts[0] + "", parts[0] + "");
     assertEquals(ExitCode.BAD_INPUT, twice.code());
     assertEquals(ExitCode.DISK, Run.of("survey", "--join", folder + "").code());
-  }
-
-  private static void assertSame(Path wanted, Path found) throws IOException {
-    assertEquals(names(wanted), names(found));
-    for (String n : names(wanted)) {
-      assertEquals(-1, Files.mismatch(wanted.resolve(n), found.resolve(n)), n + " in " + found);
-    }
-  }
-
-  private static List<String> names(Path dir) throws IOException {
-    try (Stream<Path> all = Files.walk(dir)) {
-      return all.filter(Files::isRegularFile)
-          .map(p -> dir.relativize(p).toString())
-          .sorted()
-          .toList();
-    }
   }
 
   @Test

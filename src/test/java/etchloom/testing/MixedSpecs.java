@@ -1,7 +1,6 @@
 package etchloom.testing;
 
 import java.util.List;
-import java.util.Locale;
 import java.util.Random;
 
 /**
@@ -10,7 +9,7 @@ import java.util.Random;
  * outlines, terminals as holes and pads, on tabs, with screws and star points brought out. Values
  * keep the rules of their class; whether all of it has room is left to chance.
  */
-public final class MixedSpecs {
+public final class MixedSpecs extends SpecText {
   /** Phases, coils, poles: most of them feasible, and most of them with parallel paths. */
   private static final List<int[]> WINDINGS =
       List.of(
@@ -38,19 +37,17 @@ public final class MixedSpecs {
           new int[] {6, 24, 28},
           new int[] {6, 24, 20});
 
-  private final Random random;
   private final Random tapering;
-  private final StringBuilder out = new StringBuilder();
 
   private MixedSpecs(long seed) {
-    random = new Random(7_368_787 * seed + 11);
+    super(7_368_787 * seed + 11);
     tapering = new Random(~seed);
   }
 
   public static String yaml(long seed) {
     MixedSpecs m = new MixedSpecs(seed);
     m.build();
-    return m.out.toString();
+    return m.text();
   }
 
   private void build() {
@@ -149,21 +146,5 @@ public final class MixedSpecs {
     String drill = pick(List.of("kind: hole, hole: 0.9 mm", "kind: pad"));
     String pitch = pick(List.of("2.54", "3.5")) + " mm, pad: 1.8 mm}";
     line("  terminals: {" + drill + (tab ? "" : ", start: " + start) + ", pitch: " + pitch);
-  }
-
-  private void line(String text) {
-    out.append(text).append('\n');
-  }
-
-  private <T> T pick(List<T> some) {
-    return some.get(random.nextInt(some.size()));
-  }
-
-  private double between(double low, double high) {
-    return low + (high - low) * random.nextDouble();
-  }
-
-  private static String mm(double value) {
-    return String.format(Locale.ROOT, "%.3f mm", value);
   }
 }

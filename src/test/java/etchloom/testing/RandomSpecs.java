@@ -1,7 +1,6 @@
 package etchloom.testing;
 
 import java.util.List;
-import java.util.Locale;
 import java.util.Random;
 
 /**
@@ -9,7 +8,7 @@ import java.util.Random;
  * standard class, so that a drawn board has no reason to break one; whether there is room for what
  * is asked is left to chance.
  */
-public final class RandomSpecs {
+public final class RandomSpecs extends SpecText {
   /** Counts of coils and poles, most of them feasible for three phases, some not. */
   private static final List<int[]> COUNTS =
       List.of(
@@ -61,26 +60,24 @@ public final class RandomSpecs {
           new int[] {6, 24, 22},
           new int[] {6, 18, 16});
 
-  private final Random random;
   private final Random tapering;
-  private final StringBuilder out = new StringBuilder();
 
   private RandomSpecs(long seed) {
-    random = new Random(seed);
+    super(seed);
     tapering = new Random(~seed);
   }
 
   public static String yaml(long seed) {
     RandomSpecs r = new RandomSpecs(seed);
     r.build();
-    return r.out.toString();
+    return r.text();
   }
 
   /** Windings of every phase count, parallel paths, tabs, pads and screws. */
   public static String wide(long seed) {
     RandomSpecs r = new RandomSpecs(1_000_003 * seed + 17);
     r.buildWide();
-    return r.out.toString();
+    return r.text();
   }
 
   private void buildWide() {
@@ -198,7 +195,7 @@ public final class RandomSpecs {
   public static String shapes(long seed) {
     RandomSpecs r = new RandomSpecs(seed);
     r.buildShapes();
-    return r.out.toString();
+    return r.text();
   }
 
   private void buildShapes() {
@@ -267,21 +264,5 @@ public final class RandomSpecs {
     if (tapering.nextInt(of + 1) == 0) {
       line("  taper: on");
     }
-  }
-
-  private void line(String text) {
-    out.append(text).append('\n');
-  }
-
-  private <T> T pick(List<T> some) {
-    return some.get(random.nextInt(some.size()));
-  }
-
-  private double between(double low, double high) {
-    return low + (high - low) * random.nextDouble();
-  }
-
-  private static String mm(double value) {
-    return String.format(Locale.ROOT, "%.3f mm", value);
   }
 }
