@@ -2,7 +2,7 @@ package etchloom.cli;
 
 import etchloom.diagnostic.Diagnostic;
 import etchloom.diagnostic.Staged;
-import etchloom.report.FindingText;
+import etchloom.report.FindingBrief;
 import etchloom.report.Results;
 import etchloom.run.Drawn;
 import etchloom.run.Laid;
@@ -70,6 +70,6 @@ record Attempt(InputFiles.Inputs inputs, Drawn drawn, List<Diagnostic> warnings)
   /** Warnings and broken rules, to the stream for them. */
   void tell(Console console) {
     console.warn(warnings);
-    drawn.rules().findings().forEach(f -> console.err().println(FindingText.line(f)));
+    FindingBrief.lines(drawn.rules().findings()).forEach(console.err()::println);
   }
 }

@@ -1,5 +1,6 @@
 package etchloom.cli;
 
+import etchloom.diagnostic.SourceSpan;
 import etchloom.diagnostic.Staged;
 import etchloom.spec.FabReader;
 import etchloom.spec.FabRules;
@@ -65,7 +66,8 @@ final class InputFiles {
           staged.diagnostics());
     }
     Path fabPath = fabOption.isPresent() ? path(fab) : beside(path, fab);
-    byte[] fabBytes = bytes(fabPath, fabPath.toString(), "rules file");
+    byte[] fabBytes =
+        bytes(fabPath, (fabOption.isPresent() ? "" : askedBy(file)) + fabPath, "rules file");
     Staged<FabRules> rules = FabReader.read(fabPath.toString(), fabBytes);
     return new Inputs(
         path,
@@ -77,9 +79,18 @@ final class InputFiles {
         staged.diagnostics());
   }
 
+  /** {@code wheel.yaml:70:6: fab: }, for a file that is not there. */
+  private static String askedBy(SpecFile file) {
+    SourceSpan at = file.positions().at("fab");
+    return at.file() + ":" + at.line() + ":" + at.column() + ": fab: ";
+  }
+
   /** A path in a spec starts where the spec lies. */
   private static Path beside(Path spec, String fab) {
-    return Optional.ofNullable(spec.toAbsolutePath().getParent()).orElse(spec).resolve(path(fab));
+    return Optional.ofNullable(spec.toAbsolutePath().getParent())
+        .orElse(spec)
+        .resolve(path(fab))
+        .normalize();
   }
 
   /**

@@ -19,17 +19,6 @@ import java.util.List;
 public final class FindingText {
   private FindingText() {}
 
-  /** One line a finding, then, where there are any, the check's notes, without line ends. */
-  public static List<String> lines(RuleReport r) {
-    if (r.passed()) {
-      return List.of();
-    }
-    return java.util.stream.Stream.concat(
-            r.findings().stream().map(FindingText::line),
-            r.notes().stream().map(n -> "note: " + Text.safe(n)))
-        .toList();
-  }
-
   public static String line(Finding f) {
     if (f.rule().equals("layers")) {
       // A count that is built or is not: neither the nearest one nor a place says more.

@@ -61,4 +61,11 @@ class PlainMessagesTest {
     int warning = r.err().indexOf("warning[");
     assertTrue(error >= 0 && (warning < 0 || error < warning), r.err());
   }
+
+  @Test
+  void aRulesFileThatIsNotThere_isNamedWithTheSpecsLine() throws IOException {
+    Run r = Run.of("draw", wheel("fab: standard ", "fab: ./mine.yaml "));
+    assertEquals(ExitCode.DISK, r.code());
+    says(r, "wheel.yaml:", ": fab: " + dir.resolve("mine.yaml") + ": there is no such file");
+  }
 }

@@ -2,11 +2,16 @@ package etchloom.report;
 
 import static org.junit.jupiter.api.Assertions.assertEquals;
 import static org.junit.jupiter.api.Assertions.assertFalse;
+import static org.junit.jupiter.api.Assertions.assertTrue;
 
 import etchloom.geometry.Point;
 import etchloom.rules.Finding;
+import java.util.ArrayList;
+import java.util.Collections;
 import java.util.List;
 import org.junit.jupiter.api.Test;
+import org.junit.jupiter.params.ParameterizedTest;
+import org.junit.jupiter.params.provider.ValueSource;
 
 class FindingTextTest {
   @Test
@@ -40,9 +45,42 @@ class FindingTextTest {
   }
 
   @Test
-  void notesFollowTheFindings() {
-    List<String> lines = FindingText.lines(Samples.broken());
-    assertEquals(3, lines.size());
-    assertEquals("note: space: 51 places", lines.get(2));
+  void brief_tellsTheFirstPlacesOfEachRuleAndItsKeys() {
+    List<Finding> all = new ArrayList<>(Collections.nCopies(7, Samples.close()));
+    all.add(Samples.deep());
+    List<String> lines = FindingBrief.lines(all);
+    assertEquals(5, lines.stream().filter(l -> l.startsWith("error[space]: L1 at")).count());
+    assertEquals("  2 more like these are listed by `check --json`", lines.get(5));
+    assertEquals("  hint: in the spec see coil.space", lines.get(6));
+    assertEquals(FindingText.line(Samples.deep()), lines.get(7));
+    assertEquals("  hint: in the spec see via.hole, board.thickness", lines.get(8));
+    assertEquals(9, lines.size());
+  }
+
+  /** The words of the spec page, section 4; each has its keys. */
+  @ParameterizedTest
+  @ValueSource(
+      strings = {
+        "track",
+        "space",
+        "ring",
+        "hole",
+        "aspect",
+        "hole-gap",
+        "hole-copper",
+        "edge",
+        "mask-web",
+        "legend",
+        "copper-weight",
+        "layers",
+        "size",
+        "voltage",
+        "keep-out",
+        "laminate"
+      })
+  void brief_knowsEveryRule(String rule) {
+    List<String> lines =
+        FindingBrief.lines(List.of(new Finding(rule, "", new Point(1, 0), 1, 2, "mm", "x")));
+    assertTrue(lines.get(1).matches("  hint: in the spec see [a-z][a-z., -]+"), lines.get(1));
   }
 }
